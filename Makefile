@@ -1,0 +1,226 @@
+# bluecone: settings, sources, rules, targets. `make help` lists the targets.
+#
+# One makefile for every way of building: VARIANT picks the flags and the folder build/$(VARIANT), so
+# objects of different variants never mix. Shell calls stand in `=` variables and run only inside
+# recipes: this file also parses on a machine that has nothing but make (see `deps`).
+
+# ---- settings: all may be given on the command line -----------------------------------------------
+VARIANT = release
+WERROR  =
+V       = @
+PREFIX  = /usr/local
+
+prefix      = $(PREFIX)
+exec_prefix = $(prefix)
+bindir      = $(exec_prefix)/bin
+libdir      = $(exec_prefix)/lib
+includedir  = $(prefix)/include
+datarootdir = $(prefix)/share
+datadir     = $(datarootdir)
+mandir      = $(datarootdir)/man
+docdir      = $(datarootdir)/doc/bluecone
+pkgconfigdir      = $(libdir)/pkgconfig
+bashcompletiondir = $(datadir)/bash-completion/completions
+DESTDIR =
+
+INSTALL         = install
+INSTALL_PROGRAM = $(INSTALL) -m 755
+INSTALL_DATA    = $(INSTALL) -m 644
+PKG_CONFIG      = pkg-config
+
+ifeq ($(origin CC),default)
+CC := $(if $(filter clang,$(VARIANT)),clang,gcc)
+endif
+CXX = g++
+# ---- end of settings ------------------------------------------------------------------------------
+
+SHELL := /bin/sh
+MAKEFLAGS += --no-builtin-rules --no-print-directory
+.SUFFIXES:
+.DELETE_ON_ERROR:
+.SECONDARY:
+.PHONY: FORCE all deps deps-build deps-test deps-lint check run-tests sanitize clang demo bench lint metrics \
+        symbols install uninstall clean help
+
+OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
+VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
+SOVERSION := 0
+
+DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev
+DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags
+DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe
+
+# ---- flags ----------------------------------------------------------------------------------------
+WARNINGS := -Wall -Wextra -Wpedantic -Wshadow -Wconversion -Wsign-conversion -Wdouble-promotion \
+    -Wstrict-prototypes -Wmissing-prototypes -Wold-style-definition -Wvla -Wcast-qual -Wcast-align \
+    -Wwrite-strings -Wformat=2 -Wundef -Wswitch-enum -Wnull-dereference $(if $(WERROR),-Werror)
+HARDENING = -fstack-protector-strong -fstack-clash-protection -ftrivial-auto-var-init=pattern \
+    $(if $(filter x86_64% i%86%,$(shell $(CC) -dumpmachine 2>/dev/null)),-fcf-protection)
+FORTIFY   = $(if $(filter -O0,$(CFLAGS)),,-U_FORTIFY_SOURCE -D_FORTIFY_SOURCE=3)
+
+CFLAGS.release  = -O2 -g $(FORTIFY) $(HARDENING)
+CFLAGS.clang    = $(CFLAGS.release) -Wno-unused-command-line-argument
+CFLAGS.sanitize = -O1 -g -fsanitize=address,undefined -fno-sanitize-recover=all -fno-omit-frame-pointer
+CFLAGS.thread   = -O1 -g -fsanitize=thread
+CFLAGS.coverage = -O0 -g --coverage
+
+CFLAGS_ALL   = -std=c11 $(WARNINGS) $(CFLAGS.$(VARIANT)) -fvisibility=hidden -fno-common -ffp-contract=off \
+               -fno-math-errno "-ffile-prefix-map=$(CURDIR)=." $(CFLAGS)
+CPPFLAGS_ALL = -D_POSIX_C_SOURCE=200809L -I include -I src $(CPPFLAGS)
+LDFLAGS_ALL  = -Wl,-z,relro,-z,now,-z,noexecstack,--as-needed $(LDFLAGS)
+LDLIBS_LIB  := -liniparser -lm
+JANSSON      = $(shell $(PKG_CONFIG) $1 jansson 2>/dev/null)
+CMOCKA       = $(shell $(PKG_CONFIG) $1 cmocka 2>/dev/null)
+
+# What one object is compiled with; MODE and EXTRA depend on where its source lives.
+MODE     = -fPIE
+COMPILE  = $(CC) $(CPPFLAGS_ALL) $(EXTRA) $(CFLAGS_ALL) $(MODE)
+LINK     = $(CC) $(CFLAGS_ALL) -fPIE -pie $(LDFLAGS_ALL)
+
+# ---- sources --------------------------------------------------------------------------------------
+LIB_DIRS    := $(wildcard $(addprefix src/,base gas value flame supply))
+LIB_SRC     := $(sort $(wildcard $(LIB_DIRS:%=%/*.c)))
+PROGRAM_SRC := $(sort $(wildcard src/output/*.c src/cli/*.c))
+TEST_SRC    := $(sort $(wildcard tests/*/test_*.c))
+HEADERS     := $(sort $(wildcard include/bluecone/*.h))
+COMPOSITIONS := $(sort $(wildcard compositions/*.ini))
+MAN_PAGES   := $(sort $(wildcard man/*.[1-9]))
+EXAMPLES     = $(shell find examples -type f 2>/dev/null | LC_ALL=C sort)
+SCRIPTS     := $(sort .ci/run .ci/deps $(wildcard tests/*.sh tests/*/*.sh examples/*.sh))
+
+LIB_OBJ     := $(LIB_SRC:%.c=$(OUT)/%.o)
+PROGRAM_OBJ := $(PROGRAM_SRC:%.c=$(OUT)/%.o)
+PROGRAM_PARTS := $(filter-out %/cli/main.o,$(PROGRAM_OBJ))
+# The house rules judge the released library; the other variants carry their instruments.
+TESTS       := $(filter-out $(if $(filter release,$(VARIANT)),,%/house/test_house),$(TEST_SRC:%.c=$(OUT)/%))
+RUNNER      := $(OUT)/tests/house/run_all
+PROGRAM     := $(OUT)/bluecone
+ARCHIVE     := $(OUT)/libbluecone.a
+SHARED      := $(OUT)/libbluecone.so.$(SOVERSION)
+COMPLETION  := $(if $(wildcard src/cli/completion.bash.in),$(OUT)/bluecone.bash)
+
+all: $(PROGRAM) $(ARCHIVE) $(SHARED) $(OUT)/bluecone.pc $(COMPLETION) ## build the program and the library (default)
+	@echo '$(PROGRAM) is ready'
+
+# ---- rules ----------------------------------------------------------------------------------------
+$(LIB_OBJ):            private MODE = -fPIC
+$(OUT)/src/output/%.o: private EXTRA = $(call JANSSON,--cflags)
+$(OUT)/src/cli/%.o:    private EXTRA = $(call JANSSON,--cflags) -DBC_DATA_DIR='"$(datadir)/bluecone"'
+$(OUT)/tests/%.o:      private EXTRA = $(call CMOCKA,--cflags) -I tests \
+                               -DBC_SOURCE_DIR='"$(CURDIR)"' -DBC_BUILD_DIR='"$(CURDIR)/$(OUT)"'
+
+# Changes only when the flags or folders do, so `make install PREFIX=/usr` never installs a program
+# that was built for another place.
+FLAGS = $(COMPILE) $(LDFLAGS_ALL) $(prefix) $(libdir) $(includedir) $(datadir)
+$(OUT)/flags: FORCE
+	@mkdir -p $(@D)
+	@printf '%s\n' '$(subst ','\'',$(FLAGS))' >$@.now; cmp -s $@.now $@ || cp $@.now $@
+
+$(OUT)/%.o: %.c Makefile $(OUT)/flags
+	@mkdir -p $(@D)
+	@echo '  CC    $<'
+	$(V)$(COMPILE) -MMD -MP -c $< -o $@
+
+# The folders are prerequisites so that a source that was removed leaves the archive, too.
+$(ARCHIVE): $(LIB_OBJ) $(LIB_DIRS)
+	@echo '  AR    $@'
+	@mkdir -p $(@D) && rm -f $@
+	$(V)$(AR) rcsD $@ $(LIB_OBJ)
+
+$(SHARED): $(LIB_OBJ)
+	@echo '  LD    $@'
+	$(V)$(CC) $(CFLAGS_ALL) -fPIC -shared $(LDFLAGS_ALL) -Wl,-z,defs -Wl,-soname,$(@F) $^ $(LDLIBS_LIB) -o $@
+
+$(PROGRAM): $(PROGRAM_OBJ) $(ARCHIVE)
+	@echo '  LD    $@'
+	$(V)$(LINK) $^ $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
+
+$(TESTS) $(RUNNER): $(OUT)/%: $(OUT)/%.o $(PROGRAM_PARTS) $(ARCHIVE)
+	@echo '  LD    $@'
+	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
+
+$(OUT)/bluecone.pc: src/bluecone.pc.in include/bluecone/status.h Makefile $(OUT)/flags
+	@sed -e 's|@prefix@|$(prefix)|' -e 's|@libdir@|$(libdir)|' -e 's|@includedir@|$(includedir)|' \
+	    -e 's|@version@|$(VERSION)|' $< >$@
+
+$(OUT)/bluecone.bash: src/cli/completion.bash.in include/bluecone/status.h Makefile
+	@mkdir -p $(@D)
+	@sed 's|@version@|$(VERSION)|' $< >$@
+
+-include $(LIB_OBJ:.o=.d) $(PROGRAM_OBJ:.o=.d) $(TESTS:=.d) $(RUNNER).d
+
+# ---- targets --------------------------------------------------------------------------------------
+deps: deps-lint ## install what is missing of the Debian packages used here
+deps-build: ; @.ci/deps $(DEPS_BUILD)
+deps-test:  ; @.ci/deps $(DEPS_TEST)
+deps-lint:  ; @.ci/deps $(DEPS_LINT)
+
+# These start make again: what they build may need what `deps` has only just installed.
+check: deps-test ## build with the default compiler and run every test
+	@$(MAKE) run-tests
+sanitize: deps-test ## the tests under AddressSanitizer and UndefinedBehaviorSanitizer
+	@$(MAKE) VARIANT=sanitize run-tests
+clang: deps-lint ## the program, the library and the test programs, by Clang with -Werror
+	@$(MAKE) VARIANT=clang WERROR=1 all tests
+demo: deps-build ## build, then play the examples
+	@$(MAKE) all
+	$(if $(wildcard examples/demo.sh),@$(IN_BUILD) bash examples/demo.sh)
+bench: deps-build ## build, then measure
+	@$(MAKE) all
+	$(if $(wildcard tests/bench/run.sh),@$(IN_BUILD) bash tests/bench/run.sh)
+
+# How scripts find the source tree and the program just built.
+IN_BUILD = SRC="$(CURDIR)" PATH="$(CURDIR)/$(OUT):$$PATH"
+
+.PHONY: tests
+tests: $(TESTS) $(RUNNER)
+run-tests: all tests
+	@$(IN_BUILD) CC='$(CC)' CXX='$(CXX)' $(RUNNER) $(TESTS) 'tests/run_cli.sh -b $(OUT)' \
+	    $(if $(wildcard tests/docs/run.sh),'bash tests/docs/run.sh')
+
+# One file a run: Clang-tidy 14 takes va_list for uninitialised in every file but the first.
+lint: deps-lint ## cppcheck, clang-tidy, mandoc and shellcheck
+	cppcheck --quiet --std=c11 --enable=warning,performance,portability --inline-suppr --error-exitcode=1 \
+	    --suppress=missingIncludeSystem -D_POSIX_C_SOURCE=200809L '-DBC_DATA_DIR=""' -I include -I src src
+	printf '%s\n' $(LIB_SRC) $(PROGRAM_SRC) | xargs -P 4 -I FILE \
+	    clang-tidy --quiet FILE -- -std=c11 $(CPPFLAGS_ALL) '-DBC_DATA_DIR=""'
+	$(if $(MAN_PAGES),mandoc -T lint -W warning $(MAN_PAGES))
+	shellcheck $(filter-out tests/cli/%,$(SCRIPTS))
+	$(if $(filter tests/cli/%,$(SCRIPTS)),shellcheck --shell=sh $(filter tests/cli/%,$(SCRIPTS)))
+
+metrics: deps-lint ## the figures of our own source beside their targets
+	@$(MAKE) $(ARCHIVE) >/dev/null
+	@SRC="$(CURDIR)" OUT="$(CURDIR)/$(OUT)" COMPILE='$(COMPILE)' bash tests/house/metrics.sh
+
+symbols: all ## accept the symbols the shared library exports now
+	@nm -D --defined-only --format=posix $(SHARED) | awk '{ print $$1 }' | LC_ALL=C sort >tests/abi/symbols
+
+install: all ## copy everything below PREFIX (and DESTDIR)
+	$(INSTALL) -d $(foreach d,$(bindir) $(libdir) $(pkgconfigdir) $(includedir)/bluecone \
+	    $(datadir)/bluecone/compositions $(docdir) $(bashcompletiondir),"$(DESTDIR)$d")
+	$(INSTALL_PROGRAM) $(PROGRAM) "$(DESTDIR)$(bindir)/bluecone"
+	$(INSTALL_DATA) $(ARCHIVE) $(SHARED) "$(DESTDIR)$(libdir)"
+	ln -sf $(notdir $(SHARED)) "$(DESTDIR)$(libdir)/libbluecone.so"
+	$(INSTALL_DATA) $(OUT)/bluecone.pc "$(DESTDIR)$(pkgconfigdir)"
+	$(INSTALL_DATA) $(HEADERS) "$(DESTDIR)$(includedir)/bluecone"
+	$(if $(COMPLETION),$(INSTALL_DATA) $(COMPLETION) "$(DESTDIR)$(bashcompletiondir)/bluecone")
+	$(if $(COMPOSITIONS),$(INSTALL_DATA) $(COMPOSITIONS) "$(DESTDIR)$(datadir)/bluecone/compositions")
+	for f in $(MAN_PAGES); do $(INSTALL_DATA) -D $$f "$(DESTDIR)$(mandir)/man$${f##*.}/$${f##*/}" || exit 1; done
+	for f in $(wildcard README.md) $(EXAMPLES); do $(INSTALL_DATA) -D $$f "$(DESTDIR)$(docdir)/$$f" || exit 1; done
+
+# Folders are removed only when they are ours and empty.
+uninstall: ## remove what install put there
+	rm -f "$(DESTDIR)$(bindir)/bluecone" "$(DESTDIR)$(pkgconfigdir)/bluecone.pc" "$(DESTDIR)$(bashcompletiondir)/bluecone" \
+	    $(foreach f,libbluecone.a libbluecone.so $(notdir $(SHARED)),"$(DESTDIR)$(libdir)/$f") \
+	    $(HEADERS:include/%="$(DESTDIR)$(includedir)/%") $(COMPOSITIONS:%="$(DESTDIR)$(datadir)/bluecone/%") \
+	    $(foreach f,$(MAN_PAGES),"$(DESTDIR)$(mandir)/man$(subst .,,$(suffix $f))/$(notdir $f)") \
+	    $(foreach f,README.md $(EXAMPLES),"$(DESTDIR)$(docdir)/$f")
+	for d in "$(includedir)/bluecone" "$(datadir)/bluecone" "$(docdir)"; do \
+	    test ! -d "$(DESTDIR)$$d" || find "$(DESTDIR)$$d" -depth -type d -empty -delete; done
+
+clean: ## remove build/
+	rm -rf build
+
+help: ## this list
+	@awk -F ':.*## ' '/^[a-z]+:.*## / { printf "  make %-10s %s\n", $$1, $$2 }' Makefile
+	@echo '  VARIANT=release|clang|sanitize|thread|coverage  WERROR=1  V= (show commands)  PREFIX=  DESTDIR='

@@ -1,0 +1,26 @@
+/* SPDX-License-Identifier: MIT */
+/* bluecone/bluecone.h - the whole library in one include.
+ *
+ * A gas goes through it in this order: read it (composition.h), choose a reference state (state.h), look
+ * up the figures of that state (iso6976.h), ask for quantities (quantity.h).
+ *
+ * The caller owns every buffer; what a function returns is a value; only types with _open and _close
+ * hold anything. The library keeps no state, prints nothing and never ends the process. */
+#ifndef BLUECONE_BLUECONE_H
+#define BLUECONE_BLUECONE_H
+
+#include "bluecone/check.h"
+#include "bluecone/composition.h"
+#include "bluecone/formation.h"
+#include "bluecone/gas.h"
+#include "bluecone/iso6976.h"
+#include "bluecone/number.h"
+#include "bluecone/quantity.h"
+#include "bluecone/species.h"
+#include "bluecone/state.h"
+#include "bluecone/status.h"
+#include "bluecone/steam.h"
+#include "bluecone/thermo.h"
+#include "bluecone/units.h"
+
+#endif

@@ -1,0 +1,123 @@
+/* SPDX-License-Identifier: MIT */
+/* text.c - trimming, folding, likeness and safe showing of words. */
+#include "base/text.h"
+
+#include <string.h>
+
+const char *bc_text_skip_space(const char *text)
+{
+    while (*text == ' ' || *text == '\t' || *text == '\r')
+        text++;
+    return text;
+}
+
+static bool is_blank(char c)
+{
+    return c == ' ' || c == '\t' || c == '\r' || c == '\n';
+}
+
+bool bc_text_copy(char *to, size_t size, const char *text, size_t length)
+{
+    while (length > 0 && is_blank(text[0])) {
+        text++;
+        length--;
+    }
+    while (length > 0 && is_blank(text[length - 1]))
+        length--;
+    if (length >= size)
+        return false;
+    memcpy(to, text, length);
+    to[length] = '\0';
+    return true;
+}
+
+void bc_text_show(char *to, size_t size, const char *text)
+{
+    size_t n = 0;
+
+    while (text[n] != '\0' && n + 1 < size) {
+        const unsigned char c = (unsigned char)text[n];
+
+        to[n] = c < 0x20 || c == 0x7f ? '?' : (char)c;
+        n++;
+    }
+    if (text[n] != '\0' && size > 4) {
+        memcpy(to + size - 4, "...", 3);
+        n = size - 1;
+    }
+    to[n] = '\0';
+}
+
+static char lower(char c)
+{
+    return c >= 'A' && c <= 'Z' ? (char)(c - 'A' + 'a') : c;
+}
+
+bool bc_text_fold(char *to, size_t size, const char *word)
+{
+    size_t n = 0;
+
+    for (; *word != '\0'; word++) {
+        if (is_blank(*word) || *word == '-' || *word == '_')
+            continue;
+        if (n + 1 >= size)
+            return false;
+        to[n++] = lower(*word);
+    }
+    to[n] = '\0';
+    return true;
+}
+
+static const char *skip_ignored(const char *word)
+{
+    while (is_blank(*word) || *word == '-' || *word == '_')
+        word++;
+    return word;
+}
+
+bool bc_text_same(const char *a, const char *b)
+{
+    a = skip_ignored(a);
+    b = skip_ignored(b);
+    while (*a != '\0' && lower(*a) == lower(*b)) {
+        a = skip_ignored(a + 1);
+        b = skip_ignored(b + 1);
+    }
+    return *a == *b;
+}
+
+static size_t smallest(size_t a, size_t b, size_t c)
+{
+    const size_t ab = a < b ? a : b;
+
+    return ab < c ? ab : c;
+}
+
+/* One more row of the edit table: rows i-2, i-1 are given, row i is filled. */
+static void next_row(const char *a, size_t i, const char *b, size_t n, size_t before[], const size_t last[],
+                     size_t row[])
+{
+    row[0] = i;
+    for (size_t j = 1; j <= n; j++) {
+        const size_t cost = a[i - 1] == b[j - 1] ? 0 : 1;
+
+        row[j] = smallest(last[j] + 1, row[j - 1] + 1, last[j - 1] + cost);
+        if (i > 1 && j > 1 && a[i - 1] == b[j - 2] && a[i - 2] == b[j - 1])
+            row[j] = smallest(row[j], before[j - 2] + 1, row[j]);
+    }
+}
+
+size_t bc_text_distance(const char *a, const char *b)
+{
+    size_t rows[3][BC_WORD_MAX + 1] = {{0}};
+    const size_t m = strlen(a);
+    const size_t n = strlen(b);
+
+    if (m > BC_WORD_MAX || n > BC_WORD_MAX)
+        return BC_WORD_MAX;
+    for (size_t j = 0; j <= n; j++)
+        rows[0][j] = j;
+    for (size_t i = 1; i <= m; i++)
+        next_row(a, i, b, n, rows[(i + 1) % 3], rows[(i - 1) % 3], rows[i % 3]);
+    return rows[m % 3][n];
+}

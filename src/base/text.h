@@ -1,0 +1,30 @@
+/* SPDX-License-Identifier: MIT */
+/* text.h - the few things that words of files and options need: trimming, likeness, showing. */
+#ifndef TEXT_H
+#define TEXT_H
+
+#include <stdbool.h>
+#include <stddef.h>
+
+#define BC_WORD_MAX 64 /* bytes of one word (an id, a component, a unit), with the final NUL */
+
+/* The first character that is no blank, tab or carriage return. */
+const char *bc_text_skip_space(const char *text);
+
+/* Copies text[0..length) without leading and trailing blanks; false when it does not fit. */
+bool bc_text_copy(char *to, size_t size, const char *text, size_t length);
+
+/* Copies a text for a message: control characters become '?', a long text ends in "...". */
+void bc_text_show(char *to, size_t size, const char *text);
+
+/* Folds a word for comparing: ASCII lower case, without blanks, '-', '_'. False when it does not fit. */
+bool bc_text_fold(char *to, size_t size, const char *word);
+
+/* True when both words fold to the same. */
+bool bc_text_same(const char *a, const char *b);
+
+/* Number of single-character edits (insert, delete, replace, swap of neighbours) between two folded
+ * words; at most BC_WORD_MAX. Damerau-Levenshtein distance, optimal string alignment. */
+size_t bc_text_distance(const char *a, const char *b);
+
+#endif

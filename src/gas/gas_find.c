@@ -1,0 +1,111 @@
+/* SPDX-License-Identifier: MIT */
+/* gas_find.c - what a GAS argument means: a file, a bundled name or a literal. */
+#include "base/error_internal.h"
+#include "base/text.h"
+#include "gas/composition_internal.h"
+
+#include <dirent.h>
+#include <errno.h>
+#include <stdio.h>
+#include <stdlib.h>
+#include <string.h>
+#include <sys/stat.h>
+
+static bool exists(const char *path)
+{
+    struct stat st;
+
+    return stat(path, &st) == 0;
+}
+
+static bool is_ini(const struct dirent *entry, size_t *stem)
+{
+    const size_t length = strlen(entry->d_name);
+
+    if (length <= 4 || entry->d_name[0] == '.' || strcmp(entry->d_name + length - 4, ".ini") != 0)
+        return false;
+    *stem = length - 4;
+    return true;
+}
+
+static int only_ini(const struct dirent *entry)
+{
+    size_t stem = 0;
+
+    return is_ini(entry, &stem);
+}
+
+bc_status bc_composition_each(const char *folder, void (*visit)(const char *name, const char *path, void *data), void *data,
+                              bc_error *err)
+{
+    struct dirent **entries = NULL;
+    const int count = scandir(folder, &entries, only_ini, alphasort);
+
+    if (count < 0)
+        return errno == ENOMEM ? bc_fail(err, BC_ERR_MEMORY, "not enough memory to list %s", folder) : BC_OK;
+    for (int i = 0; i < count; i++) {
+        char path[BC_FILE_MAX];
+        char name[BC_FILE_MAX];
+        size_t stem = 0;
+
+        if (is_ini(entries[i], &stem)) {
+            (void)snprintf(path, sizeof path, "%s/%s", folder, entries[i]->d_name);
+            (void)snprintf(name, sizeof name, "%.*s", (int)stem, entries[i]->d_name);
+            visit(name, path, data);
+        }
+        free(entries[i]);
+    }
+    free(entries);
+    return BC_OK;
+}
+
+/* The bundled name nearest to a word that does not exist. */
+typedef struct {
+    const char *word;
+    size_t distance;
+    char name[BC_WORD_MAX];
+} nearest;
+
+static void keep_nearest(const char *name, const char *path, void *data)
+{
+    nearest *n = data;
+    const size_t distance = bc_text_distance(n->word, name);
+
+    (void)path;
+    if (distance < n->distance && strlen(name) < sizeof n->name) {
+        n->distance = distance;
+        (void)snprintf(n->name, sizeof n->name, "%s", name);
+    }
+}
+
+static bc_status refuse(const char *word, const char *const folders[], size_t folder_count, bc_error *err)
+{
+    nearest n = {.word = word, .distance = BC_WORD_MAX, .name = ""};
+    char shown[BC_WORD_MAX];
+
+    bc_text_show(shown, sizeof shown, word);
+    for (size_t i = 0; i < folder_count; i++)
+        if (bc_composition_each(folders[i], keep_nearest, &n, NULL) != BC_OK)
+            break;
+    if (n.name[0] == '\0')
+        return bc_fail(err, BC_ERR_INPUT, "no file or gas '%s', and no bundled gases were found; set BLUECONE_PATH to their folder", shown);
+    return bc_fail(err, BC_ERR_INPUT, "no file or bundled gas '%s'; the nearest bundled one is '%s' (bluecone list gases)", shown, n.name);
+}
+
+bc_status bc_composition_find(const char *word, const char *const folders[], size_t folder_count, bc_composition *c, bc_error *err)
+{
+    if (word[0] == '\0')
+        return bc_fail(err, BC_ERR_INPUT, "the name of the gas is empty; give a file, a bundled name or a literal");
+    if (exists(word))
+        return bc_composition_read(word, c, err);
+    for (size_t i = 0; i < folder_count && !strchr(word, '/') && !strchr(word, '='); i++) {
+        char path[BC_FILE_MAX];
+        const int length = snprintf(path, sizeof path, "%s/%s.ini", folders[i], word);
+
+        if (length > 0 && (size_t)length < sizeof path && exists(path))
+            return bc_composition_read(path, c, err);
+    }
+    if (strchr(word, '='))
+        return bc_composition_parse(word, c, err);
+    return refuse(word, folders, folder_count, err);
+}

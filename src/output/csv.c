@@ -1,0 +1,174 @@
+/* SPDX-License-Identifier: MIT */
+/* csv.c - the report for spreadsheets: RFC 4180 with line feeds, and no cell that is a formula. */
+#include "output/render.h"
+
+#include "base/error_internal.h"
+#include "output/number_text_internal.h"
+#include "output/plain_text_internal.h"
+
+#include <stdlib.h>
+#include <string.h>
+
+/* Where cells go, and how. */
+typedef struct {
+    FILE *out;
+    int digits;
+    bool failed; /* an allocation failed */
+} csv_page;
+
+static size_t skip_digits(const char *text, size_t from)
+{
+    return from + strspn(text + from, "0123456789");
+}
+
+/* Whether a text is one decimal number, such as a cell of the user's own table may hold. */
+static bool is_number(const char *text)
+{
+    const size_t start = strspn(text, "+-") > 0 ? 1 : 0;
+    size_t end = skip_digits(text, start);
+
+    if (end == start)
+        return false;
+    if (text[end] == '.')
+        end = skip_digits(text, end + 1);
+    if (text[end] == 'e' || text[end] == 'E') {
+        const size_t digits = end + 1 + (strspn(text + end + 1, "+-") > 0 ? 1 : 0);
+        end = skip_digits(text, digits) > digits ? skip_digits(text, digits) : end;
+    }
+    return text[end] == '\0';
+}
+
+/* Spreadsheets take such a text for a formula, and formulas can reach files and the network. */
+static bool is_formula(const char *text)
+{
+    return *text != '\0' && strchr("=+-@\t", *text) != NULL && !is_number(text);
+}
+
+static void put_quoted(const csv_page *page, const char *text)
+{
+    fputc('"', page->out);
+    for (; *text != '\0'; text++) {
+        if (*text == '"')
+            fputc('"', page->out);
+        fputc(*text, page->out);
+    }
+    fputc('"', page->out);
+}
+
+static void put_text(csv_page *page, const char *text)
+{
+    char *plain = plain_text(text, PLAIN_CELL);
+    const size_t size = plain == NULL ? 0 : strlen(plain) + 2;
+    char *cell = malloc(size + 1);
+
+    if (plain == NULL || cell == NULL) {
+        page->failed = true;
+    } else {
+        snprintf(cell, size, "%s%s", is_formula(plain) ? "'" : "", plain);
+        if (cell[strcspn(cell, ",\"\n")] != '\0')
+            put_quoted(page, cell);
+        else
+            fputs(cell, page->out);
+    }
+    free(plain);
+    free(cell);
+}
+
+static void put_number(const csv_page *page, double number)
+{
+    char text[NUMBER_TEXT_MAX];
+
+    number_plain(number, page->digits, text);
+    fputs(text, page->out);
+}
+
+static void put_result(csv_page *page, const report *r, const report_result *result)
+{
+    put_text(page, result->id);
+    fputc(',', page->out);
+    put_text(page, result->gas == REPORT_NO_GAS ? "" : r->gases[result->gas].name);
+    fputc(',', page->out);
+    put_number(page, result->value);
+    fputc(',', page->out);
+    put_text(page, result->unit);
+    fputc(',', page->out);
+    if (result->has_uncertainty)
+        put_number(page, result->uncertainty);
+    fputc(',', page->out);
+    put_text(page, result->method);
+    fputc('\n', page->out);
+}
+
+/* The id of a column, with its unit: a file of numbers without units would be a trap. */
+static void put_heading(csv_page *page, const report_column *column)
+{
+    const size_t size = strlen(column->id) + strlen(column->unit) + sizeof " []";
+    char *heading = malloc(size);
+
+    if (heading == NULL) {
+        page->failed = true;
+        return;
+    }
+    if (*column->unit == '\0')
+        snprintf(heading, size, "%s", column->id);
+    else
+        snprintf(heading, size, "%s [%s]", column->id, column->unit);
+    put_text(page, heading);
+    free(heading);
+}
+
+static void put_cell(csv_page *page, const report_table *table, size_t index)
+{
+    if (index >= table->cell_count)
+        return;
+    if (table->cells[index].is_number)
+        put_number(page, table->cells[index].number);
+    else
+        put_text(page, table->cells[index].text);
+}
+
+static void put_table(csv_page *page, const report_table *table)
+{
+    const size_t count = table->column_count;
+
+    for (size_t i = 0; i < count; i++) {
+        if (i > 0)
+            fputc(',', page->out);
+        put_heading(page, &table->columns[i]);
+    }
+    fputc('\n', page->out);
+    for (size_t first = 0; count > 0 && first < table->cell_count; first += count) {
+        for (size_t i = 0; i < count; i++) {
+            if (i > 0)
+                fputc(',', page->out);
+            put_cell(page, table, first + i);
+        }
+        fputc('\n', page->out);
+    }
+}
+
+static void put_report(csv_page *page, const report *r)
+{
+    if (r->result_count > 0 || r->table_count == 0) {
+        fputs("id,gas,value,unit,uncertainty,method\n", page->out);
+        for (size_t i = 0; i < r->result_count; i++)
+            put_result(page, r, &r->results[i]);
+        return;
+    }
+    for (size_t i = 0; i < r->table_count; i++) {
+        if (i > 0)
+            fputc('\n', page->out);
+        put_table(page, &r->tables[i]);
+    }
+}
+
+bc_status render_csv(const report *r, const render_style *style, FILE *out, bc_error *err)
+{
+    csv_page page = {.out = out, .digits = style->digits, .failed = !report_ok(r)};
+
+    if (!page.failed)
+        put_report(&page, r);
+    if (page.failed)
+        return bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
+    return ferror(out) ? bc_fail(err, BC_ERR_FILE, "cannot write the report") : BC_OK;
+}

@@ -1,0 +1,57 @@
+/* SPDX-License-Identifier: MIT */
+/* render.c - from a report to a file: rendered in memory first, so that a file is whole or not. */
+#include "output/render.h"
+
+#include "base/error_internal.h"
+#include "output/output_file_internal.h"
+
+#include <stdlib.h>
+#include <string.h>
+#include <strings.h>
+
+typedef bc_status renderer(const report *r, const render_style *style, FILE *out, bc_error *err);
+
+static renderer *const RENDERERS[] = {
+    [RENDER_TEXT] = render_text,
+    [RENDER_JSON] = render_json,
+    [RENDER_CSV] = render_csv,
+    [RENDER_BRIEF] = render_brief,
+};
+
+static const struct {
+    const char *ending;
+    render_form form;
+} ENDINGS[] = {{".txt", RENDER_TEXT}, {".json", RENDER_JSON}, {".csv", RENDER_CSV}};
+
+bc_status render_to(const report *r, render_form form, const render_style *style, const char *path,
+                    bc_error *err)
+{
+    char *bytes = NULL;
+    size_t count = 0;
+    FILE *memory = open_memstream(&bytes, &count);
+
+    if (memory == NULL)
+        return bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
+
+    bc_status status = RENDERERS[form](r, style, memory, err);
+    /* The stream is memory: nothing else can have run out. */
+    if ((fclose(memory) != 0 && status == BC_OK) || status == BC_ERR_FILE)
+        status = bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
+    if (status == BC_OK)
+        status = output_write(path, bytes, count, err);
+    free(bytes);
+    return status;
+}
+
+bool render_form_of(const char *path, render_form *form)
+{
+    const char *dot = strrchr(path, '.');
+
+    for (size_t i = 0; dot != NULL && i < sizeof ENDINGS / sizeof *ENDINGS; i++) {
+        if (strcasecmp(dot, ENDINGS[i].ending) == 0) {
+            *form = ENDINGS[i].form;
+            return true;
+        }
+    }
+    return false;
+}

@@ -1,0 +1,47 @@
+/* SPDX-License-Identifier: MIT */
+/* render.h - the forms a report can take, and where it goes.
+ *
+ * Every renderer writes the whole report to a stream, in English and with '.' as decimal point
+ * whatever the locale. Text from users cannot carry control characters to a terminal. */
+#ifndef RENDER_H
+#define RENDER_H
+
+#include <stdbool.h>
+#include <stdio.h>
+
+#include "output/report.h"
+
+typedef enum {
+    RENDER_TEXT, /* sections and tables for people */
+    RENDER_JSON, /* one object, 12 significant digits */
+    RENDER_CSV,  /* results, or the tables where there are no results */
+    RENDER_BRIEF /* one line a result; chosen by a command, never by a file's ending */
+} render_form;
+
+/* How text shall look. JSON heeds none of this, CSV only `digits`. */
+typedef struct {
+    bool bare;  /* brief: the number alone */
+    bool quiet; /* text: no warnings, no notes */
+    bool color; /* text: escape sequences for titles, failures and the verdict */
+    int digits; /* significant digits of every result; 0: uncertainty or the result decides */
+    int width;  /* text: columns of a line; 0: 80 */
+} render_style;
+
+/* Each answers BC_OK, BC_ERR_MEMORY, or BC_ERR_FILE when the stream failed; err may be NULL. */
+BC_MUST_USE bc_status render_text(const report *r, const render_style *style, FILE *out, bc_error *err);
+BC_MUST_USE bc_status render_json(const report *r, const render_style *style, FILE *out, bc_error *err);
+BC_MUST_USE bc_status render_csv(const report *r, const render_style *style, FILE *out, bc_error *err);
+
+/* One line a result in the order of the results: `value unit`, behind it a tab and the name of the
+ * gas where the report has several. */
+BC_MUST_USE bc_status render_brief(const report *r, const render_style *style, FILE *out, bc_error *err);
+
+/* Renders into a file, or to standard output when path is NULL. A regular file appears whole under
+ * its name or not at all; a device or FIFO is written to as it stands. */
+BC_MUST_USE bc_status render_to(const report *r, render_form form, const render_style *style,
+                                const char *path, bc_error *err);
+
+/* The form a file's ending asks for (.txt .json .csv, in any case); false if it names none. */
+bool render_form_of(const char *path, render_form *form);
+
+#endif

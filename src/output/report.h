@@ -1,0 +1,116 @@
+/* SPDX-License-Identifier: MIT */
+/* report.h - what a command has to say, free of any format.
+ *
+ * A command fills one report and hands it to one renderer; a renderer knows nothing of gases.
+ * Every text is copied. An allocation that fails sets `failed` and drops the item: callers add
+ * everything first and ask once, with report_ok(). */
+#ifndef REPORT_H
+#define REPORT_H
+
+#include <stdbool.h>
+#include <stddef.h>
+
+#include "bluecone/status.h"
+
+#define REPORT_NO_GAS ((size_t)-1)
+#define REPORT_DIGITS 6 /* significant digits where nothing better is known */
+
+/* One mole fraction of a gas. */
+typedef struct {
+    char *id;
+    double x;
+} report_fraction;
+
+/* One gas of the report, as it was computed with. */
+typedef struct {
+    char *name;
+    char *source;             /* file, bundled name or literal */
+    report_fraction *fractions;
+    size_t fraction_count;
+    double sum_before;        /* of the entries as written, as a fraction of one */
+} report_gas;
+
+/* The reference state of all results that do not name another one in their note. */
+typedef struct {
+    bool present;
+    double combustion_c, metering_c, metering_kpa;
+    bool saturated;
+    int edition;              /* of ISO 6976 */
+    char *text;               /* the same in one line, for people */
+} report_state;
+
+/* One figure. */
+typedef struct {
+    char *id, *label, *unit, *method, *note;
+    size_t section;           /* index into sections */
+    size_t gas;               /* index into gases, or REPORT_NO_GAS */
+    double value;
+    bool has_uncertainty;
+    double uncertainty;       /* standard uncertainty, k = 1, same unit */
+    int digits;               /* significant digits when no uncertainty decides */
+} report_result;
+
+typedef struct {
+    char *id, *title;
+} report_section;
+
+/* A cell of a table: text, or a number with the decimals to print (-1: significant digits decide). */
+typedef struct {
+    bool is_number;
+    double number;
+    int decimals;
+    char *text;               /* NULL: empty cell */
+} report_cell;
+
+typedef struct {
+    char *id, *heading, *unit;
+} report_column;
+
+/* What is no single figure: rows of cells under named columns. */
+typedef struct {
+    char *id, *title;
+    report_column *columns;
+    size_t column_count;
+    report_cell *cells;       /* row by row */
+    size_t cell_count;
+} report_table;
+
+typedef struct {
+    char *id, *detail;
+    bool ok;
+} report_check;
+
+typedef struct {
+    char *version, *command, *title;
+    report_state state;
+    report_gas *gases;          size_t gas_count;
+    report_section *sections;   size_t section_count;
+    report_result *results;     size_t result_count;
+    report_table *tables;       size_t table_count;
+    report_check *checks;       size_t check_count;
+    char **warnings;            size_t warning_count;
+    char *verdict;            /* NULL: nothing was asked that has a verdict */
+    char *caution;            /* NULL: nothing here leads to a change of plant */
+    bool failed;              /* an allocation failed */
+} report;
+
+/* Building. The index of the item added comes back where others refer to it. */
+void report_open(report *r, const char *version, const char *command, const char *title);
+void report_close(report *r);
+bool report_ok(const report *r);
+void report_set_state(report *r, const report_state *state);
+size_t report_add_gas(report *r, const char *name, const char *source, double sum_before);
+void report_add_fraction(report *r, size_t gas, const char *id, double x);
+size_t report_add_section(report *r, const char *id, const char *title);
+/* Adds a result; the texts of *result are copied, section and gas must exist. */
+void report_add_result(report *r, const report_result *result);
+size_t report_add_table(report *r, const char *id, const char *title);
+void report_add_column(report *r, size_t table, const char *id, const char *heading, const char *unit);
+void report_add_text(report *r, size_t table, const char *text);       /* next cell */
+void report_add_number(report *r, size_t table, double number, int decimals); /* next cell */
+void report_add_check(report *r, const char *id, bool ok, const char *detail);
+void report_add_warning(report *r, const char *text); /* the same text twice is kept once */
+void report_set_verdict(report *r, const char *text);
+void report_set_caution(report *r, const char *text);
+
+#endif
