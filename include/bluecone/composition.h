@@ -56,6 +56,7 @@ typedef struct {
     char family[32];          /* kind of gas (natural, lng, town ...), "" when not stated */
     char origin[256];         /* where the figures come from, as the file says; may be "" */
     char path[BC_FILE_MAX];   /* file it was read from; "" for a literal */
+    char bundled[BC_COMPONENT_MAX]; /* name of a bundled gas; "" for others */
     bc_basis basis;
     bc_moisture moisture;
     bc_closure closure;

@@ -40,6 +40,7 @@ typedef struct {
     const char *unit;    /* "MJ/m3" */
     const char *method;  /* published method; "ISO 6976" stands for the edition of the state */
     const char *meaning; /* one sentence */
+    int digits;          /* significant digits worth printing when no uncertainty decides */
 } bc_quantity;
 
 /* Number of quantities, and each by its index; NULL for an index out of range. */

@@ -90,6 +90,22 @@ static bc_status check_repeated(const scan *s, const bc_ini_entry *entry)
     return BC_OK;
 }
 
+/* iniparser ends a quoted value at the closing quote and drops what follows; only a remark may follow. */
+static bool quotes_close(const char *value)
+{
+    const char *start = bc_text_skip_space(value);
+
+    if (*start != '"' && *start != '\'')
+        return true;
+    const char *close = strchr(start + 1, *start);
+
+    if (!close)
+        return false;
+    const char *rest = bc_text_skip_space(close + 1);
+
+    return *rest == '\0' || *rest == ';' || *rest == '#';
+}
+
 static bc_status take_entry(scan *s, const char *text, const char *equals)
 {
     if (s->section[0] == '\0')
@@ -104,6 +120,8 @@ static bc_status take_entry(scan *s, const char *text, const char *equals)
         return refuse(s, "there is no key in front of '='");
     if (strchr(entry->key, ':'))
         return refuse(s, "a key cannot hold ':'; write '=' between key and value");
+    if (!quotes_close(equals + 1))
+        return refuse(s, "a value that starts with a quote must end with the same quote; remove the quotes or the text behind them");
     memcpy(entry->section, s->section, sizeof entry->section);
     entry->line = s->line;
     const bc_status status = check_repeated(s, entry);
@@ -125,10 +143,12 @@ static bc_status take_line(scan *s, const char *text, size_t length)
             return refuse(s, "the line holds a control character; remove it");
     const char *start = bc_text_skip_space(text);
 
-    if (*start == '\0' || *start == ';' || *start == '#')
+    if (*start == '\0')
         return BC_OK;
-    if (text[length - 1] == '\\')
+    if (text[length - 1] == '\\') /* of a remark, too: iniparser joins lines before it looks at them */
         return refuse(s, "the line ends in a backslash, which would join it with the next; remove it");
+    if (*start == ';' || *start == '#')
+        return BC_OK;
     if (*start == '[')
         return take_section(s, start, strlen(start));
     const char *equals = strchr(start, '=');
@@ -158,7 +178,8 @@ static bc_status scan_lines(scan *s, const char *text, size_t length)
         size_t n = trimmed(p, raw);
 
         s->line++;
-        n = n > BC_INI_LINE_MAX ? BC_INI_LINE_MAX + 1 : n;
+        if (n > BC_INI_LINE_MAX || raw > BC_INI_LINE_MAX + 1) /* one more for a carriage return */
+            n = BC_INI_LINE_MAX + 1;
         memcpy(line, p, n);
         line[n] = '\0';
         const bc_status status = take_line(s, line, n);

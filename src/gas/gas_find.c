@@ -102,8 +102,13 @@ bc_status bc_composition_find(const char *word, const char *const folders[], siz
         char path[BC_FILE_MAX];
         const int length = snprintf(path, sizeof path, "%s/%s.ini", folders[i], word);
 
-        if (length > 0 && (size_t)length < sizeof path && exists(path))
-            return bc_composition_read(path, c, err);
+        if (length > 0 && (size_t)length < sizeof path && exists(path)) {
+            const bc_status status = bc_composition_read(path, c, err);
+
+            if (status == BC_OK && strlen(word) < sizeof c->bundled)
+                memcpy(c->bundled, word, strlen(word) + 1);
+            return status;
+        }
     }
     if (strchr(word, '='))
         return bc_composition_parse(word, c, err);

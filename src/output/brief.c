@@ -36,12 +36,33 @@ static bool put_result(FILE *out, const report *r, const report_result *result, 
     return ok;
 }
 
+/* A report of tables alone, bare: the first column, a name a line. */
+static bool put_names(FILE *out, const report *r)
+{
+    bool ok = true;
+
+    for (size_t i = 0; i < r->table_count; i++) {
+        const report_table *t = &r->tables[i];
+
+        for (size_t j = 0; ok && j < t->cell_count; j += t->column_count) {
+            char *plain = plain_text(t->cells[j].text, PLAIN_LINE);
+
+            ok = plain != NULL;
+            fprintf(out, "%s\n", ok ? plain : "");
+            free(plain);
+        }
+    }
+    return ok;
+}
+
 bc_status render_brief(const report *r, const render_style *style, FILE *out, bc_error *err)
 {
     bool ok = report_ok(r);
 
     for (size_t i = 0; ok && i < r->result_count; i++)
         ok = put_result(out, r, &r->results[i], style);
+    if (ok && r->result_count == 0)
+        ok = put_names(out, r);
     if (!ok)
         return bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
     return ferror(out) ? bc_fail(err, BC_ERR_FILE, "cannot write the report") : BC_OK;

@@ -9,8 +9,8 @@
 #include <string.h>
 
 #define HEADING_FOLD 14 /* headings are folded, but not narrower than this */
-#define POINT_MAX 20    /* wider columns of numbers are not aligned at the point: it costs too much */
-#define BLOCK_ROOM 24   /* columns of a line that fixed columns leave to the others */
+#define POINT_MAX    20 /* wider columns of numbers are not aligned at the point: it costs too much */
+#define BLOCK_ROOM   24 /* columns of a line that fixed columns leave to the others */
 
 void grid_open(grid *g, int indent, size_t fixed)
 {

@@ -97,8 +97,8 @@ static json_t *result_of(const report *r, const report_result *result, bool *fai
     put(object, "gas", text_of(has_gas ? r->gases[result->gas].name : NULL), failed);
     put(object, "value", number_of(result->value), failed);
     put(object, "unit", text_of(result->unit), failed);
-    put(object, "uncertainty",
-        result->has_uncertainty ? number_of(result->uncertainty) : json_null(), failed);
+    put(object, "uncertainty", result->has_uncertainty ? number_of(result->uncertainty) : json_null(),
+        failed);
     put(object, "method", text_of(result->method), failed);
     put(object, "label", text_of(result->label), failed);
     if (result->note != NULL)

@@ -8,12 +8,12 @@
 #include <stdlib.h>
 #include <string.h>
 
-#define DIGITS_MAX 17        /* tells every double from its neighbours */
-#define DIGITS_KNOWN 15      /* every decimal number of so many digits survives in a double */
+#define DIGITS_MAX   17 /* tells every double from its neighbours */
+#define DIGITS_KNOWN 15 /* every decimal number of so many digits survives in a double */
 #define DECIMALS_MAX 20
-#define FIXED_FROM (-4)      /* decimal exponents printed without an exponent */
-#define FIXED_BELOW 15
-#define PLAIN_DIGITS 12      /* as in JSON */
+#define FIXED_FROM   (-4) /* decimal exponents printed without an exponent */
+#define FIXED_BELOW  15
+#define PLAIN_DIGITS 12 /* as in JSON */
 
 static int within(int value, int low, int high)
 {

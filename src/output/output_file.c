@@ -5,6 +5,7 @@
 #include "output/output_file_internal.h"
 
 #include "base/error_internal.h"
+#include "base/text.h"
 
 #include <errno.h>
 #include <fcntl.h>
@@ -16,16 +17,17 @@
 #include <sys/stat.h>
 #include <unistd.h>
 
-#define NAME_KEPT 200 /* bytes of the file's name in that of the temporary one: NAME_MAX is 255 */
-#define RIGHTS 0777   /* of a mode, the bits that are rights */
+#define NAME_KEPT 200  /* bytes of the file's name in that of the temporary one: NAME_MAX is 255 */
+#define RIGHTS    0777 /* of a mode, the bits that are rights */
 
 static bc_status fail_with(int reason, const char *path, bc_error *err)
 {
-    char text[128];
+    char text[128], name[BC_FILE_MAX];
 
+    bc_text_show(name, sizeof name, path);
     if (strerror_r(reason, text, sizeof text) != 0)
         snprintf(text, sizeof text, "error %d", reason);
-    return bc_fail(err, BC_ERR_FILE, "cannot write to %s: %s", path, text);
+    return bc_fail(err, BC_ERR_FILE, "cannot write to %s: %s", name, text);
 }
 
 /* 0, or the reason why not all bytes were written. */

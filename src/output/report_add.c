@@ -11,7 +11,8 @@
 
 size_t report_add_gas(report *r, const char *name, const char *source, double sum_before)
 {
-    report_gas gas = {.name = report_copy(r, name), .source = report_copy(r, source), .sum_before = sum_before};
+    report_gas gas = {
+        .name = report_copy(r, name), .source = report_copy(r, source), .sum_before = sum_before};
     report_gas *gases = report_grow(r, r->gases, r->gas_count, sizeof gas);
 
     if (gases != NULL)

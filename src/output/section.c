@@ -20,8 +20,7 @@ static bool stands_alone(const report *r, const report_result *result)
 
 static bool same_quantity(const report_result *a, const report_result *b)
 {
-    return strcmp(a->id, b->id) == 0 && strcmp(a->unit, b->unit) == 0 &&
-           strcmp(a->label, b->label) == 0;
+    return strcmp(a->id, b->id) == 0 && strcmp(a->unit, b->unit) == 0 && strcmp(a->label, b->label) == 0;
 }
 
 /* The row of an earlier result of the same quantity that has none of this gas yet, else a new one. */
@@ -52,11 +51,16 @@ static void sort_rows(section *s)
     }
 }
 
+static bool is_same(const char *a, const char *b)
+{
+    return a != NULL && b != NULL && strcmp(a, b) == 0;
+}
+
 /* The number of an equal note further up in the section, else a new one. */
 static size_t note_for(const section *s, size_t result)
 {
     for (size_t i = 0; i < result; i++)
-        if (s->note_of[i] != 0 && strcmp(s->r->results[i].note, s->r->results[result].note) == 0)
+        if (s->note_of[i] != 0 && is_same(s->r->results[i].note, s->r->results[result].note))
             return s->note_of[i];
     return s->note_count + 1;
 }

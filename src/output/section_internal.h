@@ -15,7 +15,7 @@ typedef struct {
     size_t *row_of;      /* a result's row; SECTION_NONE: it stands alone, or is not of this section */
     size_t *note_of;     /* the number of a result's note, from 1; 0: none */
     size_t note_count;
-    const char *method;  /* of all results; NULL: they differ */
+    const char *method; /* of all results; NULL: they differ */
 } section;
 
 /* Sorts the results of a section, with their notes if asked; false when there is no memory. To be

@@ -9,10 +9,10 @@
 #include <string.h>
 
 #define WIDTH_DEFAULT 80
-#define WIDTH_MIN 40 /* below, not even a label and a number fit side by side */
-#define HEAD_HANG 9  /* behind "Caution: ", the longest word in front of a text */
-#define INDENT 2
-#define CHECK_HANG (INDENT + 8) /* behind "FAILED" */
+#define WIDTH_MIN     40 /* below, not even a label and a number fit side by side */
+#define HEAD_HANG     9  /* behind "Caution: ", the longest word in front of a text */
+#define INDENT        2
+#define CHECK_HANG    (INDENT + 8) /* behind "FAILED" */
 
 static void print_head(text_page *page, const report *r)
 {

@@ -11,11 +11,11 @@
 #include <stdlib.h>
 #include <string.h>
 
-#define INDENT 2
-#define LABEL_FOLD 24  /* labels, units and methods are not folded narrower than this */
-#define UNIT_FOLD 10
-#define METHOD_FOLD 14
-#define NAME_MAX_COLUMNS 12 /* of a gas at the head of its column */
+#define INDENT           2
+#define LABEL_FOLD       24 /* labels, units and methods are not folded narrower than this */
+#define UNIT_FOLD        10
+#define METHOD_FOLD      14
+#define NAME_MAX_COLUMNS 14 /* of a gas at the head of its column */
 
 static void add_label(grid *g, const section *s, size_t result)
 {
@@ -75,6 +75,21 @@ static void print_singles(text_page *page, const section *s)
     grid_print(&g, page);
 }
 
+/* Keeps the whole words of a name that fit the head of a column; one long word is cut. */
+static void shorten_name(char *name)
+{
+    const size_t whole = plain_bytes(name, NAME_MAX_COLUMNS);
+    size_t n = whole;
+
+    if (name[whole] == '\0')
+        return;
+    while (n > 0 && name[n] != ' ')
+        n--;
+    while (n > 0 && (name[n - 1] == ' ' || name[n - 1] == ','))
+        n--;
+    name[n > 0 ? n : whole] = '\0';
+}
+
 /* The letter of a gas over the beginning of its name. */
 static void add_gas_column(grid *g, const section *s, size_t gas)
 {
@@ -82,7 +97,7 @@ static void add_gas_column(grid *g, const section *s, size_t gas)
     char *name = plain_text(s->r->gases[gas].name, PLAIN_LINE);
 
     if (name != NULL)
-        name[plain_bytes(name, NAME_MAX_COLUMNS)] = '\0';
+        shorten_name(name);
     text_letter(gas, letter);
     grid_add_column(g, GRID_POINT, 0, letter, name);
     g->failed = g->failed || name == NULL;

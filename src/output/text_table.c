@@ -5,7 +5,7 @@
 #include "output/grid_internal.h"
 #include "output/number_text_internal.h"
 
-#define INDENT 2
+#define INDENT    2
 #define CELL_FOLD 16 /* words in a cell are not folded narrower than this */
 
 /* Numbers alone stand point under point; words among them would push the points apart. */

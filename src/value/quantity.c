@@ -31,9 +31,9 @@ static other_function formation_gross, formation_net, formation_gap, hydrogen_ca
 
 static const quantity_row ROWS[] = {
 #define POWER(id, field, heat, a, b, g, r, m, n, unit, scale, group, label, meaning)                             \
-    {{id, label, group, unit, "ISO 6976", meaning}, offsetof(bc_value, field), scale, {a, b, g, r, m, n, heat}, NULL},
-#define OTHER(id, function, unit, group, label, method, meaning) \
-    {{id, label, group, unit, method, meaning}, 0, 1.0, {0.0, 0.0, 0.0, 0.0, 0.0, 0.0, false}, function},
+    {{id, label, group, unit, "ISO 6976", meaning, 6}, offsetof(bc_value, field), scale, {a, b, g, r, m, n, heat}, NULL},
+#define OTHER(id, function, unit, digits, group, label, method, meaning) \
+    {{id, label, group, unit, method, meaning, digits}, 0, 1.0, {0.0, 0.0, 0.0, 0.0, 0.0, 0.0, false}, function},
 #include "value/quantities.def"
 };
 

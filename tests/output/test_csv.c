@@ -90,9 +90,11 @@ static void names_with_commas_quotes_and_line_feeds_are_quoted(void **state)
     report *r = *state;
 
     add_result(r, report_add_gas(r, "Works, \"June\"", "", 1.0), 37.7, 0.0);
+    add_result(r, report_add_gas(r, "2\" line", "", 1.0), 37.7, 0.0);
     add_result(r, report_add_gas(r, "two\nlines", "", 1.0), 37.7, 0.0);
     assert_renders(render_csv, r, (render_style){0},
                    HEAD "hhv,\"Works, \"\"June\"\"\",37.7,MJ/m3,,ISO 6976:2016\n"
+                        "hhv,\"2\"\" line\",37.7,MJ/m3,,ISO 6976:2016\n"
                         "hhv,\"two\nlines\",37.7,MJ/m3,,ISO 6976:2016\n");
 }
 
@@ -115,7 +117,13 @@ static void control_characters_and_broken_utf8_become_question_marks(void **stat
 {
     report *r = *state;
 
-    add_result(r, report_add_gas(r, "a\033[2Jb\rc\xC2\x9B" "d\xFF" "e\xC3\xBC", "", 1.0), 37.7, 0.0);
+    add_result(r,
+               report_add_gas(r,
+                              "a\033[2Jb\rc\xC2\x9B"
+                              "d\xFF"
+                              "e\xC3\xBC",
+                              "", 1.0),
+               37.7, 0.0);
     assert_renders(render_csv, r, (render_style){0},
                    HEAD "hhv,a?[2Jb?c?d?e\xC3\xBC,37.7,MJ/m3,,ISO 6976:2016\n");
 }

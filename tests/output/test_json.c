@@ -217,14 +217,25 @@ static void hostile_names_are_escaped_and_broken_utf8_repaired(void **state)
 
     report_add_gas(r, "\", \"value\": 1, \"x\": \"\\", "", 1.0);
     report_add_gas(r, "\033[2J\n", "", 1.0);
-    report_add_gas(r, "S\xC3\xBC" "d \xC3(\xFF \xC0\xAF \xED\xA0\x80 \xF4\x90\x80\x80 \xC3", "", 1.0);
-    report_add_gas(r, "C1 \xC2\x9B" "31m", "", 1.0);
-    report_add_fraction(r, 0, "meth\xFF" "ane", 0.913);
+    report_add_gas(r,
+                   "S\xC3\xBC"
+                   "d \xC3(\xFF \xC0\xAF \xED\xA0\x80 \xF4\x90\x80\x80 \xC3",
+                   "", 1.0);
+    report_add_gas(r,
+                   "C1 \xC2\x9B"
+                   "31m",
+                   "", 1.0);
+    report_add_fraction(r, 0,
+                        "meth\xFF"
+                        "ane",
+                        0.913);
 
     json_t *object = parsed(r);
     assert_name(object, 0, "\", \"value\": 1, \"x\": \"\\");
     assert_name(object, 1, "\033[2J\n");
-    assert_name(object, 2, "S\xC3\xBC" "d ?(? ?? ??? ???? ?");
+    assert_name(object, 2,
+                "S\xC3\xBC"
+                "d ?(? ?? ??? ???? ?");
     assert_name(object, 3, "C1 ?31m");
     json_t *first = json_array_get(json_object_get(object, "gases"), 0);
     assert_keys(json_object_get(first, "composition"), "meth?ane");

@@ -220,8 +220,9 @@ static void a_figure_given_twice_is_shown_twice(void **state)
     add(r, section, a, HHV);
     add(r, section, b, HHV);
     add(r, section, a, other);
-    assert_says(r, (render_style){0}, "Superior heating value  MJ/m3  39.735  39.735\n"
-                                      "  Superior heating value  MJ/m3  38.110   -\n");
+    assert_says(r, (render_style){0},
+                "Superior heating value  MJ/m3  39.735  39.735\n"
+                "  Superior heating value  MJ/m3  38.110   -\n");
 }
 
 static void equal_notes_share_a_number_and_name_their_gases(void **state)
@@ -357,8 +358,9 @@ static void long_words_in_cells_are_folded(void **state)
     report_add_column(r, table, "id", "Id", NULL);
     report_add_column(r, table, "source", "Source", NULL);
     report_add_text(r, table, "methane");
-    report_add_text(r, table, "ISO 6976:2016, table 3: ideal molar heating values of components at "
-                              "several temperatures of combustion");
+    report_add_text(r, table,
+                    "ISO 6976:2016, table 3: ideal molar heating values of components at "
+                    "several temperatures of combustion");
     report_add_text(r, table, word);
     report_add_text(r, table, word);
     assert_fits(r, 80);
@@ -392,7 +394,12 @@ static void names_cannot_carry_control_characters_to_the_terminal(void **state)
 {
     report *r = *state;
 
-    report_add_gas(r, "a\033[2Jb\rc\nd\x7F" "e", "\xC2\x9B" "31m \xE2\x80\xAE 12", 1.0);
+    report_add_gas(r,
+                   "a\033[2Jb\rc\nd\x7F"
+                   "e",
+                   "\xC2\x9B"
+                   "31m \xE2\x80\xAE 12",
+                   1.0);
     report_add_warning(r, "\xFF\xC0\x9B");
     report_set_verdict(r, "\033]0;title\a");
     assert_body(r, "\n"
@@ -434,8 +441,9 @@ static void neither_nan_nor_locale_reaches_the_page(void **state)
     add(r, section, REPORT_NO_GAS, DENSITY);
     r->results[1].value = nan("");
     setlocale(LC_ALL, "de_DE.UTF-8"); /* where it is missing, "C" does */
-    assert_says(r, (render_style){0}, "  Molar heating value  892.92  kJ/mol  u 0.19\n"
-                                      "  Relative density       -\n");
+    assert_says(r, (render_style){0},
+                "  Molar heating value  892.92  kJ/mol  u 0.19\n"
+                "  Relative density       -\n");
 }
 
 #define TEXT_TEST(name) cmocka_unit_test_setup_teardown(name, set_up, tear_down)

@@ -1,0 +1,85 @@
+/* SPDX-License-Identifier: MIT */
+/* answer.c - a report to where the options want it, in the form they want. */
+#include "base/error_internal.h"
+#include "bluecone/number.h"
+#include "cli/cli.h"
+
+#include <math.h>
+#include <stdio.h>
+#include <stdlib.h>
+#include <string.h>
+#include <unistd.h>
+
+static bc_status choose_form(const arguments *a, bool brief, render_form *form, bc_error *err)
+{
+    const char *path = a->value[OPTION_output];
+
+    *form = brief ? RENDER_BRIEF : RENDER_TEXT;
+    if (path && *path == '\0')
+        return bc_fail(err, BC_ERR_USAGE, "--output needs a file name");
+    if (path && !a->value[OPTION_json] && !a->value[OPTION_csv] && !render_form_of(path, form)) {
+        const char *slash = strrchr(path, '/');
+
+        if (strrchr(slash ? slash : path, '.'))
+            return bc_fail(err, BC_ERR_USAGE, "-o %.200s: the ending is none of .txt, .json, .csv, which give the form; or add --json or --csv", path);
+    }
+    if (a->value[OPTION_json])
+        *form = RENDER_JSON;
+    if (a->value[OPTION_csv])
+        *form = RENDER_CSV;
+    return BC_OK;
+}
+
+static bc_status choose_style(const arguments *a, render_style *style, bc_error *err)
+{
+    const char *digits = a->value[OPTION_digits];
+    double n = 0.0;
+
+    *style = (render_style){.bare = a->value[OPTION_bare] != NULL, .quiet = a->value[OPTION_quiet] != NULL, .width = 80};
+    style->color = !a->value[OPTION_no_color] && !a->value[OPTION_output] && !getenv("NO_COLOR") && isatty(STDOUT_FILENO);
+    if (!digits)
+        return BC_OK;
+    if (bc_number_parse(digits, &n, NULL) != BC_OK || !(n >= 2.0 && n <= 15.0) || n != floor(n))
+        return bc_fail(err, BC_ERR_USAGE, "--digits %.20s: write a whole number from 2 to 15", digits);
+    style->digits = (int)n;
+    return BC_OK;
+}
+
+/* A number alone has no room for its state and warnings: they go where messages go. */
+static void tell_aside(const report *r, const render_style *style)
+{
+    if (style->bare || style->quiet)
+        return;
+    if (r->state.present)
+        warn("state: %s", r->state.text);
+    for (size_t i = 0; i < r->warning_count; i++)
+        warn("%s", r->warnings[i]);
+}
+
+static bc_status render(const report *r, const arguments *a, bool brief, bc_error *err)
+{
+    render_form form = RENDER_TEXT;
+    render_style style;
+    bc_status status = choose_form(a, brief, &form, err);
+
+    if (status == BC_OK)
+        status = choose_style(a, &style, err);
+    if (status != BC_OK)
+        return status;
+    if (!report_ok(r))
+        return bc_fail(err, BC_ERR_MEMORY, "not enough memory for the report");
+    if (form == RENDER_BRIEF) {
+        tell_aside(r, &style);
+        style.digits = style.digits ? style.digits : REPORT_DIGITS;
+    }
+    return render_to(r, form, &style, a->value[OPTION_output], err);
+}
+
+int answer(report *r, const arguments *a, bool brief, int code)
+{
+    bc_error err;
+    const bc_status status = render(r, a, brief, &err);
+
+    report_close(r);
+    return status == BC_OK ? code : complain(&err);
+}

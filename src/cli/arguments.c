@@ -1,0 +1,170 @@
+/* SPDX-License-Identifier: MIT */
+/* arguments.c - taking a command line apart by the table of options. */
+#include "base/error_internal.h"
+#include "base/text.h"
+#include "cli/cli.h"
+
+#include <string.h>
+
+enum {
+#define COMMAND(name, word, usage, help, least, most) COMMAND_##name,
+#include "cli/commands.def"
+    COMMAND_COUNT
+};
+
+#define GET (1U << COMMAND_get)
+#define SHEET (1U << COMMAND_sheet)
+#define LIST (1U << COMMAND_list)
+#define VERIFY (1U << COMMAND_verify)
+
+static const command COMMANDS[] = {
+#define COMMAND(name, word, usage, help, least, most) {word, usage, help, least, most, 1U << COMMAND_##name, run_##name},
+#include "cli/commands.def"
+};
+
+typedef struct {
+    const char *word, *argument, *help;
+    unsigned commands;
+} option_row;
+
+static const option_row OPTIONS[OPTION_COUNT] = {
+#define OPTION(name, word, argument, commands, help) {word, argument, help, commands},
+#include "cli/options.def"
+};
+
+const command *command_at(size_t index)
+{
+    return index < BC_COUNT(COMMANDS) ? &COMMANDS[index] : NULL;
+}
+
+const command *command_find(const char *word)
+{
+    for (size_t i = 0; i < BC_COUNT(COMMANDS); i++)
+        if (strcmp(COMMANDS[i].word, word) == 0)
+            return &COMMANDS[i];
+    return NULL;
+}
+
+const char *option_word(const command *c, size_t index, const char **argument, const char **help)
+{
+    for (size_t i = 0; i < OPTION_COUNT; i++) {
+        if (!(OPTIONS[i].commands & c->bit))
+            continue;
+        if (index-- == 0) {
+            *argument = OPTIONS[i].argument;
+            *help = OPTIONS[i].help;
+            return OPTIONS[i].word;
+        }
+    }
+    return NULL;
+}
+
+static bc_status refuse_option(const command *c, const char *word, bc_error *err)
+{
+    const char *best = NULL;
+    char shown[BC_WORD_MAX];
+
+    bc_text_show(shown, sizeof shown, word);
+    for (size_t i = 0; i < OPTION_COUNT; i++)
+        if ((OPTIONS[i].commands & c->bit) && (!best || bc_text_distance(OPTIONS[i].word, word) < bc_text_distance(best, word)))
+            best = OPTIONS[i].word;
+    return bc_fail(err, BC_ERR_USAGE, "'%s' has no option --%s; the nearest is --%s; see bluecone %s --help", c->word, shown, best, c->word);
+}
+
+/* The option of a word that may go on with "=value"; OPTION_COUNT when there is none. */
+static size_t find_option(const command *c, const char *word, size_t length)
+{
+    for (size_t i = 0; i < OPTION_COUNT; i++)
+        if ((OPTIONS[i].commands & c->bit) && strlen(OPTIONS[i].word) == length && strncmp(OPTIONS[i].word, word, length) == 0)
+            return i;
+    return OPTION_COUNT;
+}
+
+/* Stores an option; `next` is the following word of the line or NULL; *used tells that it was taken. */
+static bc_status store(const command *c, arguments *a, size_t option, const char *inline_value, const char *next, bool *used, bc_error *err)
+{
+    const option_row *row = &OPTIONS[option];
+    const bool wants = row->argument[0] != '\0';
+
+    *used = false;
+    if (a->value[option])
+        return bc_fail(err, BC_ERR_USAGE, "--%s stands twice; keep one of them", row->word);
+    if (!wants && inline_value)
+        return bc_fail(err, BC_ERR_USAGE, "--%s takes no value", row->word);
+    if (wants && !inline_value && !next)
+        return bc_fail(err, BC_ERR_USAGE, "--%s needs a value, %s; see bluecone %s --help", row->word, row->argument, c->word);
+    *used = wants && !inline_value;
+    a->value[option] = !wants ? "" : inline_value ? inline_value : next;
+    return BC_OK;
+}
+
+static bc_status take_long(const command *c, arguments *a, const char *word, const char *next, bool *used, bc_error *err)
+{
+    const char *equals = strchr(word, '=');
+    const size_t option = find_option(c, word, equals ? (size_t)(equals - word) : strlen(word));
+
+    *used = false;
+    if (option == OPTION_COUNT)
+        return refuse_option(c, word, err);
+    return store(c, a, option, equals ? equals + 1 : NULL, next, used, err);
+}
+
+/* -o FILE and -h are the only short ones. */
+static bc_status take_short(const command *c, arguments *a, const char *word, const char *next, bool *used, bc_error *err)
+{
+    *used = false;
+    if (word[0] == 'o')
+        return store(c, a, OPTION_output, word[1] != '\0' ? word + 1 : NULL, next, used, err);
+    if (strcmp(word, "h") == 0)
+        return store(c, a, OPTION_help, NULL, NULL, used, err);
+    return refuse_option(c, word, err);
+}
+
+static bc_status take_word(const command *c, arguments *a, const char *word, bc_error *err)
+{
+    if (a->argument_count == ARGUMENTS_MAX)
+        return bc_fail(err, BC_ERR_USAGE, "more than %d arguments", ARGUMENTS_MAX);
+    a->argument[a->argument_count++] = word;
+    (void)c;
+    return BC_OK;
+}
+
+static bc_status check_count(const command *c, const arguments *a, bc_error *err)
+{
+    if (a->value[OPTION_help] || a->value[OPTION_version])
+        return BC_OK;
+    if (a->argument_count < c->least)
+        return bc_fail(err, BC_ERR_USAGE, "something is missing: bluecone %s %s; see bluecone %s --help", c->word, c->usage, c->word);
+    if (a->argument_count > c->most)
+        return bc_fail(err, BC_ERR_USAGE, "'%s' is one argument too many: bluecone %s %s", a->argument[c->most], c->word, c->usage);
+    if (a->value[OPTION_json] && a->value[OPTION_csv])
+        return bc_fail(err, BC_ERR_USAGE, "--json and --csv exclude each other; keep one of them");
+    return BC_OK;
+}
+
+bc_status arguments_take(const command *c, int argc, char **argv, arguments *a, bc_error *err)
+{
+    bool words_only = false;
+
+    memset(a, 0, sizeof *a);
+    a->command = c->word;
+    for (int i = 1; i < argc; i++) {
+        const char *word = argv[i];
+        const char *next = i + 1 < argc ? argv[i + 1] : NULL;
+        bc_status status = BC_OK;
+        bool used = false;
+
+        if (words_only || word[0] != '-' || word[1] == '\0')
+            status = take_word(c, a, word, err);
+        else if (strcmp(word, "--") == 0)
+            words_only = true;
+        else if (word[1] == '-')
+            status = take_long(c, a, word + 2, next, &used, err);
+        else
+            status = take_short(c, a, word + 1, next, &used, err);
+        if (status != BC_OK)
+            return status;
+        i += used;
+    }
+    return check_count(c, a, err);
+}

@@ -1,0 +1,100 @@
+/* SPDX-License-Identifier: MIT */
+/* cli.h - what the commands share: arguments, loading of gases, answering. */
+#ifndef CLI_H
+#define CLI_H
+
+#include "base/compiler.h"
+#include "bluecone/bluecone.h"
+#include "output/render.h"
+
+#include <stdbool.h>
+#include <stddef.h>
+
+#define ARGUMENTS_MAX 64
+
+/* Options by name, for value[] below. */
+enum {
+#define OPTION(name, word, argument, commands, help) OPTION_##name,
+#include "cli/options.def"
+    OPTION_COUNT
+};
+
+/* A command line taken apart. */
+typedef struct {
+    const char *command;                /* its word */
+    const char *value[OPTION_COUNT];    /* NULL: not given; "" for an option without argument */
+    const char *argument[ARGUMENTS_MAX];
+    size_t argument_count;
+} arguments;
+
+typedef struct command {
+    const char *word, *usage, *help;
+    size_t least, most;
+    unsigned bit;
+    int (*run)(const arguments *); /* the exit code */
+} command;
+
+/* The commands; NULL for an index out of range. */
+const command *command_at(size_t index);
+const command *command_find(const char *word);
+
+/* Takes a command line apart, argv[0] being the command's word. */
+bc_status arguments_take(const command *c, int argc, char **argv, arguments *a, bc_error *err);
+
+/* The option words of a command, one a call; NULL at the end. *argument: its argument, "" for none. */
+const char *option_word(const command *c, size_t index, const char **argument, const char **help);
+
+void help_command(const command *c);
+void help_all(void);
+
+/* Folders of bundled gases: $BLUECONE_PATH, the source tree, the installed data folder. */
+#define FOLDERS_MAX 16
+typedef struct {
+    size_t count;
+    const char *path[FOLDERS_MAX];
+    char text[FOLDERS_MAX][BC_FILE_MAX];
+} folders;
+
+void folders_find(folders *f);
+
+/* A gas of the command line. */
+typedef struct {
+    bc_composition composition;
+    bc_gas gas;            /* to compute with: as read, or free of air */
+    bool scattered;        /* the spread of the composition belongs to `gas` */
+    char name[BC_NAME_MAX + 16];
+} loaded_gas;
+
+/* Loads one gas; prints nothing. */
+bc_status gas_load(const char *word, loaded_gas *gas, bc_error *err);
+
+/* Reference state from --at, --saturated, --edition. */
+bc_status state_from(const arguments *a, bc_state *state, bc_error *err);
+
+/* Puts the state, a gas and what is to be said of it into a report. The index of the gas comes back. */
+void report_state_of(report *r, const bc_state *state);
+size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject);
+
+/* Adds a quantity of a subject in the first of `units` that fits, else in its own unit. */
+bc_status report_quantity(report *r, size_t section, size_t gas_index, size_t quantity, const bc_subject *subject,
+                          const arguments *a, bc_error *err);
+
+/* Checks --unit before anything is computed: every unit must exist and fit one of the quantities. */
+bc_status units_check(const arguments *a, const bc_state *state, const size_t quantities[], size_t count, bc_error *err);
+
+/* Renders a report as the options ask; `brief` is the form of `get`. Returns the exit code, `answer` when
+ * everything was written. Closes the report. */
+int answer(report *r, const arguments *a, bool brief, int code);
+
+/* Prints "bluecone: FILE:LINE: cause" to stderr and returns the exit code of the error. */
+int complain(const bc_error *err);
+
+/* Prints a warning line to stderr. */
+void warn(const char *format, ...) BC_PRINTF(1, 2);
+
+int run_get(const arguments *a);
+int run_sheet(const arguments *a);
+int run_list(const arguments *a);
+int run_verify(const arguments *a);
+
+#endif

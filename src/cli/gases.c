@@ -1,0 +1,160 @@
+/* SPDX-License-Identifier: MIT */
+/* gases.c - gases and states of the command line, and what a report says of them. */
+#include "base/error_internal.h"
+#include "base/text.h"
+#include "cli/cli.h"
+
+#include <math.h>
+#include <stdio.h>
+#include <string.h>
+
+#define FACTOR_TOLD 5e-5  /* the mole fraction from which ISO 6976 counts a component at all */
+
+bc_status gas_load(const char *word, loaded_gas *gas, bc_error *err)
+{
+    folders f;
+
+    folders_find(&f);
+    const bc_status status = bc_composition_find(word, f.path, f.count, &gas->composition, err);
+
+    if (status != BC_OK)
+        return status;
+    gas->gas = gas->composition.gas;
+    gas->scattered = gas->composition.has_uncertainty;
+    (void)snprintf(gas->name, sizeof gas->name, "%s", gas->composition.name);
+    return BC_OK;
+}
+
+bc_status state_from(const arguments *a, bc_state *state, bc_error *err)
+{
+    bc_state s = bc_state_default();
+    const char *edition = a->value[OPTION_edition];
+
+    s.saturated = a->value[OPTION_saturated] != NULL;
+    if (edition) {
+        if (strcmp(edition, "1995") != 0 && strcmp(edition, "2016") != 0)
+            return bc_fail(err, BC_ERR_USAGE, "--edition %.20s: ISO 6976 has the editions 1995 and 2016; write one of them", edition);
+        s.edition = strcmp(edition, "1995") == 0 ? 1995 : 2016;
+    }
+    if (a->value[OPTION_at]) {
+        const bc_status status = bc_state_parse(a->value[OPTION_at], &s, err);
+
+        if (status != BC_OK)
+            return status;
+    }
+    *state = s;
+    return BC_OK;
+}
+
+static void warn_state(report *r, const bc_state *state)
+{
+    char text[256];
+
+    if (!bc_state_standard_combustion(state)) {
+        (void)snprintf(text, sizeof text, "ISO 6976:%d has no column for combustion at %.6g C: heats are from the formation balance.",
+                       state->edition, state->combustion_c);
+        report_add_warning(r, text);
+    }
+    if (!bc_state_standard_metering(state)) {
+        (void)snprintf(text, sizeof text, "ISO 6976:%d has no column for metering at %.6g C: summation factors are interpolated%s.",
+                       state->edition, state->metering_c, state->metering_c > 20.0 ? " (extrapolated beyond 20 C)" : "");
+        report_add_warning(r, text);
+    }
+    if (state->edition == 1995 && fabs(state->metering_pa - BC_P0_PA) > 0.5)
+        report_add_warning(r, "The 1995 edition meters at 101.325 kPa only: another pressure follows the 2016 formula.");
+}
+
+void report_state_of(report *r, const bc_state *state)
+{
+    char text[160];
+    const report_state shown = {.present = true, .combustion_c = state->combustion_c, .metering_c = state->metering_c,
+                                .metering_kpa = state->metering_pa * 1e-3, .saturated = state->saturated, .edition = state->edition,
+                                .text = text};
+
+    bc_state_describe(state, text, sizeof text);
+    report_set_state(r, &shown);
+    warn_state(r, state);
+}
+
+/* The species of a gas whose figure has an origin, as a list; "" when there is none. */
+static void list_origin(const bc_subject *s, const unsigned char origins[], bc_origin origin, char *text, size_t size)
+{
+    text[0] = '\0';
+    for (size_t i = 0; i < bc_species_count(); i++) {
+        const size_t used = strlen(text);
+
+        if (s->gas.x[i] > 0.0 && origins[i] == (unsigned char)origin && used + 40 < size)
+            (void)snprintf(text + used, size - used, "%s%s", used ? ", " : "", bc_species_id(i));
+    }
+}
+
+/* A warning whose format has one %s for the gas and one for the species. */
+static void warn_species(report *r, const char *gas, const char *species, const char *what)
+{
+    char text[480];
+
+    if (species[0] == '\0')
+        return;
+    (void)snprintf(text, sizeof text, "%.100s: %s %.240s.", gas, what, species);
+    report_add_warning(r, text);
+}
+
+static void warn_origins(report *r, const char *gas, const bc_subject *s)
+{
+    const bc_reference *reference = s->reference;
+    char species[240];
+
+    if (bc_state_standard_combustion(&reference->state)) {
+        list_origin(s, reference->heat_origin, BC_ORIGIN_FORMATION, species, sizeof species);
+        warn_species(r, gas, species, "not in ISO 6976, heat from the formation balance:");
+    }
+    list_origin(s, reference->heat_origin, BC_ORIGIN_OTHER_EDITION, species, sizeof species);
+    warn_species(r, gas, species, "heat from the other edition of ISO 6976:");
+    list_origin(s, reference->factor_origin, BC_ORIGIN_OTHER_EDITION, species, sizeof species);
+    warn_species(r, gas, species, "summation factor from the other edition of ISO 6976:");
+    list_origin(s, reference->factor_origin, BC_ORIGIN_ESTIMATE, species, sizeof species);
+    warn_species(r, gas, species, "summation factor estimated (virial or homologous), in no edition of ISO 6976:");
+}
+
+static void warn_range(report *r, const char *gas, const bc_subject *s)
+{
+    char text[300];
+
+    if (bc_value_in_range(&s->value))
+        return;
+    (void)snprintf(text, sizeof text, "%.100s: the compression factor %.4f is not above 0.9, the limit of the volume formulas of ISO 6976: figures per m3 are outside its range.",
+                   gas, s->value.z);
+    report_add_warning(r, text);
+}
+
+static void describe_source(const bc_composition *c, char *text, size_t size)
+{
+    if (c->bundled[0] != '\0')
+        (void)snprintf(text, size, "bundled gas %s; %s", c->bundled, c->origin[0] ? c->origin : "no source stated");
+    else if (c->path[0] != '\0' && c->origin[0] != '\0')
+        (void)snprintf(text, size, "%.250s; %s", c->path, c->origin);
+    else
+        (void)snprintf(text, size, "%s", c->path[0] != '\0' ? c->path : "literal");
+}
+
+size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject)
+{
+    const bc_composition *c = &gas->composition;
+    char source[BC_FILE_MAX + 64];
+
+    describe_source(c, source, sizeof source);
+    const size_t index = report_add_gas(r, gas->name, source, c->sum);
+
+    for (size_t i = 0; i < bc_species_count(); i++)
+        if (subject->gas.x[i] > 0.0)
+            report_add_fraction(r, index, bc_species_id(i), subject->gas.x[i]);
+    for (size_t i = 0; i < c->remark_count; i++) {
+        char text[BC_REMARK_BYTES + BC_NAME_MAX];
+
+        (void)snprintf(text, sizeof text, "%.100s: %s", gas->name, c->remarks[i]);
+        report_add_warning(r, text);
+    }
+    warn_origins(r, gas->name, subject);
+    warn_range(r, gas->name, subject);
+    return index;
+}

@@ -1,0 +1,37 @@
+/* SPDX-License-Identifier: MIT */
+/* help.c - the short help, made of the tables of commands and options. */
+#include "cli/cli.h"
+
+#include <stdio.h>
+#include <string.h>
+
+void help_all(void)
+{
+    puts("usage: bluecone COMMAND [OPTIONS] ARGUMENTS\n\n"
+         "What a fuel gas is worth and how it compares: heating values, density, Wobbe\n"
+         "index after ISO 6976, checked against a formation-enthalpy balance.\n");
+    for (size_t i = 0; command_at(i); i++)
+        printf("  %-7s %s\n", command_at(i)->word, command_at(i)->help);
+    puts("\nA GAS is a composition file, a bundled name or a literal:\n"
+         "  bluecone get wobbe-gross methane=92,ethane=5,nitrogen=3\n"
+         "  bluecone sheet pipeline-h --at 25/0\n\n"
+         "bluecone COMMAND --help tells the options; man bluecone tells all.");
+}
+
+void help_command(const command *c)
+{
+    const char *argument = NULL;
+    const char *help = NULL;
+
+    printf("usage: bluecone %s [OPTIONS] %s\n\n%s\n\n", c->word, c->usage, c->help);
+    for (size_t i = 0;; i++) {
+        const char *word = option_word(c, i, &argument, &help);
+        char left[40];
+
+        if (!word)
+            break;
+        (void)snprintf(left, sizeof left, "--%s%s%s", word, argument[0] ? " " : "", argument);
+        printf("  %-17s %s\n", left, help);
+    }
+    printf("\nman bluecone-%s tells more.\n", c->word);
+}

@@ -1,0 +1,18 @@
+/* SPDX-License-Identifier: MIT */
+/* list.h - the lists that need more than a table of texts. */
+#ifndef LIST_H
+#define LIST_H
+
+#include "cli/cli.h"
+
+/* Columns headed by their ids, and one row of texts under them. */
+void list_columns(report *r, size_t table, const char *const ids[], size_t count);
+void list_row(report *r, size_t table, const char *const cells[], size_t count);
+
+/* All bundled gases, or one with its composition and source. */
+bc_status list_gases(report *r, const char *name, bc_error *err);
+
+/* All species, or one with each datum and its source. */
+bc_status list_species(report *r, const char *name, bc_error *err);
+
+#endif

@@ -1,0 +1,98 @@
+/* SPDX-License-Identifier: MIT */
+/* main.c - from the first word to its command. */
+#include "base/error_internal.h"
+#include "base/text.h"
+#include "cli/cli.h"
+
+#include <errno.h>
+#include <signal.h>
+#include <stdarg.h>
+#include <stdio.h>
+#include <string.h>
+
+int complain(const bc_error *err)
+{
+    if (err->file[0] != '\0' && err->line > 0)
+        (void)fprintf(stderr, "bluecone: %s:%d: %s\n", err->file, err->line, err->message);
+    else if (err->file[0] != '\0')
+        (void)fprintf(stderr, "bluecone: %s: %s\n", err->file, err->message);
+    else
+        (void)fprintf(stderr, "bluecone: %s\n", err->message);
+    return bc_exit_code(err->status);
+}
+
+void warn(const char *format, ...)
+{
+    va_list arguments_list;
+
+    (void)fputs("bluecone: ", stderr);
+    va_start(arguments_list, format);
+    (void)vfprintf(stderr, format, arguments_list);
+    va_end(arguments_list);
+    (void)fputc('\n', stderr);
+}
+
+static int refuse_command(const char *word)
+{
+    const command *best = command_at(0);
+    bc_error err;
+
+    for (size_t i = 0; command_at(i); i++)
+        if (bc_text_distance(command_at(i)->word, word) < bc_text_distance(best->word, word))
+            best = command_at(i);
+    char shown[BC_WORD_MAX];
+
+    bc_text_show(shown, sizeof shown, word);
+    (void)bc_fail(&err, BC_ERR_USAGE, "unknown command '%s'; the nearest is '%s'; see bluecone --help", shown, best->word);
+    return complain(&err);
+}
+
+/* What was printed must have arrived: a full disk is a failure, not an answer. */
+static int finish(int code)
+{
+    bc_error err;
+
+    if (fflush(stdout) == 0 && !ferror(stdout))
+        return code;
+    (void)bc_fail(&err, BC_ERR_FILE, "cannot write to standard output: %s", strerror(errno));
+    return complain(&err);
+}
+
+static int run(const command *c, int argc, char **argv)
+{
+    arguments a;
+    bc_error err;
+
+    if (arguments_take(c, argc, argv, &a, &err) != BC_OK)
+        return complain(&err);
+    if (a.value[OPTION_help]) {
+        help_command(c);
+        return 0;
+    }
+    if (a.value[OPTION_version]) {
+        puts("bluecone " BC_VERSION);
+        return 0;
+    }
+    return c->run(&a);
+}
+
+int main(int argc, char **argv)
+{
+    /* a closed pipe is then an error of write() that is told, with its own exit code */
+    (void)signal(SIGPIPE, SIG_IGN);
+    if (argc < 2) {
+        (void)fputs("bluecone: no command given; see bluecone --help\n", stderr);
+        return bc_exit_code(BC_ERR_USAGE);
+    }
+    if (strcmp(argv[1], "--help") == 0 || strcmp(argv[1], "-h") == 0 || strcmp(argv[1], "help") == 0) {
+        help_all();
+        return finish(0);
+    }
+    if (strcmp(argv[1], "--version") == 0) {
+        puts("bluecone " BC_VERSION);
+        return finish(0);
+    }
+    const command *c = command_find(argv[1]);
+
+    return c ? finish(run(c, argc - 1, argv + 1)) : refuse_command(argv[1]);
+}

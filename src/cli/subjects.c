@@ -1,0 +1,111 @@
+/* SPDX-License-Identifier: MIT */
+/* subjects.c - loading and evaluating the gases of a command line. */
+#include "cli/subjects.h"
+
+#include "base/error_internal.h"
+
+#include <stdio.h>
+#include <stdlib.h>
+#include <string.h>
+
+static bc_status evaluate(const subjects *s, subject *each, bc_error *err)
+{
+    const bc_spread *spread = each->loaded.scattered ? &each->loaded.composition.spread : NULL;
+
+    return bc_subject_make(&s->reference, &each->loaded.gas, spread, &each->subject, err);
+}
+
+/* The scatter of the gas with air is not that of the gas without: none is claimed for it. */
+static bc_status take_air_out(subject *to, const loaded_gas *from, bc_error *err)
+{
+    double air = 0.0;
+
+    to->loaded = *from;
+    const bc_status status = bc_gas_air_free(&from->gas, &to->loaded.gas, &air, err);
+
+    if (status != BC_OK)
+        return status;
+    to->air_free = true;
+    to->loaded.scattered = false;
+    (void)snprintf(to->loaded.name, sizeof to->loaded.name, "%.120s, air-free", from->name);
+    return BC_OK;
+}
+
+static bool holds_oxygen(const loaded_gas *gas)
+{
+    size_t oxygen = 0;
+
+    return bc_species_find("oxygen", &oxygen, NULL) == BC_OK && gas->gas.x[oxygen] > 0.0;
+}
+
+static bc_status load(subjects *s, const char *word, bool air_free, bool both, bc_error *err)
+{
+    subject *each = &s->each[s->count];
+    bc_status status = gas_load(word, &each->loaded, err);
+
+    if (status != BC_OK)
+        return status;
+    if (air_free && holds_oxygen(&each->loaded)) {
+        subject *pure = both ? each + 1 : each;
+        const loaded_gas read = each->loaded;
+
+        status = take_air_out(pure, &read, err);
+        if (status == BC_OK && both)
+            status = evaluate(s, pure, err);
+    }
+    if (status == BC_OK)
+        status = evaluate(s, each, err);
+    s->count += each[0].air_free || !each[1].air_free ? 1 : 2;
+    return status;
+}
+
+bc_status subjects_open(subjects *s, const arguments *a, const char *const words[], size_t count, bool both, bc_error *err)
+{
+    memset(s, 0, sizeof *s);
+    bc_status status = state_from(a, &s->state, err);
+
+    if (status == BC_OK)
+        status = bc_reference_at(&s->state, &s->reference, err);
+    if (status != BC_OK)
+        return status;
+    s->each = calloc(2 * count + 1, sizeof *s->each); /* each gas may be followed by itself without air */
+    if (!s->each)
+        return bc_fail(err, BC_ERR_MEMORY, "not enough memory for %zu gases", count);
+    for (size_t i = 0; i < count && status == BC_OK; i++)
+        status = load(s, words[i], a->value[OPTION_air_free] != NULL, both, err);
+    return status;
+}
+
+void subjects_close(subjects *s)
+{
+    free(s->each);
+    s->each = NULL;
+    s->count = 0;
+}
+
+/* A stated composition uncertainty or only that of the tables: a figure alone does not tell. */
+void subjects_tell_uncertainty(const subjects *s, report *r)
+{
+    char text[400] = "No uncertainty of the composition is stated for ";
+    size_t told = 0;
+
+    for (size_t i = 0; i < s->count; i++) {
+        const size_t used = strlen(text);
+
+        if (!s->each[i].subject.spread && used + 150 < sizeof text)
+            (void)snprintf(text + used, sizeof text - used, "%s%.100s", told++ ? ", " : "", s->each[i].loaded.name);
+    }
+    if (told == 0)
+        return;
+    const size_t used = strlen(text);
+
+    (void)snprintf(text + used, sizeof text - used, ": u is that of the tables alone.");
+    report_add_warning(r, text);
+}
+
+void subjects_report(const subjects *s, report *r)
+{
+    report_state_of(r, &s->state);
+    for (size_t i = 0; i < s->count; i++)
+        (void)report_gas_of(r, &s->each[i].loaded, &s->each[i].subject);
+}
