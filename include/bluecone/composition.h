@@ -65,12 +65,12 @@ typedef struct {
     double sum;               /* of the entries before normalising, fraction of one */
     bool has_uncertainty;     /* [uncertainty] was given */
     bool air_suspected;       /* oxygen where this kind of gas has none */
-    size_t entry_count;
-    bc_entry entries[BC_ENTRY_MAX];
     bc_gas gas;               /* what all values are computed from */
-    bc_spread spread;         /* its uncertainty; count 0 when none was stated */
     size_t remark_count;
     char remarks[BC_REMARK_MAX][BC_REMARK_BYTES]; /* what was changed or is strange, as sentences */
+    size_t entry_count;
+    bc_entry entries[BC_ENTRY_MAX];
+    bc_spread spread;         /* its uncertainty; count 0 when none was stated */
 } bc_composition;
 
 /* Reads a composition file (bluecone-composition(5)).

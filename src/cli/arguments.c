@@ -117,7 +117,10 @@ static bc_status take_short(const command *c, arguments *a, const char *word, co
         return store(c, a, OPTION_output, word[1] != '\0' ? word + 1 : NULL, next, used, err);
     if (strcmp(word, "h") == 0)
         return store(c, a, OPTION_help, NULL, NULL, used, err);
-    return refuse_option(c, word, err);
+    char shown[BC_WORD_MAX];
+
+    bc_text_show(shown, sizeof shown, word);
+    return bc_fail(err, BC_ERR_USAGE, "'%s' has no option -%s; the short ones are -o FILE and -h; see bluecone %s --help", c->word, shown, c->word);
 }
 
 static bc_status take_word(const command *c, arguments *a, const char *word, bc_error *err)

@@ -7,15 +7,24 @@
 #include <math.h>
 #include <stdio.h>
 #include <string.h>
+#include <unistd.h>
 
-#define FACTOR_TOLD 5e-5  /* the mole fraction from which ISO 6976 counts a component at all */
+#define WATER_TOLD  1e-6 /* relative: a gas saturated by ourselves is not more than saturated */
+#define ORIGIN_TOLD 1e-6 /* a smaller mole fraction moves no figure in its fifth digit, whatever its heat */
+
+/* A file is read as it is; only a name needs the folders of bundled gases. */
+static bc_status find(const char *word, bc_composition *composition, bc_error *err)
+{
+    folders f = {.count = 0};
+
+    if (access(word, F_OK) != 0)
+        folders_find(&f);
+    return bc_composition_find(word, f.path, f.count, composition, err);
+}
 
 bc_status gas_load(const char *word, loaded_gas *gas, bc_error *err)
 {
-    folders f;
-
-    folders_find(&f);
-    const bc_status status = bc_composition_find(word, f.path, f.count, &gas->composition, err);
+    const bc_status status = find(word, &gas->composition, err);
 
     if (status != BC_OK)
         return status;
@@ -83,7 +92,7 @@ static void list_origin(const bc_subject *s, const unsigned char origins[], bc_o
     for (size_t i = 0; i < bc_species_count(); i++) {
         const size_t used = strlen(text);
 
-        if (s->gas.x[i] > 0.0 && origins[i] == (unsigned char)origin && used + 40 < size)
+        if (s->gas.x[i] >= ORIGIN_TOLD && origins[i] == (unsigned char)origin && used + 40 < size)
             (void)snprintf(text + used, size - used, "%s%s", used ? ", " : "", bc_species_id(i));
     }
 }
@@ -127,6 +136,24 @@ static void warn_range(report *r, const char *gas, const bc_subject *s)
     report_add_warning(r, text);
 }
 
+/* Water that cannot stay vapour where the gas is metered: the formulas count it as vapour all the same. */
+static void warn_wet(report *r, const char *gas, const bc_subject *s)
+{
+    const bc_state *state = &s->reference->state;
+    bc_gas saturated;
+    size_t water = 0;
+    char text[400];
+
+    if (bc_species_find("water", &water, NULL) != BC_OK || s->gas.x[water] <= 0.0
+        || bc_gas_saturated(&s->gas, state->metering_c + 273.15, state->metering_pa, &saturated, NULL) != BC_OK
+        || s->gas.x[water] <= saturated.x[water] * (1.0 + WATER_TOLD))
+        return;
+    (void)snprintf(text, sizeof text, "%.100s: holds %.4g mol-%% water, more than the %.4g mol-%% that stay vapour at the metering state: "
+                   "figures per m3 count all of it as vapour; --saturated meters the gas without the excess.",
+                   gas, 100.0 * s->gas.x[water], 100.0 * saturated.x[water]);
+    report_add_warning(r, text);
+}
+
 static void describe_source(const bc_composition *c, char *text, size_t size)
 {
     if (c->bundled[0] != '\0')
@@ -156,5 +183,6 @@ size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject
     }
     warn_origins(r, gas->name, subject);
     warn_range(r, gas->name, subject);
+    warn_wet(r, gas->name, subject);
     return index;
 }

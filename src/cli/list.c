@@ -96,13 +96,13 @@ static bc_status list_states(report *r, const char *name, bc_error *err)
 #define STATE(text, where, source) {{text, where, source, NULL, NULL}},
 #include "data/states.def"
     };
-    const size_t table = report_add_table(r, "states", "Reference states: combustion/metering temperature in C, metering at 101.325 kPa");
+    const size_t table = report_add_table(r, "states", "Reference states: combustion/metering temperature in C, metering at 101.325 kPa unless written");
 
     list_columns(r, table, COLUMNS, BC_COUNT(COLUMNS));
     return list_texts(r, table, ROWS, BC_COUNT(ROWS), BC_COUNT(COLUMNS), name, err);
 }
 
-/* Commands and options are listed for the completion of the shell. */
+/* Commands, options and areas of checks are listed for the completion of the shell. */
 static bc_status list_commands(report *r, const char *name, bc_error *err)
 {
     static const char *const COLUMNS[] = {"command", "arguments", "meaning"};
@@ -144,12 +144,39 @@ static bc_status list_options(report *r, const char *name, bc_error *err)
     }
 }
 
+/* The areas of `verify`, in the order of the list of checks, whose rows of an area need not stand together. */
+static bc_status list_areas(report *r, const char *name, bc_error *err)
+{
+    static const char *const COLUMNS[] = {"area", "values"};
+    const size_t table = report_add_table(r, "areas", "Areas of bluecone verify");
+    bool found = false;
+
+    list_columns(r, table, COLUMNS, BC_COUNT(COLUMNS));
+    for (size_t i = 0; i < bc_check_count(); i++) {
+        size_t first = 0;
+        size_t values = 0;
+
+        for (size_t j = bc_check_count(); j-- > 0;)
+            if (strcmp(bc_check_area(j), bc_check_area(i)) == 0) {
+                first = j;
+                values++;
+            }
+        if (first != i || (name && strcmp(name, bc_check_area(i)) != 0))
+            continue;
+        report_add_text(r, table, bc_check_area(i));
+        report_add_number(r, table, (double)values, 0);
+        found = true;
+    }
+    return found ? BC_OK : bc_fail(err, BC_ERR_USAGE, "there is no area '%.40s' of checks; see bluecone list areas", name);
+}
+
 static const struct {
     const char *word;
     bc_status (*list)(report *, const char *, bc_error *);
 } TOPICS[] = {
     {"gases", list_gases},   {"species", list_species}, {"quantities", list_quantities}, {"units", list_units},
     {"methods", list_methods}, {"states", list_states}, {"commands", list_commands},     {"options", list_options},
+    {"areas", list_areas},
 };
 
 static bc_status run_topic(report *r, const arguments *a, bc_error *err)

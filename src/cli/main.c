@@ -47,12 +47,13 @@ static int refuse_command(const char *word)
     return complain(&err);
 }
 
-/* What was printed must have arrived: a full disk is a failure, not an answer. */
+/* What was printed must have arrived: a full disk is a failure, not an answer. A renderer that found it
+ * out has told already. */
 static int finish(int code)
 {
     bc_error err;
 
-    if (fflush(stdout) == 0 && !ferror(stdout))
+    if ((fflush(stdout) == 0 && !ferror(stdout)) || code == bc_exit_code(BC_ERR_FILE))
         return code;
     (void)bc_fail(&err, BC_ERR_FILE, "cannot write to standard output: %s", strerror(errno));
     return complain(&err);

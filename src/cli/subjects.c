@@ -16,18 +16,19 @@ static bc_status evaluate(const subjects *s, subject *each, bc_error *err)
 }
 
 /* The scatter of the gas with air is not that of the gas without: none is claimed for it. */
-static bc_status take_air_out(subject *to, const loaded_gas *from, bc_error *err)
+static bc_status take_air_out(subject *each, bc_error *err)
 {
-    double air = 0.0;
-
-    to->loaded = *from;
-    const bc_status status = bc_gas_air_free(&from->gas, &to->loaded.gas, &air, err);
+    char name[sizeof each->loaded.name];
+    bc_gas pure;
+    const bc_status status = bc_gas_air_free(&each->loaded.gas, &pure, NULL, err);
 
     if (status != BC_OK)
         return status;
-    to->air_free = true;
-    to->loaded.scattered = false;
-    (void)snprintf(to->loaded.name, sizeof to->loaded.name, "%.120s, air-free", from->name);
+    each->loaded.gas = pure;
+    each->air_free = true;
+    each->loaded.scattered = false;
+    (void)snprintf(name, sizeof name, "%.120s, air-free", each->loaded.name);
+    memcpy(each->loaded.name, name, sizeof name);
     return BC_OK;
 }
 
@@ -40,23 +41,19 @@ static bool holds_oxygen(const loaded_gas *gas)
 
 static bc_status load(subjects *s, const char *word, bool air_free, bool both, bc_error *err)
 {
-    subject *each = &s->each[s->count];
+    subject *each = &s->each[s->count++];
     bc_status status = gas_load(word, &each->loaded, err);
 
-    if (status != BC_OK)
-        return status;
-    if (air_free && holds_oxygen(&each->loaded)) {
-        subject *pure = both ? each + 1 : each;
-        const loaded_gas read = each->loaded;
-
-        status = take_air_out(pure, &read, err);
-        if (status == BC_OK && both)
-            status = evaluate(s, pure, err);
-    }
     if (status == BC_OK)
         status = evaluate(s, each, err);
-    s->count += each[0].air_free || !each[1].air_free ? 1 : 2;
-    return status;
+    if (status != BC_OK || !air_free || !holds_oxygen(&each->loaded))
+        return status;
+    if (both) {
+        s->each[s->count] = *each;
+        each = &s->each[s->count++];
+    }
+    status = take_air_out(each, err);
+    return status == BC_OK ? evaluate(s, each, err) : status;
 }
 
 bc_status subjects_open(subjects *s, const arguments *a, const char *const words[], size_t count, bool both, bc_error *err)

@@ -113,7 +113,7 @@ static bc_status check_area(const char *area, bc_error *err)
             best = bc_check_area(i);
     }
     bc_text_show(shown, sizeof shown, area);
-    return bc_fail(err, BC_ERR_USAGE, "unknown area '%s' of checks; the nearest is '%s' (bluecone list methods; verify without an area runs all)",
+    return bc_fail(err, BC_ERR_USAGE, "unknown area '%s' of checks; the nearest is '%s' (bluecone list areas; verify without an area runs all)",
                    shown, best);
 }
 
@@ -125,7 +125,7 @@ static size_t conclude(report *r, const tallies *t)
     size_t failed = 0;
 
     for (size_t i = 0; i < t->count; i++) {
-        (void)snprintf(text, sizeof text, "%zu values, %zu outside their tolerance", t->each[i].run, t->each[i].failed);
+        (void)snprintf(text, sizeof text, "%s: %zu values, %zu outside their tolerance", t->each[i].area, t->each[i].run, t->each[i].failed);
         report_add_check(r, t->each[i].area, t->each[i].failed == 0, text);
         run += t->each[i].run;
         failed += t->each[i].failed;

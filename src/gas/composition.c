@@ -20,7 +20,9 @@
 
 void composition_clear(bc_composition *c)
 {
-    memset(c, 0, sizeof *c);
+    /* entries and scatter are 150 kB and come last: they are cleared one by one as they are used */
+    memset(c, 0, offsetof(bc_composition, entries));
+    c->spread.count = 0;
     c->measured_at_k = 288.15;
     c->measured_at_pa = 101325.0;
 }
@@ -155,6 +157,7 @@ static void add_source(bc_composition *c, const bc_gas *gas, const bc_entry *ent
     const double closed = c->closure == BC_CLOSURE_NONE ? 0.0 : 1.0;
     double *dx = c->spread.dx[c->spread.count++];
 
+    memset(dx, 0, sizeof c->spread.dx[0]);
     for (size_t j = 0; j < SPECIES_COUNT; j++) {
         dx[j] = w * (entry->parts[j] - closed * gas->x[j]);
         if (rest)

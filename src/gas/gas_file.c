@@ -161,18 +161,23 @@ static const struct {
     {"measured_at", take_measured_at}, {"correlation", take_correlation},
 };
 
-static bc_status take_gas_key(reader *r, const bc_ini_entry *e)
+static bc_status refuse_key(const reader *r, const bc_ini_entry *e)
 {
     size_t best = 0;
 
-    for (size_t i = 0; i < BC_COUNT(GAS_KEYS); i++) {
-        if (bc_text_same(GAS_KEYS[i].key, e->key))
-            return GAS_KEYS[i].take(r, e);
+    for (size_t i = 0; i < BC_COUNT(GAS_KEYS); i++)
         if (bc_text_distance(GAS_KEYS[i].key, e->key) < bc_text_distance(GAS_KEYS[best].key, e->key))
             best = i;
-    }
     return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown key '%s' in [gas]; the nearest known one is '%s'", e->key,
                       GAS_KEYS[best].key);
+}
+
+static bc_status take_gas_key(reader *r, const bc_ini_entry *e)
+{
+    for (size_t i = 0; i < BC_COUNT(GAS_KEYS); i++)
+        if (bc_text_same(GAS_KEYS[i].key, e->key))
+            return GAS_KEYS[i].take(r, e);
+    return refuse_key(r, e);
 }
 
 /* A share with an optional unit of its own behind it: "4.85", "120 ppm". */
@@ -216,6 +221,7 @@ static bc_status take_component(reader *r, const bc_ini_entry *e)
 
     if (c->entry_count == BC_ENTRY_MAX)
         return refuse(r, e, "there are more than 96 components; join some");
+    memset(entry, 0, sizeof *entry);
     memcpy(entry->word, e->key, sizeof entry->word);
     entry->line = e->line;
     char section[BC_INI_KEY_MAX + 8];

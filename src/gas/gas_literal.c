@@ -98,6 +98,7 @@ static bc_status take_entry(bc_composition *c, const char **p, bc_error *err)
 
     if (c->entry_count == BC_ENTRY_MAX)
         return bc_fail(err, BC_ERR_INPUT, "more than %d components; join some", BC_ENTRY_MAX);
+    memset(entry, 0, sizeof *entry);
     if (!equals || !bc_text_copy(entry->word, sizeof entry->word, *p, (size_t)(equals - *p)))
         return bc_fail(err, BC_ERR_INPUT, "a component is written name=share, as in methane=92,ethane=8");
     bc_status status = composition_resolve(c, entry, err);

@@ -64,21 +64,26 @@ const bc_quantity *bc_quantity_at(size_t index)
     return index < BC_COUNT(ROWS) ? &ROWS[index].shown : NULL;
 }
 
-bc_status bc_quantity_find(const char *id, size_t *index, bc_error *err)
+static bc_status refuse_id(const char *id, bc_error *err)
 {
     size_t best = 0;
     char shown[BC_WORD_MAX];
 
-    for (size_t i = 0; i < BC_COUNT(ROWS); i++) {
+    for (size_t i = 0; i < BC_COUNT(ROWS); i++)
+        if (bc_text_distance(ROWS[i].shown.id, id) < bc_text_distance(ROWS[best].shown.id, id))
+            best = i;
+    bc_text_show(shown, sizeof shown, id);
+    return bc_fail(err, BC_ERR_USAGE, "unknown quantity '%s'; the nearest known one is '%s' (bluecone list quantities)", shown, ROWS[best].shown.id);
+}
+
+bc_status bc_quantity_find(const char *id, size_t *index, bc_error *err)
+{
+    for (size_t i = 0; i < BC_COUNT(ROWS); i++)
         if (bc_text_same(ROWS[i].shown.id, id)) {
             *index = i;
             return BC_OK;
         }
-        if (bc_text_distance(ROWS[i].shown.id, id) < bc_text_distance(ROWS[best].shown.id, id))
-            best = i;
-    }
-    bc_text_show(shown, sizeof shown, id);
-    return bc_fail(err, BC_ERR_USAGE, "unknown quantity '%s'; the nearest known one is '%s' (bluecone list quantities)", shown, ROWS[best].shown.id);
+    return refuse_id(id, err);
 }
 
 static bc_status formation_gross(const bc_subject *s, double *value, bc_error *err)
