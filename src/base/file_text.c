@@ -89,7 +89,7 @@ static bc_status read_open_file(int fd, const char *path, size_t limit, char **t
 
     if (status != BC_OK)
         return status;
-    char *buffer = malloc(size + 1);
+    char *buffer = calloc(1, size + 1);
 
     if (!buffer)
         return bc_fail_at(err, BC_ERR_MEMORY, path, 0, "not enough memory to read the file");

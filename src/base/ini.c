@@ -144,7 +144,7 @@ static bc_status take_line(scan *s, const char *text, size_t length)
             return refuse(s, "the line holds a control character; remove it");
     const char *start = bc_text_skip_space(text);
 
-    if (*start == '\0')
+    if (length == 0 || *start == '\0')
         return BC_OK;
     if (text[length - 1] == '\\') /* of a remark, too: iniparser joins lines before it looks at them */
         return refuse(s, "the line ends in a backslash, which would join it with the next; remove it");

@@ -160,7 +160,7 @@ bc_status bc_number_prefix(const char *text, double *value, const char **rest, b
 
 bc_status bc_number_parse(const char *text, double *value, bc_error *err)
 {
-    const char *rest = NULL;
+    const char *rest = "";
     double v = 0.0;
     const bc_status status = bc_number_prefix(text, &v, &rest, err);
 

@@ -93,17 +93,22 @@ static size_t smallest(size_t a, size_t b, size_t c)
     return ab < c ? ab : c;
 }
 
-/* One more row of the edit table: rows i-2, i-1 are given, row i is filled. */
-static void next_row(const char *a, size_t i, const char *b, size_t n, size_t before[], const size_t last[],
-                     size_t row[])
+/* Three rows of the edit table: the one to fill and the two above it. */
+typedef struct {
+    const size_t *before, *last;
+    size_t *row;
+} edit_rows;
+
+/* Row i: the word a up to its i-th character against every beginning of b. */
+static void fill_row(const char *a, size_t i, const char *b, size_t n, const edit_rows *r)
 {
-    row[0] = i;
+    r->row[0] = i;
     for (size_t j = 1; j <= n; j++) {
         const size_t cost = a[i - 1] == b[j - 1] ? 0 : 1;
 
-        row[j] = smallest(last[j] + 1, row[j - 1] + 1, last[j - 1] + cost);
+        r->row[j] = smallest(r->last[j] + 1, r->row[j - 1] + 1, r->last[j - 1] + cost);
         if (i > 1 && j > 1 && a[i - 1] == b[j - 2] && a[i - 2] == b[j - 1])
-            row[j] = smallest(row[j], before[j - 2] + 1, row[j]);
+            r->row[j] = smallest(r->row[j], r->before[j - 2] + 1, r->row[j]);
     }
 }
 
@@ -117,7 +122,10 @@ size_t bc_text_distance(const char *a, const char *b)
         return BC_WORD_MAX;
     for (size_t j = 0; j <= n; j++)
         rows[0][j] = j;
-    for (size_t i = 1; i <= m; i++)
-        next_row(a, i, b, n, rows[(i + 1) % 3], rows[(i - 1) % 3], rows[i % 3]);
+    for (size_t i = 1; i <= m; i++) {
+        const edit_rows around = {rows[(i + 1) % 3], rows[(i - 1) % 3], rows[i % 3]};
+
+        fill_row(a, i, b, n, &around);
+    }
     return rows[m % 3][n];
 }

@@ -158,8 +158,8 @@ bc_status bc_measure_parse(const char *text, const char *like, const char *bare,
 {
     const char *rest = NULL;
     double value = 0.0;
-    bc_unit wanted;
-    bc_unit unit;
+    bc_unit wanted = {.factor = 1.0};
+    bc_unit unit = {.factor = 1.0};
     bc_status status = bc_number_prefix(text, &value, &rest, err);
 
     if (status != BC_OK)

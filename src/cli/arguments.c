@@ -80,55 +80,62 @@ static size_t find_option(const command *c, const char *word, size_t length)
     return OPTION_COUNT;
 }
 
-/* Stores an option; `next` is the following word of the line or NULL; *used tells that it was taken. */
-static bc_status store(const command *c, arguments *a, size_t option, const char *inline_value, const char *next, bool *used, bc_error *err)
+/* Where an option's value may stand: behind its word, or as the next word of the line (NULL: none). */
+typedef struct {
+    const char *behind, *next;
+    bool used; /* the next word was taken */
+} place;
+
+static bc_status store(const command *c, arguments *a, size_t option, place *p, bc_error *err)
 {
     const option_row *row = &OPTIONS[option];
     const bool wants = row->argument[0] != '\0';
 
-    *used = false;
     if (a->value[option])
         return bc_fail(err, BC_ERR_USAGE, "--%s stands twice; keep one of them", row->word);
-    if (!wants && inline_value)
+    if (!wants && p->behind)
         return bc_fail(err, BC_ERR_USAGE, "--%s takes no value", row->word);
-    if (wants && !inline_value && !next)
+    if (wants && !p->behind && !p->next)
         return bc_fail(err, BC_ERR_USAGE, "--%s needs a value, %s; see bluecone %s --help", row->word, row->argument, c->word);
-    *used = wants && !inline_value;
-    a->value[option] = !wants ? "" : inline_value ? inline_value : next;
+    p->used = wants && !p->behind;
+    if (!wants)
+        a->value[option] = "";
+    else
+        a->value[option] = p->behind ? p->behind : p->next;
     return BC_OK;
 }
 
-static bc_status take_long(const command *c, arguments *a, const char *word, const char *next, bool *used, bc_error *err)
+static bc_status take_long(const command *c, arguments *a, const char *word, place *p, bc_error *err)
 {
     const char *equals = strchr(word, '=');
     const size_t option = find_option(c, word, equals ? (size_t)(equals - word) : strlen(word));
 
-    *used = false;
     if (option == OPTION_COUNT)
         return refuse_option(c, word, err);
-    return store(c, a, option, equals ? equals + 1 : NULL, next, used, err);
+    p->behind = equals ? equals + 1 : NULL;
+    return store(c, a, option, p, err);
 }
 
 /* -o FILE and -h are the only short ones. */
-static bc_status take_short(const command *c, arguments *a, const char *word, const char *next, bool *used, bc_error *err)
+static bc_status take_short(const command *c, arguments *a, const char *word, place *p, bc_error *err)
 {
-    *used = false;
-    if (word[0] == 'o')
-        return store(c, a, OPTION_output, word[1] != '\0' ? word + 1 : NULL, next, used, err);
+    if (word[0] == 'o') {
+        p->behind = word[1] != '\0' ? word + 1 : NULL;
+        return store(c, a, OPTION_output, p, err);
+    }
     if (strcmp(word, "h") == 0)
-        return store(c, a, OPTION_help, NULL, NULL, used, err);
+        return store(c, a, OPTION_help, p, err);
     char shown[BC_WORD_MAX];
 
     bc_text_show(shown, sizeof shown, word);
     return bc_fail(err, BC_ERR_USAGE, "'%s' has no option -%s; the short ones are -o FILE and -h; see bluecone %s --help", c->word, shown, c->word);
 }
 
-static bc_status take_word(const command *c, arguments *a, const char *word, bc_error *err)
+static bc_status take_word(arguments *a, const char *word, bc_error *err)
 {
     if (a->argument_count == ARGUMENTS_MAX)
         return bc_fail(err, BC_ERR_USAGE, "more than %d arguments", ARGUMENTS_MAX);
     a->argument[a->argument_count++] = word;
-    (void)c;
     return BC_OK;
 }
 
@@ -153,21 +160,20 @@ bc_status arguments_take(const command *c, int argc, char **argv, arguments *a, 
     a->command = c->word;
     for (int i = 1; i < argc; i++) {
         const char *word = argv[i];
-        const char *next = i + 1 < argc ? argv[i + 1] : NULL;
+        place p = {NULL, i + 1 < argc ? argv[i + 1] : NULL, false};
         bc_status status = BC_OK;
-        bool used = false;
 
         if (words_only || word[0] != '-' || word[1] == '\0')
-            status = take_word(c, a, word, err);
+            status = take_word(a, word, err);
         else if (strcmp(word, "--") == 0)
             words_only = true;
         else if (word[1] == '-')
-            status = take_long(c, a, word + 2, next, &used, err);
+            status = take_long(c, a, word + 2, &p, err);
         else
-            status = take_short(c, a, word + 1, next, &used, err);
+            status = take_short(c, a, word + 1, &p, err);
         if (status != BC_OK)
             return status;
-        i += used;
+        i += p.used;
     }
     return check_count(c, a, err);
 }

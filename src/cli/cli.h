@@ -62,6 +62,8 @@ typedef struct {
     bc_composition composition;
     bc_gas gas;            /* to compute with: as read, or free of air */
     bool scattered;        /* the spread of the composition belongs to `gas` */
+    double air;            /* share of the gas as read that was taken out as air; 0 for none */
+    bool repeated;         /* the gas before it in a report is the same with its air */
     char name[BC_NAME_MAX + 16];
 } loaded_gas;
 
@@ -75,9 +77,14 @@ bc_status state_from(const arguments *a, bc_state *state, bc_error *err);
 void report_state_of(report *r, const bc_state *state);
 size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject);
 
-/* Adds a quantity of a subject in the first of `units` that fits, else in its own unit. */
-bc_status report_quantity(report *r, size_t section, size_t gas_index, size_t quantity, const bc_subject *subject,
-                          const arguments *a, bc_error *err);
+/* Where a result goes: section and gas of a report. */
+typedef struct {
+    report *r;
+    size_t section, gas;
+} slot;
+
+/* Adds a quantity of a subject in the first unit of --unit that fits, else in its own. */
+bc_status report_quantity(const slot *where, size_t quantity, const bc_subject *subject, const arguments *a, bc_error *err);
 
 /* Checks --unit before anything is computed: every unit must exist and fit one of the quantities. */
 bc_status units_check(const arguments *a, const bc_state *state, const size_t quantities[], size_t count, bc_error *err);

@@ -30,6 +30,8 @@ bc_status gas_load(const char *word, loaded_gas *gas, bc_error *err)
         return status;
     gas->gas = gas->composition.gas;
     gas->scattered = gas->composition.has_uncertainty;
+    gas->air = 0.0;
+    gas->repeated = false;
     (void)snprintf(gas->name, sizeof gas->name, "%s", gas->composition.name);
     return BC_OK;
 }
@@ -164,6 +166,25 @@ static void describe_source(const bc_composition *c, char *text, size_t size)
         (void)snprintf(text, size, "%s", c->path[0] != '\0' ? c->path : "literal");
 }
 
+/* What was done to the composition as read. The last remark on a gas with strange oxygen advises to take
+ * the air out: where that was done, it is said instead. */
+static void warn_remarks(report *r, const loaded_gas *gas)
+{
+    const bc_composition *c = &gas->composition;
+    const size_t advice = gas->air > 0.0 && c->air_suspected ? 1 : 0;
+    char text[BC_REMARK_BYTES + BC_NAME_MAX];
+
+    for (size_t i = 0; i + advice < c->remark_count && !gas->repeated; i++) {
+        (void)snprintf(text, sizeof text, "%.100s: %s", gas->name, c->remarks[i]);
+        report_add_warning(r, text);
+    }
+    if (gas->air > 0.0) {
+        (void)snprintf(text, sizeof text, "%.100s: %.3g %% of the gas taken out as air, all its oxygen with the nitrogen and argon of air.",
+                       gas->name, 100.0 * gas->air);
+        report_add_warning(r, text);
+    }
+}
+
 size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject)
 {
     const bc_composition *c = &gas->composition;
@@ -175,13 +196,9 @@ size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject
     for (size_t i = 0; i < bc_species_count(); i++)
         if (subject->gas.x[i] > 0.0)
             report_add_fraction(r, index, bc_species_id(i), subject->gas.x[i]);
-    for (size_t i = 0; i < c->remark_count; i++) {
-        char text[BC_REMARK_BYTES + BC_NAME_MAX];
-
-        (void)snprintf(text, sizeof text, "%.100s: %s", gas->name, c->remarks[i]);
-        report_add_warning(r, text);
-    }
-    warn_origins(r, gas->name, subject);
+    warn_remarks(r, gas);
+    if (!gas->repeated)
+        warn_origins(r, gas->name, subject);
     warn_range(r, gas->name, subject);
     warn_wet(r, gas->name, subject);
     return index;

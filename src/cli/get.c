@@ -37,7 +37,8 @@ static bc_status fill(report *r, const subjects *s, const arguments *a, const si
     subjects_report(s, r);
     for (size_t i = 0; i < s->count; i++)
         for (size_t j = 0; j < count; j++) {
-            const bc_status status = report_quantity(r, section, i, quantities[j], &s->each[i].subject, a, err);
+            const slot where = {r, section, i};
+            const bc_status status = report_quantity(&where, quantities[j], &s->each[i].subject, a, err);
 
             if (status != BC_OK)
                 return status;

@@ -64,13 +64,18 @@ typedef struct {
     const char *cells[5];
 } text_row;
 
-static bc_status list_texts(report *r, size_t table, const text_row rows[], size_t count, size_t columns, const char *name, bc_error *err)
+typedef struct {
+    const text_row *rows;
+    size_t count, columns;
+} text_rows;
+
+static bc_status list_texts(report *r, size_t table, const text_rows *texts, const char *name, bc_error *err)
 {
     bool found = false;
 
-    for (size_t i = 0; i < count; i++)
-        if (!name || bc_text_same(rows[i].cells[0], name)) {
-            list_row(r, table, rows[i].cells, columns);
+    for (size_t i = 0; i < texts->count; i++)
+        if (!name || bc_text_same(texts->rows[i].cells[0], name)) {
+            list_row(r, table, texts->rows[i].cells, texts->columns);
             found = true;
         }
     return found ? BC_OK : bc_fail(err, BC_ERR_USAGE, "there is no '%.40s' in this list; see the whole list without a name", name);
@@ -86,7 +91,9 @@ static bc_status list_methods(report *r, const char *name, bc_error *err)
     const size_t table = report_add_table(r, "methods", "Methods");
 
     list_columns(r, table, COLUMNS, BC_COUNT(COLUMNS));
-    return list_texts(r, table, ROWS, BC_COUNT(ROWS), BC_COUNT(COLUMNS), name, err);
+    const text_rows texts = {ROWS, BC_COUNT(ROWS), BC_COUNT(COLUMNS)};
+
+    return list_texts(r, table, &texts, name, err);
 }
 
 static bc_status list_states(report *r, const char *name, bc_error *err)
@@ -99,7 +106,9 @@ static bc_status list_states(report *r, const char *name, bc_error *err)
     const size_t table = report_add_table(r, "states", "Reference states: combustion/metering temperature in C, metering at 101.325 kPa unless written");
 
     list_columns(r, table, COLUMNS, BC_COUNT(COLUMNS));
-    return list_texts(r, table, ROWS, BC_COUNT(ROWS), BC_COUNT(COLUMNS), name, err);
+    const text_rows texts = {ROWS, BC_COUNT(ROWS), BC_COUNT(COLUMNS)};
+
+    return list_texts(r, table, &texts, name, err);
 }
 
 /* Commands, options and areas of checks are listed for the completion of the shell. */

@@ -6,31 +6,8 @@
 
 #include <errno.h>
 #include <signal.h>
-#include <stdarg.h>
 #include <stdio.h>
 #include <string.h>
-
-int complain(const bc_error *err)
-{
-    if (err->file[0] != '\0' && err->line > 0)
-        (void)fprintf(stderr, "bluecone: %s:%d: %s\n", err->file, err->line, err->message);
-    else if (err->file[0] != '\0')
-        (void)fprintf(stderr, "bluecone: %s: %s\n", err->file, err->message);
-    else
-        (void)fprintf(stderr, "bluecone: %s\n", err->message);
-    return bc_exit_code(err->status);
-}
-
-void warn(const char *format, ...)
-{
-    va_list arguments_list;
-
-    (void)fputs("bluecone: ", stderr);
-    va_start(arguments_list, format);
-    (void)vfprintf(stderr, format, arguments_list);
-    va_end(arguments_list);
-    (void)fputc('\n', stderr);
-}
 
 static int refuse_command(const char *word)
 {

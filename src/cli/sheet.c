@@ -23,7 +23,8 @@ static const struct {
 static bc_status add_quantity(report *r, size_t section, const subjects *s, size_t quantity, const arguments *a, bc_error *err)
 {
     for (size_t i = 0; i < s->count; i++) {
-        const bc_status status = report_quantity(r, section, i, quantity, &s->each[i].subject, a, err);
+        const slot where = {r, section, i};
+        const bc_status status = report_quantity(&where, quantity, &s->each[i].subject, a, err);
 
         if (status != BC_OK && status != BC_ERR_RANGE)
             return status;

@@ -20,14 +20,14 @@ static bc_status take_air_out(subject *each, bc_error *err)
 {
     char name[sizeof each->loaded.name];
     bc_gas pure;
-    const bc_status status = bc_gas_air_free(&each->loaded.gas, &pure, NULL, err);
+    const bc_status status = bc_gas_air_free(&each->loaded.gas, &pure, &each->loaded.air, err);
 
     if (status != BC_OK)
         return status;
     each->loaded.gas = pure;
     each->air_free = true;
     each->loaded.scattered = false;
-    (void)snprintf(name, sizeof name, "%.120s, air-free", each->loaded.name);
+    (void)snprintf(name, sizeof name, "air-free: %.120s", each->loaded.name);
     memcpy(each->loaded.name, name, sizeof name);
     return BC_OK;
 }
@@ -51,6 +51,7 @@ static bc_status load(subjects *s, const char *word, bool air_free, bool both, b
     if (both) {
         s->each[s->count] = *each;
         each = &s->each[s->count++];
+        each->loaded.repeated = true;
     }
     status = take_air_out(each, err);
     return status == BC_OK ? evaluate(s, each, err) : status;

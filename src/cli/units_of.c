@@ -30,16 +30,13 @@ static bool fits_quantity(const bc_unit *unit, const bc_quantity *quantity)
 /* A unit such as scf or Nm3 counts gas at its own metering temperature: at another one it would lie. */
 static bc_status check_metering(const char *text, const bc_unit *unit, const bc_state *state, bc_error *err)
 {
-    char wanted[16];
-
     if (!unit->has_metering || fabs(unit->metering_c - state->metering_c) < 0.01)
         return BC_OK;
     if (fabs(unit->metering_c - 60.0 / 1.8 + 32.0 / 1.8) < 1e-6)
-        (void)snprintf(wanted, sizeof wanted, "60F");
-    else
-        (void)snprintf(wanted, sizeof wanted, "%g", unit->metering_c);
-    return bc_fail(err, BC_ERR_USAGE, "--unit %s counts gas metered at %s%s, but the state meters at %.6g C; write --at %s/%s, or m3 or ft3", text,
-                   wanted, wanted[2] == 'F' ? "" : " C", state->metering_c, wanted, wanted);
+        return bc_fail(err, BC_ERR_USAGE, "--unit %s counts gas metered at 60 F, but the state meters at %.6g C; write --at 60F/60F, or take m3 or ft3",
+                       text, state->metering_c);
+    return bc_fail(err, BC_ERR_USAGE, "--unit %s counts gas metered at %g C, but the state meters at %.6g C; write --at %.6g/%g, or take m3 or ft3", text,
+                   unit->metering_c, state->metering_c, state->combustion_c, unit->metering_c);
 }
 
 static bc_status check_unit(const char *text, const bc_state *state, const size_t quantities[], size_t count, bc_error *err)
@@ -54,8 +51,12 @@ static bc_status check_unit(const char *text, const bc_state *state, const size_
     for (size_t i = 0; i < count; i++)
         if (fits_quantity(&unit, bc_quantity_at(quantities[i])))
             return BC_OK;
+    const bc_quantity *first = bc_quantity_at(quantities[0]);
+
+    if (strcmp(first->unit, "1") == 0)
+        return bc_fail(err, BC_ERR_USAGE, "--unit %s fits none of the quantities; %s is a pure number (bluecone list quantities)", text, first->id);
     return bc_fail(err, BC_ERR_USAGE, "--unit %s fits none of the quantities; %s is in %s; ask for one on that basis (bluecone list quantities)",
-                   text, bc_quantity_at(quantities[0])->id, bc_quantity_at(quantities[0])->unit);
+                   text, first->id, first->unit);
 }
 
 bc_status units_check(const arguments *a, const bc_state *state, const size_t quantities[], size_t count, bc_error *err)
@@ -93,8 +94,7 @@ static void method_of(const bc_quantity *quantity, int edition, char *text, size
         (void)snprintf(text, size, "%s", quantity->method);
 }
 
-bc_status report_quantity(report *r, size_t section, size_t gas_index, size_t quantity, const bc_subject *subject, const arguments *a,
-                          bc_error *err)
+bc_status report_quantity(const slot *where, size_t quantity, const bc_subject *subject, const arguments *a, bc_error *err)
 {
     const bc_quantity *q = bc_quantity_at(quantity);
     bc_figure figure;
@@ -112,13 +112,13 @@ bc_status report_quantity(report *r, size_t section, size_t gas_index, size_t qu
         return status;
     choose_unit(q, a->value[OPTION_unit], unit, sizeof unit, &shown);
     const double factor = own.factor / shown.factor;
-    const report_result result = {.id = id, .label = label, .unit = unit, .method = method, .section = section, .gas = gas_index,
+    const report_result result = {.id = id, .label = label, .unit = unit, .method = method, .section = where->section, .gas = where->gas,
                                   .value = figure.value * factor, .has_uncertainty = figure.has_u, .uncertainty = figure.u * factor,
                                   .digits = q->digits};
 
     (void)snprintf(id, sizeof id, "%s", q->id);
     (void)snprintf(label, sizeof label, "%s", q->label);
     method_of(q, subject->reference->state.edition, method, sizeof method);
-    report_add_result(r, &result);
+    report_add_result(where->r, &result);
     return BC_OK;
 }

@@ -102,6 +102,20 @@ static double moles_per_share(const bc_composition *c, const bc_entry *entry)
     return c->basis == BC_BASIS_VOLUME ? 1.0 / z : 1.0 / mass;
 }
 
+/* A volume of what would be a liquid is no amount of gas: the virial form gives it no Z above zero. */
+static bc_status check_volumes(const bc_composition *c, bc_error *err)
+{
+    for (size_t i = 0; i < c->entry_count && c->basis == BC_BASIS_VOLUME; i++) {
+        const double moles = moles_per_share(c, &c->entries[i]);
+
+        if (!(moles > 0.0) || !isfinite(moles))
+            return blame(c, c->entries[i].line,
+                         bc_fail(err, BC_ERR_INPUT, "'%s' is no gas at %.6g C, so its share cannot be one of volume; state mole or mass shares",
+                                 c->entries[i].word, c->measured_at_k - 273.15), err);
+    }
+    return BC_OK;
+}
+
 /* Sets the amount of the entry by difference and c->sum. */
 static bc_status close_sum(bc_composition *c, bc_error *err)
 {
@@ -281,6 +295,8 @@ bc_status composition_finish(bc_composition *c, bc_error *err)
 
     if (status == BC_OK)
         status = check_sum(c, err);
+    if (status == BC_OK)
+        status = check_volumes(c, err);
     if (status == BC_OK)
         status = make_gas(c, err);
     if (status == BC_OK)

@@ -35,11 +35,21 @@ static int only_ini(const struct dirent *entry)
     return is_ini(entry, &stem);
 }
 
+/* By name, not by file: "l-gas" stands before "l-gas-2" although '-' stands before '.'. */
+static int by_name(const struct dirent **a, const struct dirent **b)
+{
+    const size_t n = strlen((*a)->d_name) - 4;
+    const size_t m = strlen((*b)->d_name) - 4;
+    const int order = strncmp((*a)->d_name, (*b)->d_name, n < m ? n : m);
+
+    return order != 0 ? order : (n > m) - (n < m);
+}
+
 bc_status bc_composition_each(const char *folder, void (*visit)(const char *name, const char *path, void *data), void *data,
                               bc_error *err)
 {
     struct dirent **entries = NULL;
-    const int count = scandir(folder, &entries, only_ini, alphasort);
+    const int count = scandir(folder, &entries, only_ini, by_name);
 
     if (count < 0)
         return errno == ENOMEM ? bc_fail(err, BC_ERR_MEMORY, "not enough memory to list %s", folder) : BC_OK;

@@ -9,6 +9,7 @@
 #include <string.h>
 
 #define HEADING_FOLD 14 /* headings are folded, but not narrower than this */
+#define HEADING_MAX  32 /* a word of a heading that is longer than this is broken */
 #define POINT_MAX    20 /* wider columns of numbers are not aligned at the point: it costs too much */
 #define BLOCK_ROOM   24 /* columns of a line that fixed columns leave to the others */
 
@@ -113,10 +114,11 @@ static int longest_word(const char *text)
     return longest;
 }
 
-/* The longest line of a heading folded to HEADING_FOLD, or to its longest word. */
+/* The longest line of a heading folded to HEADING_FOLD, or to its longest word up to HEADING_MAX. */
 static int heading_width(const char *heading)
 {
-    const int fold_width = larger(longest_word(heading), HEADING_FOLD);
+    const int word = longest_word(heading);
+    const int fold_width = larger(word < HEADING_MAX ? word : HEADING_MAX, HEADING_FOLD);
     plain_line line;
     int longest = 0;
 

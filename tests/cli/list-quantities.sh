@@ -1,0 +1,2 @@
+# Every quantity with unit, meaning and method.
+bluecone list quantities

@@ -1,0 +1,3 @@
+# The sheet as rows.
+cp "$SRC/examples/new-supply-offer.ini" .
+bluecone sheet --csv new-supply-offer.ini

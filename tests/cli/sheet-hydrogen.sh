@@ -1,0 +1,2 @@
+# No carbon: no hydrogen-carbon ratio, and Z from the tables.
+bluecone sheet hydrogen

@@ -1,0 +1,33 @@
+# Wrong usage: one line, exit 2, nothing on standard output.
+bluecone
+echo "exit $?" >&2
+bluecone gett hhv g20
+echo "exit $?" >&2
+bluecone get
+echo "exit $?" >&2
+bluecone get hhv
+echo "exit $?" >&2
+bluecone get hvh g20
+echo "exit $?" >&2
+bluecone get hhv,,lhv g20
+echo "exit $?" >&2
+bluecone get --bogus hhv g20
+echo "exit $?" >&2
+bluecone get --untis kWh/m3 hhv g20
+echo "exit $?" >&2
+bluecone get -q hhv g20
+echo "exit $?" >&2
+bluecone get hhv g20 --unit
+echo "exit $?" >&2
+bluecone get --json --csv hhv g20
+echo "exit $?" >&2
+bluecone get --bare=yes hhv g20
+echo "exit $?" >&2
+bluecone get --at 15/15 --at 25/0 hhv g20
+echo "exit $?" >&2
+bluecone get --digits 99 hhv g20
+echo "exit $?" >&2
+bluecone sheet --bare g20
+echo "exit $?" >&2
+bluecone verify steam thermo
+echo "exit $?" >&2

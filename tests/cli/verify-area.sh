@@ -1,0 +1,2 @@
+# One area of the published check values.
+bluecone verify steam

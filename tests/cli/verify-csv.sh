@@ -1,0 +1,2 @@
+# What a laboratory files: one row a value.
+bluecone verify en437 --csv

@@ -1,0 +1,4 @@
+# The version, three ways.
+bluecone --version
+bluecone get --version
+bluecone sheet --version

@@ -1,0 +1,3 @@
+# What stands behind -- is no option.
+bluecone get --quiet -- hhv g20
+bluecone get hhv --quiet -- --json
