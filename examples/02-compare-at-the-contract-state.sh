@@ -9,7 +9,7 @@ cd "$(dirname "$0")"
 PATH=$PATH:../build/release # a bluecone that was installed goes first
 
 bluecone sheet --at 25/0 --unit kWh/Nm3 present-supply.ini new-supply-offer.ini |
-    sed -n '/^State/p; /^Heat per volume/,/^$/p; /^Density/,/^$/p'
+    sed -n '/^State/G; /^State/p; /^Heat per volume/,/^$/p; /^Density/,/^$/p'
 
 old=$(bluecone get wobbe-gross --bare --at 25/0 present-supply.ini)
 new=$(bluecone get wobbe-gross --bare --at 25/0 new-supply-offer.ini)

@@ -6,7 +6,7 @@ PATH=$PATH:../build/release # a bluecone that was installed goes first
 
 say() {
     echo
-    printf '%s\n' "$@" | sed 's/^/  | /'
+    printf '%s\n' "$@" | sed 's/^/| /'
     echo
 }
 
@@ -37,7 +37,7 @@ say 'What to look at:' \
     '  table above tells what the missing 0.12 % would mean: 0.4 % of the heat at' \
     '  most.' \
     '- Second route: the heats come out again from enthalpies of formation, with a' \
-    '  gap of 0.001 %: no table was mistyped.'
+    '  gap of 0.001 %: a mistyped heat would show here.'
 echo 'Next: write your certificate as examples/new-supply-offer.ini does, then run'
 echo '      build/release/bluecone sheet YOUR-FILE.ini'
 echo '      examples/01-*.sh to 08-*.sh go on from here, a step each.'

@@ -20,6 +20,7 @@
 #include "bluecone/state.h"
 #include "bluecone/status.h"
 #include "bluecone/steam.h"
+#include "bluecone/subject.h"
 #include "bluecone/thermo.h"
 #include "bluecone/units.h"
 

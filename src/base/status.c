@@ -40,6 +40,14 @@ const char *bc_version(void)
     return BC_VERSION;
 }
 
+/* Messages repeat words of the user: nothing in them may command a terminal. */
+static void disarm(char *text)
+{
+    for (; *text != '\0'; text++)
+        if ((unsigned char)*text < 0x20 || *text == 0x7f)
+            *text = '?';
+}
+
 static void fill(bc_error *err, bc_status status, const char *file, int line, const char *format,
                  va_list arguments) BC_PRINTF(5, 0);
 
@@ -50,6 +58,8 @@ static void fill(bc_error *err, bc_status status, const char *file, int line, co
     err->line = line;
     (void)snprintf(err->file, sizeof err->file, "%s", file);
     (void)vsnprintf(err->message, sizeof err->message, format, arguments);
+    disarm(err->file);
+    disarm(err->message);
 }
 
 bc_status bc_fail(bc_error *err, bc_status status, const char *format, ...)

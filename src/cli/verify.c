@@ -131,9 +131,9 @@ static size_t conclude(report *r, const tallies *t)
         failed += t->each[i].failed;
     }
     if (failed == 0)
-        (void)snprintf(text, sizeof text, "all %zu published values are met within their tolerance", run);
+        (void)snprintf(text, sizeof text, "all %zu check values are met within their tolerance", run);
     else
-        (void)snprintf(text, sizeof text, "%zu of %zu published values are NOT met within their tolerance", failed, run);
+        (void)snprintf(text, sizeof text, "%zu of %zu check values are NOT met within their tolerance", failed, run);
     report_set_verdict(r, text);
     return failed;
 }

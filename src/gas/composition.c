@@ -116,6 +116,23 @@ static bc_status check_volumes(const bc_composition *c, bc_error *err)
     return BC_OK;
 }
 
+/* What a volume of real gas holds is known best where the factors are tabulated and the gas is near ideal. */
+static void remark_volumes(bc_composition *c)
+{
+    const double t_c = c->measured_at_k - 273.15;
+
+    if (c->basis != BC_BASIS_VOLUME)
+        return;
+    if (t_c < 0.0 || t_c > 50.0)
+        composition_remark(c, "Volume shares at %.4g C: outside 0 to 50 C the compression factors are extrapolated too far.", t_c);
+    for (size_t i = 0; i < c->entry_count; i++)
+        if (moles_per_share(c, &c->entries[i]) > 1.0 / 0.9) {
+            composition_remark(c, "Volume share of %s: as a pure gas it would be outside ISO 6976 (Z below 0.9); mole shares are safer.",
+                               c->entries[i].word);
+            return;
+        }
+}
+
 /* Sets the amount of the entry by difference and c->sum. */
 static bc_status close_sum(bc_composition *c, bc_error *err)
 {
@@ -301,9 +318,11 @@ bc_status composition_finish(bc_composition *c, bc_error *err)
         status = make_gas(c, err);
     if (status == BC_OK)
         status = add_moisture(c, err);
-    if (status == BC_OK)
-        suspect_air(c);
-    return status;
+    if (status != BC_OK)
+        return status;
+    remark_volumes(c);
+    suspect_air(c);
+    return BC_OK;
 }
 
 bc_status bc_composition_completed(const bc_composition *c, size_t species, bc_gas *gas, bc_error *err)

@@ -13,7 +13,7 @@ void composition_clear(bc_composition *c);
  * c->path go into the error. The entry is not counted until the caller raises entry_count. */
 bc_status composition_resolve(bc_composition *c, bc_entry *entry, bc_error *err);
 
-/* Adds a remark; remarks beyond the capacity are dropped after one that says so. */
+/* Adds a remark. A composition gives rise to five at most; beyond the capacity they would be dropped. */
 void composition_remark(bc_composition *c, const char *format, ...) BC_PRINTF(2, 3);
 
 /* From entries to sum, gas, spread and remarks. All settings and entries must be in place. */

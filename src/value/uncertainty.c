@@ -42,6 +42,17 @@ static double z_slope(const bc_subject *s)
     return -2.0 * q * summation_sum(s) / s->value.z;
 }
 
+/* Of a gas that is metered saturated the water is fixed by temperature and pressure. What the analysis lists of
+ * it is taken out, x_j = x'_j/(1 - x'_w), so that its scatter moves all dry fractions alike. */
+static double slope_of_listed_water(const bc_gas *gas, const double a[])
+{
+    double slope = 0.0;
+
+    for (size_t j = 0; j < SPECIES_COUNT; j++)
+        slope += j == SPECIES_water ? 0.0 : a[j] * gas->x[j];
+    return slope / (1.0 - gas->x[SPECIES_water]);
+}
+
 static double composition_variance(const bc_subject *s, const exponents *e)
 {
     const bc_reference *r = s->reference;
@@ -53,12 +64,12 @@ static double composition_variance(const bc_subject *s, const exponents *e)
     if (!s->spread)
         return 0.0;
     for (size_t j = 0; j < SPECIES_COUNT; j++) {
-        if (r->state.saturated && j == SPECIES_water)
-            continue; /* fixed by temperature and pressure, not by the analysis */
         a[j] = e->mass * r->mass_kg_per_mol[j] / s->value.molar_mass_kg_per_mol + e->z * slope * r->factor[j];
         if (heat > 0.0)
             a[j] += e->heat * species_heat(r, j, e->net) / heat;
     }
+    if (r->state.saturated)
+        a[SPECIES_water] = slope_of_listed_water(&s->gas, a);
     for (size_t k = 0; k < s->spread->count; k++) {
         double step = 0.0;
 

@@ -3,7 +3,7 @@
 #ifndef UNCERTAINTY_H
 #define UNCERTAINTY_H
 
-#include "bluecone/quantity.h"
+#include "bluecone/subject.h"
 
 /* Every figure of the standard is Y = constant H^heat M^mass Z^z R^r M_air^air Z_air^air_z. */
 typedef struct {

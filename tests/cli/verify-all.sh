@@ -1,3 +1,3 @@
 # Every published value: the count and the verdict. An unknown area is refused.
-bluecone verify | tail -n 16
+bluecone verify | sed -n '/^Checks/,$s/[0-9][0-9]* \([cv]\)/N \1/p'
 bluecone verify en473

@@ -90,8 +90,8 @@ static void every_heat_of_the_2016_table_agrees_with_the_formation_balance_withi
     assert_all_needed(HEAT_OUTLIERS, COUNT(HEAT_OUTLIERS), worst, 0.1);
 }
 
-/* 0.035 kJ/mol: 0.01 for two rounded columns and 0.025 for the vaporisation of the water formed. */
-#define USUAL_DIFFERENCE 0.035
+/* 0.04 kJ/mol: 0.01 for two rounded columns and up to 0.03 for the vaporisation of sixteen waters. */
+#define USUAL_DIFFERENCE 0.04
 static const outlier DIFFERENCE_OUTLIERS[] = {
     {SPECIES_neopentane, 0.06, "the heat capacity is fitted from 300 K: below it is extrapolated"},
     {SPECIES_methylpentane_2, 0.05, "heat capacity by analogy with n-hexane"},
@@ -103,7 +103,6 @@ static const outlier DIFFERENCE_OUTLIERS[] = {
     {SPECIES_methylcyclohexane, 0.17, "heat capacity by analogy with another ring"},
     {SPECIES_ethylcyclohexane, 0.31, "heat capacity by analogy with another ring"},
     {SPECIES_o_xylene, 0.13, "heat capacity by analogy with ethylbenzene"},
-    {SPECIES_n_pentadecane, 0.04, "sixteen molecules of water for each: the vaporisation counts more"},
 };
 
 static void heats_change_with_temperature_as_heat_capacities_say(void **state)
@@ -170,13 +169,8 @@ static void the_heats_of_both_editions_are_the_same_but_for_known_revisions(void
     assert_all_needed(EDITION_OUTLIERS, COUNT(EDITION_OUTLIERS), worst, 0.055);
 }
 
-/* 0.015 up to four atoms heavier than hydrogen, 0.05 above: what summation.c takes as the standard uncertainty
- * where it must fall back from one edition to the other. */
-static const outlier FACTOR_OUTLIERS[] = {
-    {SPECIES_water, 0.023, "0.2562 against 0.2345 at 15 C: the older value is not of saturated vapour's virial"},
-    {SPECIES_hydrogen_cyanide, 0.021, "0.2765 against 0.2966: strongly associating, both editions uncertain"},
-};
-
+/* 0.025 up to four atoms heavier than hydrogen (water differs by 0.022), 0.05 above: what summation.c takes as
+ * the standard uncertainty where it must fall back from one edition to the other. */
 static void the_factors_of_both_editions_differ_by_no_more_than_the_fallback_claims(void **state)
 {
     (void)state;
@@ -186,8 +180,7 @@ static void the_factors_of_both_editions_differ_by_no_more_than_the_fallback_cla
 
         for (int k = 0; k < BC_ELEMENTS; k++)
             heavy += k == BC_H ? 0 : bc_species_atoms(s, (bc_element)k);
-        const double usual = heavy <= 4 ? 0.015 : 0.05;
-        const double limit = fmax(usual, allowed(FACTOR_OUTLIERS, COUNT(FACTOR_OUTLIERS), s, usual));
+        const double limit = heavy <= 4 ? 0.025 : 0.05;
 
         assert_within_at(bc_species_id(s), bc_summation_factor(s, 2016, 15.0).s, TABLE_1995[i].factor[1], limit);
     }

@@ -1,0 +1,34 @@
+/* SPDX-License-Identifier: MIT */
+/* subject.c - a gas made ready at a reference state, and the gap between its two heating values. */
+#include "bluecone/subject.h"
+
+#include "gas/species_index.h"
+#include "value/formation_internal.h"
+
+bc_status bc_subject_make(const bc_reference *reference, const bc_gas *gas, const bc_spread *spread, bc_subject *subject, bc_error *err)
+{
+    bc_gas metered;
+    const bc_status status = bc_gas_for_state(gas, &reference->state, &metered, err);
+
+    if (status != BC_OK)
+        return status;
+    subject->reference = reference;
+    subject->spread = spread && spread->count > 0 ? spread : NULL;
+    subject->spread_scale = 1.0;
+    if (reference->state.saturated)
+        subject->spread_scale = (1.0 - metered.x[SPECIES_water]) / (1.0 - gas->x[SPECIES_water]);
+    subject->gas = metered;
+    subject->value = bc_value_of(reference, &metered);
+    return BC_OK;
+}
+
+void bc_gap_shares(const bc_subject *s, double share[])
+{
+    const double t_k = s->reference->state.combustion_c + 273.15;
+
+    for (size_t i = 0; i < BC_SPECIES_CAPACITY; i++) {
+        share[i] = 0.0;
+        if (i < SPECIES_COUNT && s->gas.x[i] > 0.0 && s->value.gross_j_per_mol > 0.0)
+            share[i] = s->gas.x[i] * (formation_gross_j_per_mol(i, t_k) - s->reference->gross_j_per_mol[i]) / s->value.gross_j_per_mol;
+    }
+}

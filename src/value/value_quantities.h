@@ -1,0 +1,17 @@
+/* SPDX-License-Identifier: MIT */
+/* value_quantities.h - how a floor offers its quantities to the one list of them all. */
+#ifndef VALUE_QUANTITIES_H
+#define VALUE_QUANTITIES_H
+
+#include "bluecone/subject.h"
+
+/* The quantities of one floor: their number, what they are, and their evaluation. Indices are valid. */
+typedef struct {
+    size_t count;
+    const bc_quantity *(*at)(size_t index);
+    bc_status (*evaluate)(size_t index, const bc_subject *subject, bc_figure *figure, bc_error *err);
+} quantity_source;
+
+quantity_source value_quantities(void);
+
+#endif

@@ -1,0 +1,75 @@
+#!/bin/bash
+# The completion of bash, asked as the shell asks it; silent when all is well. Wants bluecone in PATH.
+set -u
+SRC=$(cd "$(dirname "$0")/../.." && pwd) || exit 2
+work=$(mktemp -d) || exit 2
+trap 'rm -rf "$work"' EXIT
+cd "$work" && mkdir folder && : >sample.ini && : >other.txt || exit 2
+
+# shellcheck disable=SC1091 # made by the build from this source
+source "$SRC/src/cli/completion.bash.in"
+
+# offered LINE: what is offered at its end, sorted, on one line; words broken at = : @ as bash does.
+offered() {
+    local broken
+    COMP_LINE=$1
+    COMP_POINT=${#1}
+    broken=$(printf '%s' "$1" | sed 's/[=:@]/ & /g')
+    read -ra COMP_WORDS <<<"$broken"
+    COMPREPLY=()
+    _bluecone 2>/dev/null
+    printf '%s\n' "${COMPREPLY[@]}" | LC_ALL=C sort | tr '\n' ' ' | sed 's/ $//'
+}
+
+# expect LINE WORDS
+expect() {
+    local got
+    got=$(offered "$1")
+    test "$got" = "$2" || printf '%s\n  offers: %s\n  wanted: %s\n' "$1" "$got" "$2"
+}
+
+# holds LINE WORD...: these are among what is offered.
+holds() {
+    local line=$1 got word
+    got=" $(offered "$line") "
+    shift
+    for word; do
+        case $got in *" $word "*) ;; *) printf '%s\n  does not offer %s\n' "$line" "$word" ;; esac
+    done
+}
+
+holds 'bluecone ' get list sheet verify --help --version
+expect 'bluecone sh' 'sheet'
+expect 'bluecone get wobbe-g' 'wobbe-gross wobbe-gross-ideal'
+expect 'bluecone get hhv,relative-density-' 'hhv,relative-density-ideal'
+holds 'bluecone get hhv ' g20 pipeline-h folder/ sample.ini
+expect 'bluecone get hhv g2' 'g20 g21 g23 g25'
+expect 'bluecone get hhv samp' 'sample.ini'
+expect 'bluecone get hhv oth' ''
+expect 'bluecone get hhv methane=92,ethan' '92,ethane= 92,ethanol='
+expect 'bluecone get hhv methane=92,res' '92,rest'
+expect 'bluecone get hhv methane=9' ''
+expect 'bluecone get hhv mass:isob' 'isobutane= isobutene='
+expect 'bluecone get hhv neopen' 'neopentane='
+expect 'bluecone get hhv g20 g11' 'g110'
+expect 'bluecone get --at 25' '25/0 25/20'
+expect 'bluecone get hhv g20 --at 60F/60F@1' '14.73psi'
+expect 'bluecone get --edition ' '1995 2016'
+expect 'bluecone get hhv g20 --unit MW' 'MW MWh'
+expect 'bluecone get hhv g20 --unit kJ/mol,kWh/Nm' 'kJ/mol,kWh/Nm3'
+expect 'bluecone get --at 25/0 wobbe-n' 'wobbe-net wobbe-net-ideal'
+holds 'bluecone sheet g20 -o ' other.txt folder/
+expect 'bluecone sheet --wor' '--working'
+expect 'bluecone sheet --ba' ''
+expect 'bluecone list sp' 'species'
+expect 'bluecone list species n-hexa' 'n-hexane'
+expect 'bluecone list options ver' 'verify'
+expect 'bluecone verify ste' 'steam'
+expect 'bluecone verify steam ' ''
+expect 'bluecone nonsense ' ''
+
+# Every option of every command is offered.
+for command in $(bluecone list commands --bare); do
+    # shellcheck disable=SC2046 # options hold no blanks
+    holds "bluecone $command -" $(bluecone list options "$command" --bare) -o
+done
