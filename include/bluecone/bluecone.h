@@ -9,12 +9,22 @@
 #ifndef BLUECONE_BLUECONE_H
 #define BLUECONE_BLUECONE_H
 
+#include "bluecone/burn.h"
 #include "bluecone/check.h"
 #include "bluecone/composition.h"
+#include "bluecone/dewpoint.h"
+#include "bluecone/emission.h"
+#include "bluecone/equilibrium.h"
+#include "bluecone/flame.h"
+#include "bluecone/flammability.h"
+#include "bluecone/flue.h"
 #include "bluecone/formation.h"
 #include "bluecone/gas.h"
+#include "bluecone/heatload.h"
+#include "bluecone/humidity.h"
 #include "bluecone/iso6976.h"
 #include "bluecone/number.h"
+#include "bluecone/oxidant.h"
 #include "bluecone/quantity.h"
 #include "bluecone/species.h"
 #include "bluecone/state.h"

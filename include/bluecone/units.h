@@ -24,6 +24,7 @@ typedef enum {
     BC_DIM_TIME,        /* s */
     BC_DIM_PRESSURE,    /* Pa, absolute */
     BC_DIM_TEMPERATURE, /* K */
+    BC_DIM_LENGTH,      /* m; a volume of gas is not its cube here */
     BC_DIMENSIONS
 } bc_dimension;
 

@@ -62,9 +62,10 @@ static bc_status take_section(scan *s, const char *text, size_t length)
     if (status != BC_OK)
         return status;
     const char *end = memchr(text, ']', length);
+    const char *behind = end ? bc_text_skip_space(end + 1) : "";
 
-    if (!end || end[1] != '\0')
-        return refuse(s, "a section line is written [name] with nothing behind it");
+    if (!end || (*behind != '\0' && *behind != ';' && *behind != '#'))
+        return refuse(s, "a section line is written [name]; behind it only a remark may stand");
     if (!bc_text_copy(s->section, sizeof s->section, text + 1, (size_t)(end - text - 1)) || s->section[0] == '\0'
         || strpbrk(s->section, ":="))
         return refuse(s, "the section name is empty, too long or holds ':' or '='");
@@ -167,10 +168,25 @@ static size_t trimmed(const char *line, size_t length)
     return length;
 }
 
-static bc_status scan_lines(scan *s, const char *text, size_t length)
+/* iniparser takes a section line only without a remark behind it: blank the remark. */
+static void blank_section_remark(char *line, size_t length)
+{
+    size_t i = 0;
+
+    while (i < length && (line[i] == ' ' || line[i] == '\t'))
+        i++;
+    if (i == length || line[i] != '[')
+        return;
+    while (i < length && line[i] != ']')
+        i++;
+    for (i++; i < length; i++)
+        line[i] = ' ';
+}
+
+static bc_status scan_lines(scan *s, char *text, size_t length)
 {
     char line[BC_INI_LINE_MAX + 2];
-    const char *p = text;
+    char *p = text;
     const char *end = text + length;
 
     while (p < end) {
@@ -187,6 +203,7 @@ static bc_status scan_lines(scan *s, const char *text, size_t length)
 
         if (status != BC_OK)
             return status;
+        blank_section_remark(p, raw);
         p += raw + (newline != NULL);
     }
     if (s->ini->count == 0)
@@ -239,7 +256,7 @@ static bc_status attach_values(bc_ini *ini, const char *path, bc_error *err)
     return BC_OK;
 }
 
-static bc_status build(bc_ini *ini, const char *path, const char *text, size_t length, bc_error *err)
+static bc_status build(bc_ini *ini, const char *path, char *text, size_t length, bc_error *err)
 {
     scan s = {.path = path, .ini = ini, .err = err};
     const bc_status status = scan_lines(&s, text, length);

@@ -129,3 +129,21 @@ size_t bc_text_distance(const char *a, const char *b)
     }
     return rows[m % 3][n];
 }
+
+size_t bc_text_unlikeness(const char *word, const char *candidate)
+{
+    char folded[BC_WORD_MAX];
+    char whole[BC_WORD_MAX];
+
+    if (!bc_text_fold(folded, sizeof folded, word) || !bc_text_fold(whole, sizeof whole, candidate))
+        return BC_WORD_MAX;
+    const size_t length = strlen(folded);
+    const size_t distance = bc_text_distance(folded, whole);
+
+    if (length < 3 || strlen(whole) <= length)
+        return distance;
+    whole[length] = '\0';
+    const size_t beginning = bc_text_distance(folded, whole) + 1;
+
+    return beginning < distance ? beginning : distance;
+}

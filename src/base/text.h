@@ -27,4 +27,8 @@ bool bc_text_same(const char *a, const char *b);
  * words; at most BC_WORD_MAX. Damerau-Levenshtein distance, optimal string alignment. */
 size_t bc_text_distance(const char *a, const char *b);
 
+/* How unlike a word and a candidate for it are, for suggesting the nearest: the distance of both when
+ * folded, or one more than that to the beginning of the candidate, since people type beginnings. */
+size_t bc_text_unlikeness(const char *word, const char *candidate);
+
 #endif

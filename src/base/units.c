@@ -20,6 +20,7 @@ typedef enum {
     TIME = BC_DIM_TIME,
     PRESSURE = BC_DIM_PRESSURE,
     TEMPERATURE = BC_DIM_TEMPERATURE,
+    LENGTH = BC_DIM_LENGTH,
     POWER,
     RATIO
 } measure;
@@ -67,7 +68,7 @@ static const char *nearest_symbol(const char *symbol)
     for (size_t i = 0; i < BC_COUNT(UNITS); i++) {
         if (bc_text_same(UNITS[i].symbol, symbol))
             return UNITS[i].symbol;
-        const size_t distance = bc_text_distance(UNITS[i].symbol, symbol);
+        const size_t distance = bc_text_unlikeness(symbol, UNITS[i].symbol);
 
         if (distance < best_distance) {
             best_distance = distance;

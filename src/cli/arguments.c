@@ -14,6 +14,7 @@ enum {
 
 #define GET (1U << COMMAND_get)
 #define SHEET (1U << COMMAND_sheet)
+#define BURN (1U << COMMAND_burn)
 #define LIST (1U << COMMAND_list)
 #define VERIFY (1U << COMMAND_verify)
 
@@ -59,6 +60,14 @@ const char *option_word(const command *c, size_t index, const char **argument, c
     return NULL;
 }
 
+bool option_is_common(const char *word)
+{
+    for (size_t i = 0; i < OPTION_COUNT; i++)
+        if (strcmp(OPTIONS[i].word, word) == 0) /* more than one bit is set */
+            return (OPTIONS[i].commands & (OPTIONS[i].commands - 1U)) != 0;
+    return false;
+}
+
 static bc_status refuse_option(const command *c, const char *word, bc_error *err)
 {
     const char *best = NULL;
@@ -66,7 +75,7 @@ static bc_status refuse_option(const command *c, const char *word, bc_error *err
 
     bc_text_show(shown, sizeof shown, word);
     for (size_t i = 0; i < OPTION_COUNT; i++)
-        if ((OPTIONS[i].commands & c->bit) && (!best || bc_text_distance(OPTIONS[i].word, word) < bc_text_distance(best, word)))
+        if ((OPTIONS[i].commands & c->bit) && (!best || bc_text_unlikeness(word, OPTIONS[i].word) < bc_text_unlikeness(word, best)))
             best = OPTIONS[i].word;
     return bc_fail(err, BC_ERR_USAGE, "'%s' has no option --%s; the nearest is --%s; see bluecone %s --help", c->word, shown, best, c->word);
 }

@@ -44,6 +44,9 @@ bc_status arguments_take(const command *c, int argc, char **argv, arguments *a, 
 /* The option words of a command, one a call; NULL at the end. *argument: its argument, "" for none. */
 const char *option_word(const command *c, size_t index, const char **argument, const char **help);
 
+/* True when more than one command takes an option. */
+bool option_is_common(const char *word);
+
 void help_command(const command *c);
 void help_all(void);
 
@@ -83,6 +86,9 @@ typedef struct {
     size_t section, gas;
 } slot;
 
+/* Adds a result, converted to the first unit of --unit that fits its own. Section and gas come from the slot. */
+void report_in_units(const slot *where, const arguments *a, const report_result *result);
+
 /* Adds a quantity of a subject in the first unit of --unit that fits, else in its own. */
 bc_status report_quantity(const slot *where, size_t quantity, const bc_subject *subject, const arguments *a, bc_error *err);
 
@@ -101,6 +107,7 @@ void warn(const char *format, ...) BC_PRINTF(1, 2);
 
 int run_get(const arguments *a);
 int run_sheet(const arguments *a);
+int run_burn(const arguments *a);
 int run_list(const arguments *a);
 int run_verify(const arguments *a);
 

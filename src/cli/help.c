@@ -18,20 +18,64 @@ void help_all(void)
          "bluecone COMMAND --help tells the options; man bluecone tells all.");
 }
 
+#define HELP_LINES_MAX 16 /* options on a line each; with more the common ones share lines, so that a screen holds it */
+
+static size_t count_options(const command *c)
+{
+    const char *argument = NULL;
+    const char *help = NULL;
+    size_t n = 0;
+
+    while (option_word(c, n, &argument, &help))
+        n++;
+    return n;
+}
+
+static void print_line(const char *word, const char *argument, const char *help)
+{
+    char left[40];
+
+    (void)snprintf(left, sizeof left, "--%s%s%s", word, argument[0] ? " " : "", argument);
+    printf("  %-19s %s\n", left, help);
+}
+
+/* Options that other commands take, too: their words alone, folded at 78 columns. */
+static void print_common(const command *c)
+{
+    const char *argument = NULL;
+    const char *help = NULL;
+    int column = printf("  common:");
+
+    for (size_t i = 0;; i++) {
+        const char *word = option_word(c, i, &argument, &help);
+
+        if (!word)
+            break;
+        if (!option_is_common(word))
+            continue;
+        if (column + (int)strlen(word) + 3 > 78)
+            column = printf("\n         ") - 1;
+        column += printf(" --%s", word);
+    }
+    putchar('\n');
+}
+
 void help_command(const command *c)
 {
+    const bool crowded = count_options(c) > HELP_LINES_MAX;
     const char *argument = NULL;
     const char *help = NULL;
 
     printf("usage: bluecone %s [OPTIONS] %s\n\n%s\n\n", c->word, c->usage, c->help);
     for (size_t i = 0;; i++) {
         const char *word = option_word(c, i, &argument, &help);
-        char left[40];
 
         if (!word)
             break;
-        (void)snprintf(left, sizeof left, "--%s%s%s", word, argument[0] ? " " : "", argument);
-        printf("  %-17s %s\n", left, help);
+        if (!crowded || !option_is_common(word))
+            print_line(word, argument, help);
     }
+    if (crowded)
+        print_common(c);
     printf("\nman bluecone-%s tells more.\n", c->word);
 }

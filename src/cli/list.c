@@ -197,7 +197,7 @@ static bc_status run_topic(report *r, const arguments *a, bc_error *err)
     for (size_t i = 0; i < BC_COUNT(TOPICS); i++) {
         if (strcmp(TOPICS[i].word, a->argument[0]) == 0)
             return TOPICS[i].list(r, name, err);
-        if (bc_text_distance(TOPICS[i].word, a->argument[0]) < bc_text_distance(TOPICS[best].word, a->argument[0]))
+        if (bc_text_unlikeness(a->argument[0], TOPICS[i].word) < bc_text_unlikeness(a->argument[0], TOPICS[best].word))
             best = i;
     }
     bc_text_show(shown, sizeof shown, a->argument[0]);
@@ -211,7 +211,10 @@ int run_list(const arguments *a)
     bc_error err;
 
     report_open(&r, BC_VERSION, "list", "List");
-    const bc_status status = run_topic(&r, a, &err);
+    bc_status status = run_topic(&r, a, &err);
+
+    if (status == BC_ERR_INPUT && err.file[0] == '\0') /* a name that does not exist, not data */
+        status = err.status = BC_ERR_USAGE;
 
     if (status == BC_OK)
         return answer(&r, a, a->value[OPTION_bare] != NULL, 0);

@@ -15,7 +15,7 @@ static int refuse_command(const char *word)
     bc_error err;
 
     for (size_t i = 0; command_at(i); i++)
-        if (bc_text_distance(command_at(i)->word, word) < bc_text_distance(best->word, word))
+        if (bc_text_unlikeness(word, command_at(i)->word) < bc_text_unlikeness(word, best->word))
             best = command_at(i);
     char shown[BC_WORD_MAX];
 

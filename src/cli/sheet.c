@@ -16,7 +16,9 @@ static const struct {
     const char *group, *title;
 } SECTIONS[] = {
     {"volume", "Heat per volume of real gas"}, {"density", "Density"}, {"mass", "Heat per mass"},
-    {"mole", "Molar figures"},                 {"ideal", "Ideal gas"}, {"check", "Second route"},
+    {"mole", "Molar figures"},                 {"ideal", "Ideal gas"},
+    {"air", "Combustion with the dry air that just suffices"}, {"flame", "Flame and flue gas, same air, all at 25 C and 101.325 kPa"},
+    {"co2", "Carbon dioxide"}, {"safety", "In air at 25 C and 101.325 kPa (estimates)"}, {"check", "Second route"},
 };
 
 /* A figure that a gas does not have (a gap of an inert gas) leaves no row. */

@@ -2,7 +2,7 @@
 /* units_of.c - the units a user asked for, and quantities printed in them. */
 #include "base/error_internal.h"
 #include "base/text.h"
-#include "cli/cli.h"
+#include "cli/figures.h"
 
 #include <math.h>
 #include <stdio.h>
@@ -75,15 +75,32 @@ bc_status units_check(const arguments *a, const bc_state *state, const size_t qu
     return list && *list != '\0' ? bc_fail(err, BC_ERR_USAGE, "--unit: a unit is longer than %d characters", BC_WORD_MAX - 1) : BC_OK;
 }
 
-/* The unit to print a quantity in: the first of the list that fits, else its own. */
-static void choose_unit(const bc_quantity *quantity, const char *list, char *text, size_t size, bc_unit *unit)
+/* The unit to print a figure in: the first of the list that fits its own, else its own. */
+static void choose_unit(const char *own_text, const char *list, char *text, size_t size, bc_unit *own, bc_unit *unit)
 {
+    if (bc_unit_parse(own_text, own, NULL) != BC_OK)
+        *own = (bc_unit){.factor = 1.0};
     while (next_unit(&list, text, size))
-        if (bc_unit_parse(text, unit, NULL) == BC_OK && fits_quantity(unit, quantity))
+        if (bc_unit_parse(text, unit, NULL) == BC_OK && bc_unit_matches(unit, own))
             return;
-    (void)snprintf(text, size, "%s", quantity->unit);
-    if (bc_unit_parse(text, unit, NULL) != BC_OK)
-        *unit = (bc_unit){.factor = 1.0};
+    (void)snprintf(text, size, "%s", own_text);
+    *unit = *own;
+}
+
+void report_in_units(const slot *where, const arguments *a, const report_result *result)
+{
+    char text[BC_WORD_MAX];
+    report_result r = *result;
+    bc_unit own;
+    bc_unit shown;
+
+    choose_unit(result->unit, a->value[OPTION_unit], text, sizeof text, &own, &shown);
+    r.section = where->section;
+    r.gas = where->gas;
+    r.unit = text;
+    r.value = bc_unit_from_si(&shown, bc_unit_to_si(&own, result->value));
+    r.uncertainty = result->uncertainty * own.factor / shown.factor; /* a difference: no offset */
+    report_add_result(where->r, &r);
 }
 
 static void method_of(const bc_quantity *quantity, int edition, char *text, size_t size)
@@ -98,27 +115,64 @@ bc_status report_quantity(const slot *where, size_t quantity, const bc_subject *
 {
     const bc_quantity *q = bc_quantity_at(quantity);
     bc_figure figure;
-    bc_unit own;
-    bc_unit shown;
     char unit[BC_WORD_MAX];
     char method[96];
     char id[BC_WORD_MAX];
     char label[BC_WORD_MAX];
-    bc_status status = bc_quantity_evaluate(quantity, subject, &figure, err);
+    const bc_status status = bc_quantity_evaluate(quantity, subject, &figure, err);
 
-    if (status == BC_OK)
-        status = bc_unit_parse(q->unit, &own, err);
     if (status != BC_OK)
         return status;
-    choose_unit(q, a->value[OPTION_unit], unit, sizeof unit, &shown);
-    const double factor = own.factor / shown.factor;
-    const report_result result = {.id = id, .label = label, .unit = unit, .method = method, .section = where->section, .gas = where->gas,
-                                  .value = figure.value * factor, .has_uncertainty = figure.has_u, .uncertainty = figure.u * factor,
-                                  .digits = q->digits};
+    const report_result result = {.id = id, .label = label, .unit = unit, .method = method, .value = figure.value,
+                                  .has_uncertainty = figure.has_u, .uncertainty = figure.u, .digits = q->digits};
 
     (void)snprintf(id, sizeof id, "%s", q->id);
     (void)snprintf(label, sizeof label, "%s", q->label);
+    (void)snprintf(unit, sizeof unit, "%s", q->unit);
     method_of(q, subject->reference->state.edition, method, sizeof method);
-    report_add_result(where->r, &result);
+    report_in_units(where, a, &result);
+    return BC_OK;
+}
+
+void add_figures(const slot *where, const arguments *a, const plain_figure figures[], size_t count)
+{
+    for (size_t i = 0; i < count; i++) {
+        char text[4][96];
+        const report_result result = {.id = text[0], .label = text[1], .unit = text[2], .method = text[3], .value = figures[i].value,
+                                      .digits = figures[i].digits};
+
+        (void)snprintf(text[0], sizeof text[0], "%s", figures[i].id);
+        (void)snprintf(text[1], sizeof text[1], "%s", figures[i].label);
+        (void)snprintf(text[2], sizeof text[2], "%s", figures[i].unit);
+        (void)snprintf(text[3], sizeof text[3], "%s", figures[i].method);
+        report_in_units(where, a, &result);
+    }
+}
+
+static bool is_used(const report *r, const char *unit)
+{
+    for (size_t i = 0; i < r->result_count; i++)
+        if (strcmp(r->results[i].unit, unit) == 0)
+            return true;
+    return false;
+}
+
+bc_status check_units_used(const report *r, const arguments *a, bc_error *err)
+{
+    const char *list = a->value[OPTION_unit];
+    char text[BC_WORD_MAX];
+    bc_unit unit;
+
+    while (next_unit(&list, text, sizeof text)) {
+        const bc_status status = bc_unit_parse(text, &unit, err);
+
+        if (status != BC_OK)
+            return status;
+        if (unit.has_metering && fabs(unit.metering_c - r->state.metering_c) > 0.01)
+            return bc_fail(err, BC_ERR_USAGE, "--unit %s counts gas metered at %.4g C, but the state meters at %.6g C", text, unit.metering_c,
+                           r->state.metering_c);
+        if (!is_used(r, text))
+            return bc_fail(err, BC_ERR_USAGE, "--unit %s fits none of the figures of this report", text);
+    }
     return BC_OK;
 }

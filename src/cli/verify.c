@@ -109,7 +109,7 @@ static bc_status check_area(const char *area, bc_error *err)
     for (size_t i = 0; i < bc_check_count(); i++) {
         if (strcmp(bc_check_area(i), area) == 0)
             return BC_OK;
-        if (bc_text_distance(bc_check_area(i), area) < bc_text_distance(best, area))
+        if (bc_text_unlikeness(area, bc_check_area(i)) < bc_text_unlikeness(area, best))
             best = bc_check_area(i);
     }
     bc_text_show(shown, sizeof shown, area);

@@ -166,7 +166,7 @@ static bc_status refuse_key(const reader *r, const bc_ini_entry *e)
     size_t best = 0;
 
     for (size_t i = 0; i < BC_COUNT(GAS_KEYS); i++)
-        if (bc_text_distance(GAS_KEYS[i].key, e->key) < bc_text_distance(GAS_KEYS[best].key, e->key))
+        if (bc_text_unlikeness(e->key, GAS_KEYS[i].key) < bc_text_unlikeness(e->key, GAS_KEYS[best].key))
             best = i;
     return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown key '%s' in [gas]; the nearest known one is '%s'", e->key,
                       GAS_KEYS[best].key);

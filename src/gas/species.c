@@ -161,13 +161,9 @@ static bc_status refuse_ambiguous(const char *word, const char *folded, bc_error
     return bc_fail(err, BC_ERR_INPUT, "'%s' is the formula of several species; write one of %s", word, candidates);
 }
 
-static void keep_nearest(const char *folded, const char *candidate, const char **best, size_t *distance)
+static void keep_nearest(const char *word, const char *candidate, const char **best, size_t *distance)
 {
-    char other[BC_WORD_MAX];
-
-    if (!bc_text_fold(other, sizeof other, candidate))
-        return;
-    const size_t d = bc_text_distance(folded, other);
+    const size_t d = bc_text_unlikeness(word, candidate);
 
     if (d < *distance) {
         *distance = d;

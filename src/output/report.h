@@ -73,6 +73,7 @@ typedef struct {
     size_t column_count;
     report_cell *cells;       /* row by row */
     size_t cell_count;
+    bool leads;               /* text: stands before the sections, since they rest on it */
 } report_table;
 
 typedef struct {
@@ -105,6 +106,7 @@ size_t report_add_section(report *r, const char *id, const char *title);
 /* Adds a result; the texts of *result are copied, section and gas must exist. */
 void report_add_result(report *r, const report_result *result);
 size_t report_add_table(report *r, const char *id, const char *title);
+void report_lead_with(report *r, size_t table);
 void report_add_column(report *r, size_t table, const char *id, const char *heading, const char *unit);
 void report_add_text(report *r, size_t table, const char *text);       /* next cell */
 void report_add_number(report *r, size_t table, double number, int decimals); /* next cell */

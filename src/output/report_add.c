@@ -112,6 +112,12 @@ size_t report_add_table(report *r, const char *id, const char *title)
     return r->table_count++;
 }
 
+void report_lead_with(report *r, size_t table)
+{
+    if (table < r->table_count)
+        r->tables[table].leads = true;
+}
+
 void report_add_column(report *r, size_t table, const char *id, const char *heading, const char *unit)
 {
     if (!is_there(r, table, r->table_count))

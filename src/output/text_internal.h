@@ -33,6 +33,6 @@ void text_letter(size_t gas, char out[TEXT_LETTERS_MAX]);
 
 /* All sections with their results, and all tables. */
 void text_sections(text_page *page, const report *r);
-void text_tables(text_page *page, const report *r);
+void text_tables(text_page *page, const report *r, bool leading); /* those that lead, or the others */
 
 #endif

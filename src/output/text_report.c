@@ -107,8 +107,9 @@ bc_status render_text(const report *r, const render_style *style, FILE *out, bc_
         print_head(&page, r);
         for (size_t i = 0; i < r->gas_count; i++)
             print_gas(&page, r, i);
+        text_tables(&page, r, true);
         text_sections(&page, r);
-        text_tables(&page, r);
+        text_tables(&page, r, false);
         print_checks(&page, r);
         print_warnings(&page, r);
         print_end(&page, r);

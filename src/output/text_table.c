@@ -55,8 +55,9 @@ static void print_table(text_page *page, const report_table *table)
     grid_print(&g, page);
 }
 
-void text_tables(text_page *page, const report *r)
+void text_tables(text_page *page, const report *r, bool leading)
 {
     for (size_t i = 0; i < r->table_count; i++)
-        print_table(page, &r->tables[i]);
+        if (r->tables[i].leads == leading)
+            print_table(page, &r->tables[i]);
 }

@@ -5,6 +5,7 @@
 #include "base/compiler.h"
 #include "base/error_internal.h"
 #include "base/text.h"
+#include "flame/flame_quantities.h"
 #include "gas/species_index.h"
 #include "value/value_quantities.h"
 
@@ -12,7 +13,7 @@
 
 typedef quantity_source source_function(void);
 
-static source_function *const FLOORS[] = {value_quantities};
+static source_function *const FLOORS[] = {value_quantities, flame_quantities};
 
 /* The floor that an index of the joined list falls to; *index becomes that of the floor. */
 static bool find_floor(size_t *index, quantity_source *source)
@@ -48,7 +49,7 @@ static bc_status refuse_id(const char *id, bc_error *err)
     char shown[BC_WORD_MAX];
 
     for (size_t i = 0; i < bc_quantity_count(); i++)
-        if (bc_text_distance(bc_quantity_at(i)->id, id) < bc_text_distance(best, id))
+        if (bc_text_unlikeness(id, bc_quantity_at(i)->id) < bc_text_unlikeness(id, best))
             best = bc_quantity_at(i)->id;
     bc_text_show(shown, sizeof shown, id);
     return bc_fail(err, BC_ERR_USAGE, "unknown quantity '%s'; the nearest known one is '%s' (bluecone list quantities)", shown, best);

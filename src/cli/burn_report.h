@@ -1,0 +1,23 @@
+/* SPDX-License-Identifier: MIT */
+/* burn_report.h - the parts of a combustion report. */
+#ifndef BURN_REPORT_H
+#define BURN_REPORT_H
+
+#include "cli/burn_case.h"
+#include "cli/figures.h"
+
+/* A case with what came of it. */
+typedef struct {
+    burn_setup setup;
+    bc_burn burn;
+    const bc_subject *fuel;
+    const char *family; /* of the composition file; "" when not stated */
+} burn_case_result;
+
+/* Sections, tables, warnings and cautions of a case. */
+bc_status burn_report(report *r, const arguments *a, const burn_case_result *c, bc_error *err);
+
+/* The heat path term by term (--working). */
+void burn_working(report *r, const burn_case_result *c);
+
+#endif
