@@ -17,12 +17,15 @@ typedef struct {
     const char *area;     /* "iso6976", "en437", "thermo", "steam", "formation" ... */
     const char *id;       /* case of the source; several quantities may share one */
     const char *subject;
+    const char *with;     /* oxidant of a flame, gas compared with; "" where there is none */
     const char *quantity;
     const char *unit;
     const char *why;      /* why this tolerance */
     const char *source;   /* published document */
     double combustion_c, metering_c, metering_kpa; /* state; 0 where it has no meaning */
-    double t_k;           /* temperature of thermodynamic and steam checks; 0 otherwise */
+    double t_k;           /* temperature of thermodynamic and steam checks, of the fuel of a flame; 0 otherwise */
+    double oxidant_k;     /* temperature of the oxidant of a flame; 0 otherwise */
+    double lambda;        /* air factor of a flame; 0 otherwise */
     int edition;          /* of ISO 6976; 0 where it has no meaning */
     bool of_uncertainty;  /* the standard uncertainty of the quantity is compared */
     double expected, computed, tolerance; /* in unit */

@@ -63,30 +63,41 @@ static bc_status take_oxygen(const char *purity, burn_setup *s, bc_error *err)
 {
     double fraction = 1.0;
     const char *rest = "";
-    bc_status status = BC_OK;
 
-    if (*purity == ':')
-        status = take_percent("oxidant", purity + 1, &fraction, &rest, err);
-    if (status == BC_OK && *rest != '\0')
+    if (*purity == ':') {
+        const bc_status status = take_percent("oxidant", purity + 1, &fraction, &rest, err);
+
+        if (status != BC_OK)
+            return status;
+    }
+    if (*rest != '\0')
         return bc_fail(err, BC_ERR_USAGE, "--oxidant oxygen%.40s: write the purity as oxygen:95", purity);
-    if (status == BC_OK)
-        status = bc_oxidant_oxygen(fraction, 1.0, &s->physics.oxidant, err);
+    const bc_status status = bc_oxidant_oxygen(fraction, 1.0, &s->physics.oxidant, err);
+
     if (status != BC_OK)
         return blame("oxidant", status, err);
-    (void)snprintf(s->oxidant, sizeof s->oxidant, "oxygen of %.6g %%, rest argon", 100.0 * fraction);
+    if (fraction < 1.0)
+        (void)snprintf(s->oxidant, sizeof s->oxidant, "oxygen of %.6g %%, rest argon", 100.0 * fraction);
+    else
+        (void)snprintf(s->oxidant, sizeof s->oxidant, "pure oxygen");
     return BC_OK;
 }
 
-static bc_status take_enriched(const char *text, burn_setup *s, bc_error *err)
+static bc_status take_enriched(const char *share, burn_setup *s, bc_error *err)
 {
     double fraction = 0.0;
     const char *rest = "";
-    bc_status status = take_percent("oxidant", text, &fraction, &rest, err);
 
-    if (status == BC_OK && *rest != '\0')
-        return bc_fail(err, BC_ERR_USAGE, "--oxidant enriched:%.40s: write the oxygen in per cent, as enriched:28", text);
-    if (status == BC_OK)
-        status = bc_oxidant_enriched(fraction, &s->physics.oxidant, err);
+    if (*share == ':') {
+        const bc_status status = take_percent("oxidant", share + 1, &fraction, &rest, err);
+
+        if (status != BC_OK)
+            return status;
+    }
+    if (*share == '\0' || *rest != '\0')
+        return bc_fail(err, BC_ERR_USAGE, "--oxidant enriched%.40s: write the oxygen in per cent, as enriched:28", share);
+    const bc_status status = bc_oxidant_enriched(fraction, &s->physics.oxidant, err);
+
     if (status != BC_OK)
         return blame("oxidant", status, err);
     (void)snprintf(s->oxidant, sizeof s->oxidant, "air enriched to %.6g %% oxygen", 100.0 * fraction);
@@ -104,9 +115,16 @@ static bc_status take_oxidant_gas(const char *word, burn_setup *s, bc_error *err
     if (status == BC_OK) {
         s->physics.oxidant = gas->gas;
         (void)snprintf(s->oxidant, sizeof s->oxidant, "%.120s", gas->name);
+        s->remark_count = gas->composition.remark_count;
+        memcpy(s->remarks, gas->composition.remarks, sizeof s->remarks);
     }
     free(gas);
-    return status;
+    if (status == BC_OK || !err || err->file[0] != '\0')
+        return status;
+    char cause[BC_MESSAGE_MAX];
+
+    (void)snprintf(cause, sizeof cause, "%s", err->message);
+    return bc_fail(err, status, "--oxidant: %.460s", cause);
 }
 
 static bc_status take_oxidant(const arguments *a, burn_setup *s, bc_error *err)
@@ -114,12 +132,13 @@ static bc_status take_oxidant(const arguments *a, burn_setup *s, bc_error *err)
     const char *word = a->value[OPTION_oxidant];
 
     (void)snprintf(s->oxidant, sizeof s->oxidant, "dry air");
-    if (!word || strcmp(word, "air") == 0)
+    s->is_air = !word || strcmp(word, "air") == 0;
+    if (s->is_air)
         return BC_OK;
     if (strcmp(word, "oxygen") == 0 || strncmp(word, "oxygen:", 7) == 0)
         return take_oxygen(word + 6, s, err);
-    if (strncmp(word, "enriched:", 9) == 0)
-        return take_enriched(word + 9, s, err);
+    if (strcmp(word, "enriched") == 0 || strncmp(word, "enriched:", 9) == 0)
+        return take_enriched(word + 8, s, err);
     return take_oxidant_gas(word, s, err);
 }
 
@@ -133,6 +152,9 @@ static bc_status water_of(const char *text, const bc_burn_case *c, double *x_wat
 
     if (strncmp(text, "dew:", 4) == 0) {
         status = bc_measure_parse(text + 4, "K", "C", &t_k, err);
+        if (status == BC_OK && t_k > c->oxidant_k)
+            return bc_fail(err, BC_ERR_USAGE, "a dew point of %.6g C is warmer than the air, %.6g C, which would drop its water", t_k - 273.15,
+                           c->oxidant_k - 273.15);
         return status == BC_OK ? bc_humidity_dew_point(t_k, c->p_pa, x_water, err) : status;
     }
     if (strncmp(text, "wet-bulb:", 9) == 0) {
@@ -140,9 +162,9 @@ static bc_status water_of(const char *text, const bc_burn_case *c, double *x_wat
         return status == BC_OK ? bc_humidity_wet_bulb(c->oxidant_k, t_k, c->p_pa, x_water, err) : status;
     }
     status = bc_number_prefix(text, &relative, &rest, err);
-    if (status != BC_OK)
+    if (status != BC_OK && strpbrk(text, "0123456789"))
         return status;
-    if (strcmp(rest, "%") != 0 && *rest != '\0')
+    if (status != BC_OK || (strcmp(rest, "%") != 0 && *rest != '\0'))
         return bc_fail(err, BC_ERR_USAGE, "'%.40s' is not understood; write 60%%, dew:12C or wet-bulb:18C", text);
     return bc_humidity_relative(relative / 100.0, c->oxidant_k, c->p_pa, x_water, err);
 }
@@ -162,7 +184,7 @@ static bc_status take_humidity(const arguments *a, burn_setup *s, bc_error *err)
     if (status != BC_OK)
         return blame("humidity", status, err);
     s->physics.oxidant = wet;
-    const size_t used = strncmp(s->oxidant, "dry air", 7) == 0 ? 0 : strlen(s->oxidant);
+    const size_t used = s->is_air ? 0 : strlen(s->oxidant);
 
     (void)snprintf(s->oxidant + used, sizeof s->oxidant - used, "%s %.4g mol-%% water", used ? "," : "air with", 100.0 * x_water);
     return BC_OK;
@@ -264,7 +286,7 @@ static bc_status take_rate(const arguments *a, const bc_subject *fuel, burn_setu
     return s->duty_w > 0.0 ? BC_OK : bc_fail(err, BC_ERR_USAGE, "--duty: the useful heat is above zero");
 }
 
-static bc_status take_reading_unit(const char *unit, reading *r, bc_error *err)
+static bc_status take_reading_unit(const char *text, const char *unit, reading *r, bc_error *err)
 {
     static const struct {
         const char *unit;
@@ -281,7 +303,7 @@ static bc_status take_reading_unit(const char *unit, reading *r, bc_error *err)
             r->value *= FORMS[i].si;
             return BC_OK;
         }
-    return bc_fail(err, BC_ERR_USAGE, "--reading: '%.20s' is no unit of a reading; write ppm, mg/m3, mg/m3ref (at the reference oxygen) or mg/MJ", unit);
+    return bc_fail(err, BC_ERR_USAGE, "--reading %.40s: write ppm, mg/m3, mg/m3ref (at the reference oxygen) or mg/MJ behind the number", text);
 }
 
 /* One of nox=120ppm, co=50mg/m3 ... */
@@ -306,7 +328,9 @@ static bc_status take_reading(const char *text, reading *r, bc_error *err)
 
         if (status != BC_OK)
             return blame("reading", status, err);
-        return take_reading_unit(rest, r, err);
+        if (r->value < 0.0)
+            return bc_fail(err, BC_ERR_USAGE, "--reading %.40s: a reading is not negative", text);
+        return take_reading_unit(text, rest, r, err);
     }
     return bc_fail(err, BC_ERR_USAGE, "--reading: '%s' is none of nox, co, so2", word);
 }
@@ -351,7 +375,26 @@ static bc_status take_conditions(const arguments *a, burn_setup *s, bc_error *er
         status = take_share(a, OPTION_casing_loss, "casing-loss", &c->casing_loss, err);
     if (status == BC_OK)
         status = take_share(a, OPTION_reference_o2, "reference-o2", &s->reference_o2, err);
+    if (status == BC_OK && !(s->reference_o2 >= 0.0 && s->reference_o2 < BC_EMISSION_AIR_EU))
+        return bc_fail(err, BC_ERR_USAGE, "--reference-o2: %.6g %% is not from 0 to below %g %%, the oxygen of air", 100.0 * s->reference_o2,
+                       100.0 * BC_EMISSION_AIR_EU);
     return status;
+}
+
+/* Lack of oxidant has no useful heat and no flue gas of complete combustion that these could apply to. */
+static bc_status check_rich(const arguments *a, double lambda, bc_error *err)
+{
+    static const struct {
+        int option;
+        const char *word;
+    } COMPLETE[] = {{OPTION_rate, "rate"}, {OPTION_duty, "duty"}, {OPTION_casing_loss, "casing-loss"}, {OPTION_so3, "so3"},
+                    {OPTION_reading, "reading"}, {OPTION_reference_o2, "reference-o2"}, {OPTION_working, "working"}};
+
+    for (size_t i = 0; i < BC_COUNT(COMPLETE) && lambda < 1.0; i++)
+        if (a->value[COMPLETE[i].option])
+            return bc_fail(err, BC_ERR_USAGE, "--%s needs complete combustion, but the air factor is %.6g; leave it out, or state 1 or more",
+                           COMPLETE[i].word, lambda);
+    return BC_OK;
 }
 
 bc_status burn_setup_from(const arguments *a, const bc_subject *fuel, burn_setup *setup, bc_error *err)
@@ -365,6 +408,8 @@ bc_status burn_setup_from(const arguments *a, const bc_subject *fuel, burn_setup
         status = take_humidity(a, &s, err);
     if (status == BC_OK)
         status = take_lambda(a, &s, err);
+    if (status == BC_OK)
+        status = check_rich(a, s.physics.lambda, err);
     if (status == BC_OK)
         status = take_rate(a, fuel, &s, err);
     if (status == BC_OK)

@@ -23,6 +23,9 @@ typedef enum { RATE_NONE, RATE_FUEL, RATE_DUTY } rate_kind;
 typedef struct {
     bc_burn_case physics;
     char oxidant[160];      /* in words */
+    bool is_air;            /* dry or humid air, nothing else */
+    size_t remark_count;    /* what was changed in the composition of the oxidant, or is strange about it */
+    char remarks[BC_REMARK_MAX][BC_REMARK_BYTES];
     char lambda_from[64];   /* "stated", "from 3 % O2 in dry flue gas" */
     rate_kind rate;
     double fuel_mol_per_s;  /* RATE_FUEL */

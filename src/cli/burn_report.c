@@ -3,7 +3,6 @@
 #include "cli/burn_report.h"
 
 #include "base/error_internal.h"
-#include "bluecone/flammability.h"
 
 #include <math.h>
 #include <stdio.h>
@@ -43,13 +42,14 @@ static void add_case(report *r, const arguments *a, const burn_case_result *c)
 {
     const bc_burn_case *p = &c->setup.physics;
     const size_t table = report_add_table(r, "case", "Case");
+    const bool humidified = a->value[OPTION_humidity] != NULL;
     char text[64];
 
     report_lead_with(r, table);
     report_add_column(r, table, "what", "what", "");
     report_add_column(r, table, "value", "value", "");
     report_add_column(r, table, "how", "how", "");
-    add_case_row(r, table, "oxidant", c->setup.oxidant, or_default(a, OPTION_oxidant));
+    add_case_row(r, table, "oxidant", c->setup.oxidant, humidified ? "stated" : or_default(a, OPTION_oxidant));
     (void)snprintf(text, sizeof text, "%.6g", p->lambda);
     add_case_row(r, table, "air factor lambda", text, c->setup.lambda_from);
     (void)snprintf(text, sizeof text, "%.6g C", p->fuel_k - T0_K);
@@ -61,7 +61,11 @@ static void add_case(report *r, const arguments *a, const burn_case_result *c)
     (void)snprintf(text, sizeof text, "%.6g kPa", p->p_pa * 1e-3);
     add_case_row(r, table, "pressure", text, or_default(a, OPTION_pressure));
     (void)snprintf(text, sizeof text, "%.4g %% of net heat", PERCENT * p->casing_loss);
-    add_case_row(r, table, "casing loss", text, or_default(a, OPTION_casing_loss));
+    if (!c->burn.rich)
+        add_case_row(r, table, "casing loss", text, or_default(a, OPTION_casing_loss));
+    (void)snprintf(text, sizeof text, "%.4g %% of SO2", PERCENT * p->so3_conversion);
+    if (c->burn.has_acid)
+        add_case_row(r, table, "SO3 formed", text, or_default(a, OPTION_so3));
 }
 
 static void add_oxidant(report *r, const arguments *a, const burn_case_result *c)
@@ -81,28 +85,38 @@ static void add_oxidant(report *r, const arguments *a, const burn_case_result *c
     add_figures(&where, a, figures, BC_COUNT(figures));
 }
 
-static bc_status add_flue(report *r, const arguments *a, const burn_case_result *c, bc_error *err)
+/* Takes the condensate out of a flue gas at its exit. */
+static void take_condensate_out(const burn_case_result *c, bc_flue_volume *hot)
+{
+    const bc_heat_path *path = &c->burn.path;
+
+    if (!(path->condensate_mol > 0.0))
+        return;
+    const double condensate_kg = path->condensate_mol * bc_species_molar_mass_kg_per_mol(species_index("water"));
+    const double left_kg = hot->wet_m3 * hot->wet_kg_per_m3 - condensate_kg / c->fuel->value.molar_volume_m3_per_mol;
+
+    hot->wet_m3 *= path->condensation.exit_mol;
+    hot->wet_kg_per_m3 = hot->wet_m3 > 0.0 ? left_kg / hot->wet_m3 : 0.0;
+}
+
+static bc_status add_flue(report *r, const arguments *a, const burn_case_result *c, const bc_flue_volume *metered, bc_error *err)
 {
     const bc_flue *f = &c->burn.flue;
-    const bc_state *state = &c->fuel->reference->state;
-    const double fuel_volume = c->fuel->value.molar_volume_m3_per_mol;
-    const slot where = {r, report_add_section(r, "flue", "Flue gas, complete combustion"), 0};
-    bc_flue_volume metered;
+    const slot where = {r, report_add_section(r, "flue", "Flue gas, complete combustion (m3/m3: per m3 of real fuel)"), 0};
     bc_flue_volume hot;
     double co2_max = 0.0;
-    bc_status status = bc_flue_volume_at(f, state->metering_c + T0_K, state->metering_pa, fuel_volume, &metered, err);
+    bc_status status = bc_flue_volume_at(f, c->setup.physics.exit_k, c->setup.physics.p_pa, c->fuel->value.molar_volume_m3_per_mol, &hot, err);
 
-    if (status == BC_OK)
-        status = bc_flue_volume_at(f, c->setup.physics.exit_k, c->setup.physics.p_pa, fuel_volume, &hot, err);
     if (status == BC_OK)
         status = bc_flue_co2_max(&c->setup.physics.fuel, &co2_max, err);
     if (status != BC_OK)
         return status;
+    take_condensate_out(c, &hot);
     const plain_figure figures[] = {
-        {"flue-volume-wet", "Wet flue gas at the metering state", metered.wet_m3, "m3/m3", 5, "ideal gas"},
-        {"flue-volume-dry", "Dry flue gas at the metering state", metered.dry_m3, "m3/m3", 5, "ideal gas"},
+        {"flue-volume-wet", "Wet flue gas at the metering state", metered->wet_m3, "m3/m3", 5, "ideal gas"},
+        {"flue-volume-dry", "Dry flue gas at the metering state", metered->dry_m3, "m3/m3", 5, "ideal gas"},
         {"flue-volume-hot", "Wet flue gas as it leaves", hot.wet_m3, "m3/m3", 5, "ideal gas"},
-        {"flue-density", "Density of wet flue gas, metering state", metered.wet_kg_per_m3, "kg/m3", 5, "ideal gas"},
+        {"flue-density", "Density of wet flue gas, metering state", metered->wet_kg_per_m3, "kg/m3", 5, "ideal gas"},
         {"flue-density-hot", "Density of wet flue gas as it leaves", hot.wet_kg_per_m3, "kg/m3", 5, "ideal gas"},
         {"flue-molar-mass", "Molar mass of wet flue gas", f->wet_kg_per_mol * 1e3, "g/mol", 5, "atom balance"},
         {"flue-mass", "Wet flue gas per mass of fuel", f->wet_kg_per_mol * f->wet_mol / f->fuel_kg_per_mol, "kg/kg", 5, "atom balance"},
@@ -119,12 +133,15 @@ static bc_status add_flue(report *r, const arguments *a, const burn_case_result 
 static void add_flue_table(report *r, const burn_case_result *c)
 {
     const bc_flue *f = &c->burn.flue;
+    const bool condenses = c->burn.path.condensate_mol > 0.0;
     const size_t table = report_add_table(r, "flue-composition", "Flue gas composition, complete combustion");
 
     report_add_column(r, table, "species", "species", "");
     report_add_column(r, table, "wet", "wet", "mol-%");
     report_add_column(r, table, "dry", "dry", "mol-%");
     report_add_column(r, table, "mass", "per fuel", "kg/kg");
+    if (condenses)
+        report_add_column(r, table, "exit", "as it leaves", "mol-%");
     for (size_t i = 0; i < bc_species_count(); i++) {
         if (f->wet.x[i] < TRACE)
             continue;
@@ -135,6 +152,8 @@ static void add_flue_table(report *r, const burn_case_result *c)
         else
             report_add_text(r, table, "-");
         report_add_number(r, table, f->wet.x[i] * f->wet_mol * bc_species_molar_mass_kg_per_mol(i) / f->fuel_kg_per_mol, 5);
+        if (condenses)
+            report_add_number(r, table, PERCENT * c->burn.path.condensation.exit.x[i], 4);
     }
 }
 
@@ -278,7 +297,7 @@ static void add_flame(report *r, const arguments *a, const burn_case_result *c)
 }
 
 /* The heat path, positive when heat is given off. */
-static void add_heat(report *r, const arguments *a, const burn_case_result *c)
+static void add_heat(report *r, const arguments *a, const burn_case_result *c, const bc_flue_volume *metered)
 {
     const bc_heat_path *p = &c->burn.path;
     const bc_heat_yield *y = &c->burn.yield;
@@ -292,7 +311,7 @@ static void add_heat(report *r, const arguments *a, const burn_case_result *c)
         {"path-condensation", "Condensation at the exit temperature", p->condensation_j * 1e-3, "kJ/mol", 6, "NASA/TP-2002-211556"},
         {"path-total", "Sum", p->total_j * 1e-3, "kJ/mol", 6, "NASA/TP-2002-211556"},
         {"heat-released", "Heat given off per volume of fuel", y->released_j / fuel_volume * 1e-6, "MJ/m3", 5, "NASA/TP-2002-211556"},
-        {"heat-per-oxidant", "Heat given off per volume of oxidant", y->released_per_oxidant_j / fuel_volume * 1e-6, "MJ/m3", 5, "NASA/TP-2002-211556"},
+        {"heat-per-oxidant", "Heat given off per volume of oxidant", y->released_j / fuel_volume / metered->oxidant_m3 * 1e-6, "MJ/m3", 5, "NASA/TP-2002-211556"},
     };
 
     add_figures(&where, a, figures, BC_COUNT(figures));
@@ -308,13 +327,14 @@ static void add_efficiency(report *r, const arguments *a, const burn_case_result
     const plain_figure figures[] = {
         {"stack-loss-net", "Stack loss, of net heat", PERCENT * y->stack_loss_net, "%", 4, "enthalpy path"},
         {"stack-loss-gross", "Stack loss, of gross heat", PERCENT * y->stack_loss_gross, "%", 4, "enthalpy path"},
-        {"casing-loss-net", "Casing loss, of net heat", PERCENT * y->casing_loss_net, "%", 4, "stated"},
+        {"casing-loss-net", "Casing loss, of net heat", PERCENT * y->casing_loss_net, "%", 4, or_default(a, OPTION_casing_loss)},
+        {"casing-loss-gross", "Casing loss, of gross heat", PERCENT * y->casing_loss_gross, "%", 4, or_default(a, OPTION_casing_loss)},
         {"efficiency-net", "Efficiency on net heat", PERCENT * y->efficiency_net, "%", 4, "indirect"},
         {"efficiency-gross", "Efficiency on gross heat", PERCENT * y->efficiency_gross, "%", 4, "indirect"},
     };
 
     add_figures(&where, a, figures, BC_COUNT(figures));
-    if (!row || c->burn.path.condensate_mol > 0.0
+    if (!row || !c->setup.is_air || c->burn.path.condensate_mol > 0.0
         || bc_siegert_loss(row, p->exit_k, p->oxidant_k, fraction_of(&c->burn.flue.dry, "oxygen"), &siegert, NULL) != BC_OK)
         return;
     const plain_figure estimate = {"stack-loss-siegert", "Stack loss by Siegert, for comparison", PERCENT * siegert, "%", 4, "Siegert"};
@@ -338,6 +358,7 @@ static bc_status add_rates(report *r, const arguments *a, const burn_case_result
     const slot where = {r, report_add_section(r, "rate", "Rates"), 0};
     const bc_flue_flow flow = bc_flue_flow_at(&b->flue, rate);
     const double hour = 3600.0;
+    const bool condenses = b->path.condensate_mol > 0.0;
     const plain_figure figures[] = {
         {"duty", "Useful heat", bc_heat_duty_w(&b->yield, rate) * 1e-3, "kW", 5, "indirect"},
         {"input-net", "Heat input, net", rate * c->fuel->value.net_j_per_mol * 1e-3, "kW", 5, "ISO 6976"},
@@ -345,51 +366,20 @@ static bc_status add_rates(report *r, const arguments *a, const burn_case_result
         {"fuel-volume-rate", "Fuel at the metering state", rate * c->fuel->value.molar_volume_m3_per_mol * hour, "m3/h", 5, "ISO 6976"},
         {"fuel-mass-rate", "Fuel", flow.fuel_kg * hour, "kg/h", 5, "atom balance"},
         {"oxidant-mass-rate", "Oxidant", flow.oxidant_kg * hour, "kg/h", 5, "atom balance"},
-        {"flue-mass-rate", "Wet flue gas", flow.wet_kg * hour, "kg/h", 5, "atom balance"},
+        {"flue-mass-rate", condenses ? "Wet flue gas before condensation" : "Wet flue gas", flow.wet_kg * hour, "kg/h", 5, "atom balance"},
         {"co2-mass-rate", "Carbon dioxide", flow.carbon_dioxide_kg * hour, "kg/h", 5, "atom balance"},
-        {"water-mass-rate", "Water formed", flow.water_kg * hour, "kg/h", 5, "atom balance"},
+        {"water-mass-rate", condenses ? "Water before condensation" : "Water in the flue gas", flow.water_kg * hour, "kg/h", 5, "atom balance"},
+    };
+    const plain_figure others[] = {
+        {"so2-mass-rate", "Sulfur dioxide", flow.sulfur_dioxide_kg * hour, "kg/h", 5, "atom balance"},
         {"condensate-mass-rate", "Condensate", b->path.condensate_mol * bc_species_molar_mass_kg_per_mol(species_index("water")) * rate * hour,
          "kg/h", 5, "water balance"},
     };
 
-    add_figures(&where, a, figures, BC_COUNT(figures) - (b->path.condensate_mol > 0.0 ? 0 : 1));
+    add_figures(&where, a, figures, BC_COUNT(figures));
+    add_figures(&where, a, others, flow.sulfur_dioxide_kg > 0.0 ? 1 : 0);
+    add_figures(&where, a, others + 1, condenses ? 1 : 0);
     return BC_OK;
-}
-
-/* Limits in air and burning velocity where the rules reach; a warning says where they do not. */
-static void add_safety(report *r, const arguments *a, const burn_case_result *c)
-{
-    const slot where = {r, report_add_section(r, "safety", "In air at 25 C, 101.325 kPa (estimates)"), 0};
-    bc_flammability f;
-    bc_burning_velocity v;
-    bc_error err;
-
-    if (bc_flammability_of(&c->setup.physics.fuel, &f, &err) != BC_OK)
-        report_add_warning(r, err.message);
-    else if (f.verdict == BC_NOT_FLAMMABLE)
-        report_add_warning(r, "By Le Chatelier's rule and ISO 10156 the gas is not flammable in air at 25 C; it may still burn preheated.");
-    else {
-        const plain_figure limits[] = {{"lfl", "Lower flammability limit", PERCENT * f.lfl, "%", 3, "Le Chatelier, USBM Bulletin 627"},
-                                       {"ufl", "Upper flammability limit", PERCENT * f.ufl, "%", 3, "Le Chatelier, USBM Bulletin 627"}};
-
-        add_figures(&where, a, limits, f.has_lfl ? 1 : 0);
-        add_figures(&where, a, limits + 1, f.has_ufl ? 1 : 0);
-        if (f.outside_rule)
-            report_add_warning(r, "The flammability limits hold hydrogen sulfide, carbon disulfide or ethyne, for which Le Chatelier's rule fails.");
-        if (f.with_oxygen)
-            report_add_warning(r, "The gas holds more than 3 % oxygen: it may itself be near an explosive mixture.");
-    }
-    if (bc_burning_velocity_of(&c->setup.physics.fuel, &v, &err) != BC_OK) {
-        report_add_warning(r, err.message);
-        return;
-    }
-    const plain_figure velocity = {"burning-velocity", "Laminar burning velocity", PERCENT * v.value_m_per_s, "cm/s", 3,
-                                   "Di Sarli and Di Benedetto 2007"};
-
-    if (v.in_range)
-        add_figures(&where, a, &velocity, 1);
-    else
-        report_add_warning(r, "Burning velocity: the gas has over 50 % hydrogen in its combustibles, outside the mixing rule; none is given.");
 }
 
 static void add_rich(report *r, const arguments *a, const burn_case_result *c)
@@ -404,14 +394,21 @@ static void add_rich(report *r, const arguments *a, const burn_case_result *c)
 
     add_figures(&where, a, figures, BC_COUNT(figures));
     add_mixture(r, "flue-equilibrium", "Flue gas as it leaves: equilibrium, frozen below 1227 C", &b->exit);
-    report_add_warning(r, "The burner lacks oxidant: the flue gas holds carbon monoxide and hydrogen; soot is not modelled.");
+    report_add_warning(r, "The burner lacks oxidant: the flue gas holds carbon monoxide and hydrogen; soot and condensation are not modelled.");
     report_set_verdict(r, "lack of oxidant: carbon monoxide forms");
 }
 
 static void warn_case(report *r, const burn_case_result *c)
 {
     const bc_burn *b = &c->burn;
+    char text[BC_REMARK_BYTES + 16];
 
+    for (size_t i = 0; i < c->setup.remark_count; i++) {
+        (void)snprintf(text, sizeof text, "Oxidant: %s", c->setup.remarks[i]);
+        report_add_warning(r, text);
+    }
+    if (!b->rich && b->dew.exists && c->setup.physics.exit_k < b->dew.t_k && !(b->path.condensate_mol > 0.0))
+        report_add_warning(r, "The flue gas leaves below 0 C: water would come out as ice, which is not computed; all of it is counted as vapour.");
     if (b->has_acid && !b->acid.in_range)
         report_add_warning(r, "Acid dew points: SO3 or water is outside the range of the correlations (SO3 0.1 to 200 ppm, water 3 to 30 %).");
     if (!b->rich && b->path.condensate_mol > 0.0)
@@ -422,8 +419,13 @@ static void warn_case(report *r, const burn_case_result *c)
 
 static bc_status add_complete(report *r, const arguments *a, const burn_case_result *c, bc_error *err)
 {
-    bc_status status = add_flue(r, a, c, err);
+    const bc_state *state = &c->fuel->reference->state;
+    bc_flue_volume metered;
+    bc_status status = bc_flue_volume_at(&c->burn.flue, state->metering_c + T0_K, state->metering_pa, c->fuel->value.molar_volume_m3_per_mol,
+                                         &metered, err);
 
+    if (status == BC_OK)
+        status = add_flue(r, a, c, &metered, err);
     if (status != BC_OK)
         return status;
     add_flue_table(r, c);
@@ -431,7 +433,7 @@ static bc_status add_complete(report *r, const arguments *a, const burn_case_res
     if (status != BC_OK)
         return status;
     add_dew_points(r, a, c);
-    add_heat(r, a, c);
+    add_heat(r, a, c, &metered);
     add_efficiency(r, a, c);
     return add_rates(r, a, c, err);
 }
@@ -452,7 +454,7 @@ bc_status burn_report(report *r, const arguments *a, const burn_case_result *c, 
         status = add_emissions(r, a, c, err);
     if (status != BC_OK)
         return status;
-    add_safety(r, a, c);
+    burn_safety(r, a, c);
     warn_case(r, c);
     if (a->value[OPTION_working] && !c->burn.rich)
         burn_working(r, c);

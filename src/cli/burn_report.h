@@ -17,6 +17,9 @@ typedef struct {
 /* Sections, tables, warnings and cautions of a case. */
 bc_status burn_report(report *r, const arguments *a, const burn_case_result *c, bc_error *err);
 
+/* Limits in air and burning velocity of the fuel. */
+void burn_safety(report *r, const arguments *a, const burn_case_result *c);
+
 /* The heat path term by term (--working). */
 void burn_working(report *r, const burn_case_result *c);
 

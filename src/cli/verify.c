@@ -55,7 +55,9 @@ static void add_columns(report *r, size_t table)
 
 static void describe_state(const bc_check *c, char *text, size_t size)
 {
-    if (c->edition != 0)
+    if (c->lambda > 0.0)
+        (void)snprintf(text, size, "lambda %.4g, %.5g/%.5g K, %.6g kPa", c->lambda, c->t_k, c->oxidant_k, c->metering_kpa);
+    else if (c->edition != 0)
         (void)snprintf(text, size, "%.6g/%.6g@%.6gkPa %d", c->combustion_c, c->metering_c, c->metering_kpa, c->edition);
     else
         (void)snprintf(text, size, "%.6g K", c->t_k);

@@ -5,6 +5,7 @@
 #include "base/compiler.h"
 #include "base/error_internal.h"
 #include "bluecone/composition.h"
+#include "bluecone/flame.h"
 #include "bluecone/quantity.h"
 #include "bluecone/steam.h"
 #include "bluecone/thermo.h"
@@ -19,28 +20,34 @@
 #define T0_K 273.15
 #define T_FORMATION_K 298.15
 
-typedef enum { GAS_VALUE, GAS_U, THERMO_VALUE, STEAM_VALUE } check_kind;
+typedef enum { GAS_VALUE, GAS_U, THERMO_VALUE, STEAM_VALUE, FLAME_VALUE } check_kind;
 
 /* Texts stand in the row itself: pointers would be relocated at the start of every program that links
  * the library, for a table that only `verify` reads. */
 typedef struct {
     check_kind kind;
-    char area[16], id[40], subject[320], quantity[28], unit[16], why[160], source[180];
+    char area[16], id[40], subject[320], with[64], quantity[28], unit[16], why[160], source[180];
     int edition;
-    double combustion_c, metering_c, metering_kpa, t_k;
+    double combustion_c, metering_c, metering_kpa, t_k, oxidant_k, lambda;
     double expected, tolerance;
 } check_row;
 
 static const check_row ROWS[] = {
 #define CHECK_GAS(area, id, gas, edition, t1, t2, p, quantity, expected, unit, tolerance, why, source) \
-    {GAS_VALUE, area, id, gas, quantity, unit, why, source, edition, t1, t2, p, 0.0, expected, tolerance},
+    {GAS_VALUE, area, id, gas, "", quantity, unit, why, source, edition, t1, t2, p, 0.0, 0.0, 0.0, expected, tolerance},
 #define CHECK_U(area, id, gas, edition, t1, t2, p, quantity, expected, unit, tolerance, why, source) \
-    {GAS_U, area, id, gas, quantity, unit, why, source, edition, t1, t2, p, 0.0, expected, tolerance},
+    {GAS_U, area, id, gas, "", quantity, unit, why, source, edition, t1, t2, p, 0.0, 0.0, 0.0, expected, tolerance},
 #define CHECK_THERMO(area, symbol, quantity, t_k, expected, unit, tolerance, why, source) \
-    {THERMO_VALUE, area, symbol, symbol, quantity, unit, why, source, 0, 0.0, 0.0, 0.0, t_k, expected, tolerance},
+    {THERMO_VALUE, area, symbol, symbol, "", quantity, unit, why, source, 0, 0.0, 0.0, 0.0, t_k, 0.0, 0.0, expected, tolerance},
 #define CHECK_STEAM(quantity, t_c, expected, tolerance, why, source) \
-    {STEAM_VALUE, "steam", "water", "water", quantity, "Pa", why, source, 0, 0.0, 0.0, 0.0, (t_c) + T0_K, expected, tolerance},
+    {STEAM_VALUE, "steam", "water", "water", "", quantity, "Pa", why, source, 0, 0.0, 0.0, 0.0, (t_c) + T0_K, 0.0, 0.0, expected, tolerance},
 #include "data/checks.def"
+#define CHECK_FLUE(area, id, gas, quantity, expected, unit, tolerance, why, source) \
+    {GAS_VALUE, area, id, gas, "", quantity, unit, why, source, 2016, 25.0, 15.0, 101.325, 0.0, 0.0, 0.0, expected, tolerance},
+#include "data/checks_flue.def"
+#define CHECK_FLAME(area, id, fuel, oxidant, lambda, t_fuel, t_oxidant, p, quantity, expected, tolerance, why, source) \
+    {FLAME_VALUE, area, id, fuel, oxidant, quantity, "K", why, source, 0, 0.0, 0.0, p, t_fuel, t_oxidant, lambda, expected, tolerance},
+#include "data/checks_flame.def"
 };
 
 /* Fuels of ISO 6976:2016: the formation checks, one a row of the standard that burns. */
@@ -156,6 +163,34 @@ static bc_status run_gas(bc_check *check, bc_error *err)
     return convert(check, bc_quantity_at(quantity), &check->computed, err);
 }
 
+static bc_status read_literal(const char *literal, bc_gas *gas, bc_error *err)
+{
+    bc_composition c;
+    const bc_status status = bc_composition_parse(literal, &c, err);
+
+    if (status == BC_OK)
+        *gas = c.gas;
+    return status;
+}
+
+static bc_status run_flame(bc_check *check, bc_error *err)
+{
+    const bool complete = strcmp(check->quantity, "flame-temperature-complete") == 0;
+    bc_reactants r = {.fuel_t_k = check->t_k, .oxidant_t_k = check->oxidant_k, .p_pa = check->metering_kpa * 1e3};
+    bc_mixture flame;
+    bc_status status = read_literal(check->subject, &r.fuel, err);
+
+    if (status == BC_OK)
+        status = read_literal(check->with, &r.oxidant, err);
+    if (status == BC_OK)
+        status = bc_oxidant_for_lambda(&r.fuel, &r.oxidant, check->lambda, &r.oxidant_per_fuel, err);
+    if (status == BC_OK)
+        status = complete ? bc_flame_complete(&r, &flame, err) : bc_flame_equilibrium(&r, &flame, err);
+    if (status == BC_OK)
+        check->computed = flame.t_k;
+    return status;
+}
+
 static void run_formation(size_t fuel, bc_check *check)
 {
     const size_t species = FUELS[fuel].species;
@@ -169,7 +204,7 @@ static void run_formation(size_t fuel, bc_check *check)
         }
     if (bc_thermo_origin_of(species) == BC_THERMO_FITTED)
         why = "0.1 %, arithmetic only: the formation enthalpy of this species was set from the same heat";
-    *check = (bc_check){.area = "formation", .id = bc_species_id(species), .subject = bc_species_id(species), .quantity = "hhv-formation",
+    *check = (bc_check){.area = "formation", .id = bc_species_id(species), .subject = bc_species_id(species), .with = "", .quantity = "hhv-formation",
                         .unit = "kJ/mol", .why = why, .source = FUELS[fuel].source, .combustion_c = 25.0, .t_k = T_FORMATION_K,
                         .expected = FUELS[fuel].expected_kj_per_mol};
     /* an inert gas has a heat of nothing: 0.01 kJ/mol is the last printed digit of the standard */
@@ -179,15 +214,17 @@ static void run_formation(size_t fuel, bc_check *check)
 
 static bc_status run_row(const check_row *row, bc_check *check, bc_error *err)
 {
-    *check = (bc_check){.area = row->area, .id = row->id, .subject = row->subject, .quantity = row->quantity, .unit = row->unit,
+    *check = (bc_check){.area = row->area, .id = row->id, .subject = row->subject, .with = row->with, .quantity = row->quantity, .unit = row->unit,
                         .why = row->why, .source = row->source, .combustion_c = row->combustion_c, .metering_c = row->metering_c,
-                        .metering_kpa = row->metering_kpa, .t_k = row->t_k, .edition = row->edition, .of_uncertainty = row->kind == GAS_U,
+                        .metering_kpa = row->metering_kpa, .t_k = row->t_k, .oxidant_k = row->oxidant_k, .lambda = row->lambda, .edition = row->edition, .of_uncertainty = row->kind == GAS_U,
                         .expected = row->expected, .tolerance = row->tolerance};
     switch (row->kind) {
     case THERMO_VALUE:
         return run_thermo(check, err);
     case STEAM_VALUE:
         return bc_steam_pressure(check->t_k, &check->computed, err);
+    case FLAME_VALUE:
+        return run_flame(check, err);
     case GAS_VALUE:
     case GAS_U:
     default:
