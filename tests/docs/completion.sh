@@ -38,7 +38,7 @@ holds() {
     done
 }
 
-holds 'bluecone ' get list sheet verify --help --version
+holds 'bluecone ' burn get list sheet verify --help --version
 expect 'bluecone sh' 'sheet'
 expect 'bluecone get wobbe-g' 'wobbe-gross wobbe-gross-ideal'
 expect 'bluecone get hhv,relative-density-' 'hhv,relative-density-ideal'
@@ -61,6 +61,17 @@ expect 'bluecone get --at 25/0 wobbe-n' 'wobbe-net wobbe-net-ideal'
 holds 'bluecone sheet g20 -o ' other.txt folder/
 expect 'bluecone sheet --wor' '--working'
 expect 'bluecone sheet --ba' ''
+holds 'bluecone burn ' g20 pipeline-h folder/ sample.ini
+expect 'bluecone burn g20 g2' ''
+expect 'bluecone burn --flue-' '--flue-o2 --flue-temp'
+holds 'bluecone burn --oxidant ' air oxygen oxygen: enriched: sample.ini
+expect 'bluecone burn --oxidant enr' 'enriched:'
+expect 'bluecone burn --oxidant enriched:2' ''
+expect 'bluecone burn --oxidant oxygen=20,nitroge' '20,nitrogen-dioxide= 20,nitrogen='
+expect 'bluecone burn --humidity w' 'wet-bulb:'
+expect 'bluecone burn --reading nox=71ppm,s' '71ppm,so2='
+expect 'bluecone burn --reading nox=71ppm,co=1' ''
+expect 'bluecone burn --excess 10 g20 --unit Btu/sc' 'Btu/scf'
 expect 'bluecone list sp' 'species'
 expect 'bluecone list species n-hexa' 'n-hexane'
 expect 'bluecone list options ver' 'verify'

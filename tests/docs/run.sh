@@ -123,7 +123,7 @@ check_file() {
 # ---- help, pages and lists ------------------------------------------------------------------------
 # Rows "option command" of options.def.
 options_of_table() {
-    sed -n 's/^OPTION([a-z_]*, *"\([^"]*\)", *"[^"]*", *\([A-Z |]*\),.*/\1 \2/p' "$SRC/src/cli/options.def" |
+    sed -n 's/^OPTION([a-z0-9_]*, *"\([^"]*\)", *"[^"]*", *\([A-Z |]*\),.*/\1 \2/p' "$SRC/src/cli/options.def" |
         while read -r option commands; do
             for c in $(printf '%s\n' "$commands" | tr 'A-Z|' 'a-z '); do echo "$option $c"; done
         done
@@ -136,14 +136,14 @@ check_options() {
     test -s "$work/options" || echo 'options.def could not be read' >>"$work/missing"
     while read -r option command; do
         page=$SRC/man/bluecone-$command.1
-        bluecone "$command" --help | grep -q -e "--${option} " || echo "$command --help does not tell --$option" >>"$work/missing"
+        bluecone "$command" --help | grep -q -e "--$option\( \|\$\)" || echo "$command --help does not tell --$option" >>"$work/missing"
         grep -q "^\.It.* Fl -$option\( \|\$\)" "$page" || echo "${page##*/} does not tell --$option" >>"$work/missing"
     done <"$work/options"
     point 'every option stands in the help and the page of its command' "$work/missing"
 
     : >"$work/missing"
     for command in $(bluecone list commands --bare); do
-        sed -n 's/^\.It.* Fl -\([a-z-]*\).*/\1/p' "$SRC/man/bluecone-$command.1" | while read -r option; do
+        sed -n 's/^\.It.* Fl -\([a-z0-9-]*\).*/\1/p' "$SRC/man/bluecone-$command.1" | while read -r option; do
             grep -qx "$option $command" "$work/options" || echo "bluecone-$command(1) tells --$option, which is none" >>"$work/missing"
         done
     done
@@ -183,13 +183,18 @@ check_help() {
     point 'every help fits a screen' "$work/missing"
 }
 
-# check_listed TOPIC FILE EXPRESSION: the ids that sed finds in a table are those of `list TOPIC`.
+# check_listed TOPIC EXPRESSION FILE...: the ids that sed finds in the tables are those of `list TOPIC`.
 check_listed() {
-    sed -n "$3" "$SRC/$2" | sort >"$work/table"
-    bluecone list "$1" --bare | sort >"$work/listed"
-    test -s "$work/table" || echo "$2 could not be read" >"$work/table"
+    local topic=$1 expression=$2 file
+    shift 2
+    for file; do
+        sed -n "$expression" "$SRC/$file" >"$work/rows"
+        test -s "$work/rows" || echo "$file could not be read"
+        cat "$work/rows"
+    done | sort >"$work/table"
+    bluecone list "$topic" --bare | sort >"$work/listed"
     diff "$work/table" "$work/listed" >"$work/missing"
-    point "list $1 has every row of ${2##*/}" "$work/missing"
+    point "list $topic has every row of $*" "$work/missing"
 }
 
 check_methods_page() {
@@ -219,8 +224,8 @@ else
     check_options
     check_pages
     check_help
-    check_listed quantities src/value/quantities.def 's/^\(POWER\|OTHER\)("\([^"]*\)".*/\2/p'
-    check_listed methods src/data/methods.def 's/^METHOD("\([^"]*\)".*/\1/p'
+    check_listed quantities 's/^\(POWER\|OTHER\|FLAME\)("\([^"]*\)".*/\2/p' src/value/quantities.def src/flame/quantities_flame.def
+    check_listed methods 's/^METHOD("\([^"]*\)".*/\1/p' src/data/methods.def
     check_methods_page
     test ! -e "$SRC/tests/docs/completion.sh" || bash "$SRC/tests/docs/completion.sh" >"$work/missing" 2>&1
     test ! -e "$SRC/tests/docs/completion.sh" || point 'the completion of bash answers' "$work/missing"

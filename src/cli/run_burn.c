@@ -1,5 +1,5 @@
 /* SPDX-License-Identifier: MIT */
-/* burn.c - what a gas does in a burner: the case, its physics, and the report of it. */
+/* run_burn.c - what a gas does in a burner: the case, its physics, and the report of it. */
 #include "base/error_internal.h"
 #include "cli/burn_report.h"
 

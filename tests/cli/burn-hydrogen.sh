@@ -1,0 +1,2 @@
+# Hydrogen: no carbon anywhere.
+bluecone burn --excess 22 hydrogen=100
