@@ -132,8 +132,8 @@ size_t bc_text_distance(const char *a, const char *b)
 
 size_t bc_text_unlikeness(const char *word, const char *candidate)
 {
-    char folded[BC_WORD_MAX];
-    char whole[BC_WORD_MAX];
+    char folded[BC_WORD_MAX] = "";
+    char whole[BC_WORD_MAX] = "";
 
     if (!bc_text_fold(folded, sizeof folded, word) || !bc_text_fold(whole, sizeof whole, candidate))
         return BC_WORD_MAX;

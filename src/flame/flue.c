@@ -76,7 +76,7 @@ bc_status bc_flue_at(const bc_gas *fuel, const bc_gas *oxidant, double lambda, b
 bc_status bc_flue_co2_max(const bc_gas *fuel, double *x, bc_error *err)
 {
     const bc_gas air = bc_oxidant_air();
-    bc_flue flue;
+    bc_flue flue = {.lambda = 1.0};
     const bc_status status = bc_flue_at(fuel, &air, 1.0, &flue, err);
 
     if (status == BC_OK)
