@@ -39,15 +39,16 @@ MAKEFLAGS += --no-builtin-rules --no-print-directory
 .SUFFIXES:
 .DELETE_ON_ERROR:
 .SECONDARY:
-.PHONY: FORCE all deps deps-build deps-test deps-lint check run-tests sanitize clang demo bench lint metrics \
+.PHONY: FORCE all deps deps-build deps-test deps-lint deps-cross check crosscheck run-tests sanitize clang demo bench lint metrics \
         symbols install uninstall clean help
 
 OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
 VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
 SOVERSION := 0
 
-DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev
-DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags
+DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev
+DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils
+DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv
 DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe
 
 # ---- flags ----------------------------------------------------------------------------------------
@@ -69,6 +70,8 @@ CFLAGS_ALL   = -std=c11 $(WARNINGS) $(CFLAGS.$(VARIANT)) -fvisibility=hidden -fn
 CPPFLAGS_ALL = -D_POSIX_C_SOURCE=200809L -I include -I src $(CPPFLAGS)
 LDFLAGS_ALL  = -Wl,-z,relro,-z,now,-z,noexecstack,--as-needed $(LDFLAGS)
 LDLIBS_LIB  := -liniparser -lm
+# The module for charts, and what it has in common with the program.
+CAIRO        = $(shell $(PKG_CONFIG) $1 cairo cairo-pdf cairo-svg 2>/dev/null)
 JANSSON      = $(shell $(PKG_CONFIG) $1 jansson 2>/dev/null)
 CMOCKA       = $(shell $(PKG_CONFIG) $1 cmocka 2>/dev/null)
 
@@ -80,7 +83,8 @@ LINK     = $(CC) $(CFLAGS_ALL) -fPIE -pie $(LDFLAGS_ALL)
 # ---- sources --------------------------------------------------------------------------------------
 LIB_DIRS    := $(wildcard $(addprefix src/,base gas value flame supply))
 LIB_SRC     := $(sort $(wildcard $(LIB_DIRS:%=%/*.c)))
-PROGRAM_SRC := $(sort $(wildcard src/output/*.c src/cli/*.c))
+CHART_SRC   := $(sort $(wildcard src/output/chart_draw*.c))
+PROGRAM_SRC := $(sort $(filter-out $(CHART_SRC),$(wildcard src/output/*.c src/cli/*.c)))
 TEST_SRC    := $(sort $(wildcard tests/*/test_*.c))
 HEADERS     := $(sort $(wildcard include/bluecone/*.h))
 COMPOSITIONS := $(sort $(wildcard compositions/*.ini))
@@ -90,6 +94,8 @@ SCRIPTS     := $(sort .ci/run .ci/deps $(wildcard tests/*.sh tests/*/*.sh exampl
 
 LIB_OBJ     := $(LIB_SRC:%.c=$(OUT)/%.o)
 PROGRAM_OBJ := $(PROGRAM_SRC:%.c=$(OUT)/%.o)
+CHART_OBJ   := $(CHART_SRC:%.c=$(OUT)/%.o)
+CHART_TOO   := $(OUT)/src/output/number_text.o $(OUT)/src/output/plain_text.o
 PROGRAM_PARTS := $(filter-out %/cli/main.o,$(PROGRAM_OBJ))
 # The house rules judge the released library; the other variants carry their instruments.
 TESTS       := $(filter-out $(if $(filter release,$(VARIANT)),,%/house/test_house),$(TEST_SRC:%.c=$(OUT)/%))
@@ -97,14 +103,16 @@ RUNNER      := $(OUT)/tests/house/run_all
 PROGRAM     := $(OUT)/bluecone
 ARCHIVE     := $(OUT)/libbluecone.a
 SHARED      := $(OUT)/libbluecone.so.$(SOVERSION)
+CHART       := $(OUT)/bluecone_chart.so
 COMPLETION  := $(if $(wildcard src/cli/completion.bash.in),$(OUT)/bluecone.bash)
 
-all: $(PROGRAM) $(ARCHIVE) $(SHARED) $(OUT)/bluecone.pc $(COMPLETION) ## build the program and the library (default)
+all: $(PROGRAM) $(CHART) $(ARCHIVE) $(SHARED) $(OUT)/bluecone.pc $(COMPLETION) ## build the program and the library (default)
 	@echo '$(PROGRAM) is ready'
 
 # ---- rules ----------------------------------------------------------------------------------------
-$(LIB_OBJ):            private MODE = -fPIC
-$(OUT)/src/output/%.o: private EXTRA = $(call JANSSON,--cflags)
+$(LIB_OBJ) $(CHART_OBJ) $(CHART_TOO): private MODE = -fPIC
+$(OUT)/src/output/%.o: private EXTRA = $(call JANSSON,--cflags) -DBC_LIB_DIR='"$(libdir)"'
+$(CHART_OBJ):          private EXTRA = $(call CAIRO,--cflags)
 $(OUT)/src/cli/%.o:    private EXTRA = $(call JANSSON,--cflags) -DBC_DATA_DIR='"$(datadir)/bluecone"'
 $(OUT)/tests/%.o:      private EXTRA = $(call CMOCKA,--cflags) -I tests \
                                -DBC_SOURCE_DIR='"$(CURDIR)"' -DBC_BUILD_DIR='"$(CURDIR)/$(OUT)"'
@@ -131,13 +139,24 @@ $(SHARED): $(LIB_OBJ)
 	@echo '  LD    $@'
 	$(V)$(CC) $(CFLAGS_ALL) -fPIC -shared $(LDFLAGS_ALL) -Wl,-z,defs -Wl,-soname,$(@F) $^ $(LDLIBS_LIB) -o $@
 
+# Loaded when a chart is asked for, so that no other answer waits for Cairo.
+$(CHART): $(CHART_OBJ) $(CHART_TOO)
+	@echo '  LD    $@'
+	$(V)$(CC) $(CFLAGS_ALL) -fPIC -shared $(LDFLAGS_ALL) -Wl,-z,defs $^ $(call CAIRO,--libs) -lm -o $@
+
 $(PROGRAM): $(PROGRAM_OBJ) $(ARCHIVE)
 	@echo '  LD    $@'
-	$(V)$(LINK) $^ $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
+	$(V)$(LINK) $^ $(call JANSSON,--libs) $(LDLIBS_LIB) -ldl -o $@
+
+# A test finds the module beside itself, as the program does.
+$(OUT)/tests/output/test_chart: $(OUT)/src/output/chart_draw_ticks.o $(OUT)/src/output/chart_draw_time.o \
+    $(OUT)/src/output/chart_draw_range.o | $(OUT)/tests/output/bluecone_chart.so
+$(OUT)/tests/output/bluecone_chart.so: $(CHART)
+	@mkdir -p $(@D) && ln -sf $(abspath $<) $@
 
 $(TESTS) $(RUNNER): $(OUT)/%: $(OUT)/%.o $(PROGRAM_PARTS) $(ARCHIVE)
 	@echo '  LD    $@'
-	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
+	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -ldl -o $@
 
 $(OUT)/bluecone.pc: src/bluecone.pc.in include/bluecone/status.h Makefile $(OUT)/flags
 	@sed -e 's|@prefix@|$(prefix)|' -e 's|@libdir@|$(libdir)|' -e 's|@includedir@|$(includedir)|' \
@@ -147,13 +166,14 @@ $(OUT)/bluecone.bash: src/cli/completion.bash.in include/bluecone/status.h Makef
 	@mkdir -p $(@D)
 	@sed 's|@version@|$(VERSION)|' $< >$@
 
--include $(LIB_OBJ:.o=.d) $(PROGRAM_OBJ:.o=.d) $(TESTS:=.d) $(RUNNER).d
+-include $(LIB_OBJ:.o=.d) $(PROGRAM_OBJ:.o=.d) $(CHART_OBJ:.o=.d) $(TESTS:=.d) $(RUNNER).d
 
 # ---- targets --------------------------------------------------------------------------------------
 deps: deps-lint ## install what is missing of the Debian packages used here
 deps-build: ; @.ci/deps $(DEPS_BUILD)
 deps-test:  ; @.ci/deps $(DEPS_TEST)
 deps-lint:  ; @.ci/deps $(DEPS_LINT)
+deps-cross: ; @.ci/deps $(DEPS_CROSS)
 
 # These start make again: what they build may need what `deps` has only just installed.
 check: deps-test ## build with the default compiler and run every test
@@ -165,12 +185,17 @@ clang: deps-lint ## the program, the library and the test programs, by Clang wit
 demo: deps-build ## build, then play the examples
 	@$(MAKE) all
 	$(if $(wildcard examples/demo.sh),@$(IN_BUILD) bash examples/demo.sh)
+crosscheck: deps-cross ## compare with reference libraries from PyPI, pinned
+	@$(MAKE) all
+	@$(IN_BUILD) CC='$(CC)' bash tests/crosscheck/run.sh
+
 bench: deps-build ## build, then measure
 	@$(MAKE) all
 	$(if $(wildcard tests/bench/run.sh),@$(IN_BUILD) bash tests/bench/run.sh)
 
 # How scripts find the source tree and the program just built.
-IN_BUILD = SRC="$(CURDIR)" PATH="$(CURDIR)/$(OUT):$$PATH"
+IN_BUILD = SRC="$(CURDIR)" PATH="$(CURDIR)/$(OUT):$$PATH" \
+    $(if $(filter sanitize,$(VARIANT)),LSAN_OPTIONS="suppressions=$(CURDIR)/tests/house/leaks.supp:print_suppressions=0")
 
 .PHONY: tests
 tests: $(TESTS) $(RUNNER)
@@ -182,8 +207,8 @@ run-tests: all tests
 lint: deps-lint ## cppcheck, clang-tidy, mandoc and shellcheck
 	cppcheck --quiet --std=c11 --enable=warning,performance,portability --inline-suppr --error-exitcode=1 \
 	    --suppress=missingIncludeSystem -D_POSIX_C_SOURCE=200809L '-DBC_DATA_DIR=""' -I include -I src src
-	printf '%s\n' $(LIB_SRC) $(PROGRAM_SRC) | xargs -P 4 -I FILE \
-	    clang-tidy --quiet FILE -- -std=c11 $(CPPFLAGS_ALL) '-DBC_DATA_DIR=""'
+	printf '%s\n' $(LIB_SRC) $(PROGRAM_SRC) $(CHART_SRC) | xargs -P 4 -I FILE \
+	    clang-tidy --quiet FILE -- -std=c11 $(CPPFLAGS_ALL) $(call CAIRO,--cflags) '-DBC_DATA_DIR=""'
 	$(if $(MAN_PAGES),mandoc -T lint -W warning $(MAN_PAGES))
 	shellcheck $(filter-out tests/cli/%,$(SCRIPTS))
 	$(if $(filter tests/cli/%,$(SCRIPTS)),shellcheck --shell=sh $(filter tests/cli/%,$(SCRIPTS)))
@@ -196,10 +221,11 @@ symbols: all ## accept the symbols the shared library exports now
 	@nm -D --defined-only --format=posix $(SHARED) | awk '{ print $$1 }' | LC_ALL=C sort >tests/abi/symbols
 
 install: all ## copy everything below PREFIX (and DESTDIR)
-	$(INSTALL) -d $(foreach d,$(bindir) $(libdir) $(pkgconfigdir) $(includedir)/bluecone \
+	$(INSTALL) -d $(foreach d,$(bindir) $(libdir)/bluecone $(pkgconfigdir) $(includedir)/bluecone \
 	    $(datadir)/bluecone/compositions $(docdir) $(bashcompletiondir),"$(DESTDIR)$d")
 	$(INSTALL_PROGRAM) $(PROGRAM) "$(DESTDIR)$(bindir)/bluecone"
 	$(INSTALL_DATA) $(ARCHIVE) $(SHARED) "$(DESTDIR)$(libdir)"
+	$(INSTALL_DATA) $(CHART) "$(DESTDIR)$(libdir)/bluecone"
 	ln -sf $(notdir $(SHARED)) "$(DESTDIR)$(libdir)/libbluecone.so"
 	$(INSTALL_DATA) $(OUT)/bluecone.pc "$(DESTDIR)$(pkgconfigdir)"
 	$(INSTALL_DATA) $(HEADERS) "$(DESTDIR)$(includedir)/bluecone"
@@ -211,11 +237,11 @@ install: all ## copy everything below PREFIX (and DESTDIR)
 # Folders are removed only when they are ours and empty.
 uninstall: ## remove what install put there
 	rm -f "$(DESTDIR)$(bindir)/bluecone" "$(DESTDIR)$(pkgconfigdir)/bluecone.pc" "$(DESTDIR)$(bashcompletiondir)/bluecone" \
-	    $(foreach f,libbluecone.a libbluecone.so $(notdir $(SHARED)),"$(DESTDIR)$(libdir)/$f") \
+	    $(foreach f,libbluecone.a libbluecone.so $(notdir $(SHARED)) bluecone/$(notdir $(CHART)),"$(DESTDIR)$(libdir)/$f") \
 	    $(HEADERS:include/%="$(DESTDIR)$(includedir)/%") $(COMPOSITIONS:%="$(DESTDIR)$(datadir)/bluecone/%") \
 	    $(foreach f,$(MAN_PAGES),"$(DESTDIR)$(mandir)/man$(subst .,,$(suffix $f))/$(notdir $f)") \
 	    $(foreach f,README.md $(EXAMPLES),"$(DESTDIR)$(docdir)/$f")
-	for d in "$(includedir)/bluecone" "$(datadir)/bluecone" "$(docdir)"; do \
+	for d in "$(includedir)/bluecone" "$(libdir)/bluecone" "$(datadir)/bluecone" "$(docdir)"; do \
 	    test ! -d "$(DESTDIR)$$d" || find "$(DESTDIR)$$d" -depth -type d -empty -delete; done
 
 clean: ## remove build/

@@ -4,7 +4,7 @@
  * What a mixture of given elements becomes when every reaction has run its course: the composition of
  * least Gibbs energy, at a temperature and pressure or at an enthalpy and pressure (an adiabatic flame).
  * Gases only: no liquid water, no soot. Where the elements hold more carbon than oxygen (C/O > 1) soot
- * would form in a real flame; the gas-only result then runs too hot in hydrocarbons and is a formality.
+ * would form in a real flame, and the gas-only result is no more than a formality.
  *
  * Method: Newton's on the element potentials (Gordon and McBride, NASA RP-1311, 1994), standard pressure
  * 1 bar, data of bluecone/thermo.h. Tested for lambda 0.3..20, 250..4500 K, 0.05..100 bar. */

@@ -23,11 +23,6 @@ typedef struct {
     double p_pa;             /* BC_EQUILIBRIUM_P_MIN_PA..BC_EQUILIBRIUM_P_MAX_PA */
 } bc_reactants;
 
-/* Oxygen that a gas needs to burn completely, its own oxygen deducted, mol O2 per mol:
- *   a = C + H/4 + S - O/2   (products CO2, H2O, SO2, N2)
- * Negative for a gas with oxygen to give; exactly 0 for inerts. */
-BC_API double bc_gas_oxygen_need(const bc_gas *gas);
-
 /* Oxidant for a ratio lambda (1/phi): the fuel's need times lambda over what the oxidant gives,
  *   oxidant/fuel = lambda a(fuel) / -a(oxidant),  mol/mol.
  *

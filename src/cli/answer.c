@@ -21,7 +21,7 @@ static bc_status choose_form(const arguments *a, bool brief, render_form *form, 
         const char *slash = strrchr(path, '/');
 
         if (strrchr(slash ? slash : path, '.'))
-            return bc_fail(err, BC_ERR_USAGE, "-o %.200s: the ending is none of .txt, .json, .csv, which give the form; or add --json or --csv", path);
+            return bc_fail(err, BC_ERR_USAGE, "-o %.200s: the ending is none of .txt .json .csv .svg .png .pdf, which give the form; or add --json or --csv", path);
     }
     if (a->value[OPTION_json])
         *form = RENDER_JSON;
@@ -45,7 +45,7 @@ static bc_status choose_style(const arguments *a, render_style *style, bc_error 
     return BC_OK;
 }
 
-/* A number alone has no room for its state and warnings: they go where messages go. */
+/* A number alone and a picture have no room for state and warnings: they go where messages go. */
 static void tell_aside(const report *r, const render_style *style)
 {
     if (style->bare || style->quiet)
@@ -71,6 +71,8 @@ static bc_status render(const report *r, const arguments *a, bool brief, bc_erro
     if (form == RENDER_BRIEF) {
         tell_aside(r, &style);
         style.digits = style.digits ? style.digits : REPORT_DIGITS;
+    } else if (render_form_is_chart(form)) {
+        tell_aside(r, &style);
     }
     return render_to(r, form, &style, a->value[OPTION_output], err);
 }

@@ -23,4 +23,10 @@ void burn_safety(report *r, const arguments *a, const burn_case_result *c);
 /* The heat path term by term (--working). */
 void burn_working(report *r, const burn_case_result *c);
 
+/* True when the output is a chart, or --sweep asks for the curves behind one. */
+bool burn_wants_chart(const arguments *a);
+
+/* Flame temperature, flue gas, dew points and efficiency against excess oxidant or flue gas temperature. */
+bc_status burn_chart(report *r, const arguments *a, const burn_case_result *c, bc_error *err);
+
 #endif

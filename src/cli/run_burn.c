@@ -21,6 +21,8 @@ static bc_status fill(report *r, const arguments *a, const subjects *s, const bu
     subjects_report(s, r);
     bc_status status = burn_report(r, a, c, err);
 
+    if (status == BC_OK && burn_wants_chart(a))
+        status = burn_chart(r, a, c, err);
     return status == BC_OK ? check_units_used(r, a, err) : status;
 }
 

@@ -23,6 +23,12 @@
 /* Halving 5800 K 43 times ends here; H then closes to 1e-12 of its terms. */
 #define SEARCH_LAST_K 1.0e-9
 
+/* The most carbon that gases of the other elements hold: CO, C2H, CN and CS. */
+static double carbon_held(const double element_moles[BC_ELEMENTS])
+{
+    return element_moles[BC_O] + 2.0 * element_moles[BC_H] + element_moles[BC_N] + element_moles[BC_S];
+}
+
 static bc_status check_elements(const double element_moles[BC_ELEMENTS], bc_error *err)
 {
     double sum = 0.0;
@@ -37,6 +43,12 @@ static bc_status check_elements(const double element_moles[BC_ELEMENTS], bc_erro
     if (!(sum > 0.0 && isfinite(sum)))
         return bc_fail(err, BC_ERR_INPUT,
                        "a mixture without elements has no equilibrium; give it at least one");
+    if (element_moles[BC_C] > carbon_held(element_moles) + AMOUNT_MIN * sum)
+        return bc_fail(
+            err, BC_ERR_INPUT,
+            "%.4g mol of carbon are more than the gases considered can hold with the other elements, "
+            "%.4g mol; add oxidant",
+            element_moles[BC_C], carbon_held(element_moles));
     return BC_OK;
 }
 
@@ -63,7 +75,7 @@ static double begin(equilibrium *e, const double element_moles[BC_ELEMENTS], dou
             e->inert_moles += e->elements[k];
     }
     e->ln_p = log(p_pa / P_STANDARD_PA);
-    e->iterations = 0;
+    e->range_changes = e->iterations = 0;
     e->factors.range = 1;
     equilibrium_list_species(e);
     return sum;
@@ -90,7 +102,7 @@ static void write_mixture(equilibrium *e, const double element_moles[BC_ELEMENTS
     mixture_finish(mixture, element_moles, &e->factors);
 }
 
-typedef enum { FOUND, NOT_FOUND, IMPOSSIBLE, TOO_COLD, TOO_HOT } outcome;
+typedef enum { FOUND, NOT_FOUND, TOO_COLD, TOO_HOT } outcome;
 
 /* From a hot mixture, where nothing is rare, down to the temperature wanted. */
 static outcome cool_down(equilibrium *e)
@@ -99,8 +111,7 @@ static outcome cool_down(equilibrium *e)
 
     e->t_k = fmax(wanted_k, HOT_K);
     equilibrium_list_species(e);
-    if (!equilibrium_start_evenly(e))
-        return IMPOSSIBLE;
+    equilibrium_start_evenly(e);
     while (equilibrium_iterate(e, STEPS_MANY)) {
         if (e->t_k <= wanted_k)
             return FOUND;
@@ -111,7 +122,8 @@ static outcome cool_down(equilibrium *e)
 
 static outcome find_at_temperature(equilibrium *e)
 {
-    if (equilibrium_estimate(e) && equilibrium_iterate(e, STEPS_GOOD))
+    equilibrium_estimate(e);
+    if (equilibrium_iterate(e, STEPS_GOOD))
         return FOUND;
     return cool_down(e);
 }
@@ -155,7 +167,8 @@ static outcome search_temperature(equilibrium *e)
 
 static outcome find_at_enthalpy(equilibrium *e)
 {
-    if (equilibrium_estimate(e) && equilibrium_iterate(e, STEPS_GOOD))
+    equilibrium_estimate(e);
+    if (equilibrium_iterate(e, STEPS_GOOD))
         return FOUND;
     equilibrium_list_species(e);
     return search_temperature(e);
@@ -163,10 +176,6 @@ static outcome find_at_enthalpy(equilibrium *e)
 
 static bc_status refuse(outcome found, bc_error *err)
 {
-    if (found == IMPOSSIBLE)
-        return bc_fail(err, BC_ERR_INPUT,
-                       "no mixture of the gases considered holds these elements (carbon without enough "
-                       "hydrogen or oxygen); add oxidant");
     if (found == TOO_COLD || found == TOO_HOT)
         return bc_fail(err, BC_ERR_RANGE,
                        "the temperature that belongs to this enthalpy is %s %g K, the end of the data",

@@ -129,42 +129,35 @@ static void remove_species(equilibrium *e, size_t row)
     e->factors.t_k = 0.0; /* their functions are due again */
 }
 
-typedef enum { ROW_USUAL, ROW_EXCLUDES, ROW_IMPOSSIBLE } row_kind;
-
-/* A balance without negative terms: a sum of zero excludes its species, a negative sum cannot be. */
-static row_kind kind_of_row(const equilibrium *e, size_t row)
+/* Whether a balance excludes its species: a sum of zero without negative terms. */
+static bool row_excludes(const equilibrium *e, size_t row)
 {
     if (e->amount[row] > 0.0)
-        return ROW_USUAL;
+        return false;
     for (size_t j = 0; j < e->species; j++)
         if (e->v[j][row] < 0.0)
-            return ROW_USUAL;
-    return e->amount[row] < 0.0 ? ROW_IMPOSSIBLE : ROW_EXCLUDES;
+            return false;
+    return true;
 }
 
-/* Rows left without a component depend on the others: false when their amounts do not. */
-static bool drop_rows(equilibrium *e, const bool done[REACTING])
+/* Rows left without a component depend on the others and say nothing more. */
+static void drop_rows(equilibrium *e, const bool done[REACTING])
 {
     size_t kept = 0;
 
     for (size_t i = 0; i < e->components; i++) {
-        const double amount = fabs(e->amount[i]) < AMOUNT_MIN ? 0.0 : e->amount[i];
-
-        if (!done[i] && amount != 0.0)
-            return false;
         if (!done[i])
             continue;
         for (size_t j = 0; j < e->species; j++)
             e->v[j][kept] = e->v[j][i];
         e->component[kept] = e->component[i];
-        e->amount[kept++] = amount;
+        e->amount[kept++] = fabs(e->amount[i]) < AMOUNT_MIN ? 0.0 : e->amount[i];
     }
     e->components = kept;
-    return true;
 }
 
-/* One elimination. ROW_EXCLUDES: species were taken out, another elimination is due. */
-static row_kind eliminate(equilibrium *e)
+/* One elimination. False: species were taken out, another elimination is due. */
+static bool eliminate(equilibrium *e)
 {
     bool done[REACTING] = {false};
 
@@ -177,31 +170,24 @@ static row_kind eliminate(equilibrium *e)
         e->choice[found] = species;
         done[make_component(e, species, done)] = true;
     }
-    if (!drop_rows(e, done))
-        return ROW_IMPOSSIBLE;
-    for (size_t i = 0; i < e->components; i++) {
-        const row_kind kind = kind_of_row(e, i);
-
-        if (kind == ROW_EXCLUDES)
+    drop_rows(e, done);
+    for (size_t i = 0; i < e->components; i++)
+        if (row_excludes(e, i)) {
             remove_species(e, i);
-        if (kind != ROW_USUAL)
-            return kind;
-    }
-    return ROW_USUAL;
+            return false;
+        }
+    return true;
 }
 
-bool equilibrium_choose_components(equilibrium *e)
+void equilibrium_choose_components(equilibrium *e)
 {
-    row_kind kind = eliminate(e);
-
-    while (kind == ROW_EXCLUDES)
-        kind = eliminate(e);
+    while (!eliminate(e))
+        continue;
     for (size_t j = 0; j < e->species; j++) {
         for (size_t i = e->components; i < REACTING; i++)
             e->v[j][i] = 0.0;
         e->v[j][LN_N] = 1.0;
     }
-    return kind == ROW_USUAL;
 }
 
 bool equilibrium_components_are_poor(const equilibrium *e)
@@ -222,7 +208,7 @@ void equilibrium_evaluate(equilibrium *e)
     const int range = f->range;
 
     polynomial_factors_at(e->t_k, f);
-    if (f->range != range && e->range_changes++ >= RANGE_CHANGES_MAX)
+    if (!e->fixed_t && f->range != range && e->range_changes++ >= RANGE_CHANGES_MAX)
         f->range = range;
     for (size_t j = 0; j < e->species; j++) {
         const double *a = bc_thermo_coefficients(bc_product_thermo(e->product[j]), f->range);

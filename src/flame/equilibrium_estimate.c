@@ -206,12 +206,14 @@ static void set_minor_species(equilibrium *e)
     }
 }
 
-bool equilibrium_estimate(equilibrium *e)
+void equilibrium_estimate(equilibrium *e)
 {
     double moles[PRODUCT_COUNT] = {0.0};
 
-    if (free_oxygen(e) <= 0.0 && atoms_of(e, BC_C) + atoms_of(e, BC_H) + atoms_of(e, BC_S) > 0.0)
-        return equilibrium_start_evenly(e);
+    if (free_oxygen(e) <= 0.0 && atoms_of(e, BC_C) + atoms_of(e, BC_H) + atoms_of(e, BC_S) > 0.0) {
+        equilibrium_start_evenly(e);
+        return;
+    }
     burn_completely(e, moles);
     if (!e->fixed_t)
         e->t_k = estimate_temperature(e, moles);
@@ -219,19 +221,17 @@ bool equilibrium_estimate(equilibrium *e)
     for (size_t j = 0; j < e->species; j++)
         equilibrium_set_moles(e, j, fmax(LN_UNKNOWN, log(moles[e->product[j]])));
     set_total(e);
-    if (!equilibrium_choose_components(e))
-        return false;
+    equilibrium_choose_components(e);
     equilibrium_evaluate(e);
     set_minor_species(e);
-    return true;
 }
 
-bool equilibrium_start_evenly(equilibrium *e)
+void equilibrium_start_evenly(equilibrium *e)
 {
     if (!e->fixed_t)
         e->t_k = EVEN_T_K;
     for (size_t j = 0; j < e->species; j++)
         equilibrium_set_moles(e, j, log(EVEN_MOLES / (double)e->species));
     set_total(e);
-    return equilibrium_choose_components(e);
+    equilibrium_choose_components(e);
 }

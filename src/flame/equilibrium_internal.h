@@ -60,8 +60,8 @@ typedef struct {
 void equilibrium_list_species(equilibrium *e);
 
 /* Chooses the components, the most abundant species first, and takes out species that the element balance
- * excludes (CO2 from equal moles of C and O). False: no mixture of the species holds these elements. */
-bool equilibrium_choose_components(equilibrium *e);
+ * excludes (CO2 from equal moles of C and O). */
+void equilibrium_choose_components(equilibrium *e);
 
 /* Whether species have outgrown components so much that equilibrium_choose_components() is due. */
 bool equilibrium_components_are_poor(const equilibrium *e);
@@ -73,9 +73,9 @@ void equilibrium_evaluate(equilibrium *e);
 void equilibrium_set_moles(equilibrium *e, size_t species, double ln_moles);
 
 /* First states, components chosen: from complete combustion and its dissociation, or the same small amount
- * of everything. False: no mixture of the species holds these elements. */
-bool equilibrium_estimate(equilibrium *e);
-bool equilibrium_start_evenly(equilibrium *e);
+ * of everything. */
+void equilibrium_estimate(equilibrium *e);
+void equilibrium_start_evenly(equilibrium *e);
 
 /* Newton's iteration from the state in e; false when it does not arrive within the steps. */
 bool equilibrium_iterate(equilibrium *e, int steps);

@@ -227,8 +227,8 @@ bool equilibrium_iterate(equilibrium *e, int steps)
 
         if (state == ARRIVED && !poor)
             return true;
-        if (poor && !equilibrium_choose_components(e))
-            return false;
+        if (poor)
+            equilibrium_choose_components(e);
     }
     return false;
 }

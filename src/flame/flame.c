@@ -3,6 +3,7 @@
 #include "bluecone/flame.h"
 
 #include "base/error_internal.h"
+#include "bluecone/oxidant.h"
 #include "bluecone/thermo.h"
 #include "flame/products_internal.h"
 #include "gas/species_index.h"
@@ -35,21 +36,11 @@ static double oxygen_need(const double elements[BC_ELEMENTS])
     return elements[BC_C] + elements[BC_H] / 4.0 + elements[BC_S] - elements[BC_O] / 2.0;
 }
 
-double bc_gas_oxygen_need(const bc_gas *gas)
-{
-    double elements[BC_ELEMENTS] = {0.0};
-
-    add_elements(gas, 1.0, elements);
-    const double need = oxygen_need(elements);
-
-    return fabs(need) > ROUNDING ? need : 0.0;
-}
-
 bc_status bc_oxidant_for_lambda(const bc_gas *fuel, const bc_gas *oxidant, double lambda,
                                 double *oxidant_per_fuel, bc_error *err)
 {
-    const double need = bc_gas_oxygen_need(fuel);
-    const double supply = -bc_gas_oxygen_need(oxidant);
+    const double need = bc_oxygen_demand(fuel);
+    const double supply = -bc_oxygen_demand(oxidant);
 
     if (!(lambda >= 0.0 && isfinite(lambda)))
         return bc_fail(err, BC_ERR_RANGE, "an oxidant ratio lambda of %g is not possible; it is 0 or more",

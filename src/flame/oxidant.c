@@ -8,6 +8,8 @@
 
 #include <math.h>
 
+#define ROUNDING 1e-12 /* of a sum of a few atom counts: below it a gas is inert */
+
 /* Differences of atom counts of a few: what is left of a balance that closes is below it. */
 #define NOTHING 1e-12
 
@@ -33,7 +35,9 @@ double bc_oxygen_demand(const bc_gas *gas)
     double atoms[BC_ELEMENTS];
 
     oxidant_atoms(gas, atoms);
-    return oxidant_oxygen_need(atoms);
+    const double need = oxidant_oxygen_need(atoms);
+
+    return fabs(need) > ROUNDING ? need : 0.0;
 }
 
 bc_gas bc_oxidant_air(void)

@@ -3,47 +3,9 @@
 #include "output/render.h"
 
 #include "base/error_internal.h"
-#include "output/plain_text_internal.h"
-
-#include <jansson.h>
-
-#include <math.h>
-#include <stdlib.h>
+#include "output/json_internal.h"
 
 #define DIGITS 12 /* significant digits of every number */
-
-/* Jansson passes a failure on: a value that could not be made is NULL, and putting NULL somewhere
- * fails. So only `failed` need be asked, once. */
-static void put(json_t *object, const char *key, json_t *value, bool *failed)
-{
-    if (json_object_set_new(object, key, value) != 0)
-        *failed = true;
-}
-
-static void append(json_t *array, json_t *value, bool *failed)
-{
-    if (json_array_append_new(array, value) != 0)
-        *failed = true;
-}
-
-/* Jansson takes valid UTF-8 only. NULL becomes null. */
-static json_t *text_of(const char *text)
-{
-    char *plain = NULL;
-    json_t *value = NULL;
-
-    if (text == NULL)
-        return json_null();
-    plain = plain_text(text, PLAIN_ESCAPED);
-    value = plain == NULL ? NULL : json_string(plain);
-    free(plain);
-    return value;
-}
-
-static json_t *number_of(double number)
-{
-    return isfinite(number) ? json_real(number) : json_null();
-}
 
 static json_t *state_of(const report_state *state, bool *failed)
 {
@@ -204,6 +166,8 @@ static json_t *report_of(const report *r, bool *failed)
     put(object, "results", results_of(r, failed), failed);
     put(object, "tables", tables_of(r, failed), failed);
     put(object, "checks", checks_of(r, failed), failed);
+    if (r->chart_count > 0)
+        put(object, "charts", json_charts(r, failed), failed);
     put(object, "warnings", warnings_of(r, failed), failed);
     put(object, "verdict", text_of(r->verdict), failed);
     if (r->caution != NULL)
@@ -222,7 +186,8 @@ bc_status render_json(const report *r, const render_style *style, FILE *out, bc_
     if (failed || object == NULL)
         status = bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
     else if (json_dumpf(object, out, flags) != 0 || fputc('\n', out) == EOF)
-        status = bc_fail(err, BC_ERR_FILE, "cannot write the report");
+        status = ferror(out) ? bc_fail(err, BC_ERR_FILE, "cannot write the report")
+                             : bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
     json_decref(object);
     return status;
 }

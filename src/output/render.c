@@ -16,12 +16,16 @@ static renderer *const RENDERERS[] = {
     [RENDER_JSON] = render_json,
     [RENDER_CSV] = render_csv,
     [RENDER_BRIEF] = render_brief,
+    [RENDER_SVG] = render_svg,
+    [RENDER_PNG] = render_png,
+    [RENDER_PDF] = render_pdf,
 };
 
 static const struct {
     const char *ending;
     render_form form;
-} ENDINGS[] = {{".txt", RENDER_TEXT}, {".json", RENDER_JSON}, {".csv", RENDER_CSV}};
+} ENDINGS[] = {{".txt", RENDER_TEXT}, {".json", RENDER_JSON}, {".csv", RENDER_CSV},
+             {".svg", RENDER_SVG},  {".png", RENDER_PNG},   {".pdf", RENDER_PDF}};
 
 bc_status render_to(const report *r, render_form form, const render_style *style, const char *path,
                     bc_error *err)
@@ -35,7 +39,8 @@ bc_status render_to(const report *r, render_form form, const render_style *style
 
     bc_status status = RENDERERS[form](r, style, memory, err);
     /* The stream is memory: nothing else can have run out. */
-    if ((fclose(memory) != 0 && status == BC_OK) || status == BC_ERR_FILE)
+    const bool short_of_memory = ferror(memory) != 0;
+    if ((fclose(memory) != 0 && status == BC_OK) || short_of_memory)
         status = bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
     if (status == BC_OK)
         status = output_write(path, bytes, count, err);
@@ -54,4 +59,9 @@ bool render_form_of(const char *path, render_form *form)
         }
     }
     return false;
+}
+
+bool render_form_is_chart(render_form form)
+{
+    return form == RENDER_SVG || form == RENDER_PNG || form == RENDER_PDF;
 }

@@ -15,10 +15,13 @@ typedef enum {
     RENDER_TEXT, /* sections and tables for people */
     RENDER_JSON, /* one object, 12 significant digits */
     RENDER_CSV,  /* results, or the tables where there are no results */
-    RENDER_BRIEF /* one line a result; chosen by a command, never by a file's ending */
+    RENDER_BRIEF, /* one line a result; chosen by a command, never by a file's ending */
+    RENDER_SVG,  /* the charts alone, panel below panel, 800 px wide */
+    RENDER_PNG,  /* the same at twice as many pixels */
+    RENDER_PDF   /* the same at 600 points, on as many pages as keep within A4 */
 } render_form;
 
-/* How text shall look. JSON heeds none of this, CSV only `digits`. */
+/* How text shall look. JSON and charts heed none of this, CSV only `digits`. */
 typedef struct {
     bool bare;  /* brief: the number alone */
     bool quiet; /* text: no warnings, no notes */
@@ -36,12 +39,21 @@ BC_MUST_USE bc_status render_csv(const report *r, const render_style *style, FIL
  * gas where the report has several. */
 BC_MUST_USE bc_status render_brief(const report *r, const render_style *style, FILE *out, bc_error *err);
 
+/* The charts with title, state and caution, the same bytes in every run. BC_ERR_USAGE: the report has
+ * no chart; BC_ERR_FILE also: the module that draws, loaded on first use, is missing or a stranger. */
+BC_MUST_USE bc_status render_svg(const report *r, const render_style *style, FILE *out, bc_error *err);
+BC_MUST_USE bc_status render_png(const report *r, const render_style *style, FILE *out, bc_error *err);
+BC_MUST_USE bc_status render_pdf(const report *r, const render_style *style, FILE *out, bc_error *err);
+
 /* Renders into a file, or to standard output when path is NULL. A regular file appears whole under
  * its name or not at all; a device or FIFO is written to as it stands. */
 BC_MUST_USE bc_status render_to(const report *r, render_form form, const render_style *style,
                                 const char *path, bc_error *err);
 
-/* The form a file's ending asks for (.txt .json .csv, in any case); false if it names none. */
+/* The form a file's ending asks for (.txt .json .csv .svg .png .pdf, in any case); false if it names none. */
 bool render_form_of(const char *path, render_form *form);
+
+/* True for the forms that draw the charts of a report. */
+bool render_form_is_chart(render_form form);
 
 #endif

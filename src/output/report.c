@@ -113,9 +113,12 @@ void report_close(report *r)
         report_free_result(&r->results[i]);
     for (size_t i = 0; i < r->table_count; i++)
         report_free_table(&r->tables[i]);
+    for (size_t i = 0; i < r->chart_count; i++)
+        report_free_chart(&r->charts[i]);
     free(r->gases);
     free(r->results);
     free(r->tables);
+    free(r->charts);
     free_sections(r);
     free_checks(r);
     free_warnings(r);

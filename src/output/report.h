@@ -81,6 +81,60 @@ typedef struct {
     bool ok;
 } report_check;
 
+typedef enum { REPORT_X, REPORT_Y } report_axis_id;
+
+/* One axis of a chart; without names and time its values are plain numbers. */
+typedef struct {
+    char *label, *unit;       /* unit "": none */
+    bool fixed;               /* from low to high; else the data decide */
+    double low, high;
+    bool is_time;             /* x only: seconds since 1970-01-01 00:00 of the data's own clock */
+    char **names;             /* names[i] stands at the value i: categories, on y from above */
+    size_t name_count;
+} report_axis;
+
+typedef enum {
+    REPORT_LINE,   /* joined in the order of the points */
+    REPORT_POINTS,
+    REPORT_BARS,   /* from zero: along y, along x where the y axis has names; points ascending */
+    REPORT_REGION, /* a filled polygon */
+    REPORT_OUTLINE,/* a closed curve, such as an ellipse of uncertainty */
+    REPORT_SPANS   /* each two points are the ends of a span: an uncertainty, a range */
+} report_series_kind;
+
+typedef struct {
+    double x, y;
+} report_point;
+
+/* Series of a chart with the same label are one thing to the eye: one style, one entry of the
+ * legend (a curve with a gap; a point and its ellipse). */
+typedef struct {
+    char *label;
+    report_series_kind kind;
+    report_point *points;
+    size_t point_count;
+} report_series;
+
+typedef enum {
+    REPORT_MARK_X,    /* a vertical line at x: a limit, a crossing */
+    REPORT_MARK_Y,    /* a horizontal line at y */
+    REPORT_MARK_POINT /* a point to look at */
+} report_mark_kind;
+
+typedef struct {
+    char *label;
+    report_mark_kind kind;
+    double x, y;              /* of a line only one counts; the other is 0 */
+} report_mark;
+
+/* One panel. Panels that follow each other with the same x label and unit share their x axis. */
+typedef struct {
+    char *id, *title;
+    report_axis x, y;
+    report_series *series;    size_t series_count;
+    report_mark *marks;       size_t mark_count;
+} report_chart;
+
 typedef struct {
     char *version, *command, *title;
     report_state state;
@@ -89,6 +143,7 @@ typedef struct {
     report_result *results;     size_t result_count;
     report_table *tables;       size_t table_count;
     report_check *checks;       size_t check_count;
+    report_chart *charts;       size_t chart_count;
     char **warnings;            size_t warning_count;
     char *verdict;            /* NULL: nothing was asked that has a verdict */
     char *caution;            /* NULL: nothing here leads to a change of plant */
@@ -114,5 +169,15 @@ void report_add_check(report *r, const char *id, bool ok, const char *detail);
 void report_add_warning(report *r, const char *text); /* the same text twice is kept once */
 void report_set_verdict(report *r, const char *text);
 void report_set_caution(report *r, const char *text);
+
+/* Charts. All numbers must be finite. Labels may be empty; a chart may stay without points. */
+size_t report_add_chart(report *r, const char *id, const char *title);
+void report_set_axis(report *r, size_t chart, report_axis_id axis, const char *label, const char *unit);
+void report_set_range(report *r, size_t chart, report_axis_id axis, double low, double high); /* low < high */
+void report_set_time(report *r, size_t chart);                                        /* the x axis */
+void report_add_name(report *r, size_t chart, report_axis_id axis, const char *name); /* next category */
+size_t report_add_series(report *r, size_t chart, report_series_kind kind, const char *label);
+void report_add_point(report *r, size_t chart, size_t series, double x, double y);
+void report_add_mark(report *r, size_t chart, report_mark_kind kind, double x, double y, const char *label);
 
 #endif

@@ -15,7 +15,12 @@ $cc -O2 -I "$SRC/include" -D_POSIX_C_SOURCE=200809L -o "$work/bench_values" "$SR
 
 echo "one answer: bluecone get wobbe-gross FILE against a minimal program that loads the same file (target 1.5 x)"
 file="$SRC/compositions/pipeline-h.ini"
-"$work/bench_start" 1500 "$work/minimal" "$file" -- bluecone get wobbe-gross "$file" -- bluecone sheet "$file"
+"$work/bench_start" 1500 "$work/minimal" "$file" -- bluecone get wobbe-gross "$file" -- bluecone burn "$file" -- bluecone sheet "$file"
+
+$cc -O2 -I "$SRC/include" -I "$SRC/src" -D_POSIX_C_SOURCE=200809L -o "$work/bench_flame" "$SRC/tests/bench/bench_flame.c" \
+    "$build/libbluecone.a" -liniparser -lm
+echo "library: flames (targets 50 000 in equilibrium, 300 000 complete)"
+"$work/bench_flame"
 
 echo "library: HHV, LHV, Z, relative density and both Wobbe indices of one gas"
 "$work/bench_values"
