@@ -11,6 +11,7 @@
 #include "bluecone/thermo.h"
 #include "bluecone/units.h"
 #include "gas/species_index.h"
+#include "supply/index_check.h"
 #include "value/formation_internal.h"
 #include "value/thermo_internal.h"
 
@@ -71,13 +72,15 @@ static const struct {
 
 size_t bc_check_count(void)
 {
-    return BC_COUNT(ROWS) + BC_COUNT(FUELS);
+    return BC_COUNT(ROWS) + BC_COUNT(FUELS) + index_check_count();
 }
 
 const char *bc_check_area(size_t index)
 {
     if (index >= bc_check_count())
         return "";
+    if (index >= BC_COUNT(ROWS) + BC_COUNT(FUELS))
+        return index_check_area(index - BC_COUNT(ROWS) - BC_COUNT(FUELS));
     return index < BC_COUNT(ROWS) ? ROWS[index].area : "formation";
 }
 
@@ -241,8 +244,10 @@ bc_status bc_check_run(size_t index, bc_check *check, bc_error *err)
         return bc_fail(err, BC_ERR_USAGE, "there is no check %zu", index);
     if (index < BC_COUNT(ROWS))
         status = run_row(&ROWS[index], &computed, err);
-    else
+    else if (index < BC_COUNT(ROWS) + BC_COUNT(FUELS))
         run_formation(index - BC_COUNT(ROWS), &computed);
+    else
+        status = index_check_run(index - BC_COUNT(ROWS) - BC_COUNT(FUELS), &computed, err);
     if (status != BC_OK)
         return status;
     computed.ok = fabs(computed.computed - computed.expected) <= computed.tolerance;
