@@ -9,6 +9,8 @@
 
 #include "output/render.h"
 
+#include "support.h"
+
 #include <locale.h>
 #include <math.h>
 #include <stdio.h>
@@ -175,8 +177,7 @@ static void a_locale_with_a_decimal_comma_changes_no_cell(void **state)
     report *r = *state;
 
     add_result(r, REPORT_NO_GAS, 37.7, 0.0131);
-    if (setlocale(LC_ALL, "de_DE.UTF-8") == NULL)
-        skip();
+    use_german_numbers();
     assert_renders(render_csv, r, (render_style){0}, HEAD "hhv,,37.7,MJ/m3,0.0131,ISO 6976:2016\n");
     assert_renders(render_brief, r, (render_style){0}, "37.700 MJ/m3\n");
 }

@@ -9,6 +9,8 @@
 
 #include "output/number_text_internal.h"
 
+#include "support.h"
+
 #include <locale.h>
 #include <math.h>
 
@@ -144,8 +146,7 @@ static void machines_get_twelve_digits_without_trailing_zeros(void **state)
 static void a_locale_with_a_decimal_comma_changes_nothing(void **state)
 {
     (void)state;
-    if (setlocale(LC_NUMERIC, "de_DE.UTF-8") == NULL)
-        skip();
+    use_german_numbers();
     assert_string_equal(localeconv()->decimal_point, ",");
     assert_significant(39.7, 6, "39.7000");
     assert_significant(1.23456e-7, 3, "1.23e-07");
