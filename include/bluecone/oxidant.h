@@ -45,6 +45,12 @@ BC_API BC_MUST_USE bc_status bc_oxidant_oxygen(double purity, double argon_of_re
  * give: -a is what an oxidant supplies. Source: the stoichiometric balance. */
 BC_API double bc_oxygen_demand(const bc_gas *gas);
 
+/* Whether a gas can be the fuel of a burner: BC_OK when it needs oxygen.
+ *
+ * BC_ERR_RANGE: nothing in it burns, or it holds all the oxygen that it needs, so that it may explode as it
+ * is; the message says which. Source: bc_oxygen_demand(), heats of bluecone/formation.h. */
+BC_API BC_MUST_USE bc_status bc_fuel_check(const bc_gas *gas, bc_error *err);
+
 /* Stoichiometric need of a fuel. Negative figures: the fuel brings more oxygen than it needs. */
 typedef struct {
     double oxygen_mol;  /* mol O2 per mol of fuel = m3/m3 of ideal gases */

@@ -185,6 +185,34 @@ static void warn_remarks(report *r, const loaded_gas *gas)
     }
 }
 
+/* True for a gas whose own air puts it between the limits of flammability of what is left without it, those
+ * taken wider by their error; or that holds all its oxygen. */
+static bool is_explosive(const bc_subject *s)
+{
+    bc_gas pure;
+    double air = 0.0;
+    bc_flammability f;
+
+    if (s->value.net_j_per_mol < 1.0)
+        return false;
+    if (bc_oxygen_demand(&s->gas) <= 0.0)
+        return true;
+    if (bc_gas_air_free(&s->gas, &pure, &air, NULL) != BC_OK || air < 0.05 || bc_flammability_of(&pure, &f, NULL) != BC_OK || !f.has_lfl)
+        return false;
+    return 1.0 - air > f.lfl * (1.0 - BC_LFL_ERROR) && (!f.has_ufl || 1.0 - air < f.ufl * (1.0 + BC_UFL_ERROR));
+}
+
+/* A flammable mixture is no gas to sell or burn: nothing must read as if it were. */
+static void warn_explosive(report *r, const char *gas, const bc_subject *s)
+{
+    char text[300];
+
+    if (!is_explosive(s))
+        return;
+    (void)snprintf(text, sizeof text, "%.100s: DANGER: with the oxygen it holds the gas is a flammable mixture; it may explode as it is.", gas);
+    report_add_warning(r, text);
+}
+
 size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject)
 {
     const bc_composition *c = &gas->composition;
@@ -200,6 +228,7 @@ size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject
     if (!gas->repeated)
         warn_origins(r, gas->name, subject);
     warn_range(r, gas->name, subject);
+    warn_explosive(r, gas->name, subject);
     warn_wet(r, gas->name, subject);
     return index;
 }

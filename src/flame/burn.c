@@ -26,21 +26,20 @@ static bool within(double value, double least, double most)
 
 static bc_status check_case(const bc_burn_case *c, bc_error *err)
 {
+    static const char *const STREAMS[] = {"fuel", "oxidant", "flue gas"};
     const double temperatures[] = {c->fuel_k, c->oxidant_k, c->exit_k};
 
     if (!within(c->lambda, BC_BURN_LAMBDA_MIN, BC_BURN_LAMBDA_MAX))
         return bc_fail(err, BC_ERR_RANGE, "the air factor %.4g is outside %g to %g", c->lambda, BC_BURN_LAMBDA_MIN, BC_BURN_LAMBDA_MAX);
     for (size_t i = 0; i < 3; i++)
         if (!within(temperatures[i], T_MIN_K, T_MAX_K))
-            return bc_fail(err, BC_ERR_RANGE, "the temperature %.6g C is outside %.6g to %.6g C", temperatures[i] - 273.15, T_MIN_K - 273.15,
-                           T_MAX_K - 273.15);
+            return bc_fail(err, BC_ERR_RANGE, "the temperature of the %s, %.6g C, is outside %.6g to %.6g C", STREAMS[i], temperatures[i] - 273.15,
+                           T_MIN_K - 273.15, T_MAX_K - 273.15);
     if (!within(c->p_pa, P_MIN_PA, P_MAX_PA))
         return bc_fail(err, BC_ERR_RANGE, "the pressure %.6g kPa is outside %g to %g kPa", c->p_pa * 1e-3, P_MIN_PA * 1e-3, P_MAX_PA * 1e-3);
     if (!within(c->so3_conversion, 0.0, 1.0) || !within(c->casing_loss, 0.0, 1.0))
         return bc_fail(err, BC_ERR_RANGE, "SO3 conversion and casing loss are shares from 0 to 100 %%");
-    if (!(bc_oxygen_demand(&c->fuel) > 0.0))
-        return bc_fail(err, BC_ERR_RANGE, "the gas does not burn: it needs no oxygen");
-    return BC_OK;
+    return bc_fuel_check(&c->fuel, err);
 }
 
 static bc_status burn_flames(const bc_burn_case *c, bc_burn *b, bc_error *err)

@@ -31,11 +31,9 @@ static const struct {
 static bc_status demand_of(const bc_subject *s, bc_demand *demand, bc_error *err)
 {
     const bc_gas air = bc_oxidant_air();
-    const bc_status status = bc_oxidant_demand(&s->gas, &air, demand, err);
+    const bc_status status = bc_fuel_check(&s->gas, err);
 
-    if (status == BC_OK && !(demand->oxygen_mol > 0.0))
-        return bc_fail(err, BC_ERR_RANGE, "the gas does not burn: it needs no air");
-    return status;
+    return status == BC_OK ? bc_oxidant_demand(&s->gas, &air, demand, err) : status;
 }
 
 static bc_status oxygen_demand(const bc_subject *s, double *value, bc_error *err)

@@ -3,6 +3,7 @@
 #include "bluecone/oxidant.h"
 
 #include "base/error_internal.h"
+#include "bluecone/formation.h"
 #include "flame/oxidant_internal.h"
 #include "gas/species_index.h"
 
@@ -38,6 +39,21 @@ double bc_oxygen_demand(const bc_gas *gas)
     const double need = oxidant_oxygen_need(atoms);
 
     return fabs(need) > ROUNDING ? need : 0.0;
+}
+
+bc_status bc_fuel_check(const bc_gas *gas, bc_error *err)
+{
+    double gross = 0.0;
+    double net = 0.0;
+    const bc_status status = bc_formation_gas(gas, 298.15, &gross, &net, err);
+
+    if (status != BC_OK)
+        return status;
+    if (bc_oxygen_demand(gas) > 0.0)
+        return BC_OK;
+    if (net > 1.0) /* J/mol: what burns is there, and its oxygen, too */
+        return bc_fail(err, BC_ERR_RANGE, "the gas holds all the oxygen that it needs: it may explode as it is, and is no fuel for a burner");
+    return bc_fail(err, BC_ERR_RANGE, "the gas does not burn: it needs no oxygen");
 }
 
 bc_gas bc_oxidant_air(void)
