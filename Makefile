@@ -46,7 +46,7 @@ OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
 VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
 SOVERSION := 0
 
-DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev
+DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libnlopt-dev
 DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils
 DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv
 DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe
@@ -69,7 +69,9 @@ CFLAGS_ALL   = -std=c11 $(WARNINGS) $(CFLAGS.$(VARIANT)) -fvisibility=hidden -fn
                -fno-math-errno "-ffile-prefix-map=$(CURDIR)=." $(CFLAGS)
 CPPFLAGS_ALL = -D_POSIX_C_SOURCE=200809L -I include -I src $(CPPFLAGS)
 LDFLAGS_ALL  = -Wl,-z,relro,-z,now,-z,noexecstack,--as-needed $(LDFLAGS)
-LDLIBS_LIB  := -liniparser -lm
+# NLopt is loaded when an optimum is asked for: only its header is needed here.
+LDLIBS_LIB  := -liniparser -lm -ldl
+NLOPT        = $(shell $(PKG_CONFIG) $1 nlopt 2>/dev/null)
 # The module for charts, and what it has in common with the program.
 CAIRO        = $(shell $(PKG_CONFIG) $1 cairo cairo-pdf cairo-svg 2>/dev/null)
 JANSSON      = $(shell $(PKG_CONFIG) $1 jansson 2>/dev/null)
@@ -112,6 +114,7 @@ all: $(PROGRAM) $(CHART) $(ARCHIVE) $(SHARED) $(OUT)/bluecone.pc $(COMPLETION) #
 # ---- rules ----------------------------------------------------------------------------------------
 $(LIB_OBJ) $(CHART_OBJ) $(CHART_TOO): private MODE = -fPIC
 $(OUT)/src/output/%.o: private EXTRA = $(call JANSSON,--cflags) -DBC_LIB_DIR='"$(libdir)"'
+$(OUT)/src/supply/%.o: private EXTRA = $(call NLOPT,--cflags)
 $(CHART_OBJ):          private EXTRA = $(call CAIRO,--cflags)
 $(OUT)/src/cli/%.o:    private EXTRA = $(call JANSSON,--cflags) -DBC_DATA_DIR='"$(datadir)/bluecone"'
 $(OUT)/tests/%.o:      private EXTRA = $(call CMOCKA,--cflags) -I tests \
@@ -146,7 +149,7 @@ $(CHART): $(CHART_OBJ) $(CHART_TOO)
 
 $(PROGRAM): $(PROGRAM_OBJ) $(ARCHIVE)
 	@echo '  LD    $@'
-	$(V)$(LINK) $^ $(call JANSSON,--libs) $(LDLIBS_LIB) -ldl -o $@
+	$(V)$(LINK) $^ $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
 
 # A test finds the module beside itself, as the program does.
 $(OUT)/tests/output/test_chart: $(OUT)/src/output/chart_draw_ticks.o $(OUT)/src/output/chart_draw_time.o \
@@ -156,7 +159,7 @@ $(OUT)/tests/output/bluecone_chart.so: $(CHART)
 
 $(TESTS) $(RUNNER): $(OUT)/%: $(OUT)/%.o $(PROGRAM_PARTS) $(ARCHIVE)
 	@echo '  LD    $@'
-	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -ldl -o $@
+	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
 
 $(OUT)/bluecone.pc: src/bluecone.pc.in include/bluecone/status.h Makefile $(OUT)/flags
 	@sed -e 's|@prefix@|$(prefix)|' -e 's|@libdir@|$(libdir)|' -e 's|@includedir@|$(includedir)|' \

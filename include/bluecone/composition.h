@@ -8,6 +8,7 @@
 #include <stddef.h>
 
 #include "bluecone/gas.h"
+#include "bluecone/offer.h"
 #include "bluecone/status.h"
 
 #ifdef __cplusplus
@@ -66,6 +67,7 @@ typedef struct {
     bool has_uncertainty;     /* [uncertainty] was given */
     bool air_suspected;       /* oxygen where this kind of gas has none */
     bc_gas gas;               /* what all values are computed from */
+    bc_offer offer;           /* section [supply]; all zero without one */
     size_t remark_count;
     char remarks[BC_REMARK_MAX][BC_REMARK_BYTES]; /* what was changed or is strange, as sentences */
     size_t entry_count;

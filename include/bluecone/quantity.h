@@ -27,6 +27,9 @@ BC_API BC_MUST_USE bc_status bc_quantity_find(const char *id, size_t *index, bc_
  * BC_ERR_RANGE: the gas has no such figure (a hydrogen-carbon ratio without carbon). */
 BC_API BC_MUST_USE bc_status bc_quantity_evaluate(size_t index, const bc_subject *subject, bc_figure *figure, bc_error *err);
 
+/* The value alone, for what asks many times: sweeps and searches. `value` and errors as above. */
+BC_API BC_MUST_USE bc_status bc_quantity_value(size_t index, const bc_subject *subject, double *value, bc_error *err);
+
 #ifdef __cplusplus
 }
 #endif

@@ -15,6 +15,7 @@ enum {
 #define GET (1U << COMMAND_get)
 #define SHEET (1U << COMMAND_sheet)
 #define BURN (1U << COMMAND_burn)
+#define BLEND (1U << COMMAND_blend)
 #define LIST (1U << COMMAND_list)
 #define VERIFY (1U << COMMAND_verify)
 

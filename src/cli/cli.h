@@ -60,6 +60,8 @@ typedef struct {
 
 void folders_find(folders *f);
 
+#define RECIPE_MAX 480
+
 /* A gas of the command line. */
 typedef struct {
     bc_composition composition;
@@ -68,6 +70,7 @@ typedef struct {
     double air;            /* share of the gas as read that was taken out as air; 0 for none */
     bool repeated;         /* the gas before it in a report is the same with its air */
     char name[BC_NAME_MAX + 16];
+    char recipe[RECIPE_MAX]; /* of a gas that was blended here; "" for one that was loaded */
 } loaded_gas;
 
 /* Loads one gas; prints nothing. */
@@ -92,6 +95,9 @@ void report_in_units(const slot *where, const arguments *a, const report_result 
 /* Adds a quantity of a subject in the first unit of --unit that fits, else in its own. */
 bc_status report_quantity(const slot *where, size_t quantity, const bc_subject *subject, const arguments *a, bc_error *err);
 
+/* The unit to print a figure in: the first of --unit that fits its own, else its own. */
+void unit_for(const arguments *a, const char *own, char *text, size_t size);
+
 /* Checks --unit before anything is computed: every unit must exist and fit one of the quantities. */
 bc_status units_check(const arguments *a, const bc_state *state, const size_t quantities[], size_t count, bc_error *err);
 
@@ -108,6 +114,7 @@ void warn(const char *format, ...) BC_PRINTF(1, 2);
 int run_get(const arguments *a);
 int run_sheet(const arguments *a);
 int run_burn(const arguments *a);
+int run_blend(const arguments *a);
 int run_list(const arguments *a);
 int run_verify(const arguments *a);
 

@@ -32,6 +32,7 @@ bc_status gas_load(const char *word, loaded_gas *gas, bc_error *err)
     gas->scattered = gas->composition.has_uncertainty;
     gas->air = 0.0;
     gas->repeated = false;
+    gas->recipe[0] = '\0';
     (void)snprintf(gas->name, sizeof gas->name, "%s", gas->composition.name);
     return BC_OK;
 }
@@ -156,9 +157,13 @@ static void warn_wet(report *r, const char *gas, const bc_subject *s)
     report_add_warning(r, text);
 }
 
-static void describe_source(const bc_composition *c, char *text, size_t size)
+static void describe_source(const loaded_gas *gas, char *text, size_t size)
 {
-    if (c->bundled[0] != '\0')
+    const bc_composition *c = &gas->composition;
+
+    if (gas->recipe[0] != '\0')
+        (void)snprintf(text, size, "%s", gas->recipe);
+    else if (c->bundled[0] != '\0')
         (void)snprintf(text, size, "bundled gas %s; %s", c->bundled, c->origin[0] ? c->origin : "no source stated");
     else if (c->path[0] != '\0' && c->origin[0] != '\0')
         (void)snprintf(text, size, "%.250s; %s", c->path, c->origin);
@@ -218,7 +223,7 @@ size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject
     const bc_composition *c = &gas->composition;
     char source[BC_FILE_MAX + 64];
 
-    describe_source(c, source, sizeof source);
+    describe_source(gas, source, sizeof source);
     const size_t index = report_add_gas(r, gas->name, source, c->sum);
 
     for (size_t i = 0; i < bc_species_count(); i++)

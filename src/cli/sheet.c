@@ -1,6 +1,7 @@
 /* SPDX-License-Identifier: MIT */
 /* sheet.c - the full sheet of one gas, or of several side by side. */
 #include "base/error_internal.h"
+#include "cli/sheet.h"
 #include "cli/subjects.h"
 #include "cli/working.h"
 
@@ -34,7 +35,7 @@ static bc_status add_quantity(report *r, size_t section, const subjects *s, size
     return BC_OK;
 }
 
-static bc_status add_sections(report *r, const subjects *s, const arguments *a, bc_error *err)
+bc_status sheet_sections(report *r, const subjects *s, const arguments *a, bc_error *err)
 {
     for (size_t k = 0; k < BC_COUNT(SECTIONS); k++) {
         const size_t section = report_add_section(r, SECTIONS[k].group, SECTIONS[k].title);
@@ -145,8 +146,7 @@ static void add_share(report *r, size_t table, double x)
         report_add_text(r, table, "-");
 }
 
-/* The composition as it was computed with: what the reader compares with the certificate. */
-static void add_composition(report *r, const subjects *s)
+void sheet_composition(report *r, const subjects *s)
 {
     const size_t table = report_add_table(r, "composition", "Composition as computed");
 
@@ -174,17 +174,16 @@ static bc_status fill(report *r, const subjects *s, const arguments *a, bc_error
 {
     subjects_report(s, r);
     subjects_tell_uncertainty(s, r);
-    bc_status status = add_sections(r, s, a, err);
+    bc_status status = sheet_sections(r, s, a, err);
 
-    add_composition(r, s);
+    sheet_composition(r, s);
     for (size_t i = 0; i < s->count && status == BC_OK; i++) {
         check_gap(r, &s->each[i]);
         status = add_shortfall(r, s, &s->each[i], err);
         if (a->value[OPTION_working])
             report_working(r, s->each[i].loaded.name, &s->each[i].subject);
     }
-    report_set_caution(r, "Changing the gas or the setting of a burner is work for licensed people under the local code: carbon monoxide, "
-                          "flashback and explosion can kill.");
+    report_set_caution(r, SHEET_CAUTION);
     return status;
 }
 

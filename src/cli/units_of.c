@@ -87,6 +87,14 @@ static void choose_unit(const char *own_text, const char *list, char *text, size
     *unit = *own;
 }
 
+void unit_for(const arguments *a, const char *own, char *text, size_t size)
+{
+    bc_unit from;
+    bc_unit to;
+
+    choose_unit(own, a->value[OPTION_unit], text, size, &from, &to);
+}
+
 void report_in_units(const slot *where, const arguments *a, const report_result *result)
 {
     char text[BC_WORD_MAX];

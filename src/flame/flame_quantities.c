@@ -248,5 +248,5 @@ static bc_status evaluate(size_t index, const bc_subject *subject, bc_figure *fi
 
 quantity_source flame_quantities(void)
 {
-    return (quantity_source){BC_COUNT(ROWS), shown, evaluate};
+    return (quantity_source){BC_COUNT(ROWS), shown, evaluate, NULL};
 }

@@ -29,7 +29,8 @@ double bc_gas_molar_mass_kg_per_mol(const bc_gas *gas)
     double mass = 0.0;
 
     for (size_t i = 0; i < SPECIES_COUNT; i++)
-        mass += gas->x[i] * bc_species_molar_mass_kg_per_mol(i);
+        if (gas->x[i] != 0.0) /* most species are not there: the sum is asked for often */
+            mass += gas->x[i] * bc_species_molar_mass_kg_per_mol(i);
     return mass;
 }
 
@@ -38,7 +39,8 @@ double bc_gas_atoms(const bc_gas *gas, bc_element element)
     double atoms = 0.0;
 
     for (size_t i = 0; i < SPECIES_COUNT; i++)
-        atoms += gas->x[i] * bc_species_atoms(i, element);
+        if (gas->x[i] != 0.0)
+            atoms += gas->x[i] * bc_species_atoms(i, element);
     return atoms;
 }
 

@@ -1,65 +1,19 @@
 /* SPDX-License-Identifier: MIT */
 /* gas_file.c - the composition file: its sections, keys and words. */
 #include "base/error_internal.h"
-#include "base/ini.h"
 #include "base/text.h"
 #include "bluecone/number.h"
 #include "bluecone/units.h"
-#include "gas/composition_internal.h"
+#include "gas/gas_file_internal.h"
 #include "gas/species_index.h"
 
 #include <math.h>
 #include <stdio.h>
 #include <string.h>
 
-/* The file being read. */
-typedef struct {
-    const char *path;
-    const bc_ini *ini;
-    bc_composition *c;
-    double unit;    /* of the shares: 0.01, 1 or 1e-6 */
-    bc_error *err;
-} reader;
-
-/* One word of a key's value and what it stands for. */
-typedef struct {
-    const char *word;
-    int value;
-} choice;
-
 static bc_status refuse(const reader *r, const bc_ini_entry *e, const char *cause)
 {
     return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "%s", cause);
-}
-
-/* Keeps the cause that a deeper function gave and adds the place. */
-static bc_status blame(const reader *r, const bc_ini_entry *e)
-{
-    if (r->err) {
-        r->err->status = BC_ERR_INPUT;
-        r->err->line = e->line;
-        (void)snprintf(r->err->file, sizeof r->err->file, "%s", r->path);
-    }
-    return BC_ERR_INPUT;
-}
-
-static bc_status take_choice(const reader *r, const bc_ini_entry *e, const choice *choices, size_t count, int *value)
-{
-    char list[128] = "";
-
-    for (size_t i = 0; i < count; i++) {
-        if (bc_text_same(choices[i].word, e->value)) {
-            *value = choices[i].value;
-            return BC_OK;
-        }
-        const size_t used = strlen(list);
-
-        (void)snprintf(list + used, sizeof list - used, "%s%s", i ? ", " : "", choices[i].word);
-    }
-    char shown[48];
-
-    bc_text_show(shown, sizeof shown, e->value);
-    return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "%s = %s is not known; write one of %s", e->key, shown, list);
 }
 
 static bc_status take_text(const reader *r, const bc_ini_entry *e, char *to, size_t size)
@@ -74,7 +28,7 @@ static bc_status take_basis(reader *r, const bc_ini_entry *e)
 {
     static const choice CHOICES[] = {{"mole", BC_BASIS_MOLE}, {"volume", BC_BASIS_VOLUME}, {"mass", BC_BASIS_MASS}};
     int value = 0;
-    const bc_status status = take_choice(r, e, CHOICES, BC_COUNT(CHOICES), &value);
+    const bc_status status = gas_file_choice(r, e, CHOICES, BC_COUNT(CHOICES), &value);
 
     if (status == BC_OK)
         r->c->basis = (bc_basis)value;
@@ -86,7 +40,7 @@ static bc_status take_unit(reader *r, const bc_ini_entry *e)
     static const choice CHOICES[] = {{"percent", 0}, {"fraction", 1}, {"ppm", 2}};
     static const double UNITS[] = {1e-2, 1.0, 1e-6};
     int value = 0;
-    const bc_status status = take_choice(r, e, CHOICES, BC_COUNT(CHOICES), &value);
+    const bc_status status = gas_file_choice(r, e, CHOICES, BC_COUNT(CHOICES), &value);
 
     if (status == BC_OK)
         r->unit = UNITS[value];
@@ -98,7 +52,7 @@ static bc_status take_moisture(reader *r, const bc_ini_entry *e)
     static const choice CHOICES[] = {
         {"dry", BC_MOISTURE_DRY}, {"as-analysed", BC_MOISTURE_AS_ANALYSED}, {"saturated", BC_MOISTURE_SATURATED}};
     int value = 0;
-    const bc_status status = take_choice(r, e, CHOICES, BC_COUNT(CHOICES), &value);
+    const bc_status status = gas_file_choice(r, e, CHOICES, BC_COUNT(CHOICES), &value);
 
     if (status == BC_OK)
         r->c->moisture = (bc_moisture)value;
@@ -109,7 +63,7 @@ static bc_status take_correlation(reader *r, const bc_ini_entry *e)
 {
     static const choice CHOICES[] = {{"normalised", BC_CLOSURE_NORMALISED}, {"none", BC_CLOSURE_NONE}};
     int value = 0;
-    const bc_status status = take_choice(r, e, CHOICES, BC_COUNT(CHOICES), &value);
+    const bc_status status = gas_file_choice(r, e, CHOICES, BC_COUNT(CHOICES), &value);
 
     if (status == BC_OK)
         r->c->closure = (bc_closure)value;
@@ -126,9 +80,9 @@ static bc_status take_measured_at(reader *r, const bc_ini_entry *e)
     if (!bc_text_copy(part, sizeof part, e->value, length))
         return refuse(r, e, "measured_at is too long; write it as 15 C, 101.325 kPa");
     if (bc_measure_parse(part, "K", "C", &r->c->measured_at_k, r->err) != BC_OK)
-        return blame(r, e);
+        return gas_file_blame(r, e);
     if (comma && bc_measure_parse(bc_text_skip_space(comma + 1), "Pa", NULL, &r->c->measured_at_pa, r->err) != BC_OK)
-        return blame(r, e);
+        return gas_file_blame(r, e);
     if (!(r->c->measured_at_k >= 223.15 && r->c->measured_at_k <= 373.15))
         return refuse(r, e, "measured_at: the temperature is outside -50 to 100 C; correct it");
     if (!(r->c->measured_at_pa > 1e3 && r->c->measured_at_pa < 1e8))
@@ -152,32 +106,15 @@ static bc_status take_origin(reader *r, const bc_ini_entry *e)
 }
 
 /* The keys of [gas], the one list for reading and for the message about unknown ones. */
-static const struct {
-    const char *key;
-    bc_status (*take)(reader *, const bc_ini_entry *);
-} GAS_KEYS[] = {
+static const file_key GAS_KEYS[] = {
     {"name", take_name},         {"family", take_family},           {"source", take_origin},
     {"basis", take_basis},       {"unit", take_unit},               {"moisture", take_moisture},
     {"measured_at", take_measured_at}, {"correlation", take_correlation},
 };
 
-static bc_status refuse_key(const reader *r, const bc_ini_entry *e)
-{
-    size_t best = 0;
-
-    for (size_t i = 0; i < BC_COUNT(GAS_KEYS); i++)
-        if (bc_text_unlikeness(e->key, GAS_KEYS[i].key) < bc_text_unlikeness(e->key, GAS_KEYS[best].key))
-            best = i;
-    return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown key '%s' in [gas]; the nearest known one is '%s'", e->key,
-                      GAS_KEYS[best].key);
-}
-
 static bc_status take_gas_key(reader *r, const bc_ini_entry *e)
 {
-    for (size_t i = 0; i < BC_COUNT(GAS_KEYS); i++)
-        if (bc_text_same(GAS_KEYS[i].key, e->key))
-            return GAS_KEYS[i].take(r, e);
-    return refuse_key(r, e);
+    return gas_file_key(r, e, GAS_KEYS, BC_COUNT(GAS_KEYS));
 }
 
 /* A share with an optional unit of its own behind it: "4.85", "120 ppm". */
@@ -188,7 +125,7 @@ static bc_status take_share(const reader *r, const bc_ini_entry *e, double *shar
     double unit = r->unit;
 
     if (bc_number_prefix(e->value, &value, &rest, r->err) != BC_OK)
-        return blame(r, e);
+        return gas_file_blame(r, e);
     if (strcmp(rest, "%") == 0)
         unit = 1e-2;
     else if (strcmp(rest, "ppm") == 0)
@@ -277,7 +214,7 @@ static bc_status take_uncertainty(reader *r, const bc_ini_entry *e)
     if (entry->is_rest)
         return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "'%s' is the rest: its uncertainty follows from the others; remove this line", e->key);
     if (bc_number_prefix(e->value, &value, &rest, r->err) != BC_OK)
-        return blame(r, e);
+        return gas_file_blame(r, e);
     if (value < 0.0)
         return refuse(r, e, "an uncertainty cannot be negative; correct it");
     if (strcmp(rest, "%") == 0)
@@ -300,9 +237,9 @@ static bc_status take_cut(reader *r, const bc_ini_entry *e, const char *word)
     if (!entry)
         return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "the cut '%s' does not stand in [components]; add or remove it", word);
     if (bc_species_find(e->key, &species, r->err) != BC_OK)
-        return blame(r, e);
+        return gas_file_blame(r, e);
     if (bc_number_parse(e->value, &share, r->err) != BC_OK)
-        return blame(r, e);
+        return gas_file_blame(r, e);
     if (share < 0.0)
         return refuse(r, e, "the share of a cut cannot be negative; correct it");
     entry->parts[species] += share;
@@ -365,9 +302,9 @@ static bc_status check_sections(const reader *r)
         const bc_ini_entry *e = bc_ini_at(r->ini, i);
 
         if (strcmp(e->section, "gas") != 0 && strcmp(e->section, "components") != 0 && strcmp(e->section, "uncertainty") != 0
-            && strncmp(e->section, "cut ", 4) != 0)
+            && strcmp(e->section, "supply") != 0 && strncmp(e->section, "cut ", 4) != 0)
             return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line,
-                              "unknown section [%s]; known are [gas], [components], [uncertainty] and [cut NAME]", e->section);
+                              "unknown section [%s]; known are [gas], [components], [uncertainty], [supply] and [cut NAME]", e->section);
     }
     return BC_OK;
 }
@@ -386,6 +323,8 @@ static bc_status read_document(reader *r)
         status = take_cuts(r);
     if (status == BC_OK)
         status = take_section(r, "uncertainty", take_uncertainty);
+    if (status == BC_OK)
+        status = take_section(r, "supply", gas_file_supply_key);
     return status == BC_OK ? composition_finish(r->c, r->err) : status;
 }
 

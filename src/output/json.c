@@ -130,6 +130,32 @@ static json_t *tables_of(const report *r, bool *failed)
     return array;
 }
 
+static json_t *limit_of(const report *r, const report_limit *limit, bool *failed)
+{
+    const bool has_gas = limit->gas != REPORT_NO_GAS;
+    json_t *object = json_object();
+
+    put(object, "id", text_of(limit->id), failed);
+    put(object, "gas", text_of(has_gas ? r->gases[limit->gas].name : NULL), failed);
+    put(object, "value", limit->has_value ? number_of(limit->value) : json_null(), failed);
+    put(object, "min", limit->has_min ? number_of(limit->min) : json_null(), failed);
+    put(object, "max", limit->has_max ? number_of(limit->max) : json_null(), failed);
+    put(object, "unit", text_of(limit->unit), failed);
+    put(object, "margin", limit->has_value ? number_of(limit->margin) : json_null(), failed);
+    put(object, "verdict", text_of(limit->verdict), failed);
+    put(object, "state", text_of(limit->state), failed);
+    return object;
+}
+
+static json_t *limits_of(const report *r, bool *failed)
+{
+    json_t *array = json_array();
+
+    for (size_t i = 0; i < r->limit_count; i++)
+        append(array, limit_of(r, &r->limits[i], failed), failed);
+    return array;
+}
+
 static json_t *checks_of(const report *r, bool *failed)
 {
     json_t *array = json_array();
@@ -165,6 +191,8 @@ static json_t *report_of(const report *r, bool *failed)
     put(object, "gases", gases_of(r, failed), failed);
     put(object, "results", results_of(r, failed), failed);
     put(object, "tables", tables_of(r, failed), failed);
+    if (r->limit_count > 0)
+        put(object, "limits", limits_of(r, failed), failed);
     put(object, "checks", checks_of(r, failed), failed);
     if (r->chart_count > 0)
         put(object, "charts", json_charts(r, failed), failed);

@@ -113,6 +113,10 @@ void report_close(report *r)
         report_free_result(&r->results[i]);
     for (size_t i = 0; i < r->table_count; i++)
         report_free_table(&r->tables[i]);
+    for (size_t i = 0; i < r->limit_count; i++)
+        report_free_limit(&r->limits[i]);
+    free(r->limits);
+    free(r->limits_title);
     for (size_t i = 0; i < r->chart_count; i++)
         report_free_chart(&r->charts[i]);
     free(r->gases);

@@ -81,6 +81,17 @@ typedef struct {
     bool ok;
 } report_check;
 
+/* How a gas stands to one limit. A bound, or the value, that is not there is no number. */
+typedef struct {
+    char *id, *unit;
+    char *state;              /* the limit's own reference state in short; may be "" */
+    char *verdict;            /* "inside", "outside", or why it cannot be judged */
+    size_t gas;               /* index into gases, or REPORT_NO_GAS */
+    bool has_value, has_min, has_max;
+    double value, min, max;
+    double margin;            /* to the nearer bound, negative outside; counts with has_value */
+} report_limit;
+
 typedef enum { REPORT_X, REPORT_Y } report_axis_id;
 
 /* One axis of a chart; without names and time its values are plain numbers. */
@@ -143,6 +154,8 @@ typedef struct {
     report_result *results;     size_t result_count;
     report_table *tables;       size_t table_count;
     report_check *checks;       size_t check_count;
+    report_limit *limits;       size_t limit_count;
+    char *limits_title;       /* whose limits these are; NULL without any */
     report_chart *charts;       size_t chart_count;
     char **warnings;            size_t warning_count;
     char *verdict;            /* NULL: nothing was asked that has a verdict */
@@ -166,6 +179,8 @@ void report_add_column(report *r, size_t table, const char *id, const char *head
 void report_add_text(report *r, size_t table, const char *text);       /* next cell */
 void report_add_number(report *r, size_t table, double number, int decimals); /* next cell */
 void report_add_check(report *r, const char *id, bool ok, const char *detail);
+void report_add_limit(report *r, const report_limit *limit); /* the texts of *limit are copied */
+void report_set_limits_title(report *r, const char *title);
 void report_add_warning(report *r, const char *text); /* the same text twice is kept once */
 void report_set_verdict(report *r, const char *text);
 void report_set_caution(report *r, const char *text);

@@ -17,6 +17,7 @@ void report_free_gas(report_gas *gas);
 void report_free_result(report_result *result);
 void report_free_column(report_column *column);
 void report_free_table(report_table *table);
+void report_free_limit(report_limit *limit);
 void report_free_chart(report_chart *chart);
 
 #endif

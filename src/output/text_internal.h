@@ -35,4 +35,7 @@ void text_letter(size_t gas, char out[TEXT_LETTERS_MAX]);
 void text_sections(text_page *page, const report *r);
 void text_tables(text_page *page, const report *r, bool leading); /* those that lead, or the others */
 
+/* The limits, a line each. */
+void text_limits(text_page *page, const report *r);
+
 #endif

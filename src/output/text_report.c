@@ -110,6 +110,7 @@ bc_status render_text(const report *r, const render_style *style, FILE *out, bc_
         text_tables(&page, r, true);
         text_sections(&page, r);
         text_tables(&page, r, false);
+        text_limits(&page, r);
         print_checks(&page, r);
         print_warnings(&page, r);
         print_end(&page, r);

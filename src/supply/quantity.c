@@ -125,3 +125,19 @@ bc_status bc_quantity_evaluate(size_t index, const bc_subject *subject, bc_figur
     *figure = f;
     return BC_OK;
 }
+
+bc_status bc_quantity_value(size_t index, const bc_subject *subject, double *value, bc_error *err)
+{
+    quantity_source source;
+    bc_figure f;
+
+    if (!find_floor(&index, &source))
+        return bc_fail(err, BC_ERR_USAGE, "there is no quantity of that number");
+    if (source.value)
+        return source.value(index, subject, value, err);
+    const bc_status status = source.evaluate(index, subject, &f, err);
+
+    if (status == BC_OK)
+        *value = f.value;
+    return status;
+}

@@ -93,6 +93,16 @@ static double field_of(const bc_value *value, size_t offset)
     return field;
 }
 
+static bc_status value_alone(size_t index, const bc_subject *subject, double *value, bc_error *err)
+{
+    const quantity_row *row = &ROWS[index];
+
+    if (row->other)
+        return row->other(subject, value, err);
+    *value = field_of(&subject->value, row->field) * row->scale;
+    return BC_OK;
+}
+
 static bc_status evaluate(size_t index, const bc_subject *subject, bc_figure *figure, bc_error *err)
 {
     const quantity_row *row = &ROWS[index];
@@ -118,5 +128,5 @@ static bc_status evaluate(size_t index, const bc_subject *subject, bc_figure *fi
 
 quantity_source value_quantities(void)
 {
-    return (quantity_source){BC_COUNT(ROWS), shown, evaluate};
+    return (quantity_source){BC_COUNT(ROWS), shown, evaluate, value_alone};
 }

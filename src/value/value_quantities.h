@@ -5,11 +5,13 @@
 
 #include "bluecone/subject.h"
 
-/* The quantities of one floor: their number, what they are, and their evaluation. Indices are valid. */
+/* The quantities of one floor: their number, what they are, and their evaluation. Indices are valid.
+ * `value` leaves the uncertainty out; NULL where evaluate() works out none. */
 typedef struct {
     size_t count;
     const bc_quantity *(*at)(size_t index);
     bc_status (*evaluate)(size_t index, const bc_subject *subject, bc_figure *figure, bc_error *err);
+    bc_status (*value)(size_t index, const bc_subject *subject, double *value, bc_error *err);
 } quantity_source;
 
 quantity_source value_quantities(void);

@@ -38,7 +38,7 @@ holds() {
     done
 }
 
-holds 'bluecone ' burn get list sheet verify --help --version
+holds 'bluecone ' blend burn get list sheet verify --help --version
 expect 'bluecone sh' 'sheet'
 expect 'bluecone get wobbe-g' 'wobbe-gross wobbe-gross-ideal'
 expect 'bluecone get hhv,relative-density-' 'hhv,relative-density-ideal'
@@ -61,6 +61,15 @@ expect 'bluecone get --at 25/0 wobbe-n' 'wobbe-net wobbe-net-ideal'
 holds 'bluecone sheet g20 -o ' other.txt folder/
 expect 'bluecone sheet --wor' '--working'
 expect 'bluecone sheet --ba' ''
+expect 'bluecone blend ' 'free rest'
+holds 'bluecone blend 20 ' g20 hydrogen folder/ sample.ini
+expect 'bluecone blend 20 hydrogen r' 'rest'
+expect 'bluecone blend 20 hydrogen rest methane=92,ethan' '92,ethane= 92,ethanol='
+expect 'bluecone blend --by ' 'energy mass mole volume'
+expect 'bluecone blend --least s' 'share:'
+expect 'bluecone blend --show hhv,wobbe-g' 'hhv,wobbe-gross hhv,wobbe-gross-ideal'
+expect 'bluecone blend --within samp' 'sample.ini'
+expect 'bluecone blend --aim hhv=39MJ/m3,wobbe-gross-' '39MJ/m3,wobbe-gross-ideal='
 holds 'bluecone burn ' g20 pipeline-h folder/ sample.ini
 expect 'bluecone burn g20 g2' ''
 expect 'bluecone burn --flue-' '--flue-o2 --flue-temp'

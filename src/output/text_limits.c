@@ -1,0 +1,81 @@
+/* SPDX-License-Identifier: MIT */
+/* text_limits.c - the limits of a report as a grid. */
+#include "output/text_internal.h"
+
+#include "output/grid_internal.h"
+#include "output/number_text_internal.h"
+
+#include <stdio.h>
+#include <string.h>
+
+#define INDENT    2
+#define CELL_FOLD 20 /* why a limit cannot be judged is a sentence */
+#define BOUND_DIGITS 9
+#define MARGIN_DIGITS 4
+
+static void add_number(grid *g, bool there, double number, int digits)
+{
+    char text[NUMBER_TEXT_MAX];
+
+    if (there)
+        number_significant(number, digits, text);
+    grid_add_cell(g, there ? text : "-");
+}
+
+/* A bound as it was written, without the zeros that significant digits would add. */
+static void add_bound(grid *g, bool there, double bound)
+{
+    char text[NUMBER_TEXT_MAX];
+
+    if (there) {
+        number_significant(bound, BOUND_DIGITS, text);
+        if (strchr(text, '.') != NULL && strchr(text, 'e') == NULL) {
+            size_t length = strlen(text);
+
+            while (text[length - 1] == '0')
+                length--;
+            text[text[length - 1] == '.' ? length - 1 : length] = '\0';
+        }
+    }
+    grid_add_cell(g, there ? text : "-");
+}
+
+static void add_columns(grid *g)
+{
+    static const char *const HEADINGS[] = {"limit", "gas", "unit", "at", "min", "max", "value", "margin", "verdict"};
+
+    for (size_t i = 0; i < sizeof HEADINGS / sizeof *HEADINGS; i++)
+        grid_add_column(g, i >= 4 && i <= 7 ? GRID_RIGHT : GRID_LEFT, CELL_FOLD, HEADINGS[i], "");
+}
+
+static void add_limit(grid *g, const report_limit *limit, const render_style *style)
+{
+    char letter[TEXT_LETTERS_MAX] = "";
+
+    if (limit->gas != REPORT_NO_GAS)
+        text_letter(limit->gas, letter);
+    grid_add_cell(g, limit->id);
+    grid_add_cell(g, letter);
+    grid_add_cell(g, strcmp(limit->unit, "1") == 0 ? "" : limit->unit);
+    grid_add_cell(g, limit->state);
+    add_bound(g, limit->has_min, limit->min);
+    add_bound(g, limit->has_max, limit->max);
+    add_number(g, limit->has_value, limit->value, style->digits > 0 ? style->digits : REPORT_DIGITS);
+    add_number(g, limit->has_value, limit->margin, MARGIN_DIGITS);
+    grid_add_cell(g, limit->verdict);
+}
+
+void text_limits(text_page *page, const report *r)
+{
+    grid g;
+
+    if (r->limit_count == 0)
+        return;
+    fputc('\n', page->out);
+    text_title(page, r->limits_title != NULL ? r->limits_title : "Limits", NULL);
+    grid_open(&g, INDENT, 1);
+    add_columns(&g);
+    for (size_t i = 0; i < r->limit_count; i++)
+        add_limit(&g, &r->limits[i], page->style);
+    grid_print(&g, page);
+}

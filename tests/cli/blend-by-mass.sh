@@ -1,0 +1,1 @@
+bluecone blend --by mass 12.5 propane rest biomethane | sed -n '/^Recipe/,/^$/p'

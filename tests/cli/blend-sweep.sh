@@ -1,0 +1,1 @@
+bluecone blend 0..30/5 hydrogen rest pipeline-h
