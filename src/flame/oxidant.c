@@ -9,8 +9,6 @@
 
 #include <math.h>
 
-#define ROUNDING 1e-12 /* of a sum of a few atom counts: below it a gas is inert */
-
 /* Differences of atom counts of a few: what is left of a balance that closes is below it. */
 #define NOTHING 1e-12
 
@@ -38,19 +36,20 @@ double bc_oxygen_demand(const bc_gas *gas)
     oxidant_atoms(gas, atoms);
     const double need = oxidant_oxygen_need(atoms);
 
-    return fabs(need) > ROUNDING ? need : 0.0;
+    return fabs(need) > NOTHING ? need : 0.0;
 }
 
 bc_status bc_fuel_check(const bc_gas *gas, bc_error *err)
 {
     double gross = 0.0;
     double net = 0.0;
+
+    if (bc_oxygen_demand(gas) > 0.0)
+        return BC_OK;
     const bc_status status = bc_formation_gas(gas, 298.15, &gross, &net, err);
 
     if (status != BC_OK)
         return status;
-    if (bc_oxygen_demand(gas) > 0.0)
-        return BC_OK;
     if (net > 1.0) /* J/mol: what burns is there, and its oxygen, too */
         return bc_fail(err, BC_ERR_RANGE, "the gas holds all the oxygen that it needs: it may explode as it is, and is no fuel for a burner");
     return bc_fail(err, BC_ERR_RANGE, "the gas does not burn: it needs no oxygen");
