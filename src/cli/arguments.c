@@ -16,6 +16,7 @@ enum {
 #define SHEET (1U << COMMAND_sheet)
 #define BURN (1U << COMMAND_burn)
 #define BLEND (1U << COMMAND_blend)
+#define SWITCH (1U << COMMAND_switch)
 #define LIST (1U << COMMAND_list)
 #define VERIFY (1U << COMMAND_verify)
 

@@ -115,6 +115,7 @@ int run_get(const arguments *a);
 int run_sheet(const arguments *a);
 int run_burn(const arguments *a);
 int run_blend(const arguments *a);
+int run_switch(const arguments *a);
 int run_list(const arguments *a);
 int run_verify(const arguments *a);
 

@@ -19,7 +19,7 @@ static const struct {
     {"volume", "Heat per volume of real gas"}, {"density", "Density"}, {"mass", "Heat per mass"},
     {"mole", "Molar figures"},                 {"ideal", "Ideal gas"},
     {"air", "Combustion with the dry air that just suffices"}, {"flame", "Flame and flue gas, same air, all at 25 C and 101.325 kPa"},
-    {"co2", "Carbon dioxide"}, {"safety", "In air at 25 C and 101.325 kPa (estimates)"}, {"check", "Second route"},
+    {"co2", "Carbon dioxide"}, {"interchange", "Burner indices of the gas alone (switch compares two gases)"}, {"safety", "In air at 25 C and 101.325 kPa (estimates)"}, {"check", "Second route"},
 };
 
 /* A figure that a gas does not have (a gap of an inert gas) leaves no row. */

@@ -67,6 +67,7 @@ static void add_row(report *r, size_t table, size_t number, const bc_check *c)
 {
     char state[64];
     char quantity[BC_WORD_MAX];
+    char subject[480];
 
     describe_state(c, state, sizeof state);
     (void)snprintf(quantity, sizeof quantity, "%s%s", c->of_uncertainty ? "u of " : "", c->quantity);
@@ -83,7 +84,11 @@ static void add_row(report *r, size_t table, size_t number, const bc_check *c)
     report_add_text(r, table, c->ok ? "pass" : "FAIL");
     report_add_text(r, table, c->source);
     report_add_text(r, table, c->why);
-    report_add_text(r, table, c->subject);
+    if (c->edition != 0 && c->with[0] != '\0')
+        (void)snprintf(subject, sizeof subject, "%s against %s", c->subject, c->with);
+    else
+        (void)snprintf(subject, sizeof subject, "%s", c->subject);
+    report_add_text(r, table, subject);
 }
 
 static bc_status run_area(report *r, size_t table, const char *area, tallies *t, bc_error *err)

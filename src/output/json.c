@@ -141,7 +141,7 @@ static json_t *limit_of(const report *r, const report_limit *limit, bool *failed
     put(object, "min", limit->has_min ? number_of(limit->min) : json_null(), failed);
     put(object, "max", limit->has_max ? number_of(limit->max) : json_null(), failed);
     put(object, "unit", text_of(limit->unit), failed);
-    put(object, "margin", limit->has_value ? number_of(limit->margin) : json_null(), failed);
+    put(object, "margin", limit->has_value && (limit->has_min || limit->has_max) ? number_of(limit->margin) : json_null(), failed);
     put(object, "verdict", text_of(limit->verdict), failed);
     put(object, "state", text_of(limit->state), failed);
     return object;

@@ -89,7 +89,7 @@ typedef struct {
     size_t gas;               /* index into gases, or REPORT_NO_GAS */
     bool has_value, has_min, has_max;
     double value, min, max;
-    double margin;            /* to the nearer bound, negative outside; counts with has_value */
+    double margin;            /* to the nearer bound, negative outside; set by report_add_limit() */
 } report_limit;
 
 typedef enum { REPORT_X, REPORT_Y } report_axis_id;
@@ -155,7 +155,7 @@ typedef struct {
     report_table *tables;       size_t table_count;
     report_check *checks;       size_t check_count;
     report_limit *limits;       size_t limit_count;
-    char *limits_title;       /* whose limits these are; NULL without any */
+    char *limits_title;       /* whose limits these are; NULL: for machines alone, people get another table */
     report_chart *charts;       size_t chart_count;
     char **warnings;            size_t warning_count;
     char *verdict;            /* NULL: nothing was asked that has a verdict */

@@ -69,10 +69,10 @@ void text_limits(text_page *page, const report *r)
 {
     grid g;
 
-    if (r->limit_count == 0)
+    if (r->limit_count == 0 || r->limits_title == NULL)
         return;
     fputc('\n', page->out);
-    text_title(page, r->limits_title != NULL ? r->limits_title : "Limits", NULL);
+    text_title(page, r->limits_title, NULL);
     grid_open(&g, INDENT, 1);
     add_columns(&g);
     for (size_t i = 0; i < r->limit_count; i++)

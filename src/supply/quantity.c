@@ -7,13 +7,14 @@
 #include "base/text.h"
 #include "flame/flame_quantities.h"
 #include "gas/species_index.h"
+#include "supply/index_quantities.h"
 #include "value/value_quantities.h"
 
 #include <math.h>
 
 typedef quantity_source source_function(void);
 
-static source_function *const FLOORS[] = {value_quantities, flame_quantities};
+static source_function *const FLOORS[] = {value_quantities, flame_quantities, index_quantities};
 
 /* The floor that an index of the joined list falls to; *index becomes that of the floor. */
 static bool find_floor(size_t *index, quantity_source *source)

@@ -19,6 +19,13 @@ file="$SRC/compositions/pipeline-h.ini"
 
 $cc -O2 -I "$SRC/include" -I "$SRC/src" -D_POSIX_C_SOURCE=200809L -o "$work/bench_flame" "$SRC/tests/bench/bench_flame.c" \
     "$build/libbluecone.a" -liniparser -lm
+echo "one decision: bluecone switch OLD NEW with a burner, as a whole process"
+old="$SRC/examples/present-supply.ini"
+new="$SRC/examples/new-supply-offer.ini"
+"$work/bench_start" 300 "$work/minimal" "$old" -- bluecone switch "$old" "$new" -- bluecone switch --burner "$SRC/examples/kiln.ini" "$old" "$new"
+echo "the same with all shares (--blend-in), about 600 judgements"
+"$work/bench_start" 30 "$work/minimal" "$old" -- bluecone switch --blend-in --burner "$SRC/examples/kiln.ini" "$old" "$new"
+
 echo "library: flames (targets 50 000 in equilibrium, 300 000 complete)"
 "$work/bench_flame"
 

@@ -38,8 +38,9 @@ holds() {
     done
 }
 
-holds 'bluecone ' blend burn get list sheet verify --help --version
+holds 'bluecone ' blend burn get list sheet switch verify --help --version
 expect 'bluecone sh' 'sheet'
+expect 'bluecone sw' 'switch'
 expect 'bluecone get wobbe-g' 'wobbe-gross wobbe-gross-ideal'
 expect 'bluecone get hhv,relative-density-' 'hhv,relative-density-ideal'
 holds 'bluecone get hhv ' g20 pipeline-h folder/ sample.ini
@@ -72,6 +73,11 @@ expect 'bluecone blend --within samp' 'sample.ini'
 expect 'bluecone blend --aim hhv=39MJ/m3,wobbe-gross-' '39MJ/m3,wobbe-gross-ideal='
 holds 'bluecone burn ' g20 pipeline-h folder/ sample.ini
 expect 'bluecone burn g20 g2' ''
+holds 'bluecone switch ' g20 hydrogen folder/ sample.ini
+expect 'bluecone switch g20 g2' 'g20 g21 g23 g25'
+expect 'bluecone switch g20 g21 g2' ''
+expect 'bluecone switch --burner sam' 'sample.ini'
+expect 'bluecone switch --ble' '--blend-in'
 expect 'bluecone burn --flue-' '--flue-o2 --flue-temp'
 holds 'bluecone burn --oxidant ' air oxygen oxygen: enriched: sample.ini
 expect 'bluecone burn --oxidant enr' 'enriched:'

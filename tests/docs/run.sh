@@ -224,7 +224,8 @@ else
     check_options
     check_pages
     check_help
-    check_listed quantities 's/^\(POWER\|OTHER\|FLAME\)("\([^"]*\)".*/\2/p' src/value/quantities.def src/flame/quantities_flame.def
+    check_listed quantities 's/^\(POWER\|OTHER\|FLAME\|ALONE\)("\([^"]*\)".*/\2/p' src/value/quantities.def src/flame/quantities_flame.def \
+        src/data/quantities_index.def
     check_listed methods 's/^METHOD("\([^"]*\)".*/\1/p' src/data/methods.def
     check_methods_page
     test ! -e "$SRC/tests/docs/completion.sh" || bash "$SRC/tests/docs/completion.sh" >"$work/missing" 2>&1

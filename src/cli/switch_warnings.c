@@ -1,0 +1,114 @@
+/* SPDX-License-Identifier: MIT */
+/* switch_warnings.c - what is to be said of the new gas and of the burner beside the figures. */
+#include "cli/switch_report.h"
+
+#include <stdio.h>
+#include <string.h>
+
+#define RICH_TOLD 0.10       /* hydrogen and carbon monoxide: from here Weaver's indices do not follow */
+#define CO_TOLD 0.001        /* carbon monoxide that makes a leak poisonous before it burns */
+#define DISCHARGE_LEAST 0.5  /* below it no orifice has a coefficient, value from memory */
+#define EXPANDS 0.03         /* of the absolute pressure: Bernoulli's equation holds to 1 % below it */
+
+static double fraction_of(const bc_subject *s, const char *id)
+{
+    size_t species = 0;
+
+    return bc_species_find(id, &species, NULL) == BC_OK ? s->gas.x[species] : 0.0;
+}
+
+static void warn_gas(report *r, const switch_case *c)
+{
+    const bc_subject *s = &c->s->each[NEW_GAS].subject;
+    const double hydrogen = fraction_of(s, "hydrogen");
+    const double monoxide = fraction_of(s, "carbon-monoxide");
+    char text[400];
+
+    if (hydrogen + monoxide > RICH_TOLD) {
+        (void)snprintf(text, sizeof text, "The new gas holds %.3g %% hydrogen and %.3g %% carbon monoxide: the indices made for natural gas do not "
+                       "follow it; Wobbe ratio, air index and MCP lead, and a Wobbe index that hardly moves hides a faster flame.",
+                       100.0 * hydrogen, 100.0 * monoxide);
+        report_add_warning(r, text);
+    }
+    if (hydrogen > RICH_TOLD)
+        report_add_warning(r, "Hydrogen: the flame is nearly invisible and flashes back first at low load and light-up; check seals, flame and gas detectors.");
+    if (monoxide > CO_TOLD) {
+        (void)snprintf(text, sizeof text, "The new gas holds %.3g %% carbon monoxide: a leak poisons before it can burn.", 100.0 * monoxide);
+        report_add_warning(r, text);
+    }
+}
+
+/* A danger that nobody judged keeps the gas from being cleared: say what would help. */
+static void warn_open(report *r, const switch_case *c)
+{
+    const bc_switch *s = &c->result;
+
+    if (s->cleared || s->same_gas)
+        return;
+    if (!c->has_burner)
+        report_add_warning(r, "A danger that no method could judge keeps the gas from being cleared; --burner FILE lets the limits of the burner itself judge.");
+    else if (!s->covered[BC_DANGER_LIFT] || !s->covered[BC_DANGER_FLASHBACK])
+        report_add_warning(r, "velocity_min and velocity_max in the burner file let the burning velocity judge lifting and flashback, where both gases are in its range.");
+    if (c->has_burner && c->burner.type == BC_BURNER_ENGINE && !s->covered[BC_DANGER_KNOCK])
+        report_add_warning(r, "Knock: state methane_number_min in the burner file, and ask the engine's maker where the gas is outside the methane number routes.");
+}
+
+static void warn_air(report *r, const switch_case *c)
+{
+    const bc_burner_response *x = &c->result.on_new;
+    char text[300];
+
+    if (x->burn.rich) {
+        (void)snprintf(text, sizeof text, "On the new gas the burner lacks air (lambda %.3f): carbon monoxide %.2g %% of the dry flue gas at equilibrium.",
+                       x->lambda, 100.0 * x->co_dry);
+        report_add_warning(r, text);
+    }
+    if (x->trim_at_end) {
+        (void)snprintf(text, sizeof text, "The trim is at the end of its range of %.3g %%: the flue oxygen is not held.", 100.0 * c->burner.trim_range);
+        report_add_warning(r, text);
+    }
+    if (!x->burn.rich && x->burn.dew.exists && x->burn.dew.t_k > c->burner.flue_k)
+        report_add_warning(r, "On the new gas the flue gas leaves below its water dew point: condensate forms.");
+}
+
+static void warn_orifice(report *r, const switch_case *c)
+{
+    const bc_burner_case *set = &c->set;
+    char text[300];
+
+    if (set->has_implied && !(set->implied_discharge > DISCHARGE_LEAST && set->implied_discharge < 1.0)) {
+        (void)snprintf(text, sizeof text, "Heat input, gas pressure and orifice of the burner file agree only with a discharge coefficient of %.3g: check them.",
+                       set->implied_discharge);
+        report_add_warning(r, text);
+    }
+    if (set->has_pressure && set->gas_pa > EXPANDS * (set->gas_pa + c->burner.ambient_pa))
+        report_add_warning(r, "The gas pressure is above 3 % of the absolute one: the isentropic nozzle is used, and heat goes only nearly with the Wobbe index.");
+}
+
+static void warn_default_air(report *r, const switch_case *c)
+{
+    char text[300] = "";
+
+    for (size_t i = 0; i < bc_burner_key_count(); i++) {
+        const bc_burner_key *key = bc_burner_key_at(i);
+        char value[64];
+
+        bc_burner_key_text(&c->burner, i, value, sizeof value);
+        if (strcmp(key->section, "air") == 0 && strcmp(key->key, "lambda") == 0 && value[0] != '\0' && !c->burner.stated[i])
+            (void)snprintf(text, sizeof text, "The burner file states no air: lambda %s on the old gas is assumed, and the air figures rest on it.", value);
+    }
+    if (text[0] != '\0')
+        report_add_warning(r, text);
+}
+
+void switch_warnings(report *r, const switch_case *c)
+{
+    warn_gas(r, c);
+    warn_open(r, c);
+    if (c->has_burner) {
+        warn_air(r, c);
+        warn_orifice(r, c);
+        warn_default_air(r, c);
+    }
+    report_add_warning(r, "No single index clears a gas: each compares two gases on one kind of burner, mostly old domestic ones.");
+}

@@ -1,0 +1,2 @@
+# Figures as rows.
+bluecone switch g20 g25 --csv --quiet

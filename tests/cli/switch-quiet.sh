@@ -1,0 +1,2 @@
+# No warnings; the caution stays.
+bluecone switch g20 hydrogen-blend-20 --quiet | sed -n "/^Checks/,\$p"
