@@ -41,7 +41,8 @@ static bool is_number(const char *text)
 /* Spreadsheets take such a text for a formula, and formulas can reach files and the network. */
 static bool is_formula(const char *text)
 {
-    return *text != '\0' && strchr("=+-@\t", *text) != NULL && !is_number(text);
+    /* a dash alone stands for a figure that is not there */
+    return *text != '\0' && strchr("=+-@\t", *text) != NULL && strcmp(text, "-") != 0 && !is_number(text);
 }
 
 static void put_quoted(const csv_page *page, const char *text)
