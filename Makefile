@@ -46,9 +46,9 @@ OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
 VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
 SOVERSION := 0
 
-DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libnlopt-dev
-DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils
-DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv
+DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libxlsxwriter-dev libnlopt-dev
+DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip
+DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv chromium
 DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe
 
 # ---- flags ----------------------------------------------------------------------------------------
@@ -72,8 +72,9 @@ LDFLAGS_ALL  = -Wl,-z,relro,-z,now,-z,noexecstack,--as-needed $(LDFLAGS)
 # NLopt is loaded when an optimum is asked for: only its header is needed here.
 LDLIBS_LIB  := -liniparser -lm -ldl
 NLOPT        = $(shell $(PKG_CONFIG) $1 nlopt 2>/dev/null)
-# The module for charts, and what it has in common with the program.
+# The modules for charts and workbooks, and what they have in common with the program.
 CAIRO        = $(shell $(PKG_CONFIG) $1 cairo cairo-pdf cairo-svg 2>/dev/null)
+XLSXWRITER   = $(shell $(PKG_CONFIG) $1 xlsxwriter 2>/dev/null)
 JANSSON      = $(shell $(PKG_CONFIG) $1 jansson 2>/dev/null)
 CMOCKA       = $(shell $(PKG_CONFIG) $1 cmocka 2>/dev/null)
 
@@ -86,7 +87,8 @@ LINK     = $(CC) $(CFLAGS_ALL) -fPIE -pie $(LDFLAGS_ALL)
 LIB_DIRS    := $(wildcard $(addprefix src/,base gas value flame supply))
 LIB_SRC     := $(sort $(wildcard $(LIB_DIRS:%=%/*.c)))
 CHART_SRC   := $(sort $(wildcard src/output/chart_draw*.c))
-PROGRAM_SRC := $(sort $(filter-out $(CHART_SRC),$(wildcard src/output/*.c src/cli/*.c)))
+BOOK_SRC    := $(sort $(wildcard src/output/book*.c))
+PROGRAM_SRC := $(sort $(filter-out $(CHART_SRC) $(BOOK_SRC),$(wildcard src/output/*.c src/cli/*.c)))
 TEST_SRC    := $(sort $(wildcard tests/*/test_*.c))
 HEADERS     := $(sort $(wildcard include/bluecone/*.h))
 COMPOSITIONS := $(sort $(wildcard compositions/*.ini))
@@ -97,7 +99,9 @@ SCRIPTS     := $(sort .ci/run .ci/deps $(wildcard tests/*.sh tests/*/*.sh exampl
 LIB_OBJ     := $(LIB_SRC:%.c=$(OUT)/%.o)
 PROGRAM_OBJ := $(PROGRAM_SRC:%.c=$(OUT)/%.o)
 CHART_OBJ   := $(CHART_SRC:%.c=$(OUT)/%.o)
-CHART_TOO   := $(OUT)/src/output/number_text.o $(OUT)/src/output/plain_text.o
+CHART_TOO   := $(addprefix $(OUT)/src/output/,number_text.o plain_text.o)
+BOOK_OBJ    := $(BOOK_SRC:%.c=$(OUT)/%.o)
+BOOK_TOO    := $(CHART_TOO) $(addprefix $(OUT)/src/output/,report_judged.o result_text.o section.o text_letter.o)
 PROGRAM_PARTS := $(filter-out %/cli/main.o,$(PROGRAM_OBJ))
 # The house rules judge the released library; the other variants carry their instruments.
 TESTS       := $(filter-out $(if $(filter release,$(VARIANT)),,%/house/test_house),$(TEST_SRC:%.c=$(OUT)/%))
@@ -106,16 +110,18 @@ PROGRAM     := $(OUT)/bluecone
 ARCHIVE     := $(OUT)/libbluecone.a
 SHARED      := $(OUT)/libbluecone.so.$(SOVERSION)
 CHART       := $(OUT)/bluecone_chart.so
+BOOK        := $(OUT)/bluecone_workbook.so
 COMPLETION  := $(if $(wildcard src/cli/completion.bash.in),$(OUT)/bluecone.bash)
 
-all: $(PROGRAM) $(CHART) $(ARCHIVE) $(SHARED) $(OUT)/bluecone.pc $(COMPLETION) ## build the program and the library (default)
+all: $(PROGRAM) $(CHART) $(BOOK) $(ARCHIVE) $(SHARED) $(OUT)/bluecone.pc $(COMPLETION) ## build the program and the library (default)
 	@echo '$(PROGRAM) is ready'
 
 # ---- rules ----------------------------------------------------------------------------------------
-$(LIB_OBJ) $(CHART_OBJ) $(CHART_TOO): private MODE = -fPIC
+$(LIB_OBJ) $(CHART_OBJ) $(BOOK_OBJ) $(BOOK_TOO): private MODE = -fPIC
 $(OUT)/src/output/%.o: private EXTRA = $(call JANSSON,--cflags) -DBC_LIB_DIR='"$(libdir)"'
 $(OUT)/src/supply/%.o: private EXTRA = $(call NLOPT,--cflags)
 $(CHART_OBJ):          private EXTRA = $(call CAIRO,--cflags)
+$(BOOK_OBJ):           private EXTRA = $(call XLSXWRITER,--cflags)
 $(OUT)/src/cli/%.o:    private EXTRA = $(call JANSSON,--cflags) -DBC_DATA_DIR='"$(datadir)/bluecone"'
 $(OUT)/tests/%.o:      private EXTRA = $(call CMOCKA,--cflags) -I tests \
                                -DBC_SOURCE_DIR='"$(CURDIR)"' -DBC_BUILD_DIR='"$(CURDIR)/$(OUT)"'
@@ -142,19 +148,25 @@ $(SHARED): $(LIB_OBJ)
 	@echo '  LD    $@'
 	$(V)$(CC) $(CFLAGS_ALL) -fPIC -shared $(LDFLAGS_ALL) -Wl,-z,defs -Wl,-soname,$(@F) $^ $(LDLIBS_LIB) -o $@
 
-# Loaded when a chart is asked for, so that no other answer waits for Cairo.
+# Loaded when a chart or a workbook is asked for, so that no other answer waits for their libraries.
 $(CHART): $(CHART_OBJ) $(CHART_TOO)
 	@echo '  LD    $@'
 	$(V)$(CC) $(CFLAGS_ALL) -fPIC -shared $(LDFLAGS_ALL) -Wl,-z,defs $^ $(call CAIRO,--libs) -lm -o $@
+
+$(BOOK): $(BOOK_OBJ) $(BOOK_TOO)
+	@echo '  LD    $@'
+	$(V)$(CC) $(CFLAGS_ALL) -fPIC -shared $(LDFLAGS_ALL) -Wl,-z,defs $^ $(call XLSXWRITER,--libs) -lm -o $@
 
 $(PROGRAM): $(PROGRAM_OBJ) $(ARCHIVE)
 	@echo '  LD    $@'
 	$(V)$(LINK) $^ $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
 
-# A test finds the module beside itself, as the program does.
+# A test finds the modules beside itself, as the program does.
 $(OUT)/tests/output/test_chart: $(OUT)/src/output/chart_draw_ticks.o $(OUT)/src/output/chart_draw_time.o \
-    $(OUT)/src/output/chart_draw_range.o | $(OUT)/tests/output/bluecone_chart.so
-$(OUT)/tests/output/bluecone_chart.so: $(CHART)
+    $(OUT)/src/output/chart_draw_range.o
+$(OUT)/tests/output/test_chart $(OUT)/tests/output/test_page: | $(OUT)/tests/output/bluecone_chart.so
+$(OUT)/tests/output/test_workbook: | $(OUT)/tests/output/bluecone_workbook.so
+$(OUT)/tests/output/bluecone_%.so: $(OUT)/bluecone_%.so
 	@mkdir -p $(@D) && ln -sf $(abspath $<) $@
 
 $(TESTS) $(RUNNER): $(OUT)/%: $(OUT)/%.o $(PROGRAM_PARTS) $(ARCHIVE)
@@ -169,7 +181,7 @@ $(OUT)/bluecone.bash: src/cli/completion.bash.in include/bluecone/status.h Makef
 	@mkdir -p $(@D)
 	@sed 's|@version@|$(VERSION)|' $< >$@
 
--include $(LIB_OBJ:.o=.d) $(PROGRAM_OBJ:.o=.d) $(CHART_OBJ:.o=.d) $(TESTS:=.d) $(RUNNER).d
+-include $(LIB_OBJ:.o=.d) $(PROGRAM_OBJ:.o=.d) $(CHART_OBJ:.o=.d) $(BOOK_OBJ:.o=.d) $(TESTS:=.d) $(RUNNER).d
 
 # ---- targets --------------------------------------------------------------------------------------
 deps: deps-lint ## install what is missing of the Debian packages used here
@@ -210,7 +222,7 @@ run-tests: all tests
 lint: deps-lint ## cppcheck, clang-tidy, mandoc and shellcheck
 	cppcheck --quiet --std=c11 --enable=warning,performance,portability --inline-suppr --error-exitcode=1 \
 	    --suppress=missingIncludeSystem -D_POSIX_C_SOURCE=200809L '-DBC_DATA_DIR=""' -I include -I src src
-	printf '%s\n' $(LIB_SRC) $(PROGRAM_SRC) $(CHART_SRC) | xargs -P 4 -I FILE \
+	printf '%s\n' $(LIB_SRC) $(PROGRAM_SRC) $(CHART_SRC) $(BOOK_SRC) | xargs -P 4 -I FILE \
 	    clang-tidy --quiet FILE -- -std=c11 $(CPPFLAGS_ALL) $(call CAIRO,--cflags) '-DBC_DATA_DIR=""'
 	$(if $(MAN_PAGES),mandoc -T lint -W warning $(MAN_PAGES))
 	shellcheck $(filter-out tests/cli/%,$(SCRIPTS))
@@ -228,7 +240,7 @@ install: all ## copy everything below PREFIX (and DESTDIR)
 	    $(datadir)/bluecone/compositions $(docdir) $(bashcompletiondir),"$(DESTDIR)$d")
 	$(INSTALL_PROGRAM) $(PROGRAM) "$(DESTDIR)$(bindir)/bluecone"
 	$(INSTALL_DATA) $(ARCHIVE) $(SHARED) "$(DESTDIR)$(libdir)"
-	$(INSTALL_DATA) $(CHART) "$(DESTDIR)$(libdir)/bluecone"
+	$(INSTALL_DATA) $(CHART) $(BOOK) "$(DESTDIR)$(libdir)/bluecone"
 	ln -sf $(notdir $(SHARED)) "$(DESTDIR)$(libdir)/libbluecone.so"
 	$(INSTALL_DATA) $(OUT)/bluecone.pc "$(DESTDIR)$(pkgconfigdir)"
 	$(INSTALL_DATA) $(HEADERS) "$(DESTDIR)$(includedir)/bluecone"
@@ -240,7 +252,7 @@ install: all ## copy everything below PREFIX (and DESTDIR)
 # Folders are removed only when they are ours and empty.
 uninstall: ## remove what install put there
 	rm -f "$(DESTDIR)$(bindir)/bluecone" "$(DESTDIR)$(pkgconfigdir)/bluecone.pc" "$(DESTDIR)$(bashcompletiondir)/bluecone" \
-	    $(foreach f,libbluecone.a libbluecone.so $(notdir $(SHARED)) bluecone/$(notdir $(CHART)),"$(DESTDIR)$(libdir)/$f") \
+	    $(foreach f,libbluecone.a libbluecone.so $(notdir $(SHARED)) bluecone/$(notdir $(CHART)) bluecone/$(notdir $(BOOK)),"$(DESTDIR)$(libdir)/$f") \
 	    $(HEADERS:include/%="$(DESTDIR)$(includedir)/%") $(COMPOSITIONS:%="$(DESTDIR)$(datadir)/bluecone/%") \
 	    $(foreach f,$(MAN_PAGES),"$(DESTDIR)$(mandir)/man$(subst .,,$(suffix $f))/$(notdir $f)") \
 	    $(foreach f,README.md $(EXAMPLES),"$(DESTDIR)$(docdir)/$f")

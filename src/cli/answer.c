@@ -10,6 +10,8 @@
 #include <string.h>
 #include <unistd.h>
 
+#define ANSWER_NO 1 /* exit code: answered, and the answer is no */
+
 static bc_status choose_form(const arguments *a, bool brief, render_form *form, bc_error *err)
 {
     const char *path = a->value[OPTION_output];
@@ -21,7 +23,7 @@ static bc_status choose_form(const arguments *a, bool brief, render_form *form, 
         const char *slash = strrchr(path, '/');
 
         if (strrchr(slash ? slash : path, '.'))
-            return bc_fail(err, BC_ERR_USAGE, "-o %.200s: the ending is none of .txt .json .csv .svg .png .pdf, which give the form; or add --json or --csv", path);
+            return bc_fail(err, BC_ERR_USAGE, "-o %.200s: the ending is none of .txt .json .csv .html .xlsx .svg .png .pdf, which give the form; or add --json or --csv", path);
     }
     if (a->value[OPTION_json])
         *form = RENDER_JSON;
@@ -80,6 +82,9 @@ static bc_status render(const report *r, const arguments *a, bool brief, bc_erro
 int answer(report *r, const arguments *a, bool brief, int code)
 {
     bc_error err;
+
+    if (r->judgement == REPORT_UNJUDGED)
+        report_judge(r, code == ANSWER_NO || report_judged(r) == REPORT_NO ? REPORT_NO : REPORT_YES);
     const bc_status status = render(r, a, brief, &err);
 
     report_close(r);

@@ -135,7 +135,7 @@ bool burn_wants_chart(const arguments *a)
 
     if (a->value[OPTION_sweep])
         return true;
-    return a->value[OPTION_output] && render_form_of(a->value[OPTION_output], &form) && render_form_is_chart(form);
+    return a->value[OPTION_output] && render_form_of(a->value[OPTION_output], &form) && render_form_shows_charts(form);
 }
 
 /* excess=0..50 or flue-temp=40..250 */

@@ -396,6 +396,7 @@ static void add_rich(report *r, const arguments *a, const burn_case_result *c)
     add_mixture(r, "flue-equilibrium", "Flue gas as it leaves: equilibrium, frozen below 1227 C", &b->exit);
     report_add_warning(r, "The burner lacks oxidant: the flue gas holds carbon monoxide and hydrogen; soot and condensation are not modelled.");
     report_set_verdict(r, "lack of oxidant: carbon monoxide forms");
+    report_judge(r, REPORT_CARE);
 }
 
 static void warn_case(report *r, const burn_case_result *c)

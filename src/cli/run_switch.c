@@ -58,13 +58,13 @@ static bc_status compute(switch_case *c, bc_error *err)
     return status == BC_OK ? judge(c, err) : status;
 }
 
-/* A chart shows shares: there is nothing else to draw. */
+/* Charts show shares: there is nothing else to draw. */
 static bool wants_shares(const arguments *a)
 {
     render_form form = RENDER_TEXT;
     const char *path = a->value[OPTION_output];
 
-    return a->value[OPTION_blend_in] || (path && render_form_of(path, &form) && render_form_is_chart(form));
+    return a->value[OPTION_blend_in] || (path && render_form_of(path, &form) && render_form_shows_charts(form));
 }
 
 static bc_status fill(report *r, const switch_case *c, bc_error *err)

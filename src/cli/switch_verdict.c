@@ -214,6 +214,14 @@ static void add_cautions(const bc_switch *s, char *text, size_t size)
     }
 }
 
+/* A burner that takes the gas without a remark is a yes. */
+static report_judgement judgement_of(const switch_case *c, bool with_cautions)
+{
+    if (c->result.verdict == BC_SWITCH_NO)
+        return REPORT_NO;
+    return c->result.verdict == BC_SWITCH_TAKES && !with_cautions ? REPORT_YES : REPORT_CARE;
+}
+
 static void set_verdict(report *r, const switch_case *c)
 {
     char text[900];
@@ -227,11 +235,15 @@ static void set_verdict(report *r, const switch_case *c)
         append(text, sizeof text, ": ");
         append(text, sizeof text, remedy);
     }
-    if (c->result.same_gas && c->result.verdict == BC_SWITCH_TAKES)
+    const size_t used = strlen(text);
+    const bool same_gas = c->result.same_gas && c->result.verdict == BC_SWITCH_TAKES;
+
+    if (same_gas)
         append(text, sizeof text, ": it is the gas that the burner is set on");
     else
         add_cautions(&c->result, text, sizeof text);
     report_set_verdict(r, text);
+    report_judge(r, judgement_of(c, !same_gas && strlen(text) > used));
 }
 
 void switch_conclude(report *r, const switch_case *c)

@@ -142,6 +142,7 @@ static size_t conclude(report *r, const tallies *t)
     else
         (void)snprintf(text, sizeof text, "%zu of %zu check values are NOT met within their tolerance", failed, run);
     report_set_verdict(r, text);
+    report_judge(r, failed == 0 ? REPORT_YES : REPORT_NO);
     return failed;
 }
 

@@ -141,13 +141,15 @@ static cairo_status_t measure(chart_canvas *canvas, chart_plan *plan, chart_form
     return close_both(canvas->cr, surface);
 }
 
-static bool open_plan(chart_plan *plan, const report *r)
+static bool open_plan(chart_plan *plan, const chart_order *order)
 {
+    const report *r = order->r;
     size_t series = 0;
 
     for (size_t i = 0; i < r->chart_count; i++)
         series += r->charts[i].series_count;
     *plan = (chart_plan){.r = r,
+                         .inset = order->inset,
                          .panels = calloc(r->chart_count + 1, sizeof *plan->panels),
                          .styles = calloc(series + 1, sizeof *plan->styles)};
     return plan->panels != NULL && plan->styles != NULL;
@@ -161,7 +163,7 @@ chart_outcome bluecone_chart_draw(unsigned abi, chart_order *order)
 
     if (abi != CHART_ABI)
         return CHART_OTHER_ABI;
-    if (open_plan(&plan, order->r))
+    if (open_plan(&plan, order))
         status = measure(&canvas, &plan, order->form);
     if (status == CAIRO_STATUS_SUCCESS)
         status = order->form == CHART_SVG   ? draw_svg(&canvas, &plan, order->out)

@@ -58,6 +58,7 @@ typedef struct {
     const report *r;
     chart_panel *panels; /* r->chart_count of them */
     size_t *styles;      /* as many as series in all of r's charts */
+    bool inset; /* no head and foot, and no free edge above and below */
     size_t page_count;
     double head, foot; /* heights on each page */
 } chart_plan;

@@ -94,7 +94,7 @@ static void plan_ranges(chart_plan *plan)
         panel->x = chart_range_of(chart, REPORT_X);
         panel->y = chart_range_of(chart, REPORT_Y);
         panel->plot.height = plot_height(chart, count);
-        panel->has_title = *chart->title != '\0' && (count > 1 || strcmp(chart->title, plan->r->title) != 0);
+        panel->has_title = *chart->title != '\0' && (count > 1 || plan->inset || strcmp(chart->title, plan->r->title) != 0);
         panel->has_x_labels = true;
     }
     for (size_t first = 0, end = 1; end <= count; end++) {
@@ -211,8 +211,8 @@ static double draw_foot(chart_canvas *canvas, const report *r, double y)
 
 void chart_plan_pages(chart_canvas *canvas, chart_plan *plan, double most)
 {
-    plan->head = draw_head(canvas, plan->r) + 8.0;
-    plan->foot = draw_foot(canvas, plan->r, 0.0);
+    plan->head = plan->inset ? 0.0 : draw_head(canvas, plan->r) + 8.0;
+    plan->foot = plan->inset ? 0.0 : draw_foot(canvas, plan->r, 0.0);
     plan_ranges(plan);
     plan_margins(canvas, plan);
     plan_panels(canvas, plan, most);
@@ -253,9 +253,11 @@ void chart_draw_page(chart_canvas *canvas, const chart_plan *plan, size_t page)
 {
     chart_ink(canvas, 0xFFFFFF, 1.0);
     cairo_paint(canvas->cr);
-    draw_head(canvas, plan->r);
+    if (!plan->inset)
+        draw_head(canvas, plan->r);
     for (size_t i = 0; i < plan->r->chart_count; i++)
         if (plan->panels[i].page == page)
             draw_panel(canvas, &plan->panels[i]);
-    draw_foot(canvas, plan->r, end_of(plan, page));
+    if (!plan->inset)
+        draw_foot(canvas, plan->r, end_of(plan, page));
 }

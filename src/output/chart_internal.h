@@ -14,7 +14,7 @@
 /* The module reads the program's report: both must have it in the same shape. The number in front is
  * raised by hand when a change leaves the sizes as they are. */
 #define CHART_ABI                                                                                            \
-    (1U << 28 | (unsigned)sizeof(report) << 16 | (unsigned)sizeof(report_chart) << 4 |                       \
+    (2U << 28 | (unsigned)sizeof(report) << 16 | (unsigned)sizeof(report_chart) << 4 |                       \
      (unsigned)(sizeof(report_series) + sizeof(report_mark)) / 16)
 
 #define CHART_MODULE  "bluecone_chart.so"
@@ -33,6 +33,7 @@ typedef enum {
 typedef struct {
     const report *r;
     chart_form form;
+    bool inset; /* without title, state, caution and maker: the page around has them */
     FILE *out;
     char why[CHART_WHY_MAX];
 } chart_order;
@@ -40,6 +41,9 @@ typedef struct {
 /* Writes the charts of order->r to order->out, if abi is the module's own CHART_ABI. */
 typedef chart_outcome chart_draw(unsigned abi, chart_order *order);
 BC_API chart_draw bluecone_chart_draw;
+
+/* Writes the charts of r, at least one, as an SVG to be set into a page. Errors as of render_svg(). */
+BC_MUST_USE bc_status chart_inset(const report *r, FILE *out, bc_error *err);
 
 /* Finds the module in the first of these folders that has it; it stays loaded. BC_ERR_FILE names the
  * folders, or says why it cannot be loaded. */

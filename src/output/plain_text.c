@@ -46,12 +46,12 @@ static long decode(const unsigned char *s, size_t *bytes)
     return point;
 }
 
-/* Controls of a terminal (C0, DEL, C1) and the marks that let following text run backwards, which
- * can make a number look like another one. */
+/* Controls of a terminal (C0, DEL, C1), the marks that let following text run backwards, which can
+ * make a number look like another one, and what no XML file may hold. */
 static bool is_control(long point)
 {
     return point < 0x20 || (point >= 0x7F && point <= 0x9F) || (point >= 0x202A && point <= 0x202E) ||
-           (point >= 0x2066 && point <= 0x2069);
+           (point >= 0x2066 && point <= 0x2069) || point == 0xFFFE || point == 0xFFFF;
 }
 
 static bool survives(long point, plain_rule rule)

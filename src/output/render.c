@@ -12,20 +12,16 @@
 typedef bc_status renderer(const report *r, const render_style *style, FILE *out, bc_error *err);
 
 static renderer *const RENDERERS[] = {
-    [RENDER_TEXT] = render_text,
-    [RENDER_JSON] = render_json,
-    [RENDER_CSV] = render_csv,
-    [RENDER_BRIEF] = render_brief,
-    [RENDER_SVG] = render_svg,
-    [RENDER_PNG] = render_png,
-    [RENDER_PDF] = render_pdf,
+    [RENDER_TEXT] = render_text,   [RENDER_JSON] = render_json, [RENDER_CSV] = render_csv,
+    [RENDER_BRIEF] = render_brief, [RENDER_HTML] = render_html, [RENDER_XLSX] = render_xlsx,
+    [RENDER_SVG] = render_svg,     [RENDER_PNG] = render_png,   [RENDER_PDF] = render_pdf,
 };
 
 static const struct {
     const char *ending;
     render_form form;
-} ENDINGS[] = {{".txt", RENDER_TEXT}, {".json", RENDER_JSON}, {".csv", RENDER_CSV},
-             {".svg", RENDER_SVG},  {".png", RENDER_PNG},   {".pdf", RENDER_PDF}};
+} ENDINGS[] = {{".txt", RENDER_TEXT},  {".json", RENDER_JSON}, {".csv", RENDER_CSV}, {".html", RENDER_HTML},
+               {".xlsx", RENDER_XLSX}, {".svg", RENDER_SVG},   {".png", RENDER_PNG}, {".pdf", RENDER_PDF}};
 
 bc_status render_to(const report *r, render_form form, const render_style *style, const char *path,
                     bc_error *err)
@@ -64,4 +60,9 @@ bool render_form_of(const char *path, render_form *form)
 bool render_form_is_chart(render_form form)
 {
     return form == RENDER_SVG || form == RENDER_PNG || form == RENDER_PDF;
+}
+
+bool render_form_shows_charts(render_form form)
+{
+    return render_form_is_chart(form) || form == RENDER_HTML || form == RENDER_XLSX;
 }

@@ -16,15 +16,18 @@ typedef enum {
     RENDER_JSON, /* one object, 12 significant digits */
     RENDER_CSV,  /* results, or the tables where there are no results */
     RENDER_BRIEF, /* one line a result; chosen by a command, never by a file's ending */
+    RENDER_HTML, /* one page, charts in it, for a browser and for A4 */
+    RENDER_XLSX, /* a workbook: a sheet for each section, table and chart */
     RENDER_SVG,  /* the charts alone, panel below panel, 800 px wide */
     RENDER_PNG,  /* the same at twice as many pixels */
     RENDER_PDF   /* the same at 600 points, on as many pages as keep within A4 */
 } render_form;
 
-/* How text shall look. JSON and charts heed none of this, CSV only `digits`. */
+/* How text shall look. JSON and charts heed none of this, CSV only `digits`. HTML and
+ * workbook are as text, but for width and color. */
 typedef struct {
     bool bare;  /* brief: the number alone */
-    bool quiet; /* text: no warnings, no notes */
+    bool quiet; /* no warnings, no notes */
     bool color; /* text: escape sequences for titles, failures and the verdict */
     int digits; /* significant digits of every result; 0: uncertainty or the result decides */
     int width;  /* text: columns of a line; 0: 80 */
@@ -39,6 +42,14 @@ BC_MUST_USE bc_status render_csv(const report *r, const render_style *style, FIL
  * gas where the report has several. */
 BC_MUST_USE bc_status render_brief(const report *r, const render_style *style, FILE *out, bc_error *err);
 
+/* One file of HTML 5 that fetches nothing and runs nothing. Where the module that draws is missing, a
+ * note stands for the charts. */
+BC_MUST_USE bc_status render_html(const report *r, const render_style *style, FILE *out, bc_error *err);
+
+/* A workbook of Office Open XML: numbers as numbers, texts never as formulas, the same bytes in every
+ * run. BC_ERR_FILE also: the module that writes it, loaded on first use, is missing or a stranger. */
+BC_MUST_USE bc_status render_xlsx(const report *r, const render_style *style, FILE *out, bc_error *err);
+
 /* The charts with title, state and caution, the same bytes in every run. BC_ERR_USAGE: the report has
  * no chart; BC_ERR_FILE also: the module that draws, loaded on first use, is missing or a stranger. */
 BC_MUST_USE bc_status render_svg(const report *r, const render_style *style, FILE *out, bc_error *err);
@@ -50,10 +61,12 @@ BC_MUST_USE bc_status render_pdf(const report *r, const render_style *style, FIL
 BC_MUST_USE bc_status render_to(const report *r, render_form form, const render_style *style,
                                 const char *path, bc_error *err);
 
-/* The form a file's ending asks for (.txt .json .csv .svg .png .pdf, in any case); false if it names none. */
+/* The form a file's ending asks for (.txt .json .csv .html .xlsx .svg .png .pdf, in any case);
+ * false if it names none. */
 bool render_form_of(const char *path, render_form *form);
 
-/* True for the forms that draw the charts of a report. */
+/* True for the forms that are nothing but the charts of a report; for those that show them at all. */
 bool render_form_is_chart(render_form form);
+bool render_form_shows_charts(render_form form);
 
 #endif

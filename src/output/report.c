@@ -165,6 +165,11 @@ void report_set_verdict(report *r, const char *text)
     replace(r, &r->verdict, text);
 }
 
+void report_judge(report *r, report_judgement judgement)
+{
+    r->judgement = judgement;
+}
+
 void report_set_caution(report *r, const char *text)
 {
     replace(r, &r->caution, text);

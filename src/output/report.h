@@ -146,6 +146,14 @@ typedef struct {
     report_mark *marks;       size_t mark_count;
 } report_chart;
 
+/* What a verdict comes to, for a colour and a word beside its text. */
+typedef enum {
+    REPORT_UNJUDGED, /* nobody said: a failed check is a no */
+    REPORT_YES,
+    REPORT_CARE,     /* neither: something to look at first */
+    REPORT_NO
+} report_judgement;
+
 typedef struct {
     char *version, *command, *title;
     report_state state;
@@ -159,6 +167,7 @@ typedef struct {
     report_chart *charts;       size_t chart_count;
     char **warnings;            size_t warning_count;
     char *verdict;            /* NULL: nothing was asked that has a verdict */
+    report_judgement judgement; /* of the verdict */
     char *caution;            /* NULL: nothing here leads to a change of plant */
     bool failed;              /* an allocation failed */
 } report;
@@ -183,6 +192,8 @@ void report_add_limit(report *r, const report_limit *limit); /* the texts of *li
 void report_set_limits_title(report *r, const char *title);
 void report_add_warning(report *r, const char *text); /* the same text twice is kept once */
 void report_set_verdict(report *r, const char *text);
+void report_judge(report *r, report_judgement judgement);
+report_judgement report_judged(const report *r); /* the checks heeded */
 void report_set_caution(report *r, const char *text);
 
 /* Charts. All numbers must be finite. Labels may be empty; a chart may stay without points. */

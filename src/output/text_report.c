@@ -41,14 +41,6 @@ static void print_gas(text_page *page, const report *r, size_t gas)
         text_paragraph(page, (text_shape){.indent = HEAD_HANG, .hang = HEAD_HANG}, of->source);
 }
 
-static bool any_failed(const report *r)
-{
-    for (size_t i = 0; i < r->check_count; i++)
-        if (!r->checks[i].ok)
-            return true;
-    return false;
-}
-
 static void print_check(text_page *page, const report_check *check)
 {
     text_shape shape = {.lead = "ok", .indent = INDENT, .hang = CHECK_HANG};
@@ -85,7 +77,7 @@ static void print_end(text_page *page, const report *r)
     if (r->verdict != NULL || r->caution != NULL)
         fputc('\n', page->out);
     if (r->verdict != NULL) {
-        const text_tone tone = any_failed(r) ? TEXT_ALARM : TEXT_BOLD;
+        const text_tone tone = report_judged(r) == REPORT_NO ? TEXT_ALARM : TEXT_BOLD;
         text_paragraph(page, (text_shape){"Verdict:", 0, HEAD_HANG, tone, tone}, r->verdict);
     }
     if (r->caution != NULL)

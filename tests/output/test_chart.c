@@ -343,7 +343,7 @@ static void a_report_without_charts_is_refused_and_no_file_appears(void **state)
         bc_error err = {0};
         const bc_status status = render_to(*state, FORMS[i], &STYLE, scratch_path(), &err);
 
-        assert_refused(status, &err, BC_ERR_USAGE, "no chart|'blend'|.txt, .json or .csv");
+        assert_refused(status, &err, BC_ERR_USAGE, "no chart|'blend'|.txt, .json, .csv, .html or .xlsx");
         assert_int_equal(access(scratch_path(), F_OK), -1);
     }
 }
