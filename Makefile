@@ -92,6 +92,7 @@ PROGRAM_SRC := $(sort $(filter-out $(CHART_SRC) $(BOOK_SRC),$(wildcard src/outpu
 TEST_SRC    := $(sort $(wildcard tests/*/test_*.c))
 HEADERS     := $(sort $(wildcard include/bluecone/*.h))
 COMPOSITIONS := $(sort $(wildcard compositions/*.ini))
+SPECIFICATIONS := $(sort $(wildcard compositions/specifications/*.ini))
 MAN_PAGES   := $(sort $(wildcard man/*.[1-9]))
 EXAMPLES     = $(shell find examples -type f 2>/dev/null | LC_ALL=C sort)
 SCRIPTS     := $(sort .ci/run .ci/deps $(wildcard tests/*.sh tests/*/*.sh examples/*.sh))
@@ -237,7 +238,7 @@ symbols: all ## accept the symbols the shared library exports now
 
 install: all ## copy everything below PREFIX (and DESTDIR)
 	$(INSTALL) -d $(foreach d,$(bindir) $(libdir)/bluecone $(pkgconfigdir) $(includedir)/bluecone \
-	    $(datadir)/bluecone/compositions $(docdir) $(bashcompletiondir),"$(DESTDIR)$d")
+	    $(datadir)/bluecone/compositions/specifications $(docdir) $(bashcompletiondir),"$(DESTDIR)$d")
 	$(INSTALL_PROGRAM) $(PROGRAM) "$(DESTDIR)$(bindir)/bluecone"
 	$(INSTALL_DATA) $(ARCHIVE) $(SHARED) "$(DESTDIR)$(libdir)"
 	$(INSTALL_DATA) $(CHART) $(BOOK) "$(DESTDIR)$(libdir)/bluecone"
@@ -246,6 +247,7 @@ install: all ## copy everything below PREFIX (and DESTDIR)
 	$(INSTALL_DATA) $(HEADERS) "$(DESTDIR)$(includedir)/bluecone"
 	$(if $(COMPLETION),$(INSTALL_DATA) $(COMPLETION) "$(DESTDIR)$(bashcompletiondir)/bluecone")
 	$(if $(COMPOSITIONS),$(INSTALL_DATA) $(COMPOSITIONS) "$(DESTDIR)$(datadir)/bluecone/compositions")
+	$(if $(SPECIFICATIONS),$(INSTALL_DATA) $(SPECIFICATIONS) "$(DESTDIR)$(datadir)/bluecone/compositions/specifications")
 	for f in $(MAN_PAGES); do $(INSTALL_DATA) -D $$f "$(DESTDIR)$(mandir)/man$${f##*.}/$${f##*/}" || exit 1; done
 	for f in $(wildcard README.md) $(EXAMPLES); do $(INSTALL_DATA) -D $$f "$(DESTDIR)$(docdir)/$$f" || exit 1; done
 
@@ -253,7 +255,7 @@ install: all ## copy everything below PREFIX (and DESTDIR)
 uninstall: ## remove what install put there
 	rm -f "$(DESTDIR)$(bindir)/bluecone" "$(DESTDIR)$(pkgconfigdir)/bluecone.pc" "$(DESTDIR)$(bashcompletiondir)/bluecone" \
 	    $(foreach f,libbluecone.a libbluecone.so $(notdir $(SHARED)) bluecone/$(notdir $(CHART)) bluecone/$(notdir $(BOOK)),"$(DESTDIR)$(libdir)/$f") \
-	    $(HEADERS:include/%="$(DESTDIR)$(includedir)/%") $(COMPOSITIONS:%="$(DESTDIR)$(datadir)/bluecone/%") \
+	    $(HEADERS:include/%="$(DESTDIR)$(includedir)/%") $(foreach f,$(COMPOSITIONS) $(SPECIFICATIONS),"$(DESTDIR)$(datadir)/bluecone/$f") \
 	    $(foreach f,$(MAN_PAGES),"$(DESTDIR)$(mandir)/man$(subst .,,$(suffix $f))/$(notdir $f)") \
 	    $(foreach f,README.md $(EXAMPLES),"$(DESTDIR)$(docdir)/$f")
 	for d in "$(includedir)/bluecone" "$(libdir)/bluecone" "$(datadir)/bluecone" "$(docdir)"; do \

@@ -40,4 +40,4 @@ say 'What to look at:' \
     '  gap of 0.001 %: a mistyped heat would show here.'
 echo 'Next: write your certificate as examples/new-supply-offer.ini does, then run'
 echo '      build/release/bluecone sheet YOUR-FILE.ini'
-echo '      examples/01-*.sh to 10-*.sh go on from here, a step each.'
+echo '      examples/[0-9]*.sh go on from here, a step each.'

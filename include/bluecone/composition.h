@@ -40,6 +40,8 @@ typedef enum {
 #define BC_NAME_MAX 128        /* bytes of the name of a gas with the final NUL */
 #define BC_REMARK_MAX 12       /* remarks kept */
 #define BC_REMARK_BYTES 320    /* bytes of one remark with the final NUL */
+#define BC_PRINTED_MAX 16      /* lines of [printed] */
+#define BC_PRINTED_BYTES 48    /* bytes of the figure of one with the final NUL */
 
 /* One line of [components]. */
 typedef struct {
@@ -50,6 +52,13 @@ typedef struct {
     int line;                    /* of the file; 0 for a literal */
     double parts[BC_SPECIES_CAPACITY]; /* mole fractions of what the word stands for: one species, a cut, air */
 } bc_entry;
+
+/* A figure that is printed beside a composition, as written: bluecone/printed.h makes sense of it. */
+typedef struct {
+    char id[BC_COMPONENT_MAX];   /* "wobbe-gross" */
+    char text[BC_PRINTED_BYTES]; /* "15.08 kWh/m3" */
+    int line;
+} bc_printed_line;
 
 /* A composition read. All texts are terminated. */
 typedef struct {
@@ -68,6 +77,8 @@ typedef struct {
     bool air_suspected;       /* oxygen where this kind of gas has none */
     bc_gas gas;               /* what all values are computed from */
     bc_offer offer;           /* section [supply]; all zero without one */
+    size_t printed_count;     /* section [printed] */
+    bc_printed_line printed[BC_PRINTED_MAX];
     size_t remark_count;
     char remarks[BC_REMARK_MAX][BC_REMARK_BYTES]; /* what was changed or is strange, as sentences */
     size_t entry_count;

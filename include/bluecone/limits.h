@@ -20,13 +20,18 @@ extern "C" {
 #define BC_LIMIT_MAX 64           /* limits of one contract, followed ones included */
 #define BC_LIMIT_REFERENCE_MAX 12 /* different reference states of one contract */
 #define BC_LIMIT_ID_MAX 64        /* bytes of an id or unit with the final NUL */
+#define BC_LIMIT_NOTE_MAX 160     /* bytes of a note with the final NUL */
+#define BC_DATE_MAX 12            /* bytes of a date with the final NUL */
 #define BC_LIMIT_ROUNDING 1e-9    /* relative: a figure this near to a bound is on it, not beyond */
 
 /* What a limit is on. */
 typedef enum {
     BC_LIMIT_QUANTITY,      /* a quantity of `bluecone list quantities` */
     BC_LIMIT_FRACTION,      /* mole fraction of a component or a group */
-    BC_LIMIT_CONCENTRATION  /* its mass per volume of real gas at the metering state */
+    BC_LIMIT_CONCENTRATION, /* its mass per volume of real gas at the metering state */
+    BC_LIMIT_INDEX,         /* an index of interchangeability: bluecone/index.h */
+    BC_LIMIT_MASS_FRACTION, /* mass of a component or a group per mass of gas */
+    BC_LIMIT_VOLUME_FRACTION /* its volume as a gas alone, per sum of such volumes, at the metering state */
 } bc_limit_kind;
 
 /* One limit. A bound that is not stated is not there: has_min or has_max is false and its value 0. */
@@ -34,14 +39,15 @@ typedef struct {
     char id[BC_LIMIT_ID_MAX];        /* "wobbe-gross", "hydrogen", "c4+", "inerts", "total-sulphur" */
     char unit[BC_LIMIT_ID_MAX];      /* of the bounds, as written; that of the quantity or "mol %" when not */
     bc_limit_kind kind;
-    size_t quantity;                 /* BC_LIMIT_QUANTITY: its index */
-    double weight[BC_SPECIES_CAPACITY]; /* else: what a mole of each species adds, mol or kg */
+    size_t quantity;                 /* BC_LIMIT_QUANTITY, BC_LIMIT_INDEX: its index */
+    double weight[BC_SPECIES_CAPACITY]; /* else: what a mole of each species adds, mol or (concentration, mass) kg */
     bc_unit own, shown;              /* units of the figure as computed, and of the bounds */
     bool has_min, has_max;
     double min, max;                 /* in `unit` */
     size_t reference;                /* of the contract's references */
     char path[BC_FILE_MAX];          /* file and line it stands on */
     int line;
+    char note[BC_LIMIT_NOTE_MAX];    /* where and when it holds, as the file says; may be "" */
 } bc_limit;
 
 /* A window of [range COMPONENT]: mole fractions. */
@@ -57,6 +63,7 @@ typedef struct {
     char path[BC_FILE_MAX];
     char origin[256];                /* key `source`; "" when not stated */
     char note[256];
+    char from[BC_DATE_MAX], until[BC_DATE_MAX]; /* when the text came and went; "" when not stated */
     char currency[BC_CURRENCY_MAX];
     bc_per_amount price;
     bc_per_amount annual;            /* amount a year: si is J, kg, m3 or mol per year */
@@ -67,6 +74,8 @@ typedef struct {
     bc_limit limits[BC_LIMIT_MAX];
     size_t range_count;
     bc_range ranges[BC_LIMIT_MAX];
+    bool has_present;                /* `present` is the gas that indices of two gases compare with */
+    bc_gas present;
 } bc_contract;
 
 /* How a gas stands to a limit, in the unit of the limit. */
@@ -85,6 +94,16 @@ typedef struct {
  *
  * BC_ERR_INPUT: what is wrong with the file, with its line; BC_ERR_FILE, BC_ERR_MEMORY. */
 BC_API BC_MUST_USE bc_status bc_contract_read(const char *path, bc_contract *contract, bc_error *err);
+
+/* Finds what a CONTRACT word means: a file, else a bundled specification NAME (DIR/NAME.ini); `follows` inside of it
+ * looks through the same folders.
+ *
+ *   folders        folders with specifications, looked through in order
+ *   folder_count   their number
+ *
+ * BC_ERR_INPUT with the nearest bundled name when nothing fits; else as bc_contract_read(). */
+BC_API BC_MUST_USE bc_status bc_contract_find(const char *word, const char *const folders[], size_t folder_count, bc_contract *contract,
+                                              bc_error *err);
 
 /* A contract without limits, to be filled by bc_contract_add(): what a caller asks by itself, such as an
  * aim. `state` is that of all its limits; errors as bc_reference_at(). */
@@ -106,14 +125,14 @@ BC_API BC_MUST_USE bc_status bc_contract_add(bc_contract *contract, const char *
  *   gas     as composed: the state of the limit may saturate it
  *   value   out: untouched on failure
  *
- * BC_ERR_RANGE: the gas has no such figure. */
+ * BC_ERR_RANGE: the gas has no such figure; BC_ERR_USAGE: an index of two gases, and has_present is false. */
 BC_API BC_MUST_USE bc_status bc_limit_value(const bc_contract *contract, size_t limit, const bc_gas *gas, double *value, bc_error *err);
 
 /* Judges a gas by a limit: value, uncertainty, margin. Bounds belong to what is allowed.
  *
  *   spread   uncertainty of the composition; NULL when none was stated
  *
- * BC_ERR_RANGE: the gas has no such figure, so the limit cannot be judged. */
+ * BC_ERR_RANGE: the gas has no such figure, so the limit cannot be judged; BC_ERR_USAGE as above. */
 BC_API BC_MUST_USE bc_status bc_limit_judge(const bc_contract *contract, size_t limit, const bc_gas *gas, const bc_spread *spread,
                                             bc_limit_figure *figure, bc_error *err);
 

@@ -17,6 +17,7 @@ enum {
 #define BURN (1U << COMMAND_burn)
 #define BLEND (1U << COMMAND_blend)
 #define SWITCH (1U << COMMAND_switch)
+#define CONTRACT (1U << COMMAND_contract)
 #define LIST (1U << COMMAND_list)
 #define VERIFY (1U << COMMAND_verify)
 

@@ -37,7 +37,7 @@ static bc_status take_within(blend_case *c, bc_error *err)
         return BC_OK;
     const bc_status status = open_contract(&c->within, err);
 
-    return status == BC_OK ? bc_contract_read(path, c->within, err) : status;
+    return status == BC_OK ? contract_load(path, c->within, err) : status;
 }
 
 /* "50.72MJ/m3": the number, and a unit that may be left out. */

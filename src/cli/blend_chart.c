@@ -34,7 +34,7 @@ static size_t open_panel(report *r, const sweep_table *t, const blend_case *c, c
     (void)snprintf(text, sizeof text, "%s", column->id);
     (void)snprintf(title, sizeof title, "%s", column->id);
     if (column->is_limit) {
-        blend_state_text(&c->within->references[c->within->limits[column->index].reference].state, state, sizeof state);
+        state_text(&c->within->references[c->within->limits[column->index].reference].state, state, sizeof state);
         (void)snprintf(title, sizeof title, "%s, at %s", column->id, state);
     }
     (void)snprintf(x, sizeof x, "%.80s, by %s", blend_part_name(c, c->swept), bc_blend_basis_text(c->by));

@@ -13,7 +13,7 @@ static void add_rows(report *r, size_t table, const sweep_table *t, const blend_
     char state[64];
     const size_t count = bc_line_crossings(&t->line, c->within, index, bound, place, BC_CROSSING_MAX);
 
-    blend_state_text(&c->within->references[limit->reference].state, state, sizeof state);
+    state_text(&c->within->references[limit->reference].state, state, sizeof state);
     for (size_t i = 0; i < count; i++) {
         report_add_text(r, table, limit->id);
         report_add_text(r, table, state);

@@ -6,28 +6,6 @@
 #include <stdio.h>
 #include <string.h>
 
-/* A temperature as people write it: 15.5556 C is 60 F. */
-static void temperature_text(double t_c, char *text, size_t size)
-{
-    if (fabs(t_c - (60.0 - 32.0) / 1.8) < 1e-6)
-        (void)snprintf(text, size, "60F");
-    else
-        (void)snprintf(text, size, "%.6g", t_c);
-}
-
-void blend_state_text(const bc_state *state, char *text, size_t size)
-{
-    char burnt[24];
-    char metered[24];
-    char pressure[24] = "";
-
-    temperature_text(state->combustion_c, burnt, sizeof burnt);
-    temperature_text(state->metering_c, metered, sizeof metered);
-    if (fabs(state->metering_pa - BC_P0_PA) > 0.5)
-        (void)snprintf(pressure, sizeof pressure, "@%.6g", state->metering_pa * 1e-3);
-    (void)snprintf(text, size, "%s/%s%s%s", burnt, metered, pressure, state->saturated ? " saturated" : "");
-}
-
 static void add_limit(report *r, const blend_case *c, size_t index, size_t gas, bool *inside)
 {
     const bc_limit *limit = &c->within->limits[index];
@@ -45,7 +23,7 @@ static void add_limit(report *r, const blend_case *c, size_t index, size_t gas, 
 
     (void)snprintf(id, sizeof id, "%s", limit->id);
     (void)snprintf(unit, sizeof unit, "%s", limit->unit);
-    blend_state_text(&c->within->references[limit->reference].state, state, sizeof state);
+    state_text(&c->within->references[limit->reference].state, state, sizeof state);
     if (judged)
         (void)snprintf(verdict, sizeof verdict, "%s", f.inside ? "inside" : "outside");
     else

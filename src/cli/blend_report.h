@@ -24,9 +24,6 @@ void blend_judge(report *r, const blend_case *c, size_t gas, bool *inside);
 /* The verdict on one judged gas: within all limits, or what is broken, worst first. */
 void blend_verdict(report *r, const blend_case *c, size_t gas, bool inside);
 
-/* "25/0", "15/15 saturated": the state of a limit in short. */
-void blend_state_text(const bc_state *state, char *text, size_t size);
-
 /* Answers: the report to where -o wants it, or with -o FILE.ini the blend into that file and the report to
  * standard output. Closes report and case. */
 int blend_answer(report *r, blend_case *c, const double share[], int code);

@@ -60,6 +60,12 @@ typedef struct {
 
 void folders_find(folders *f);
 
+/* Folders of bundled specifications: `specifications` in each of those. */
+void folders_of_specifications(folders *f);
+
+/* Reads a contract file or a bundled specification. */
+bc_status contract_load(const char *word, bc_contract *contract, bc_error *err);
+
 #define RECIPE_MAX 480
 
 /* A gas of the command line. */
@@ -78,6 +84,9 @@ bc_status gas_load(const char *word, loaded_gas *gas, bc_error *err);
 
 /* Reference state from --at, --saturated, --edition. */
 bc_status state_from(const arguments *a, bc_state *state, bc_error *err);
+
+/* "25/0", "15/15 saturated": a state in short. */
+void state_text(const bc_state *state, char *text, size_t size);
 
 /* Puts the state, a gas and what is to be said of it into a report. The index of the gas comes back. */
 void report_state_of(report *r, const bc_state *state);
@@ -116,6 +125,7 @@ int run_sheet(const arguments *a);
 int run_burn(const arguments *a);
 int run_blend(const arguments *a);
 int run_switch(const arguments *a);
+int run_contract(const arguments *a);
 int run_list(const arguments *a);
 int run_verify(const arguments *a);
 

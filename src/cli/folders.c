@@ -1,5 +1,5 @@
 /* SPDX-License-Identifier: MIT */
-/* folders.c - where the bundled gases are. */
+/* folders.c - where the bundled gases and specifications are. */
 #include "cli/cli.h"
 
 #include <stdio.h>
@@ -67,4 +67,22 @@ void folders_find(folders *f)
     add_environment(f);
     add_beside_program(f);
     add(f, BC_DATA_DIR, strlen(BC_DATA_DIR), "/compositions");
+}
+
+void folders_of_specifications(folders *f)
+{
+    folders_find(f);
+    for (size_t i = 0; i < f->count; i++) {
+        const size_t used = strlen(f->text[i]);
+
+        (void)snprintf(f->text[i] + used, BC_FILE_MAX - used, "/specifications");
+    }
+}
+
+bc_status contract_load(const char *word, bc_contract *contract, bc_error *err)
+{
+    folders f;
+
+    folders_of_specifications(&f);
+    return bc_contract_find(word, f.path, f.count, contract, err);
 }

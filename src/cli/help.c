@@ -11,7 +11,7 @@ void help_all(void)
          "What a fuel gas is worth and how it compares: heating values, density, Wobbe\n"
          "index after ISO 6976, checked against a formation-enthalpy balance.\n");
     for (size_t i = 0; command_at(i); i++)
-        printf("  %-7s %s\n", command_at(i)->word, command_at(i)->help);
+        printf("  %-8s %s\n", command_at(i)->word, command_at(i)->help);
     puts("\nA GAS is a composition file, a bundled name or a literal:\n"
          "  bluecone get wobbe-gross methane=92,ethane=5,nitrogen=3\n"
          "  bluecone sheet pipeline-h --at 25/0\n\n"

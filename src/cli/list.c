@@ -1,5 +1,5 @@
 /* SPDX-License-Identifier: MIT */
-/* list.c - what there is: gases, species, quantities, units, methods, states. */
+/* list.c - what there is: species, quantities, units, methods, states. */
 #include "cli/list.h"
 
 #include "base/error_internal.h"
@@ -185,7 +185,7 @@ static const struct {
 } TOPICS[] = {
     {"gases", list_gases},   {"species", list_species}, {"quantities", list_quantities}, {"units", list_units},
     {"methods", list_methods}, {"states", list_states}, {"commands", list_commands},     {"options", list_options},
-    {"areas", list_areas},
+    {"areas", list_areas},   {"specifications", list_specifications},
 };
 
 static bc_status run_topic(report *r, const arguments *a, bc_error *err)
@@ -201,7 +201,7 @@ static bc_status run_topic(report *r, const arguments *a, bc_error *err)
             best = i;
     }
     bc_text_show(shown, sizeof shown, a->argument[0]);
-    return bc_fail(err, BC_ERR_USAGE, "there is no list '%s'; the nearest is '%s': bluecone list gases|species|quantities|units|methods|states",
+    return bc_fail(err, BC_ERR_USAGE, "there is no list '%s'; the nearest is '%s': bluecone list gases|specifications|species|quantities|units|methods|states",
                    shown, TOPICS[best].word);
 }
 

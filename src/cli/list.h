@@ -12,6 +12,9 @@ void list_row(report *r, size_t table, const char *const cells[], size_t count);
 /* All bundled gases, or one with its composition and source. */
 bc_status list_gases(report *r, const char *name, bc_error *err);
 
+/* All bundled specifications, or one with its limits and source. */
+bc_status list_specifications(report *r, const char *name, bc_error *err);
+
 /* All species, or one with each datum and its source. */
 bc_status list_species(report *r, const char *name, bc_error *err);
 

@@ -57,13 +57,27 @@ static bc_status load(subjects *s, const char *word, bool air_free, bool both, b
     return status == BC_OK ? evaluate(s, each, err) : status;
 }
 
+static bc_status open_gases(subjects *s, const arguments *a, const char *const words[], size_t count, bool both, bc_error *err);
+
 bc_status subjects_open(subjects *s, const arguments *a, const char *const words[], size_t count, bool both, bc_error *err)
 {
     memset(s, 0, sizeof *s);
-    bc_status status = state_from(a, &s->state, err);
+    const bc_status status = state_from(a, &s->state, err);
 
-    if (status == BC_OK)
-        status = bc_reference_at(&s->state, &s->reference, err);
+    return status == BC_OK ? open_gases(s, a, words, count, both, err) : status;
+}
+
+bc_status subjects_open_at(subjects *s, const bc_state *state, const arguments *a, const char *const words[], size_t count, bc_error *err)
+{
+    memset(s, 0, sizeof *s);
+    s->state = *state;
+    return open_gases(s, a, words, count, false, err);
+}
+
+static bc_status open_gases(subjects *s, const arguments *a, const char *const words[], size_t count, bool both, bc_error *err)
+{
+    bc_status status = bc_reference_at(&s->state, &s->reference, err);
+
     if (status != BC_OK)
         return status;
     s->each = calloc(2 * count + 1, sizeof *s->each); /* each gas may be followed by itself without air */

@@ -23,6 +23,8 @@ typedef struct {
 /* Loads the gases words[0..count). With --air-free a gas that holds oxygen is followed (`both`) or
  * replaced by itself without air. The caller closes in any case. */
 bc_status subjects_open(subjects *s, const arguments *a, const char *const words[], size_t count, bool both, bc_error *err);
+/* The same at a state that no option gives. */
+bc_status subjects_open_at(subjects *s, const bc_state *state, const arguments *a, const char *const words[], size_t count, bc_error *err);
 void subjects_close(subjects *s);
 
 /* State, gases and their warnings into a report. */

@@ -302,10 +302,27 @@ static bc_status check_sections(const reader *r)
         const bc_ini_entry *e = bc_ini_at(r->ini, i);
 
         if (strcmp(e->section, "gas") != 0 && strcmp(e->section, "components") != 0 && strcmp(e->section, "uncertainty") != 0
-            && strcmp(e->section, "supply") != 0 && strncmp(e->section, "cut ", 4) != 0)
+            && strcmp(e->section, "supply") != 0 && strcmp(e->section, "printed") != 0 && strncmp(e->section, "cut ", 4) != 0)
             return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line,
-                              "unknown section [%s]; known are [gas], [components], [uncertainty], [supply] and [cut NAME]", e->section);
+                              "unknown section [%s]; known are [gas], [components], [uncertainty], [printed], [supply] and [cut NAME]", e->section);
     }
+    return BC_OK;
+}
+
+/* A figure printed on the certificate: kept as it is, for who asks which state it belongs to. */
+static bc_status take_printed(reader *r, const bc_ini_entry *e)
+{
+    bc_composition *c = r->c;
+    bc_printed_line *p = &c->printed[c->printed_count];
+
+    if (c->printed_count == BC_PRINTED_MAX)
+        return refuse(r, e, "there are more than 16 printed figures; leave some out");
+    if (strlen(e->value) >= sizeof p->text || strlen(e->key) >= sizeof p->id)
+        return refuse(r, e, "a printed figure is a number and its unit, as 41.21 MJ/m3; shorten it");
+    (void)snprintf(p->id, sizeof p->id, "%s", e->key);
+    (void)snprintf(p->text, sizeof p->text, "%s", e->value);
+    p->line = e->line;
+    c->printed_count++;
     return BC_OK;
 }
 
@@ -325,6 +342,8 @@ static bc_status read_document(reader *r)
         status = take_section(r, "uncertainty", take_uncertainty);
     if (status == BC_OK)
         status = take_section(r, "supply", gas_file_supply_key);
+    if (status == BC_OK)
+        status = take_section(r, "printed", take_printed);
     return status == BC_OK ? composition_finish(r->c, r->err) : status;
 }
 

@@ -148,6 +148,44 @@ static void put_table(csv_page *page, const report_table *table)
     }
 }
 
+/* A number that may not be there: an empty cell. */
+static void put_maybe(csv_page *page, bool there, double number)
+{
+    if (there)
+        put_number(page, number);
+    fputc(',', page->out);
+}
+
+static void put_limit(csv_page *page, const report *r, const report_limit *limit)
+{
+    put_text(page, limit->id);
+    fputc(',', page->out);
+    put_text(page, limit->gas == REPORT_NO_GAS ? "" : r->gases[limit->gas].name);
+    fputc(',', page->out);
+    put_text(page, limit->unit);
+    fputc(',', page->out);
+    put_text(page, limit->state);
+    fputc(',', page->out);
+    put_maybe(page, limit->has_min, limit->min);
+    put_maybe(page, limit->has_max, limit->max);
+    put_maybe(page, limit->has_value, limit->value);
+    put_maybe(page, limit->has_uncertainty, limit->uncertainty);
+    put_maybe(page, limit->has_value, limit->margin);
+    put_maybe(page, limit->has_percent, limit->percent);
+    put_maybe(page, limit->has_probability, limit->probability);
+    put_text(page, limit->verdict);
+    fputc('\n', page->out);
+}
+
+static void put_limits(csv_page *page, const report *r)
+{
+    if (r->limit_count == 0)
+        return;
+    fputs("\nlimit,gas,unit,state,min,max,value,uncertainty,margin,margin_percent,probability,verdict\n", page->out);
+    for (size_t i = 0; i < r->limit_count; i++)
+        put_limit(page, r, &r->limits[i]);
+}
+
 static void put_report(csv_page *page, const report *r)
 {
     if (r->result_count > 0 || r->table_count == 0) {
@@ -169,6 +207,8 @@ bc_status render_csv(const report *r, const render_style *style, FILE *out, bc_e
 
     if (!page.failed)
         put_report(&page, r);
+    if (!page.failed)
+        put_limits(&page, r);
     if (page.failed)
         return bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
     return ferror(out) ? bc_fail(err, BC_ERR_FILE, "cannot write the report") : BC_OK;

@@ -142,6 +142,12 @@ static json_t *limit_of(const report *r, const report_limit *limit, bool *failed
     put(object, "max", limit->has_max ? number_of(limit->max) : json_null(), failed);
     put(object, "unit", text_of(limit->unit), failed);
     put(object, "margin", limit->has_value && (limit->has_min || limit->has_max) ? number_of(limit->margin) : json_null(), failed);
+    if (limit->has_uncertainty)
+        put(object, "uncertainty", number_of(limit->uncertainty), failed);
+    if (limit->has_percent)
+        put(object, "margin_percent", number_of(limit->percent), failed);
+    if (limit->has_probability)
+        put(object, "probability", number_of(limit->probability), failed);
     put(object, "verdict", text_of(limit->verdict), failed);
     put(object, "state", text_of(limit->state), failed);
     return object;
@@ -153,6 +159,36 @@ static json_t *limits_of(const report *r, bool *failed)
 
     for (size_t i = 0; i < r->limit_count; i++)
         append(array, limit_of(r, &r->limits[i], failed), failed);
+    return array;
+}
+
+static json_t *fractions_of(const report_fraction fractions[], size_t count, bool *failed)
+{
+    json_t *object = json_object();
+
+    for (size_t i = 0; i < count; i++)
+        put(object, fractions[i].id, number_of(fractions[i].x), failed);
+    return object;
+}
+
+static json_t *worst_of(const report *r, bool *failed)
+{
+    json_t *array = json_array();
+
+    for (size_t i = 0; i < r->worst_count; i++) {
+        const report_worst *w = &r->worst[i];
+        json_t *object = json_object();
+
+        put(object, "id", text_of(w->id), failed);
+        put(object, "unit", text_of(w->unit), failed);
+        put(object, "state", text_of(w->state), failed);
+        put(object, "min", number_of(w->min), failed);
+        put(object, "max", number_of(w->max), failed);
+        put(object, "at_min", fractions_of(w->at_min, w->at_min_count, failed), failed);
+        put(object, "at_max", fractions_of(w->at_max, w->at_max_count, failed), failed);
+        put(object, "proof", json_string(w->min_exact && w->max_exact ? "exact" : "searched"), failed);
+        append(array, object, failed);
+    }
     return array;
 }
 
@@ -193,6 +229,8 @@ static json_t *report_of(const report *r, bool *failed)
     put(object, "tables", tables_of(r, failed), failed);
     if (r->limit_count > 0)
         put(object, "limits", limits_of(r, failed), failed);
+    if (r->worst_count > 0)
+        put(object, "worst", worst_of(r, failed), failed);
     put(object, "checks", checks_of(r, failed), failed);
     if (r->chart_count > 0)
         put(object, "charts", json_charts(r, failed), failed);

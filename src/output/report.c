@@ -117,6 +117,9 @@ void report_close(report *r)
         report_free_limit(&r->limits[i]);
     free(r->limits);
     free(r->limits_title);
+    for (size_t i = 0; i < r->worst_count; i++)
+        report_free_worst(&r->worst[i]);
+    free(r->worst);
     for (size_t i = 0; i < r->chart_count; i++)
         report_free_chart(&r->charts[i]);
     free(r->gases);

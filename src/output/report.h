@@ -90,7 +90,25 @@ typedef struct {
     bool has_value, has_min, has_max;
     double value, min, max;
     double margin;            /* to the nearer bound, negative outside; set by report_add_limit() */
+    bool has_uncertainty;
+    double uncertainty;       /* standard uncertainty, k = 1, same unit */
+    bool has_percent;
+    double percent;           /* margin in per cent of the window, or of the bound where there is one */
+    bool has_probability;
+    double probability;       /* that the limit is kept, 0..1 */
 } report_limit;
+
+typedef enum { REPORT_MIN, REPORT_MAX } report_end;
+
+/* What a figure can be over all allowed compositions, and the ones that attain it. */
+typedef struct {
+    char *id, *unit;
+    char *state;              /* reference state in short; may be "" */
+    double min, max;
+    bool min_exact, max_exact; /* proven; else the best that was found */
+    report_fraction *at_min;  size_t at_min_count;
+    report_fraction *at_max;  size_t at_max_count;
+} report_worst;
 
 typedef enum { REPORT_X, REPORT_Y } report_axis_id;
 
@@ -164,6 +182,8 @@ typedef struct {
     report_check *checks;       size_t check_count;
     report_limit *limits;       size_t limit_count;
     char *limits_title;       /* whose limits these are; NULL: for machines alone, people get another table */
+    bool limits_lead;         /* text: they stand before the sections, since they are what was asked */
+    report_worst *worst;        size_t worst_count;
     report_chart *charts;       size_t chart_count;
     char **warnings;            size_t warning_count;
     char *verdict;            /* NULL: nothing was asked that has a verdict */
@@ -190,6 +210,10 @@ void report_add_number(report *r, size_t table, double number, int decimals); /*
 void report_add_check(report *r, const char *id, bool ok, const char *detail);
 void report_add_limit(report *r, const report_limit *limit); /* the texts of *limit are copied */
 void report_set_limits_title(report *r, const char *title);
+void report_lead_with_limits(report *r);
+size_t report_add_worst(report *r, const char *id, const char *unit, const char *state);
+void report_set_worst(report *r, size_t worst, report_end end, double value, bool exact);
+void report_add_worst_fraction(report *r, size_t worst, report_end end, const char *id, double x);
 void report_add_warning(report *r, const char *text); /* the same text twice is kept once */
 void report_set_verdict(report *r, const char *text);
 void report_judge(report *r, report_judgement judgement);

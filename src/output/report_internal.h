@@ -18,6 +18,7 @@ void report_free_result(report_result *result);
 void report_free_column(report_column *column);
 void report_free_table(report_table *table);
 void report_free_limit(report_limit *limit);
+void report_free_worst(report_worst *worst);
 void report_free_chart(report_chart *chart);
 
 #endif

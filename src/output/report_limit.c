@@ -65,3 +65,8 @@ void report_set_limits_title(report *r, const char *title)
     free(r->limits_title);
     r->limits_title = report_copy(r, title);
 }
+
+void report_lead_with_limits(report *r)
+{
+    r->limits_lead = true;
+}

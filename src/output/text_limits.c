@@ -12,6 +12,8 @@
 #define CELL_FOLD 20 /* why a limit cannot be judged is a sentence */
 #define BOUND_DIGITS 9
 #define MARGIN_DIGITS 4
+#define UNCERTAINTY_DIGITS 2
+#define PERCENT_DIGITS 3
 
 static void add_number(grid *g, bool there, double number, int digits)
 {
@@ -40,15 +42,40 @@ static void add_bound(grid *g, bool there, double bound)
     grid_add_cell(g, there ? text : "-");
 }
 
-static void add_columns(grid *g)
-{
-    static const char *const HEADINGS[] = {"limit", "gas", "unit", "at", "min", "max", "value", "margin", "verdict"};
+/* Columns that only some reports fill. */
+typedef struct {
+    bool uncertainty, percent;
+} limit_columns;
 
-    for (size_t i = 0; i < sizeof HEADINGS / sizeof *HEADINGS; i++)
-        grid_add_column(g, i >= 4 && i <= 7 ? GRID_RIGHT : GRID_LEFT, CELL_FOLD, HEADINGS[i], "");
+static limit_columns columns_of(const report *r)
+{
+    limit_columns c = {false, false};
+
+    for (size_t i = 0; i < r->limit_count; i++) {
+        c.uncertainty = c.uncertainty || r->limits[i].has_uncertainty;
+        c.percent = c.percent || r->limits[i].has_percent;
+    }
+    return c;
 }
 
-static void add_limit(grid *g, const report_limit *limit, const render_style *style)
+static void add_columns(grid *g, const limit_columns *c)
+{
+    static const char *const LEFT[] = {"limit", "gas", "unit", "at"};
+    static const char *const RIGHT[] = {"min", "max", "value"};
+
+    for (size_t i = 0; i < sizeof LEFT / sizeof *LEFT; i++)
+        grid_add_column(g, GRID_LEFT, CELL_FOLD, LEFT[i], "");
+    for (size_t i = 0; i < sizeof RIGHT / sizeof *RIGHT; i++)
+        grid_add_column(g, GRID_RIGHT, CELL_FOLD, RIGHT[i], "");
+    if (c->uncertainty)
+        grid_add_column(g, GRID_RIGHT, CELL_FOLD, "u", "");
+    grid_add_column(g, GRID_RIGHT, CELL_FOLD, "margin", "");
+    if (c->percent)
+        grid_add_column(g, GRID_RIGHT, CELL_FOLD, "%", "");
+    grid_add_column(g, GRID_LEFT, CELL_FOLD, "verdict", "");
+}
+
+static void add_limit(grid *g, const limit_columns *c, const report_limit *limit, const render_style *style)
 {
     char letter[TEXT_LETTERS_MAX] = "";
 
@@ -61,7 +88,11 @@ static void add_limit(grid *g, const report_limit *limit, const render_style *st
     add_bound(g, limit->has_min, limit->min);
     add_bound(g, limit->has_max, limit->max);
     add_number(g, limit->has_value, limit->value, style->digits > 0 ? style->digits : REPORT_DIGITS);
+    if (c->uncertainty)
+        add_number(g, limit->has_uncertainty, limit->uncertainty, UNCERTAINTY_DIGITS);
     add_number(g, limit->has_value, limit->margin, MARGIN_DIGITS);
+    if (c->percent)
+        add_number(g, limit->has_percent, limit->percent, PERCENT_DIGITS);
     grid_add_cell(g, limit->verdict);
 }
 
@@ -73,9 +104,11 @@ void text_limits(text_page *page, const report *r)
         return;
     fputc('\n', page->out);
     text_title(page, r->limits_title, NULL);
-    grid_open(&g, INDENT, 1);
-    add_columns(&g);
+    grid_open(&g, INDENT, 2); /* limit and gas */
+    const limit_columns c = columns_of(r);
+
+    add_columns(&g, &c);
     for (size_t i = 0; i < r->limit_count; i++)
-        add_limit(&g, &r->limits[i], page->style);
+        add_limit(&g, &c, &r->limits[i], page->style);
     grid_print(&g, page);
 }

@@ -100,9 +100,12 @@ bc_status render_text(const report *r, const render_style *style, FILE *out, bc_
         for (size_t i = 0; i < r->gas_count; i++)
             print_gas(&page, r, i);
         text_tables(&page, r, true);
+        if (r->limits_lead)
+            text_limits(&page, r);
         text_sections(&page, r);
         text_tables(&page, r, false);
-        text_limits(&page, r);
+        if (!r->limits_lead)
+            text_limits(&page, r);
         print_checks(&page, r);
         print_warnings(&page, r);
         print_end(&page, r);

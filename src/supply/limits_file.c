@@ -4,9 +4,11 @@
 
 #include "base/error_internal.h"
 #include "base/text.h"
+#include "bluecone/composition.h"
 
 #include <stdio.h>
 #include <string.h>
+#include <sys/stat.h>
 
 #define FOLLOW_MAX 4 /* files behind each other; more is a circle */
 
@@ -23,105 +25,6 @@ bc_status limits_blame(const limits_reader *r, int line)
         (void)snprintf(r->err->file, sizeof r->err->file, "%s", r->path);
     }
     return BC_ERR_INPUT;
-}
-
-static bc_status take_text(const limits_reader *r, const bc_ini_entry *e, char *to, size_t size)
-{
-    if (strlen(e->value) >= size)
-        return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "the value of '%s' is longer than %zu bytes; shorten it", e->key, size - 1);
-    memcpy(to, e->value, strlen(e->value) + 1);
-    return BC_OK;
-}
-
-static bc_status take_name(limits_reader *r, const bc_ini_entry *e)
-{
-    return take_text(r, e, r->c->name, sizeof r->c->name);
-}
-
-static bc_status take_source(limits_reader *r, const bc_ini_entry *e)
-{
-    return take_text(r, e, r->c->origin, sizeof r->c->origin);
-}
-
-static bc_status take_note(limits_reader *r, const bc_ini_entry *e)
-{
-    return take_text(r, e, r->c->note, sizeof r->c->note);
-}
-
-static bc_status take_at(limits_reader *r, const bc_ini_entry *e)
-{
-    return bc_state_parse(e->value, &r->c->state, r->err) == BC_OK ? BC_OK : limits_blame(r, e->line);
-}
-
-static bc_status take_edition(limits_reader *r, const bc_ini_entry *e)
-{
-    if (strcmp(e->value, "1995") != 0 && strcmp(e->value, "2016") != 0)
-        return limits_refuse(r, e, "edition: ISO 6976 has the editions 1995 and 2016; write one of them");
-    r->c->state.edition = strcmp(e->value, "1995") == 0 ? 1995 : 2016;
-    return BC_OK;
-}
-
-static bc_status take_saturated(limits_reader *r, const bc_ini_entry *e)
-{
-    if (strcmp(e->value, "yes") != 0 && strcmp(e->value, "no") != 0)
-        return limits_refuse(r, e, "saturated: write yes or no");
-    r->c->state.saturated = strcmp(e->value, "yes") == 0;
-    return BC_OK;
-}
-
-static bc_status take_currency(limits_reader *r, const bc_ini_entry *e)
-{
-    return take_text(r, e, r->c->currency, sizeof r->c->currency);
-}
-
-static bc_status take_price(limits_reader *r, const bc_ini_entry *e)
-{
-    return bc_price_parse(e->value, &r->c->price, r->c->currency, r->err) == BC_OK ? BC_OK : limits_blame(r, e->line);
-}
-
-/* "220 GWh" or "20000000 m3": an amount a year is a flow, and read as one. */
-static bc_status take_annual(limits_reader *r, const bc_ini_entry *e)
-{
-    static const double HOUR_S = 3600.0;
-    char flow[BC_WORD_MAX];
-
-    (void)snprintf(flow, sizeof flow, "%.50s/h", e->value);
-    if (bc_flow_parse(flow, &r->c->annual, r->err) != BC_OK)
-        return limits_blame(r, e->line);
-    r->c->annual.si *= HOUR_S;
-    return BC_OK;
-}
-
-/* Read before everything else. */
-static bc_status take_follows(limits_reader *r, const bc_ini_entry *e)
-{
-    (void)r;
-    (void)e;
-    return BC_OK;
-}
-
-/* The keys of [contract], the one list for reading and for the message about unknown ones. */
-static const struct {
-    const char *key;
-    bc_status (*take)(limits_reader *, const bc_ini_entry *);
-} KEYS[] = {
-    {"name", take_name},         {"source", take_source}, {"note", take_note},   {"at", take_at},
-    {"edition", take_edition},   {"saturated", take_saturated}, {"follows", take_follows}, {"currency", take_currency},
-    {"price", take_price},       {"annual_energy", take_annual}, {"annual_volume", take_annual},
-};
-
-static bc_status take_contract_key(limits_reader *r, const bc_ini_entry *e)
-{
-    size_t best = 0;
-
-    for (size_t i = 0; i < BC_COUNT(KEYS); i++) {
-        if (bc_text_same(KEYS[i].key, e->key))
-            return KEYS[i].take(r, e);
-        if (bc_text_unlikeness(e->key, KEYS[i].key) < bc_text_unlikeness(e->key, KEYS[best].key))
-            best = i;
-    }
-    return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown key '%s' in [contract]; the nearest known one is '%s'", e->key,
-                      KEYS[best].key);
 }
 
 typedef bc_status taker(limits_reader *, const bc_ini_entry *);
@@ -157,16 +60,46 @@ static bc_status take_contract_keys(limits_reader *r)
             status = bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown section [%s]; known are [contract], [limit WHAT] and [range COMPONENT]",
                                 e->section);
         else if (strcmp(e->section, "contract") == 0)
-            status = take_contract_key(r, e);
+            status = limits_take_term(r, e);
         if (status != BC_OK)
             return status;
     }
     return BC_OK;
 }
 
-static bc_status read_file(const char *path, bc_contract *c, int depth, bc_error *err);
+static bc_status read_file(const limits_reader *from, const char *path, bc_error *err);
 
-/* `follows` names a file beside this one; its limits come first, so that ours replace them. */
+static bool exists(const char *path)
+{
+    struct stat st;
+
+    return stat(path, &st) == 0;
+}
+
+/* The file of a word of the command line or of `follows`: NAME.ini in one of the folders. */
+static bool find_bundled(const limits_folders *f, const char *word, char path[BC_FILE_MAX])
+{
+    for (size_t i = 0; i < f->count && !strchr(word, '/'); i++) {
+        const int length = snprintf(path, BC_FILE_MAX, "%s/%s.ini", f->path[i], word);
+
+        if (length > 0 && length < BC_FILE_MAX && exists(path))
+            return true;
+    }
+    return false;
+}
+
+/* Two files that follow each other would be read for ever. */
+static bc_status check_circle(const limits_reader *r, const bc_ini_entry *e, const char *path)
+{
+    for (const limits_reader *at = r; at; at = at->from)
+        if (strcmp(at->path, path) == 0)
+            return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "'%.200s' follows itself: the contracts stand in a circle; break it", e->value);
+    if (r->depth == FOLLOW_MAX)
+        return limits_refuse(r, e, "contracts follow each other more than four times, or in a circle; break it");
+    return BC_OK;
+}
+
+/* `follows` names a bundled specification, or a file beside this one; its limits come first, so that ours replace them. */
 static bc_status follow(const limits_reader *r)
 {
     const bc_ini_entry *e = bc_ini_find(r->ini, "contract", "follows");
@@ -175,15 +108,18 @@ static bc_status follow(const limits_reader *r)
 
     if (!e)
         return BC_OK;
-    if (r->depth == FOLLOW_MAX)
-        return limits_refuse(r, e, "contracts follow each other more than four times, or in a circle; break it");
     const int folder = slash && e->value[0] != '/' ? (int)(slash - r->path) + 1 : 0;
     const int length = snprintf(path, sizeof path, "%.*s%s", folder, r->path, e->value);
 
     if (length < 0 || (size_t)length >= sizeof path)
         return limits_refuse(r, e, "the path of the contract to follow is too long");
-    const bc_status status = read_file(path, r->c, r->depth + 1, r->err);
+    if (!exists(path) && !find_bundled(r->folders, e->value, path))
+        return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line,
+                          "no file or bundled specification '%.200s' to follow (bluecone list specifications)", e->value);
+    bc_status status = check_circle(r, e, path);
 
+    if (status == BC_OK)
+        status = read_file(r, path, r->err);
     if (status == BC_OK) { /* what is changed here is no longer what that file says it is */
         (void)snprintf(r->c->name, sizeof r->c->name, "%.100s", r->path);
         r->c->origin[0] = '\0';
@@ -203,26 +139,29 @@ static bc_status read_document(limits_reader *r)
     return status == BC_OK ? each_section(r, "range ", limits_take_range) : status;
 }
 
-static bc_status read_file(const char *path, bc_contract *c, int depth, bc_error *err)
+static bc_status read_file(const limits_reader *from, const char *path, bc_error *err)
 {
     bc_ini *ini = NULL;
     bc_status status = bc_ini_open(path, &ini, err);
 
     if (status != BC_OK)
         return status;
-    limits_reader r = {.path = path, .ini = ini, .c = c, .depth = depth, .err = err};
+    limits_reader r = {.path = path, .ini = ini, .c = from->c, .folders = from->folders, .depth = from->depth + 1, .err = err};
 
+    r.from = from->depth > 0 ? from : NULL;
     status = read_document(&r);
     bc_ini_close(ini);
     return status;
 }
 
-bc_status bc_contract_read(const char *path, bc_contract *c, bc_error *err)
+static bc_status read_contract(const char *path, const limits_folders *folders, bc_contract *c, bc_error *err)
 {
+    const limits_reader before = {.path = "", .c = c, .folders = folders};
+
     memset(c, 0, sizeof *c);
     c->state = bc_state_default();
     (void)snprintf(c->name, sizeof c->name, "%.100s", path);
-    const bc_status status = read_file(path, c, 0, err);
+    const bc_status status = read_file(&before, path, err);
 
     if (status != BC_OK)
         return status;
@@ -230,6 +169,59 @@ bc_status bc_contract_read(const char *path, bc_contract *c, bc_error *err)
     if (c->limit_count == 0)
         return bc_fail_at(err, BC_ERR_INPUT, path, 0, "the contract has no limit; write one as [limit wobbe-gross] with min, max, unit");
     return BC_OK;
+}
+
+bc_status bc_contract_read(const char *path, bc_contract *c, bc_error *err)
+{
+    const limits_folders none = {.count = 0};
+
+    return read_contract(path, &none, c, err);
+}
+
+/* The bundled name nearest to a word that does not exist. */
+typedef struct {
+    const char *word;
+    size_t unlikeness;
+    char name[BC_WORD_MAX];
+} nearest;
+
+static void keep_nearest(const char *name, const char *path, void *data)
+{
+    nearest *n = data;
+    const size_t unlikeness = bc_text_unlikeness(n->word, name);
+
+    (void)path;
+    if (unlikeness < n->unlikeness)
+        (void)snprintf(n->name, sizeof n->name, "%.63s", name);
+    if (unlikeness < n->unlikeness)
+        n->unlikeness = unlikeness;
+}
+
+static bc_status refuse_word(const char *word, const limits_folders *f, bc_error *err)
+{
+    nearest n = {.word = word, .unlikeness = BC_WORD_MAX, .name = ""};
+    char shown[BC_WORD_MAX];
+
+    bc_text_show(shown, sizeof shown, word);
+    for (size_t i = 0; i < f->count && !strchr(word, '/'); i++)
+        if (bc_composition_each(f->path[i], keep_nearest, &n, NULL) != BC_OK)
+            break;
+    if (n.name[0] == '\0' || n.unlikeness > 1 + strlen(word) / 3)
+        return bc_fail(err, BC_ERR_INPUT, "there is no contract file or bundled specification '%s' (bluecone list specifications)", shown);
+    return bc_fail(err, BC_ERR_INPUT, "there is no contract file or bundled specification '%s'; the nearest is '%s' (bluecone list specifications)",
+                   shown, n.name);
+}
+
+bc_status bc_contract_find(const char *word, const char *const folders[], size_t folder_count, bc_contract *c, bc_error *err)
+{
+    const limits_folders f = {folders, folder_count};
+    char path[BC_FILE_MAX];
+
+    if (word[0] == '\0')
+        return bc_fail(err, BC_ERR_INPUT, "the name of the contract is empty; give a file or a bundled specification");
+    if (exists(word))
+        return read_contract(word, &f, c, err);
+    return find_bundled(&f, word, path) ? read_contract(path, &f, c, err) : refuse_word(word, &f, err);
 }
 
 bc_status bc_contract_start(const bc_state *state, bc_contract *c, bc_error *err)

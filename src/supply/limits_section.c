@@ -48,7 +48,7 @@ static bc_status check_keys(const limits_reader *r, const char *section, const c
             known = bc_text_same(keys[k], e->key);
         if (!known)
             return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown key '%s' in [%s]; known are min, max, unit%s", e->key, section,
-                              count > 3 ? ", at, saturated" : "");
+                              count > 3 ? ", at, saturated, edition, basis, note" : "");
     }
     return BC_OK;
 }
@@ -71,25 +71,41 @@ static bc_status take_bounds(const limits_reader *r, const char *section, bc_lim
     return status == BC_OK ? check_bounds(r, limit) : status;
 }
 
-/* The state of a limit: the contract's, with its own `at` and `saturated`. */
+/* The state of a limit: the contract's, with its own `at`, `saturated` and `edition`. */
 static bc_status take_state(limits_reader *r, const char *section, bc_state *state)
 {
     const bc_ini_entry *at = bc_ini_find(r->ini, section, "at");
     const bc_ini_entry *saturated = bc_ini_find(r->ini, section, "saturated");
+    const bc_ini_entry *edition = bc_ini_find(r->ini, section, "edition");
+    bc_status status = BC_OK;
 
     *state = r->c->state;
-    if (saturated && strcmp(saturated->value, "yes") != 0 && strcmp(saturated->value, "no") != 0)
-        return limits_refuse(r, saturated, "saturated: write yes or no");
     if (saturated)
-        state->saturated = strcmp(saturated->value, "yes") == 0;
-    if (at && bc_state_parse(at->value, state, r->err) != BC_OK)
+        status = limits_take_yes(r, saturated, &state->saturated);
+    if (status == BC_OK && edition)
+        status = limits_take_edition(r, edition, &state->edition);
+    if (status == BC_OK && at && bc_state_parse(at->value, state, r->err) != BC_OK)
         return limits_blame(r, at->line);
-    return BC_OK;
+    return status;
+}
+
+/* What the figure is of: its basis, its unit and a note. */
+static bc_status fill_words(limits_reader *r, const char *section, const bc_state *state, bc_limit *limit)
+{
+    const bc_ini_entry *unit = bc_ini_find(r->ini, section, "unit");
+    const bc_ini_entry *basis = bc_ini_find(r->ini, section, "basis");
+    const bc_ini_entry *note = bc_ini_find(r->ini, section, "note");
+
+    if (note && strlen(note->value) >= sizeof limit->note)
+        return limits_refuse(r, note, "the note of a limit is longer than 159 bytes; shorten it");
+    (void)snprintf(limit->note, sizeof limit->note, "%s", note ? note->value : "");
+    if (basis && limit_take_basis(basis->value, limit, r->err) != BC_OK)
+        return limits_blame(r, basis->line);
+    return limit_take_unit(unit ? unit->value : "", state, limit, r->err) == BC_OK ? BC_OK : limits_blame(r, unit ? unit->line : limit->line);
 }
 
 static bc_status fill_limit(limits_reader *r, const char *section, bc_limit *limit)
 {
-    const bc_ini_entry *unit = bc_ini_find(r->ini, section, "unit");
     bc_state state;
     bc_status status = take_state(r, section, &state);
 
@@ -99,7 +115,7 @@ static bc_status fill_limit(limits_reader *r, const char *section, bc_limit *lim
         return status;
     if (reference_for(r, &state, &limit->reference) != BC_OK)
         return limits_blame(r, limit->line);
-    return limit_take_unit(unit ? unit->value : "", &state, limit, r->err) == BC_OK ? BC_OK : limits_blame(r, unit ? unit->line : limit->line);
+    return fill_words(r, section, &state, limit);
 }
 
 /* The limit with an id that a followed file set, which is replaced as a whole, or a new one. */
@@ -113,7 +129,7 @@ static bc_limit *place_of(bc_contract *c, const char *id)
 
 bc_status limits_take_limit(limits_reader *r, const bc_ini_entry *e)
 {
-    static const char *const LIMIT_KEYS[] = {"min", "max", "unit", "at", "saturated"};
+    static const char *const LIMIT_KEYS[] = {"min", "max", "unit", "at", "saturated", "edition", "basis", "note"};
     bc_limit limit;
     bc_status status = check_keys(r, e->section, LIMIT_KEYS, BC_COUNT(LIMIT_KEYS));
 
@@ -135,6 +151,27 @@ bc_status limits_take_limit(limits_reader *r, const bc_ini_entry *e)
     else if (strcmp(place->path, limit.path) == 0)
         return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "[%s] limits what line %d limits already; join them", e->section, place->line);
     *place = limit;
+    return BC_OK;
+}
+
+/* The range on a word that a followed file set, which is replaced, or a new one; NULL when there is no room. */
+static bc_range *range_place(bc_contract *c, const char *id)
+{
+    for (size_t i = 0; i < c->range_count; i++)
+        if (bc_text_same(c->ranges[i].id, id))
+            return &c->ranges[i];
+    return c->range_count < BC_LIMIT_MAX ? &c->ranges[c->range_count] : NULL;
+}
+
+static bc_status keep_range(const limits_reader *r, const bc_ini_entry *e, const bc_range *range)
+{
+    bc_range *place = range_place(r->c, range->id);
+
+    if (!place)
+        return limits_refuse(r, e, "the contract has more than 64 ranges; join some");
+    if (place == &r->c->ranges[r->c->range_count])
+        r->c->range_count++;
+    *place = *range;
     return BC_OK;
 }
 
@@ -171,11 +208,9 @@ bc_status limits_take_range(limits_reader *r, const bc_ini_entry *e)
     (void)snprintf(range.id, sizeof range.id, "%s", e->section + strlen("range "));
     if (status == BC_OK && !limit_members(range.id, range.weight))
         return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "'%s' is no component or group (bluecone list species)", range.id);
-    if (status == BC_OK && r->c->range_count == BC_LIMIT_MAX)
-        return limits_refuse(r, e, "the contract has more than 64 ranges; join some");
     if (status == BC_OK)
         status = fill_range(r, e, &range);
     if (status == BC_OK)
-        r->c->ranges[r->c->range_count++] = range;
+        return keep_range(r, e, &range);
     return status;
 }

@@ -4,6 +4,7 @@
 
 #include "base/error_internal.h"
 #include "base/text.h"
+#include "bluecone/index.h"
 #include "bluecone/quantity.h"
 #include "gas/species_index.h"
 
@@ -13,47 +14,94 @@
 
 #define METERING_TOLD 0.01 /* K: metering temperatures nearer than that are the same */
 
-/* Groups with a name of their own; c2+ to c9+ are found by their form. */
-static const char *const GROUPS[] = {"inerts", "total-sulphur", "c2+", "c3+", "c4+", "c5+", "c6+"};
-
 static bool is_hydrocarbon(size_t i, int carbon)
 {
     return bc_species_atoms(i, BC_C) >= carbon && bc_species_atoms(i, BC_H) > 0 && bc_species_atoms(i, BC_O) == 0
            && bc_species_atoms(i, BC_N) == 0 && bc_species_atoms(i, BC_S) == 0;
 }
 
+static bool is_alkane(size_t i, int carbon)
+{
+    return is_hydrocarbon(i, carbon) && bc_species_atoms(i, BC_C) == carbon && bc_species_atoms(i, BC_H) == 2 * carbon + 2;
+}
+
 /* Gases that neither burn nor feed a flame: noble gases, nitrogen, carbon dioxide. */
-static bool is_inert(size_t i)
+static double inerts(size_t i)
 {
     static const size_t INERT[] = {SPECIES_nitrogen, SPECIES_carbon_dioxide, SPECIES_helium, SPECIES_neon, SPECIES_argon};
 
     for (size_t k = 0; k < BC_COUNT(INERT); k++)
         if (INERT[k] == i)
-            return true;
-    return false;
+            return 1.0;
+    return 0.0;
 }
 
-static double member_weight(const char *folded, size_t i)
+static double inerts_and_oxygen(size_t i)
 {
-    if (folded[0] == 'c')
-        return is_hydrocarbon(i, folded[1] - '0') ? 1.0 : 0.0;
-    if (folded[0] == 'i')
-        return is_inert(i) ? 1.0 : 0.0;
+    return i == SPECIES_oxygen ? 1.0 : inerts(i);
+}
+
+static double butanes(size_t i)
+{
+    return is_alkane(i, 4) ? 1.0 : 0.0;
+}
+
+static double pentanes(size_t i)
+{
+    return is_alkane(i, 5) ? 1.0 : 0.0;
+}
+
+static double sulphur(size_t i)
+{
     return (double)bc_species_atoms(i, BC_S);
+}
+
+static double hydrogen_sulphide_and_cos(size_t i)
+{
+    return i == SPECIES_hydrogen_sulfide || i == SPECIES_carbonyl_sulfide ? 1.0 : 0.0;
+}
+
+static double mercaptans(size_t i)
+{
+    return i == SPECIES_methanethiol ? 1.0 : 0.0;
+}
+
+/* Groups with a name of their own: moles that a mole of a species counts. Sulphur ones weigh by their sulphur. */
+static const struct {
+    const char *word;
+    double (*count)(size_t species);
+} GROUPS[] = {
+    {"inerts", inerts},           {"inerts+oxygen", inerts_and_oxygen}, {"butanes", butanes},
+    {"pentanes", pentanes},       {"total-sulphur", sulphur},           {"total-sulfur", sulphur},
+    {"h2s+cos", hydrogen_sulphide_and_cos}, {"mercaptan-sulphur", mercaptans},
+};
+
+/* "c4+": all hydrocarbons from that carbon number on. */
+static int least_carbon(const char *word)
+{
+    char folded[BC_WORD_MAX];
+
+    if (!bc_text_fold(folded, sizeof folded, word) || folded[0] != 'c' || folded[1] < '2' || folded[1] > '9' || strcmp(folded + 2, "+") != 0)
+        return 0;
+    return folded[1] - '0';
 }
 
 static bool group_members(const char *word, double weight[])
 {
-    char folded[BC_WORD_MAX];
+    const int carbon = least_carbon(word);
+    size_t group = 0;
 
-    if (!bc_text_fold(folded, sizeof folded, word))
+    while (group < BC_COUNT(GROUPS) && !bc_text_same(GROUPS[group].word, word))
+        group++;
+    if (carbon == 0 && group == BC_COUNT(GROUPS))
         return false;
-    const bool by_carbon = folded[0] == 'c' && folded[1] >= '2' && folded[1] <= '9' && strcmp(folded + 2, "+") == 0;
-
-    if (!by_carbon && strcmp(folded, "inerts") != 0 && strcmp(folded, "totalsulphur") != 0 && strcmp(folded, "totalsulfur") != 0)
-        return false;
-    for (size_t i = 0; i < BC_SPECIES_CAPACITY; i++)
-        weight[i] = i < SPECIES_COUNT ? member_weight(folded, i) : 0.0;
+    for (size_t i = 0; i < BC_SPECIES_CAPACITY; i++) {
+        weight[i] = 0.0;
+        if (i < SPECIES_COUNT && carbon > 0)
+            weight[i] = is_hydrocarbon(i, carbon) ? 1.0 : 0.0;
+        else if (i < SPECIES_COUNT)
+            weight[i] = GROUPS[group].count(i);
+    }
     return true;
 }
 
@@ -77,30 +125,52 @@ static const char *nearest(const char *word)
     for (size_t i = 0; i < bc_quantity_count(); i++)
         if (bc_text_unlikeness(word, bc_quantity_at(i)->id) < bc_text_unlikeness(word, best))
             best = bc_quantity_at(i)->id;
+    for (size_t i = 0; i < bc_index_count(); i++)
+        if (bc_text_unlikeness(word, bc_index_at(i)->id) < bc_text_unlikeness(word, best))
+            best = bc_index_at(i)->id;
     for (size_t i = 0; i < bc_species_count(); i++)
         if (bc_text_unlikeness(word, bc_species_id(i)) < bc_text_unlikeness(word, best))
             best = bc_species_id(i);
     for (size_t i = 0; i < BC_COUNT(GROUPS); i++)
-        if (bc_text_unlikeness(word, GROUPS[i]) < bc_text_unlikeness(word, best))
-            best = GROUPS[i];
+        if (bc_text_unlikeness(word, GROUPS[i].word) < bc_text_unlikeness(word, best))
+            best = GROUPS[i].word;
     return best;
+}
+
+/* The quantity or index of a word; without one, no nearest word is looked for, which would cost more than all else. */
+static bool find_figure(const char *word, bc_limit *limit)
+{
+    for (size_t i = 0; i < bc_quantity_count(); i++)
+        if (bc_text_same(bc_quantity_at(i)->id, word)) {
+            limit->kind = BC_LIMIT_QUANTITY;
+            limit->quantity = i;
+            (void)snprintf(limit->id, sizeof limit->id, "%s", bc_quantity_at(i)->id);
+            return true;
+        }
+    for (size_t i = 0; i < bc_index_count(); i++)
+        if (bc_text_same(bc_index_at(i)->id, word)) {
+            limit->kind = BC_LIMIT_INDEX;
+            limit->quantity = i;
+            (void)snprintf(limit->id, sizeof limit->id, "%s", bc_index_at(i)->id);
+            return true;
+        }
+    return false;
 }
 
 bc_status limit_find(const char *word, bc_limit *limit, bc_error *err)
 {
     size_t species = 0;
 
+    if (find_figure(word, limit))
+        return BC_OK;
     limit->kind = BC_LIMIT_FRACTION;
     (void)snprintf(limit->id, sizeof limit->id, "%s", word);
-    if (bc_quantity_find(word, &limit->quantity, NULL) == BC_OK) {
-        limit->kind = BC_LIMIT_QUANTITY;
-        (void)snprintf(limit->id, sizeof limit->id, "%s", bc_quantity_at(limit->quantity)->id);
+    if (group_members(word, limit->weight))
         return BC_OK;
-    }
-    if (!limit_members(word, limit->weight))
+    if (bc_species_find(word, &species, NULL) != BC_OK)
         return bc_fail(err, BC_ERR_INPUT, "'%s' is no quantity, component or group; the nearest known word is '%s'", word, nearest(word));
-    if (bc_species_find(word, &species, NULL) == BC_OK)
-        (void)snprintf(limit->id, sizeof limit->id, "%s", bc_species_id(species));
+    (void)limit_members(word, limit->weight);
+    (void)snprintf(limit->id, sizeof limit->id, "%s", bc_species_id(species));
     return BC_OK;
 }
 
@@ -114,14 +184,38 @@ static const char *plain_unit(const char *unit)
     return unit;
 }
 
-/* Moles that count become kilograms that count; of sulphur in general its own atoms weigh. */
-static void weigh(bc_limit *limit)
+/* Limits that texts state as sulphur, whatever molecule carries it. */
+static bool is_of_sulphur(const char *word)
 {
-    const bool sulphur = bc_text_same(limit->id, "total-sulphur") || bc_text_same(limit->id, "total-sulfur");
+    static const char *const WORDS[] = {"total-sulphur", "total-sulfur", "h2s+cos", "mercaptan-sulphur"};
+
+    for (size_t i = 0; i < BC_COUNT(WORDS); i++)
+        if (bc_text_same(word, WORDS[i]))
+            return true;
+    return false;
+}
+
+/* Moles that count become kilograms that count; of sulphur its own atoms weigh. */
+static void weigh(bc_limit *limit, bc_limit_kind kind)
+{
+    const bool of_sulphur = is_of_sulphur(limit->id);
 
     for (size_t i = 0; i < SPECIES_COUNT; i++)
-        limit->weight[i] *= sulphur ? bc_element_mass_g_per_mol(BC_S) * 1e-3 : bc_species_molar_mass_kg_per_mol(i);
-    limit->kind = BC_LIMIT_CONCENTRATION;
+        limit->weight[i] *= of_sulphur ? bc_element_mass_g_per_mol(BC_S) * 1e-3 : bc_species_molar_mass_kg_per_mol(i);
+    limit->kind = kind;
+}
+
+bc_status limit_take_basis(const char *basis, bc_limit *limit, bc_error *err)
+{
+    if (limit->kind != BC_LIMIT_FRACTION)
+        return bc_fail(err, BC_ERR_INPUT, "'%s' has its basis in its name; basis = mole, volume or mass belongs to components and groups", limit->id);
+    if (bc_text_same(basis, "mass"))
+        weigh(limit, BC_LIMIT_MASS_FRACTION);
+    else if (bc_text_same(basis, "volume"))
+        limit->kind = BC_LIMIT_VOLUME_FRACTION;
+    else if (!bc_text_same(basis, "mole"))
+        return bc_fail(err, BC_ERR_INPUT, "basis: a share is one of mole, volume or mass; write one of them");
+    return BC_OK;
 }
 
 static bc_status check_metering(const bc_limit *limit, const bc_state *state, bc_error *err)
@@ -132,10 +226,27 @@ static bc_status check_metering(const bc_limit *limit, const bc_state *state, bc
                    limit->unit, limit->shown.metering_c, state->metering_c);
 }
 
+/* The unit that the figure is computed in, and the one of bounds that state none. */
+static const char *own_unit(const bc_limit *limit, const char **fallback)
+{
+    const char *own = "1";
+
+    if (limit->kind == BC_LIMIT_QUANTITY)
+        own = bc_quantity_at(limit->quantity)->unit;
+    else if (limit->kind == BC_LIMIT_INDEX)
+        own = bc_index_at(limit->quantity)->unit;
+    *fallback = own;
+    if (limit->kind == BC_LIMIT_FRACTION)
+        *fallback = "mol %";
+    else if (limit->kind == BC_LIMIT_MASS_FRACTION || limit->kind == BC_LIMIT_VOLUME_FRACTION)
+        *fallback = "%";
+    return own;
+}
+
 bc_status limit_take_unit(const char *unit, const bc_state *state, bc_limit *limit, bc_error *err)
 {
-    const char *own = limit->kind == BC_LIMIT_QUANTITY ? bc_quantity_at(limit->quantity)->unit : "1";
-    const char *fallback = limit->kind == BC_LIMIT_QUANTITY ? own : "mol %";
+    const char *fallback = NULL;
+    const char *own = own_unit(limit, &fallback);
     bc_unit concentration;
     bc_status status = BC_OK;
 
@@ -144,7 +255,7 @@ bc_status limit_take_unit(const char *unit, const bc_state *state, bc_limit *lim
     if (status == BC_OK)
         status = bc_unit_parse("kg/m3", &concentration, err);
     if (status == BC_OK && limit->kind == BC_LIMIT_FRACTION && bc_unit_matches(&limit->shown, &concentration)) {
-        weigh(limit);
+        weigh(limit, BC_LIMIT_CONCENTRATION);
         own = "kg/m3";
     }
     if (status == BC_OK)

@@ -41,3 +41,7 @@ quantities=$(bluecone list quantities --bare | grep -vx flame-temperature | past
     --within "$SRC/examples/contract-marrowfen.ini" --price 1=61EUR/MWh,2=34EUR/MWh,3=8EUR/MWh,4=0.9EUR/kg,5=0.05EUR/m3 -- \
     "$work/sweep-without" blend 0..30/0.03 hydrogen rest pipeline-h --csv --show "$quantities" -- \
     "$work/sweep-with" blend 0..30/0.03 hydrogen rest pipeline-h --csv --show all
+$cc -O2 -I "$SRC/include" -D_POSIX_C_SOURCE=200809L -o "$work/bench_worst" "$SRC/tests/bench/bench_worst.c" \
+    "$build/libbluecone.a" -liniparser -lm
+echo "library: worst gas of 20 components (targets 30 ms exact, 500 ms with what is searched)"
+"$work/bench_worst"

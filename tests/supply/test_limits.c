@@ -190,7 +190,7 @@ static const struct {
     {"annual energy", "[contract]\nannual_energy = 30 C\n[limit hhv]\nmin = 3\n", 2, "no flow"},
     {"range of a quantity", "[limit hhv]\nmin = 3\n[range hhv]\nmax = 3\n", 4, "no component or group"},
     {"range in mass", "[limit hhv]\nmin = 3\n[range ethane]\nmax = 3\nunit = mg/m3\n", 4, "mole fractions"},
-    {"followed file is not there", "[contract]\nfollows = nowhere.ini\n[limit hhv]\nmin = 3\n", 0, "No such file"},
+    {"followed file is not there", "[contract]\nfollows = nowhere.ini\n[limit hhv]\nmin = 3\n", 2, "no file or bundled specification 'nowhere.ini'"},
 };
 
 static void what_a_contract_cannot_mean_is_refused_with_its_line(void **state)

@@ -1,0 +1,38 @@
+/* SPDX-License-Identifier: MIT */
+/* contract_worst.h - the parts of the answer to --worst. */
+#ifndef CONTRACT_WORST_H
+#define CONTRACT_WORST_H
+
+#include "cli/contract_report.h"
+
+/* The space of a contract, ready to be asked, and the tables that answers go into. */
+typedef struct {
+    const contract_case *c;
+    bc_space *space;
+    bc_worst *worst;
+    size_t place[BC_LIMIT_MAX]; /* of each limit in the space */
+    size_t figures, gases;      /* tables */
+} worst_case;
+
+/* The caller closes in any case. */
+bc_status worst_open(worst_case *w, const contract_case *c, bc_error *err);
+void worst_close(worst_case *w);
+
+/* What a figure is called. */
+typedef struct {
+    const char *id, *unit, *state;
+} worst_figure;
+
+void worst_tables(worst_case *w, report *r);
+void worst_add(worst_case *w, report *r, const worst_figure *f, const bc_extremes *e);
+
+/* Indices against the present supply; nothing without one. */
+bc_status worst_against(worst_case *w, report *r, bc_error *err);
+
+/* Which limits are idle and which are open. */
+bc_status worst_standings(worst_case *w, report *r, bc_error *err);
+
+/* Why no gas is allowed: the verdict. */
+void worst_explain(const worst_case *w, report *r);
+
+#endif

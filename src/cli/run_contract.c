@@ -1,0 +1,67 @@
+/* SPDX-License-Identifier: MIT */
+/* run_contract.c - may we sign for this gas: limits, terms, traps and states of a contract. */
+#include "cli/contract_report.h"
+
+#include "base/error_internal.h"
+#include "cli/sheet.h"
+
+#include <stdio.h>
+
+void contract_warn(report *r, const bc_contract *c)
+{
+    char text[BC_NAME_MAX + 320];
+
+    if (c->until[0] != '\0') {
+        (void)snprintf(text, sizeof text, "%.120s: the text was in force until %s and is superseded.", c->name, c->until);
+        report_add_warning(r, text);
+    }
+    if (c->note[0] != '\0') {
+        (void)snprintf(text, sizeof text, "%.120s: %s.", c->name, c->note);
+        report_add_warning(r, text);
+    }
+}
+
+static bc_status fill(report *r, const contract_case *c, bool *good, bc_error *err)
+{
+    if (c->judged == 0) {
+        report_state_of(r, &c->contract->state);
+        contract_limits_alone(r, c);
+        contract_warn(r, c->contract);
+        return c->a->value[OPTION_worst] ? contract_worst(r, c, good, err) : BC_OK;
+    }
+    subjects_report(&c->gases, r);
+    subjects_tell_uncertainty(&c->gases, r);
+    contract_warn(r, c->contract);
+    *good = contract_judge(r, c);
+    bc_status status = contract_trade_report(r, c, err);
+
+    if (status == BC_OK && c->a->value[OPTION_traps])
+        status = contract_traps(r, c, err);
+    if (status == BC_OK)
+        status = contract_printed(r, c, err);
+    if (status == BC_OK && c->a->value[OPTION_worst])
+        status = contract_worst(r, c, good, err);
+    if (status == BC_OK)
+        status = contract_charts(r, c, err);
+    report_set_caution(r, SHEET_CAUTION);
+    return status;
+}
+
+int run_contract(const arguments *a)
+{
+    contract_case c;
+    bool good = true;
+    report r;
+    bc_error err;
+
+    report_open(&r, BC_VERSION, "contract", "Contract");
+    bc_status status = contract_open(&c, a, &err);
+
+    if (status == BC_OK)
+        status = fill(&r, &c, &good, &err);
+    contract_close(&c);
+    if (status == BC_OK)
+        return answer(&r, a, false, good ? 0 : 1);
+    report_close(&r);
+    return complain(&err);
+}

@@ -1,0 +1,2 @@
+# the limits of a bundled specification
+bluecone contract us-tariff-2008

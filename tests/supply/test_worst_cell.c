@@ -1,0 +1,222 @@
+/* SPDX-License-Identifier: MIT */
+/* test_worst_cell.c - what the proofs rest on: planes on the safe side, cells without gaps, bounds when they run out. */
+#include "supply/worst_internal.h"
+#include "worst_cases.h"
+
+static bc_space space;
+static const char *const FIGURES[] = {"hhv", "wobbe-gross", "wobbe-net-ideal", "z", "density", "hhv-mass", "hhv-mole"};
+
+static void term_of(bc_worst *worst, const char *id, const char *at, worst_term *term)
+{
+    bc_reference reference;
+    bc_ratio ratio;
+    bc_error err;
+
+    reference_of(at, &reference);
+    assert_ok(bc_ratio_of_quantity(quantity_of(id), &reference, &ratio, &err), &err);
+    assert_ok(worst_term_of(worst, &ratio, term, &err), &err);
+    assert_ok(worst_add_axes(worst, term, &err), &err);
+}
+
+static void random_fractions(const bc_worst *worst, chance *c, double x[])
+{
+    double sum = 0.0;
+
+    for (size_t j = 0; j < worst->columns; j++)
+        sum += x[j] = pow(chance_uniform(c), 6.0);
+    for (size_t j = 0; j < worst->columns; j++)
+        x[j] /= sum;
+}
+
+/* A box over all axes around some of the gases, as narrow as a millionth of the whole. */
+static void random_cell(const bc_worst *worst, chance *c, double gases[8][LP_COLUMNS], worst_cell *cell)
+{
+    const double share = pow(10.0, -6.0 * chance_uniform(c));
+
+    for (int k = 0; k < 8; k++) {
+        random_fractions(worst, c, gases[k]);
+        for (size_t j = 0; k > 0 && j < worst->columns; j++)
+            gases[k][j] = (1.0 - share) * gases[0][j] + share * gases[k][j];
+    }
+    for (size_t a = 0; a < worst->axis_count; a++) {
+        cell->lo[a] = HUGE_VAL;
+        cell->hi[a] = -HUGE_VAL;
+        for (int k = 0; k < 8; k++) {
+            const double at = worst_sum(worst, worst->axis[a].form, gases[k]);
+
+            cell->lo[a] = fmin(cell->lo[a], at);
+            cell->hi[a] = fmax(cell->hi[a], at);
+        }
+        cell->touch[a] = cell->lo[a] + chance_uniform(c) * (cell->hi[a] - cell->lo[a]);
+    }
+}
+
+static void planes_enclose_what_a_figure_is_divided_by(void **state)
+{
+    chance c = {2};
+
+    (void)state;
+    natural_gas(&space);
+    bc_worst *worst = opened(&space);
+
+    for (size_t f = 0; f < COUNT(FIGURES); f++) {
+        worst_term term;
+
+        term_of(worst, FIGURES[f], "25/0", &term);
+        for (int i = 0; i < 2000; i++) {
+            double gases[8][LP_COLUMNS], above[LP_COLUMNS], below[LP_COLUMNS];
+            worst_cell cell;
+
+            random_cell(worst, &c, gases, &cell);
+            worst_estimate(worst, &term, &cell, true, above);
+            worst_estimate(worst, &term, &cell, false, below);
+            for (int k = 0; k < 8; k++) {
+                double raw = 0.0;
+
+                assert_true(worst_raw(worst, &term, gases[k], &raw));
+                const double phi = worst_sum(worst, term.n, gases[k]) / raw;
+
+                assert_true(worst_sum(worst, above, gases[k]) >= phi * (1.0 - 1e-13));
+                assert_true(worst_sum(worst, below, gases[k]) <= phi * (1.0 + 1e-13));
+                if (term.p < 1.0)
+                    assert_true(worst_phi_least(worst, &term, &cell) <= phi * (1.0 + 1e-13));
+            }
+        }
+    }
+    bc_worst_close(worst);
+}
+
+/* The two planes come together as the square of the width: a hundredfold of cells gains four digits. */
+static void planes_close_in_with_the_square_of_the_width(void **state)
+{
+    chance c = {3};
+    double gap[2] = {0.0, 0.0};
+    worst_term term;
+
+    (void)state;
+    natural_gas(&space);
+    bc_worst *worst = opened(&space);
+
+    term_of(worst, "wobbe-gross", "25/0", &term);
+    for (int narrow = 0; narrow < 2; narrow++)
+        for (int i = 0; i < 200; i++) {
+            double x[LP_COLUMNS], above[LP_COLUMNS], below[LP_COLUMNS];
+            worst_cell cell;
+
+            random_fractions(worst, &c, x);
+            for (size_t a = 0; a < worst->axis_count; a++) {
+                const double at = worst_sum(worst, worst->axis[a].form, x), width = (narrow ? 1e-3 : 1e-1) * at;
+
+                cell.lo[a] = at - 0.3 * width;
+                cell.hi[a] = at + 0.7 * width;
+                cell.touch[a] = at;
+            }
+            worst_estimate(worst, &term, &cell, true, above);
+            worst_estimate(worst, &term, &cell, false, below);
+            gap[narrow] = fmax(gap[narrow], worst_sum(worst, above, x) / worst_sum(worst, below, x) - 1.0);
+        }
+    assert_true(gap[0] < 2e-3 && gap[1] < 3e-4 * gap[0]);
+    bc_worst_close(worst);
+}
+
+static void cells_are_cut_without_a_gap(void **state)
+{
+    chance c = {4};
+    worst_term term;
+
+    (void)state;
+    natural_gas(&space);
+    bc_worst *worst = opened(&space);
+
+    term_of(worst, "wobbe-gross", "25/0", &term);
+    for (int i = 0; i < 500; i++) {
+        const worst_run run = {.term = &term, .sign = 1.0};
+        worst_cell whole, cell, other;
+        size_t cuts = 0;
+
+        worst_root(worst, &whole);
+        whole.bound = 7.0;
+        cell = whole;
+        random_fractions(worst, &c, worst->cell_answer.x);
+        assert_true(worst_cut(worst, &run, &cell, &other));
+        for (size_t a = 0; a < worst->axis_count; a++) {
+            assert_true(cell.lo[a] == whole.lo[a] && other.hi[a] == whole.hi[a]);
+            if (cell.hi[a] != whole.hi[a]) {
+                assert_true(cell.hi[a] == other.lo[a]);
+                cuts++;
+            } else {
+                assert_true(other.lo[a] == whole.lo[a]);
+            }
+            assert_true(cell.touch[a] >= cell.lo[a] && cell.touch[a] <= cell.hi[a]);
+            assert_true(other.touch[a] >= other.lo[a] && other.touch[a] <= other.hi[a]);
+        }
+        assert_int_equal(cuts, 1);
+        assert_true(cell.bound == 7.0 && other.bound == 7.0);
+    }
+    bc_worst_close(worst);
+}
+
+/* However few cells are looked at, what is called a bound is one; with enough it meets the value. */
+static void a_bound_holds_when_the_cells_run_out(void **state)
+{
+    static const size_t BUDGETS[] = {1, 2, 3, 5, 8, 20, 50, WORST_CELLS};
+    worst_term term;
+
+    (void)state;
+    natural_gas(&space);
+    add_limit(&space, "wobbe-gross", "25/0", 46.1, 56.5);
+    bc_worst *worst = opened(&space);
+
+    term_of(worst, "wobbe-gross", "15/15", &term);
+    for (int side = 0; side < 2; side++) {
+        const double sign = side ? 1.0 : -1.0;
+        double bound[COUNT(BUDGETS)], best = 0.0;
+
+        for (size_t k = 0; k < COUNT(BUDGETS); k++) {
+            worst_run run = {.term = &term, .sign = sign, .found = true, .budget = BUDGETS[k]};
+
+            memcpy(run.x, worst->inside, sizeof run.x);
+            assert_true(worst_raw(worst, &term, run.x, &run.best));
+            worst_explore(worst, &run);
+            assert_true(run.cells <= BUDGETS[k]);
+            bound[k] = run.bound;
+            best = run.best;
+        }
+        assert_within(bound[COUNT(BUDGETS) - 1], best, 1e-6 * best);
+        for (size_t k = 0; k < COUNT(BUDGETS); k++)
+            assert_true(sign * (bound[k] - best) >= 0.0);
+        assert_true(sign * (bound[0] - best) > 1e-6 * best);
+    }
+    bc_worst_close(worst);
+}
+
+/* A search narrows a program to its region of trust, and gives it back whole. */
+static void a_search_gives_the_windows_back(void **state)
+{
+    bc_reference reference;
+    bc_extremes e;
+    bc_error err;
+
+    (void)state;
+    natural_gas(&space);
+    bc_worst *worst = opened(&space);
+
+    reference_of("15/15", &reference);
+    assert_ok(bc_worst_quantity(worst, quantity_of("flame-temperature-complete"), &reference, &e, &err), &err);
+    assert_memory_equal(worst->near_lp.lower, worst->bounds.lower, sizeof worst->bounds.lower);
+    assert_memory_equal(worst->near_lp.upper, worst->bounds.upper, sizeof worst->bounds.upper);
+    bc_worst_close(worst);
+}
+
+int main(void)
+{
+    const struct CMUnitTest tests[] = {
+        cmocka_unit_test(planes_enclose_what_a_figure_is_divided_by),
+        cmocka_unit_test(planes_close_in_with_the_square_of_the_width),
+        cmocka_unit_test(cells_are_cut_without_a_gap),
+        cmocka_unit_test(a_bound_holds_when_the_cells_run_out),
+        cmocka_unit_test(a_search_gives_the_windows_back),
+    };
+
+    return cmocka_run_group_tests_name("supply/test_worst_cell", tests, NULL, NULL);
+}
