@@ -28,7 +28,7 @@ typedef struct {
  *
  *   spread   uncertainty of the composition; NULL when none was stated
  *
- * BC_ERR_RANGE when the gas cannot be saturated at the state. */
+ * BC_ERR_RANGE when the gas cannot be saturated at the state, or is no gas there (Z up to 0.05). */
 BC_API BC_MUST_USE bc_status bc_subject_make(const bc_reference *reference, const bc_gas *gas, const bc_spread *spread,
                                              bc_subject *subject, bc_error *err);
 

@@ -151,6 +151,21 @@ static bc_status take_word(arguments *a, const char *word, bc_error *err)
     return BC_OK;
 }
 
+/* Said before anything is computed: a form that the command has not, or that another option contradicts. */
+static bc_status check_output(const command *c, const arguments *a, bc_error *err)
+{
+    const char *path = a->value[OPTION_output];
+    render_form form = RENDER_TEXT;
+
+    if (!path || !render_form_of(path, &form))
+        return BC_OK;
+    if (render_form_is_chart(form) && !(c->bit & (BURN | BLEND | SWITCH | CONTRACT)))
+        return bc_fail(err, BC_ERR_USAGE, "-o %.200s: '%s' has no charts; write it to .txt .json .csv .html or .xlsx", path, c->word);
+    if ((a->value[OPTION_json] && form != RENDER_JSON) || (a->value[OPTION_csv] && form != RENDER_CSV))
+        return bc_fail(err, BC_ERR_USAGE, "-o %.200s: the ending contradicts --%s; keep one of them", path, a->value[OPTION_json] ? "json" : "csv");
+    return BC_OK;
+}
+
 static bc_status check_count(const command *c, const arguments *a, bc_error *err)
 {
     if (a->value[OPTION_help] || a->value[OPTION_version])
@@ -161,7 +176,7 @@ static bc_status check_count(const command *c, const arguments *a, bc_error *err
         return bc_fail(err, BC_ERR_USAGE, "'%s' is one argument too many: bluecone %s %s", a->argument[c->most], c->word, c->usage);
     if (a->value[OPTION_json] && a->value[OPTION_csv])
         return bc_fail(err, BC_ERR_USAGE, "--json and --csv exclude each other; keep one of them");
-    return BC_OK;
+    return check_output(c, a, err);
 }
 
 bc_status arguments_take(const command *c, int argc, char **argv, arguments *a, bc_error *err)

@@ -1,20 +1,21 @@
 /* SPDX-License-Identifier: MIT */
 /* complain.c - what goes to standard error: errors and warnings, a line each. */
-#include "base/text.h"
 #include "cli/cli.h"
+#include "output/plain_text_internal.h"
 
 #include <stdarg.h>
 #include <stdio.h>
+#include <stdlib.h>
 
 #define LINE_BYTES 1536 /* a file name, a line number and a sentence */
 
 /* Words and file names of the user are quoted in the line: a terminal must not obey them. */
 static void tell(const char *text)
 {
-    char shown[LINE_BYTES];
+    char *shown = plain_text(text, PLAIN_LINE);
 
-    bc_text_show(shown, sizeof shown, text);
-    (void)fprintf(stderr, "bluecone: %s\n", shown);
+    (void)fprintf(stderr, "bluecone: %s\n", shown ? shown : "out of memory");
+    free(shown);
 }
 
 int complain(const bc_error *err)

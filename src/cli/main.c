@@ -58,6 +58,8 @@ int main(int argc, char **argv)
 {
     /* a closed pipe is then an error of write() that is told, with its own exit code */
     (void)signal(SIGPIPE, SIG_IGN);
+    /* a file over the size limit likewise: else a half-written one would be left behind */
+    (void)signal(SIGXFSZ, SIG_IGN);
     if (argc < 2) {
         (void)fputs("bluecone: no command given; see bluecone --help\n", stderr);
         return bc_exit_code(BC_ERR_USAGE);

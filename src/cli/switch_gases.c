@@ -40,7 +40,7 @@ static void add_corrected(report *r, const switch_case *c, size_t section)
         const plain_figure figures[] = {
             {"fuel-temperature", "Gas at the burner", t_k - T0_K, "C", 5, "stated, or default"},
             {"wobbe-gross-corrected", "Wobbe gross, so warm", corrected * 1e-6, "MJ/m3", 5, "W sqrt(T0/T)"},
-            {"wobbe-modified", "Modified Wobbe, net", modified / MODIFIED_UNIT, "1", 5, "Hi/sqrt(d T), MJ/(m3 K^0.5)"},
+            {"wobbe-modified", "Modified Wobbe, net", modified / MODIFIED_UNIT, "MJ/(m3 K^0.5)", 5, "Hi/sqrt(d T)"},
         };
 
         add_figures(&where, c->a, figures, BC_COUNT(figures));

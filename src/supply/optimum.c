@@ -113,6 +113,9 @@ static void tell_needed(const nlopt_library *l, optimum_model *m, size_t k, bc_b
         return;
     const double way = program_value(&p, x) * m->limit[k].scale;
 
+    b->has_needed = isfinite(way);
+    if (!b->has_needed)
+        return;
     b->needed = m->limit[k].bound + (b->kind == BC_BOUND_MIN ? -way : way);
 }
 

@@ -122,9 +122,22 @@ static bool adjust(adjusted_form form, double value, const pair_ratios *r, doubl
     }
 }
 
-static bool counts_for(made_for made, const switch_pair *p)
+/* An index of dangers that this type of burner does not know says nothing of it. */
+static bool concerns(unsigned dangers, bc_burner_type type)
 {
-    if (!p->set || made == MADE_FOR_ANY)
+    for (unsigned d = 0; d < BC_DANGERS; d++)
+        if ((dangers >> d & 1U) && bc_danger_matters((bc_danger)d, type))
+            return true;
+    return false;
+}
+
+static bool counts_for(made_for made, unsigned dangers, const switch_pair *p)
+{
+    if (!p->set)
+        return true;
+    if (!concerns(dangers, p->set->burner->type))
+        return false;
+    if (made == MADE_FOR_ANY)
         return true;
     return made == MADE_FOR_ATMOSPHERIC && p->set->burner->type == BC_BURNER_ATMOSPHERIC;
 }
@@ -143,7 +156,7 @@ static bc_criterion criterion_of(const switch_pair *p, size_t row, const bc_inde
     const size_t index = index_of_criterion(row);
     const bc_index_row *shown = bc_index_at(index);
     bc_criterion c = {.id = shown->id, .label = shown->label, .unit = shown->unit, .source = i->limits_source, .decimals = shown->digits,
-                      .counts = counts_for(ROWS[row].made, p), .dangers = ROWS[row].dangers, .has_value = i->has_value, .value = i->value,
+                      .counts = counts_for(ROWS[row].made, ROWS[row].dangers, p), .dangers = ROWS[row].dangers, .has_value = i->has_value, .value = i->value,
                       .preferable = i->preferable, .acceptable = i->acceptable, .verdict = i->verdict, .reason = i->reason};
 
     if (c.verdict == BC_VERDICT_NOT_ACCEPTABLE && old_breaks(p, index)) {

@@ -2,6 +2,7 @@
 /* subject.c - a gas made ready at a reference state, and the gap between its two heating values. */
 #include "bluecone/subject.h"
 
+#include "base/error_internal.h"
 #include "gas/species_index.h"
 #include "value/formation_internal.h"
 
@@ -19,6 +20,10 @@ bc_status bc_subject_make(const bc_reference *reference, const bc_gas *gas, cons
         subject->spread_scale = (1.0 - metered.x[SPECIES_water]) / (1.0 - gas->x[SPECIES_water]);
     subject->gas = metered;
     subject->value = bc_value_of(reference, &metered);
+    /* below it the summation formula means nothing, and at 0 its roots are no numbers */
+    if (!(subject->value.z > 0.05))
+        return bc_fail(err, BC_ERR_RANGE, "at %.4g C the mixture is no gas: its compression factor by ISO 6976 would be %.2g",
+                       reference->state.metering_c, subject->value.z);
     return BC_OK;
 }
 
