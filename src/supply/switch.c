@@ -1,5 +1,6 @@
 /* SPDX-License-Identifier: MIT */
 /* switch.c - criteria of indices and burner into one judgement. */
+#include "bluecone/oxidant.h"
 #include "bluecone/switch.h"
 
 #include "base/compiler.h"
@@ -181,7 +182,10 @@ bc_status bc_switch_judge(const bc_subject *old_gas, const bc_subject *new_gas, 
     memset(&s, 0, sizeof s);
     s.has_burner = burner != NULL;
     s.same_gas = same_gas(old_gas, new_gas) && !(new_gas_k > 0.0);
-    if (burner)
+    status = bc_fuel_check(&old_gas->gas, err);
+    if (status == BC_OK)
+        status = bc_fuel_check(&new_gas->gas, err);
+    if (status == BC_OK && burner)
         status = bc_burner_set(burner, old_gas, &s.set, err);
     pair.set = burner ? &s.set : NULL;
     if (status == BC_OK)
