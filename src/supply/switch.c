@@ -183,8 +183,6 @@ bc_status bc_switch_judge(const bc_subject *old_gas, const bc_subject *new_gas, 
     s.has_burner = burner != NULL;
     s.same_gas = same_gas(old_gas, new_gas) && !(new_gas_k > 0.0);
     status = bc_fuel_check(&old_gas->gas, err);
-    if (status == BC_OK)
-        status = bc_fuel_check(&new_gas->gas, err);
     if (status == BC_OK && burner)
         status = bc_burner_set(burner, old_gas, &s.set, err);
     pair.set = burner ? &s.set : NULL;
