@@ -9,6 +9,16 @@
 #define BC_PRINTF(text, first)
 #endif
 
+/* A large buffer that is filled as it is used need not be filled with a pattern first. */
+#if defined(__has_attribute)
+#if __has_attribute(uninitialized)
+#define BC_UNFILLED __attribute__((uninitialized))
+#endif
+#endif
+#ifndef BC_UNFILLED
+#define BC_UNFILLED
+#endif
+
 #define BC_COUNT(array) (sizeof(array) / sizeof *(array))
 
 #endif

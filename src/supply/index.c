@@ -161,7 +161,7 @@ static bc_status evaluate(const list_row *row, const index_case *c, bc_index *ou
 
 bc_status bc_index_evaluate(size_t index, const bc_subject *old_gas, const bc_subject *new_gas, bc_index *out, bc_error *err)
 {
-    index_room room;
+    BC_UNFILLED index_room room;
     const index_case c = {old_gas, new_gas, old_gas && burns(old_gas), burns(new_gas), &room};
 
     if (index >= BC_COUNT(ROWS))
@@ -176,7 +176,7 @@ bc_status bc_index_evaluate(size_t index, const bc_subject *old_gas, const bc_su
 
 bc_status bc_index_evaluate_all(const bc_subject *old_gas, const bc_subject *new_gas, bc_index out[], bc_error *err)
 {
-    index_room room;
+    BC_UNFILLED index_room room;
     const index_case c = {old_gas, new_gas, burns(old_gas), burns(new_gas), &room};
     bc_index all[BC_COUNT(ROWS)];
 

@@ -13,7 +13,17 @@ static double count(size_t species, bc_element element)
     return (double)bc_species_atoms(species, element);
 }
 
-double formation_gross_j_per_mol(size_t species, double t_k)
+formation_products formation_products_at(double t_k)
+{
+    return (formation_products){.t_k = t_k,
+                                .oxygen = thermo_h_j_per_mol(THERMO_oxygen, t_k),
+                                .carbon_dioxide = thermo_h_j_per_mol(THERMO_carbon_dioxide, t_k),
+                                .water_liquid = thermo_liquid_water_j_per_mol(t_k),
+                                .nitrogen = thermo_h_j_per_mol(THERMO_nitrogen, t_k),
+                                .sulfur_dioxide = thermo_h_j_per_mol(THERMO_sulfur_dioxide, t_k)};
+}
+
+double formation_gross_with(const formation_products *p, size_t species)
 {
     const double c = count(species, BC_C);
     const double h = count(species, BC_H);
@@ -24,9 +34,15 @@ double formation_gross_j_per_mol(size_t species, double t_k)
 
     if (inert > 0.0)
         return 0.0;
-    return thermo_h_j_per_mol(species, t_k) + oxygen * thermo_h_j_per_mol(THERMO_oxygen, t_k)
-           - c * thermo_h_j_per_mol(THERMO_carbon_dioxide, t_k) - h / 2.0 * thermo_liquid_water_j_per_mol(t_k)
-           - n / 2.0 * thermo_h_j_per_mol(THERMO_nitrogen, t_k) - s * thermo_h_j_per_mol(THERMO_sulfur_dioxide, t_k);
+    return thermo_h_j_per_mol(species, p->t_k) + oxygen * p->oxygen - c * p->carbon_dioxide - h / 2.0 * p->water_liquid
+           - n / 2.0 * p->nitrogen - s * p->sulfur_dioxide;
+}
+
+double formation_gross_j_per_mol(size_t species, double t_k)
+{
+    const formation_products products = formation_products_at(t_k);
+
+    return formation_gross_with(&products, species);
 }
 
 double formation_vaporisation_j_per_mol(double t_k)
@@ -63,9 +79,11 @@ bc_status bc_formation_gas(const bc_gas *gas, double t_k, double *gross_j_per_mo
 
     if (status != BC_OK)
         return status;
+    const formation_products products = formation_products_at(t_k);
+
     for (size_t i = 0; i < SPECIES_COUNT; i++)
         if (gas->x[i] != 0.0)
-            gross += gas->x[i] * formation_gross_j_per_mol(i, t_k);
+            gross += gas->x[i] * formation_gross_with(&products, i);
     *gross_j_per_mol = gross;
     *net_j_per_mol = gross - bc_gas_atoms(gas, BC_H) / 2.0 * formation_vaporisation_j_per_mol(t_k);
     return BC_OK;

@@ -127,7 +127,7 @@ static const heat_row *rows_of(int edition)
  * compilations of formation enthalpies (Active Thermochemical Tables 1.122 against the CRC Handbook). */
 #define U_FORMATION_J_PER_MOL 1000.0
 
-static void look_up_heat(bc_reference *r, size_t species, size_t column)
+static void look_up_heat(bc_reference *r, size_t species, size_t column, const formation_products *products)
 {
     const int edition = r->state.edition;
     const heat_row *row = &rows_of(edition)[species];
@@ -144,7 +144,7 @@ static void look_up_heat(bc_reference *r, size_t species, size_t column)
         r->u_gross_j_per_mol[species] = (row->u > 0.0 ? row->u : HEATS_2016[species].u) * 1e3;
         r->heat_origin[species] = (unsigned char)origin;
     } else {
-        r->gross_j_per_mol[species] = formation_gross_j_per_mol(species, r->state.combustion_c + 273.15);
+        r->gross_j_per_mol[species] = formation_gross_with(products, species);
         r->u_gross_j_per_mol[species] = r->gross_j_per_mol[species] > 0.0 ? U_FORMATION_J_PER_MOL : 0.0;
         r->heat_origin[species] = BC_ORIGIN_FORMATION;
     }
@@ -170,11 +170,12 @@ bc_status bc_reference_at(const bc_state *state, bc_reference *reference, bc_err
     reference->state = *state;
     look_up_constants(reference);
     const size_t column = column_at(state);
+    const formation_products products = formation_products_at(state->combustion_c + 273.15);
 
     for (size_t i = 0; i < SPECIES_COUNT; i++) {
         const bc_summation factor = bc_summation_factor(i, state->edition, state->metering_c);
 
-        look_up_heat(reference, i, column);
+        look_up_heat(reference, i, column, &products);
         mark_inert(reference, i);
         reference->factor[i] = factor.s;
         reference->u_factor[i] = factor.u;
