@@ -58,7 +58,13 @@ static void tell_aside(const report *r, const render_style *style)
         warn("%s", r->warnings[i]);
 }
 
-static bc_status render(const report *r, const arguments *a, bool brief, bc_error *err)
+/* A text passes; these are kept, and must tell later what they were made from. */
+static bool tells_inputs(render_form form)
+{
+    return form == RENDER_JSON || form == RENDER_HTML || form == RENDER_XLSX;
+}
+
+static bc_status render(report *r, const arguments *a, bool brief, bc_error *err)
 {
     render_form form = RENDER_TEXT;
     render_style style;
@@ -68,6 +74,8 @@ static bc_status render(const report *r, const arguments *a, bool brief, bc_erro
         status = choose_style(a, &style, err);
     if (status != BC_OK)
         return status;
+    if (tells_inputs(form))
+        inputs_identify(r);
     if (!report_ok(r))
         return bc_fail(err, BC_ERR_MEMORY, "not enough memory for the report");
     if (form == RENDER_BRIEF) {

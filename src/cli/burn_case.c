@@ -115,6 +115,7 @@ static bc_status take_oxidant_gas(const char *word, burn_setup *s, bc_error *err
     if (status == BC_OK) {
         s->physics.oxidant = gas->gas;
         (void)snprintf(s->oxidant, sizeof s->oxidant, "%.120s", gas->name);
+        (void)snprintf(s->oxidant_path, sizeof s->oxidant_path, "%s", gas->composition.path);
         s->remark_count = gas->composition.remark_count;
         memcpy(s->remarks, gas->composition.remarks, sizeof s->remarks);
     }

@@ -92,6 +92,12 @@ void state_text(const bc_state *state, char *text, size_t size);
 void report_state_of(report *r, const bc_state *state);
 size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject);
 
+/* A contract and those it follows, as files that a report was made from. */
+void report_contract_inputs(report *r, const bc_contract *contract);
+
+/* Reads the files of a report again, for their SHA-256. Only for forms that are kept: it costs time. */
+void inputs_identify(report *r);
+
 /* Where a result goes: section and gas of a report. */
 typedef struct {
     report *r;

@@ -1,6 +1,6 @@
 /* SPDX-License-Identifier: MIT */
 /* contract_chart.c - margins as bars, and the plane of Wobbe index and relative density with the contract's window. */
-#include "cli/contract_report.h"
+#include "cli/contract_worst.h"
 
 #include <math.h>
 #include <stdio.h>
@@ -160,6 +160,39 @@ static void add_window(report *r, size_t chart, plane_axis axes[2])
         report_add_point(r, chart, series, x[i == 1 || i == 2], y[i >= 2]);
 }
 
+static bc_status form_on(const contract_case *c, const plane_axis *axis, bc_ratio *form, bc_error *err)
+{
+    if (axis->limit)
+        return bc_limit_ratio(c->contract, (size_t)(axis->limit - c->contract->limits), form, err);
+    return bc_ratio_of_quantity(axis->quantity, &c->gases.reference, form, err);
+}
+
+/* What the allowed gases can reach, where --worst asks for it. */
+static bc_status add_region(report *r, const contract_case *c, size_t chart, plane_axis axes[2], bc_error *err)
+{
+    bc_ratio forms[2];
+    region_outline outline;
+
+    if (!c->a->value[OPTION_worst])
+        return BC_OK;
+    bc_status status = form_on(c, &axes[0], &forms[0], err);
+
+    if (status == BC_OK)
+        status = form_on(c, &axes[1], &forms[1], err);
+    if (status == BC_OK)
+        status = region_trace(c, forms, &outline, err);
+    if (status != BC_OK)
+        return status;
+    region_draw(r, chart, &outline);
+    for (size_t k = 0; k < outline.count; k++) {
+        stretch(&axes[0], outline.lower[k].x);
+        stretch(&axes[0], outline.upper[k].x);
+        stretch(&axes[1], outline.lower[k].y);
+        stretch(&axes[1], outline.upper[k].y);
+    }
+    return BC_OK;
+}
+
 static void label_axis(report *r, const contract_case *c, size_t chart, report_axis_id where, const plane_axis *axis)
 {
     const bc_quantity *q = bc_quantity_at(axis->quantity);
@@ -190,7 +223,8 @@ bc_status contract_charts(report *r, const contract_case *c, bc_error *err)
     label_axis(r, c, chart, REPORT_Y, &axes[1]);
     for (size_t i = 0; i < c->gases.count; i++)
         add_gas(r, c, chart, axes, i);
-    if (axes[0].high >= axes[0].low && axes[1].high >= axes[1].low)
+    status = add_region(r, c, chart, axes, err);
+    if (status == BC_OK && axes[0].high >= axes[0].low && axes[1].high >= axes[1].low)
         add_window(r, chart, axes);
-    return BC_OK;
+    return status;
 }

@@ -35,4 +35,17 @@ bc_status worst_standings(worst_case *w, report *r, bc_error *err);
 /* Why no gas is allowed: the verdict. */
 void worst_explain(const worst_case *w, report *r);
 
+#define REGION_SLICES 64
+
+/* The outline of what the allowed gases can reach on a plane, from slice to slice along x. A corner is where an
+ * allowed gas lies, not where a bound does: nothing is drawn that cannot be delivered. */
+typedef struct {
+    report_point lower[REGION_SLICES + 1], upper[REGION_SLICES + 1];
+    size_t count; /* 0: nothing is allowed */
+} region_outline;
+
+/* Axes are the figures along x and y, no proxies. */
+bc_status region_trace(const contract_case *c, const bc_ratio axes[2], region_outline *o, bc_error *err);
+void region_draw(report *r, size_t chart, const region_outline *o);
+
 #endif

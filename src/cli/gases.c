@@ -229,6 +229,7 @@ size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject
     for (size_t i = 0; i < bc_species_count(); i++)
         if (subject->gas.x[i] > 0.0)
             report_add_fraction(r, index, bc_species_id(i), subject->gas.x[i]);
+    report_add_input(r, c->path);
     warn_remarks(r, gas);
     if (!gas->repeated)
         warn_origins(r, gas->name, subject);

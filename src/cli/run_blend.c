@@ -22,5 +22,7 @@ int run_blend(const arguments *a)
         return complain(&err);
     }
     report_open(&r, BC_VERSION, "blend", "Blend");
+    if (c.within)
+        report_contract_inputs(&r, c.within);
     return ask(&c, &r);
 }

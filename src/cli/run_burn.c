@@ -19,6 +19,7 @@ static bc_status compute(const arguments *a, const subjects *s, burn_case_result
 static bc_status fill(report *r, const arguments *a, const subjects *s, const burn_case_result *c, bc_error *err)
 {
     subjects_report(s, r);
+    report_add_input(r, c->setup.oxidant_path);
     bc_status status = burn_report(r, a, c, err);
 
     if (status == BC_OK && burn_wants_chart(a))

@@ -21,14 +21,23 @@ void contract_warn(report *r, const bc_contract *c)
     }
 }
 
+static bc_status fill_alone(report *r, const contract_case *c, bool *good, bc_error *err)
+{
+    report_state_of(r, &c->contract->state);
+    contract_limits_alone(r, c);
+    contract_warn(r, c->contract);
+    if (!c->a->value[OPTION_worst])
+        return BC_OK;
+    const bc_status status = contract_worst(r, c, good, err);
+
+    return status == BC_OK ? contract_charts(r, c, err) : status;
+}
+
 static bc_status fill(report *r, const contract_case *c, bool *good, bc_error *err)
 {
-    if (c->judged == 0) {
-        report_state_of(r, &c->contract->state);
-        contract_limits_alone(r, c);
-        contract_warn(r, c->contract);
-        return c->a->value[OPTION_worst] ? contract_worst(r, c, good, err) : BC_OK;
-    }
+    report_contract_inputs(r, c->contract);
+    if (c->judged == 0)
+        return fill_alone(r, c, good, err);
     subjects_report(&c->gases, r);
     subjects_tell_uncertainty(&c->gases, r);
     contract_warn(r, c->contract);

@@ -70,6 +70,7 @@ static bool wants_shares(const arguments *a)
 static bc_status fill(report *r, const switch_case *c, bc_error *err)
 {
     subjects_report(c->s, r);
+    report_add_input(r, c->burner.path);
     switch_burner(r, c);
     switch_gases(r, c);
     switch_indices(r, c);

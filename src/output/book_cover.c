@@ -67,12 +67,25 @@ static void put_checks(book_sheet *s, const report *r)
     }
 }
 
+static void put_files(book_sheet *s, const report *r)
+{
+    for (size_t i = 0; i < r->input_count; i++) {
+        char text[600];
+
+        if (r->inputs[i].sha256 == NULL)
+            continue;
+        (void)snprintf(text, sizeof text, "%.500s: SHA-256 %.64s", r->inputs[i].name, r->inputs[i].sha256);
+        put_fact(s, "File", text);
+    }
+}
+
 static void put_end(book_sheet *s, const report *r)
 {
     char text[200];
 
     (void)snprintf(text, sizeof text, "bluecone %.60s, command %.60s", r->version, r->command);
     put_fact(s, "Program", text);
+    put_files(s, r);
     for (size_t i = 0; i < r->result_count; i++) {
         if (!r->results[i].has_uncertainty)
             continue;

@@ -1,5 +1,9 @@
 /* SPDX-License-Identifier: MIT */
-/* csv.c - the report for spreadsheets: RFC 4180 with line feeds, and no cell that is a formula. */
+/* csv.c - the report for spreadsheets: RFC 4180 with line feeds, and no cell that is a formula.
+ *
+ * Blocks with an empty line between, so that the figures come first and alone up to it. A table behind figures
+ * has a row `table,ID,TITLE` above its headings, since several may have the same ones; tables without figures
+ * are what was asked for, and start with their headings. */
 #include "output/render.h"
 
 #include "base/error_internal.h"
@@ -186,9 +190,26 @@ static void put_limits(csv_page *page, const report *r)
         put_limit(page, r, &r->limits[i]);
 }
 
+static bool has_figures(const report *r)
+{
+    return r->result_count > 0 || r->table_count == 0;
+}
+
+static void put_named_tables(csv_page *page, const report *r)
+{
+    for (size_t i = 0; i < r->table_count; i++) {
+        fputs("\ntable,", page->out);
+        put_text(page, r->tables[i].id);
+        fputc(',', page->out);
+        put_text(page, r->tables[i].title);
+        fputc('\n', page->out);
+        put_table(page, &r->tables[i]);
+    }
+}
+
 static void put_report(csv_page *page, const report *r)
 {
-    if (r->result_count > 0 || r->table_count == 0) {
+    if (has_figures(r)) {
         fputs("id,gas,value,unit,uncertainty,method\n", page->out);
         for (size_t i = 0; i < r->result_count; i++)
             put_result(page, r, &r->results[i]);
@@ -209,6 +230,8 @@ bc_status render_csv(const report *r, const render_style *style, FILE *out, bc_e
         put_report(&page, r);
     if (!page.failed)
         put_limits(&page, r);
+    if (!page.failed && has_figures(r))
+        put_named_tables(&page, r);
     if (page.failed)
         return bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
     return ferror(out) ? bc_fail(err, BC_ERR_FILE, "cannot write the report") : BC_OK;

@@ -50,6 +50,23 @@ static json_t *gases_of(const report *r, bool *failed)
     return array;
 }
 
+/* Those that are identified. */
+static json_t *inputs_of(const report *r, bool *failed)
+{
+    json_t *array = json_array();
+
+    for (size_t i = 0; i < r->input_count; i++) {
+        if (r->inputs[i].sha256 == NULL)
+            continue;
+        json_t *object = json_object();
+
+        put(object, "name", text_of(r->inputs[i].name), failed);
+        put(object, "sha256", text_of(r->inputs[i].sha256), failed);
+        append(array, object, failed);
+    }
+    return array;
+}
+
 static json_t *result_of(const report *r, const report_result *result, bool *failed)
 {
     const bool has_gas = result->gas != REPORT_NO_GAS;
@@ -225,6 +242,8 @@ static json_t *report_of(const report *r, bool *failed)
     put(object, "command", text_of(r->command), failed);
     put(object, "state", state_of(&r->state, failed), failed);
     put(object, "gases", gases_of(r, failed), failed);
+    if (r->input_count > 0)
+        put(object, "inputs", inputs_of(r, failed), failed);
     put(object, "results", results_of(r, failed), failed);
     put(object, "tables", tables_of(r, failed), failed);
     if (r->limit_count > 0)

@@ -86,6 +86,23 @@ static void put_inputs(page *p)
         fputs("</dd>\n", p->out);
 }
 
+static void put_files(page *p)
+{
+    bool any = false;
+
+    for (size_t i = 0; i < p->r->input_count; i++) {
+        if (p->r->inputs[i].sha256 == NULL)
+            continue;
+        fputs(any ? "<br>" : "<dt>Files</dt><dd>", p->out);
+        page_element(p, "bdi", p->r->inputs[i].name);
+        fputs(" SHA-256 ", p->out);
+        page_element(p, "code", p->r->inputs[i].sha256);
+        any = true;
+    }
+    if (any)
+        fputs("</dd>\n", p->out);
+}
+
 void page_foot(page *p)
 {
     fputs("<footer>\n<h2 id=\"a0\">About this report</h2>\n<dl>\n<dt>Program</dt><dd>bluecone ", p->out);
@@ -94,6 +111,7 @@ void page_foot(page *p)
     page_text(p, p->r->command);
     fputs("</dd>\n", p->out);
     put_inputs(p);
+    put_files(p);
     put_methods(p);
     put_uncertainty(p);
     fputs("</dl>\n</footer>\n", p->out);

@@ -14,7 +14,7 @@
 typedef enum {
     RENDER_TEXT, /* sections and tables for people */
     RENDER_JSON, /* one object, 12 significant digits */
-    RENDER_CSV,  /* results, or the tables where there are no results */
+    RENDER_CSV,  /* results, limits, tables: blocks with an empty line between */
     RENDER_BRIEF, /* one line a result; chosen by a command, never by a file's ending */
     RENDER_HTML, /* one page, charts in it, for a browser and for A4 */
     RENDER_XLSX, /* a workbook: a sheet for each section, table and chart */

@@ -109,6 +109,9 @@ void report_close(report *r)
 {
     for (size_t i = 0; i < r->gas_count; i++)
         report_free_gas(&r->gases[i]);
+    for (size_t i = 0; i < r->input_count; i++)
+        report_free_input(&r->inputs[i]);
+    free(r->inputs);
     for (size_t i = 0; i < r->result_count; i++)
         report_free_result(&r->results[i]);
     for (size_t i = 0; i < r->table_count; i++)

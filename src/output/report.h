@@ -30,6 +30,12 @@ typedef struct {
     double sum_before;        /* of the entries as written, as a fraction of one */
 } report_gas;
 
+/* A file that the report was made from. */
+typedef struct {
+    char *path;
+    char *name, *sha256;      /* NULL: not identified, since the form does not show it */
+} report_input;
+
 /* The reference state of all results that do not name another one in their note. */
 typedef struct {
     bool present;
@@ -176,6 +182,7 @@ typedef struct {
     char *version, *command, *title;
     report_state state;
     report_gas *gases;          size_t gas_count;
+    report_input *inputs;       size_t input_count;
     report_section *sections;   size_t section_count;
     report_result *results;     size_t result_count;
     report_table *tables;       size_t table_count;
@@ -199,6 +206,8 @@ bool report_ok(const report *r);
 void report_set_state(report *r, const report_state *state);
 size_t report_add_gas(report *r, const char *name, const char *source, double sum_before);
 void report_add_fraction(report *r, size_t gas, const char *id, double x);
+void report_add_input(report *r, const char *path); /* the same path twice is kept once; "" is none */
+void report_identify_input(report *r, size_t input, const char *name, const char *sha256); /* once */
 size_t report_add_section(report *r, const char *id, const char *title);
 /* Adds a result; the texts of *result are copied, section and gas must exist. */
 void report_add_result(report *r, const report_result *result);

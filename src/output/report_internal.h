@@ -14,6 +14,7 @@ char *report_copy(report *r, const char *text);
 
 /* Free what an item holds, not the item. */
 void report_free_gas(report_gas *gas);
+void report_free_input(report_input *input);
 void report_free_result(report_result *result);
 void report_free_column(report_column *column);
 void report_free_table(report_table *table);

@@ -43,5 +43,47 @@ quantities=$(bluecone list quantities --bare | grep -vx flame-temperature | past
     "$work/sweep-with" blend 0..30/0.03 hydrogen rest pipeline-h --csv --show all
 $cc -O2 -I "$SRC/include" -D_POSIX_C_SOURCE=200809L -o "$work/bench_worst" "$SRC/tests/bench/bench_worst.c" \
     "$build/libbluecone.a" -liniparser -lm
-echo "library: worst gas of 20 components (targets 30 ms exact, 500 ms with what is searched)"
+echo "library: worst gas of 20 components"
 "$work/bench_worst"
+
+# A contract with as many components as the trade has, and one with as many limits: `limit WHAT MIN MAX`, - for none.
+limit() {
+    printf '[limit %s]\n' "$1"
+    [ "$2" = - ] || printf 'min = %s\n' "$2"
+    [ "$3" = - ] || printf 'max = %s\n' "$3"
+}
+{
+    limit wobbe-gross 46.1 56.5; limit wobbe-net 40 53; limit hhv 30 47; limit lhv 28 44; limit hhv-mass 30 -
+    limit relative-density 0.5 0.75; limit density 0.6 0.95; limit z 0.9 1; limit air-demand 7 13; limit co2-factor-net - 70
+    limit methane 60 -; limit ethane - 14; limit propane - 6; limit c4+ - 4; limit inerts - 14
+    limit hydrogen - 10; limit oxygen - 1; limit carbon-dioxide - 6; limit total-sulphur - 150; limit hydrogen-sulfide - 20
+} >"$work/twenty.ini"
+{
+    limit wobbe-gross 46.1 56.5; limit wobbe-net 41 52; limit hhv 34 46; limit relative-density 0.55 0.7
+    printf '[range methane]\nmin = 60\n'
+    for range in ethane=12 propane=6 n-butane=1.5 isobutane=1.5 n-pentane=0.4 isopentane=0.4 neopentane=0.1 n-hexane=0.2 \
+        n-heptane=0.1 n-octane=0.05 benzene=0.05 toluene=0.01 hydrogen=10 carbon-monoxide=0.5 nitrogen=12 helium=0.5 \
+        carbon-dioxide=5 oxygen=0.2 hydrogen-sulfide=0.0005; do
+        printf '[range %s]\nmax = %s\n' "${range%=*}" "${range#*=}"
+    done
+} >"$work/wide.ini"
+
+# row NAME ARGUMENT...: adds a command to the rows, named with its target.
+rows=()
+row() {
+    local name=$1
+    shift
+    ln -s "$(command -v bluecone)" "$work/$name"
+    rows+=(-- "$work/$name" "$@")
+}
+wide=(contract "$work/wide.ini" pipeline-h --against g20)
+row "get" get wobbe-gross pipeline-h
+row "20 limits: get + 1000 us" contract "$work/twenty.ini" pipeline-h
+row "worst, 20 components: 500 ms" "${wide[@]}" --worst
+row "report.html: 150 ms" "${wide[@]}" -o "$work/report.html"
+row "report.xlsx: 150 ms" "${wide[@]}" -o "$work/report.xlsx"
+row "chart.svg: 150 ms" "${wide[@]}" -o "$work/chart.svg"
+row "chart.svg, worst: 500 ms" "${wide[@]}" --worst -o "$work/chart.svg"
+echo "contracts, whole processes: what was done and its target, then what was measured (--worst searches flame temperature"
+echo "and interchangeability, too; with a chart it also traces the reachable region)"
+"$work/bench_start" 60 "${rows[@]:1}"

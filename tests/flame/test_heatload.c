@@ -26,9 +26,9 @@ static bc_heat_path walk(const bc_heat_case *heat_case)
     return path;
 }
 
-/* The classroom boiler: CH4 + 2 O2 at 298.15 K, products at 1000 K. With NASA/TP-2002-211556: -802.56, 85.41, -717.16
+/* A boiler by hand: CH4 + 2 O2 at 298.15 K, products at 1000 K. With NASA/TP-2002-211556: -802.56, 85.41, -717.16
  * kJ/mol, half of the last digit; -802.25 and 85.12 with older tables (common practice). */
-static void the_classroom_boiler_shows_its_three_figures(void **state)
+static void the_boiler_balance_shows_its_three_figures(void **state)
 {
     const bc_gas methane = gas_of("methane=100");
     const bc_gas oxygen = gas_of("oxygen=100");
@@ -274,7 +274,7 @@ static void heat_that_cannot_be_is_refused(void **state)
 int main(void)
 {
     const struct CMUnitTest tests[] = {
-        cmocka_unit_test(the_classroom_boiler_shows_its_three_figures),
+        cmocka_unit_test(the_boiler_balance_shows_its_three_figures),
         cmocka_unit_test(the_path_does_not_matter),
         cmocka_unit_test(the_printed_terms_add_up_to_the_path),
         cmocka_unit_test(the_heats_of_the_path_are_those_of_the_formation_balance),

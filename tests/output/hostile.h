@@ -95,6 +95,9 @@ static inline void open_full(report *r, const char *text, size_t gases, bool cha
     add_figure(r, section, REPORT_NO_GAS, text, 11.3);
     add_table(r, text, true);
     add_table(r, text, false);
+    report_add_input(r, text);
+    if (*text != '\0')
+        report_identify_input(r, 0, text, text);
     report_add_check(r, text, true, text);
     report_add_check(r, text, false, text);
     report_add_warning(r, text);

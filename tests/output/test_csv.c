@@ -163,8 +163,19 @@ static void tables_alone_have_their_own_headings_and_an_empty_line_between(void 
                    "time,hhv [MJ/m3]\n08:00,37.7061\n-5.2e3,\n'-5.2.1,\n"
                    "\n"
                    "time,hhv [MJ/m3]\n08:00,37.7061\n-5.2e3,\n'-5.2.1,\n");
+}
+
+static void tables_behind_figures_have_a_row_that_names_them(void **state)
+{
+    report *r = *state;
+
     add_result(r, REPORT_NO_GAS, 37.7, 0.0);
-    assert_renders(render_csv, r, (render_style){0}, HEAD "hhv,,37.7,MJ/m3,,ISO 6976:2016\n");
+    add_table(r, "log");
+    add_table(r, "log-2");
+    assert_renders(render_csv, r, (render_style){0},
+                   HEAD "hhv,,37.7,MJ/m3,,ISO 6976:2016\n"
+                        "\ntable,log,Log\ntime,hhv [MJ/m3]\n08:00,37.7061\n-5.2e3,\n'-5.2.1,\n"
+                        "\ntable,log-2,Log\ntime,hhv [MJ/m3]\n08:00,37.7061\n-5.2e3,\n'-5.2.1,\n");
 }
 
 static void an_empty_report_is_the_heading_alone(void **state)
@@ -226,6 +237,7 @@ int main(void)
         CSV_TEST(control_characters_and_broken_utf8_become_question_marks),
         CSV_TEST(a_value_that_is_not_finite_is_an_empty_cell),
         CSV_TEST(tables_alone_have_their_own_headings_and_an_empty_line_between),
+        CSV_TEST(tables_behind_figures_have_a_row_that_names_them),
         CSV_TEST(an_empty_report_is_the_heading_alone),
         CSV_TEST(a_locale_with_a_decimal_comma_changes_no_cell),
         CSV_TEST(bare_lines_have_value_and_unit_and_with_several_gases_the_name),

@@ -145,6 +145,25 @@ static void state_checks_warnings_verdict_and_caution_are_told(void **state)
     json_decref(object);
 }
 
+static void inputs_are_told_when_they_are_identified(void **state)
+{
+    report *r = *state;
+
+    report_add_input(r, "a.ini");
+    report_add_input(r, "gone.ini");
+    report_add_input(r, "a.ini");
+    report_add_input(r, "");
+    assert_int_equal(r->input_count, 2);
+    report_identify_input(r, 0, "a.ini", "ba78");
+    json_t *object = parsed(r);
+    json_t *inputs = json_object_get(object, "inputs");
+
+    assert_int_equal(json_array_size(inputs), 1);
+    assert_keys(json_array_get(inputs, 0), "name sha256");
+    assert_string_equal(json_string_value(json_object_get(json_array_get(inputs, 0), "sha256")), "ba78");
+    json_decref(object);
+}
+
 static void a_composition_keeps_the_order_of_the_file(void **state)
 {
     report *r = *state;
@@ -283,6 +302,7 @@ int main(void)
     const struct CMUnitTest tests[] = {
         JSON_TEST(an_empty_report_has_every_key),
         JSON_TEST(state_checks_warnings_verdict_and_caution_are_told),
+        JSON_TEST(inputs_are_told_when_they_are_identified),
         JSON_TEST(a_composition_keeps_the_order_of_the_file),
         JSON_TEST(a_result_has_null_where_it_has_nothing),
         JSON_TEST(numbers_have_twelve_digits_in_every_locale),
