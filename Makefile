@@ -46,7 +46,7 @@ OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
 VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
 SOVERSION := 0
 
-DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libxlsxwriter-dev libnlopt-dev
+DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libxlsxwriter-dev libnlopt-dev libcsv-dev
 DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip
 DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv chromium
 DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe

@@ -36,6 +36,7 @@
 #include "bluecone/index.h"
 #include "bluecone/iso6976.h"
 #include "bluecone/limits.h"
+#include "bluecone/log.h"
 #include "bluecone/mcp.h"
 #include "bluecone/methane_number.h"
 #include "bluecone/number.h"

@@ -74,6 +74,22 @@ static bc_status load_gases(contract_case *c, bc_error *err)
     return BC_OK;
 }
 
+/* A log stands in the place of gases; what asks about single ones, or about none, has no meaning then. */
+static bc_status check_log(const contract_case *c, bc_error *err)
+{
+    static const size_t OTHERS[] = {OPTION_air_free, OPTION_coverage, OPTION_traps, OPTION_worst, OPTION_printed};
+    static const char *const WORDS[] = {"air-free", "coverage", "traps", "worst", "printed"};
+
+    if (!c->a->value[OPTION_log])
+        return BC_OK;
+    for (size_t i = 0; i < BC_COUNT(OTHERS); i++)
+        if (c->a->value[OTHERS[i]])
+            return bc_fail(err, BC_ERR_USAGE, "--log and --%s exclude each other; ask one after the other", WORDS[i]);
+    if (c->a->argument_count > 1)
+        return bc_fail(err, BC_ERR_USAGE, "--log judges the gases of the log; name none behind the contract");
+    return BC_OK;
+}
+
 /* Options that ask about gases need some. */
 static bc_status check_question(const contract_case *c, bc_error *err)
 {
@@ -81,7 +97,7 @@ static bc_status check_question(const contract_case *c, bc_error *err)
     static const char *const WORDS[] = {"against", "traps", "printed"};
 
     for (size_t i = 0; i < BC_COUNT(ASKING); i++)
-        if (c->a->value[ASKING[i]] && c->a->argument_count < 2 && !(ASKING[i] == OPTION_against && c->a->value[OPTION_worst]))
+        if (c->a->value[ASKING[i]] && c->a->argument_count < 2 && !(ASKING[i] == OPTION_against && (c->a->value[OPTION_worst] || c->a->value[OPTION_log])))
             return bc_fail(err, BC_ERR_USAGE, "--%s is about a gas: name one behind the contract", WORDS[i]);
     if (c->a->value[OPTION_printed] && c->a->argument_count != 2)
         return bc_fail(err, BC_ERR_USAGE, "--printed belongs to one gas; write [printed] into the files of several");
@@ -92,8 +108,10 @@ bc_status contract_open(contract_case *c, const arguments *a, bc_error *err)
 {
     memset(c, 0, sizeof *c);
     c->a = a;
-    bc_status status = check_question(c, err);
+    bc_status status = check_log(c, err);
 
+    if (status == BC_OK)
+        status = check_question(c, err);
     if (status == BC_OK)
         status = take_coverage(c, err);
     if (status != BC_OK)

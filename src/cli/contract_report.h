@@ -38,6 +38,9 @@ bc_status contract_trade_report(report *r, const contract_case *c, bc_error *err
 /* What each usual confusion would do. */
 bc_status contract_traps(report *r, const contract_case *c, bc_error *err);
 
+/* A log of analyses instead of gases; *good turns false when a limit was broken. */
+bc_status contract_log(report *r, const contract_case *c, bool *good, bc_error *err);
+
 /* The worst gas that ranges and limits let in; *good turns false when none is let in at all. */
 bc_status contract_worst(report *r, const contract_case *c, bool *good, bc_error *err);
 

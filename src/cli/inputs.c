@@ -3,11 +3,12 @@
 #include "cli/cli.h"
 
 #include "base/file_text.h"
-#include "base/ini.h"
 #include "base/sha256.h"
 
 #include <stdlib.h>
 #include <string.h>
+
+#define INPUT_BYTES_MAX ((size_t)1 << 30) /* a log of years has some 50 MB */
 
 void report_contract_inputs(report *r, const bc_contract *contract)
 {
@@ -40,7 +41,7 @@ void inputs_identify(report *r)
         size_t count = 0;
         char digest[SHA256_TEXT];
 
-        if (bc_file_text(r->inputs[i].path, BC_INI_BYTES_MAX, &bytes, &count, NULL) != BC_OK)
+        if (bc_file_text(r->inputs[i].path, INPUT_BYTES_MAX, &bytes, &count, NULL) != BC_OK)
             continue;
         bc_sha256(bytes, count, digest);
         report_identify_input(r, i, name_of(&f, r->inputs[i].path), digest);

@@ -36,6 +36,8 @@ static bc_status fill_alone(report *r, const contract_case *c, bool *good, bc_er
 static bc_status fill(report *r, const contract_case *c, bool *good, bc_error *err)
 {
     report_contract_inputs(r, c->contract);
+    if (c->a->value[OPTION_log])
+        return contract_log(r, c, good, err);
     if (c->judged == 0)
         return fill_alone(r, c, good, err);
     subjects_report(&c->gases, r);

@@ -1,5 +1,5 @@
 # what a contract file cannot mean
-try() { printf "$1" >c.ini; bluecone contract c.ini g20 >out.txt; echo $?; }
+try() { printf "%b" "$1" >c.ini; bluecone contract c.ini g20 >out.txt; echo $?; }
 try '[contract]\nfollows = nowhere\n[limit hhv]\nmin = 3\n'
 try '[contract]\nuntil = soon\n[limit hhv]\nmin = 3\n'
 try '[contract]\nannual_energy = 3 m3\n[limit hhv]\nmin = 3\n'
@@ -10,4 +10,4 @@ try '[limit hhv]\nmin = 3\nbasis = mass\n'
 try '[limit hydrogen]\nmax = 3\nbasis = weight\n'
 try '[limit hydrogen]\nmax = 3\nedition = 2020\n'
 try '[limit wobbe-ratio]\nmin = 0.95\n'
-cat out.txt | sed -n '/^Limits/,/^$/p'
+sed -n '/^Limits/,/^$/p' out.txt

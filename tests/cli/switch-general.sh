@@ -1,3 +1,3 @@
 # Two natural gases, burners in general: the whole report.
-bluecone switch "$SRC/examples/present-supply.ini" "$SRC/examples/new-supply-offer.ini" --no-color
+cd "$SRC/examples" && bluecone switch present-supply.ini new-supply-offer.ini --no-color
 echo "exit $?"

@@ -4,7 +4,7 @@ set -u
 SRC=$(cd "$(dirname "$0")/../.." && pwd) || exit 2
 work=$(mktemp -d) || exit 2
 trap 'rm -rf "$work"' EXIT
-cd "$work" && mkdir folder && : >sample.ini && : >other.txt || exit 2
+cd "$work" && mkdir folder && : >sample.ini && : >other.txt && : >log.csv || exit 2
 
 # shellcheck disable=SC1091 # made by the build from this source
 source "$SRC/src/cli/completion.bash.in"
@@ -92,6 +92,7 @@ expect 'bluecone contract gb-gsmr-2' 'gb-gsmr-2025'
 holds 'bluecone contract ' gb-gsmr-2025 sample.ini folder/
 expect 'bluecone contract pl-e g2' 'g20 g21 g23 g25'
 expect 'bluecone contract pl-e g20 --against g2' 'g20 g21 g23 g25'
+expect 'bluecone contract pl-e --log lo' 'log.csv'
 expect 'bluecone contract --printed hhv=39MJ/m3,wobbe-gross-' '39MJ/m3,wobbe-gross-ideal='
 expect 'bluecone list specifications pl' 'pl-e'
 expect 'bluecone list species n-hexa' 'n-hexane'
