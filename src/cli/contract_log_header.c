@@ -86,12 +86,20 @@ static bc_status take_unit(const log_case *l, log_column *column, const char *un
     return bc_fail_at(err, BC_ERR_INPUT, l->path, line, "a component in '%s' is not understood; logs are in mol %% or ppm (mole)", shown);
 }
 
+static bool is_same_component(const log_column *a, const log_column *b)
+{
+    for (size_t i = 0; i < BC_COUNT(a->parts); i++)
+        if (a->parts[i] < b->parts[i] || a->parts[i] > b->parts[i])
+            return false;
+    return true;
+}
+
 static bc_status check_twice(const log_case *l, const log_column *column, int line, bc_error *err)
 {
     for (size_t i = 0; i < l->column_count; i++) {
         const log_column *other = &l->columns[i];
 
-        if (other->kind == LOG_COMPONENT && memcmp(other->parts, column->parts, sizeof column->parts) == 0)
+        if (other->kind == LOG_COMPONENT && is_same_component(other, column))
             return bc_fail_at(err, BC_ERR_INPUT, l->path, line, "'%s' and '%s' are the same component; keep one of them", other->name, column->name);
     }
     return BC_OK;
