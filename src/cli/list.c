@@ -20,6 +20,16 @@ void list_row(report *r, size_t table, const char *const cells[], size_t count)
         report_add_text(r, table, cells[i]);
 }
 
+bool list_has(const report *r, size_t table, const char *name)
+{
+    const report_table *t = &r->tables[table];
+
+    for (size_t i = 0; i < t->cell_count; i += t->column_count)
+        if (t->cells[i].text && strcmp(t->cells[i].text, name) == 0)
+            return true;
+    return false;
+}
+
 static bc_status list_quantities(report *r, const char *name, bc_error *err)
 {
     static const char *const COLUMNS[] = {"id", "unit", "meaning", "method"};

@@ -9,6 +9,9 @@
 void list_columns(report *r, size_t table, const char *const ids[], size_t count);
 void list_row(report *r, size_t table, const char *const cells[], size_t count);
 
+/* True when a row begins with this name: a name found twice belongs to the folder searched first. */
+bool list_has(const report *r, size_t table, const char *name);
+
 /* All bundled gases, or one with its composition and source. */
 bc_status list_gases(report *r, const char *name, bc_error *err);
 

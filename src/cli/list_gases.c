@@ -5,7 +5,6 @@
 
 #include <stdio.h>
 #include <stdlib.h>
-#include <string.h>
 
 /* A list in the making; a name found twice belongs to the folder searched first. */
 typedef struct {
@@ -16,21 +15,11 @@ typedef struct {
     bc_error *err;
 } listing;
 
-static bool listed_already(const listing *l, const char *name)
-{
-    const report_table *t = &l->r->tables[l->table];
-
-    for (size_t i = 0; i < t->cell_count; i += t->column_count)
-        if (t->cells[i].text && strcmp(t->cells[i].text, name) == 0)
-            return true;
-    return false;
-}
-
 static void add_gas(const char *name, const char *path, void *data)
 {
     listing *l = data;
 
-    if (l->status != BC_OK || listed_already(l, name))
+    if (l->status != BC_OK || list_has(l->r, l->table, name))
         return;
     l->status = bc_composition_read(path, l->scratch, l->err);
     if (l->status != BC_OK)

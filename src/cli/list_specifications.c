@@ -17,23 +17,13 @@ typedef struct {
     bc_error *err;
 } listing;
 
-static bool listed_already(const listing *l, const char *name)
-{
-    const report_table *t = &l->r->tables[l->table];
-
-    for (size_t i = 0; i < t->cell_count; i += t->column_count)
-        if (t->cells[i].text && strcmp(t->cells[i].text, name) == 0)
-            return true;
-    return false;
-}
-
 static void add_specification(const char *name, const char *path, void *data)
 {
     listing *l = data;
     bc_contract *c = l->scratch;
 
     (void)path;
-    if (l->status != BC_OK || listed_already(l, name))
+    if (l->status != BC_OK || list_has(l->r, l->table, name))
         return;
     l->status = contract_load(name, c, l->err);
     if (l->status != BC_OK)

@@ -3,6 +3,7 @@
 #include "base/error_internal.h"
 #include "base/text.h"
 #include "gas/composition_internal.h"
+#include "gas/nearest.h"
 
 #include <dirent.h>
 #include <errno.h>
@@ -69,25 +70,6 @@ bc_status bc_composition_each(const char *folder, void (*visit)(const char *name
     return BC_OK;
 }
 
-/* The bundled name nearest to a word that does not exist. */
-typedef struct {
-    const char *word;
-    size_t distance;
-    char name[BC_WORD_MAX];
-} nearest;
-
-static void keep_nearest(const char *name, const char *path, void *data)
-{
-    nearest *n = data;
-    const size_t distance = bc_text_unlikeness(n->word, name);
-
-    (void)path;
-    if (distance < n->distance && strlen(name) < sizeof n->name) {
-        n->distance = distance;
-        (void)snprintf(n->name, sizeof n->name, "%s", name);
-    }
-}
-
 static bool ends_in_ini(const char *word)
 {
     const size_t length = strlen(word);
@@ -95,26 +77,18 @@ static bool ends_in_ini(const char *word)
     return length > 4 && strcmp(word + length - 4, ".ini") == 0;
 }
 
-/* A suggestion helps when at most a third of the word would have to change. */
-static bool is_near(const nearest *n)
-{
-    return n->name[0] != '\0' && n->distance <= 1 + strlen(n->word) / 3;
-}
-
 static bc_status refuse(const char *word, const char *const folders[], size_t folder_count, bc_error *err)
 {
-    nearest n = {.word = word, .distance = BC_WORD_MAX, .name = ""};
     char shown[BC_WORD_MAX];
 
     bc_text_show(shown, sizeof shown, word);
     if (strchr(word, '/') || ends_in_ini(word))
         return bc_fail(err, BC_ERR_INPUT, "there is no file '%s'; check the path", shown);
-    for (size_t i = 0; i < folder_count; i++)
-        if (bc_composition_each(folders[i], keep_nearest, &n, NULL) != BC_OK)
-            break;
+    const bc_nearest n = bc_nearest_bundled(word, folders, folder_count);
+
     if (n.name[0] == '\0')
         return bc_fail(err, BC_ERR_INPUT, "no file or gas '%s', and no bundled gases were found; set BLUECONE_PATH to their folder", shown);
-    if (!is_near(&n))
+    if (!bc_nearest_helps(&n))
         return bc_fail(err, BC_ERR_INPUT, "no file or bundled gas '%s'; bluecone list gases shows the bundled ones, a literal is written methane=92,ethane=8",
                        shown);
     return bc_fail(err, BC_ERR_INPUT, "no file or bundled gas '%s'; the nearest bundled one is '%s' (bluecone list gases)", shown, n.name);

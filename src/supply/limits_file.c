@@ -4,7 +4,7 @@
 
 #include "base/error_internal.h"
 #include "base/text.h"
-#include "bluecone/composition.h"
+#include "gas/nearest.h"
 
 #include <stdio.h>
 #include <string.h>
@@ -178,35 +178,13 @@ bc_status bc_contract_read(const char *path, bc_contract *c, bc_error *err)
     return read_contract(path, &none, c, err);
 }
 
-/* The bundled name nearest to a word that does not exist. */
-typedef struct {
-    const char *word;
-    size_t unlikeness;
-    char name[BC_WORD_MAX];
-} nearest;
-
-static void keep_nearest(const char *name, const char *path, void *data)
-{
-    nearest *n = data;
-    const size_t unlikeness = bc_text_unlikeness(n->word, name);
-
-    (void)path;
-    if (unlikeness < n->unlikeness)
-        (void)snprintf(n->name, sizeof n->name, "%.63s", name);
-    if (unlikeness < n->unlikeness)
-        n->unlikeness = unlikeness;
-}
-
 static bc_status refuse_word(const char *word, const limits_folders *f, bc_error *err)
 {
-    nearest n = {.word = word, .unlikeness = BC_WORD_MAX, .name = ""};
+    const bc_nearest n = bc_nearest_bundled(word, f->path, strchr(word, '/') ? 0 : f->count);
     char shown[BC_WORD_MAX];
 
     bc_text_show(shown, sizeof shown, word);
-    for (size_t i = 0; i < f->count && !strchr(word, '/'); i++)
-        if (bc_composition_each(f->path[i], keep_nearest, &n, NULL) != BC_OK)
-            break;
-    if (n.name[0] == '\0' || n.unlikeness > 1 + strlen(word) / 3)
+    if (!bc_nearest_helps(&n))
         return bc_fail(err, BC_ERR_INPUT, "there is no contract file or bundled specification '%s' (bluecone list specifications)", shown);
     return bc_fail(err, BC_ERR_INPUT, "there is no contract file or bundled specification '%s'; the nearest is '%s' (bluecone list specifications)",
                    shown, n.name);
