@@ -183,6 +183,8 @@ static bc_status add_region(report *r, const contract_case *c, size_t chart, pla
         status = region_trace(c, forms, &outline, err);
     if (status != BC_OK)
         return status;
+    if (outline.untraced)
+        report_add_warning(r, "No reachable region is drawn on the plane: the contract has too many limits to trace it.");
     region_draw(r, chart, &outline);
     for (size_t k = 0; k < outline.count; k++) {
         stretch(&axes[0], outline.lower[k].x);

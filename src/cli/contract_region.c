@@ -43,7 +43,8 @@ bc_status region_trace(const contract_case *c, const bc_ratio axes[2], region_ou
     bc_status status = worst_open(&w, c, err);
 
     o->count = 0;
-    if (status == BC_OK && !bc_worst_is_empty(w.worst) && w.space->limit_count < BC_SPACE_LIMIT_MAX) {
+    o->untraced = status == BC_OK && w.space->limit_count >= BC_SPACE_LIMIT_MAX;
+    if (status == BC_OK && !bc_worst_is_empty(w.worst) && !o->untraced) {
         status = bc_worst_ratio(w.worst, &axes[0], &ends, err);
         if (status == BC_OK)
             trace(w.space, axes, &ends, o);

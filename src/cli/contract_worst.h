@@ -41,7 +41,8 @@ void worst_explain(const worst_case *w, report *r);
  * allowed gas lies, not where a bound does: nothing is drawn that cannot be delivered. */
 typedef struct {
     report_point lower[REGION_SLICES + 1], upper[REGION_SLICES + 1];
-    size_t count; /* 0: nothing is allowed */
+    size_t count; /* 0: nothing is allowed, or untraced */
+    bool untraced; /* the limits leave no room for a slice */
 } region_outline;
 
 /* Axes are the figures along x and y, no proxies. */

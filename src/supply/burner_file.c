@@ -9,6 +9,7 @@
 #include "bluecone/units.h"
 #include "supply/burner_keys.h"
 
+#include <math.h>
 #include <stdio.h>
 #include <string.h>
 
@@ -204,6 +205,15 @@ static bc_status check_order(const reader *r, const bc_ini *ini)
     return BC_OK;
 }
 
+static bc_status check_orifices(const reader *r, const bc_ini *ini)
+{
+    if (r->burner->orifices - floor(r->burner->orifices) <= 0.0)
+        return BC_OK;
+    const bc_ini_entry *e = bc_ini_find(ini, "burner", "orifices");
+
+    return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "orifices = %.40s is no whole number; count them", e->value);
+}
+
 static bc_status read_document(const reader *r, const bc_ini *ini)
 {
     static const char *const NEEDED[] = {"type", "control"};
@@ -219,6 +229,8 @@ static bc_status read_document(const reader *r, const bc_ini *ini)
         status = check_air(r, ini);
     if (status == BC_OK)
         status = check_use(r, ini);
+    if (status == BC_OK)
+        status = check_orifices(r, ini);
     return status == BC_OK ? check_order(r, ini) : status;
 }
 
