@@ -42,13 +42,28 @@ static void on_cell(void *text, size_t length, void *data)
     l->cell_count++;
 }
 
+/* Hours and excursions need the time. */
+static bc_status take_header(log_file *f)
+{
+    log_case *l = f->l;
+
+    log_header_start(&l->header, l->path);
+    const bc_status status = log_header_take(&l->header, l->cells, l->cell_count, f->row_line, f->err);
+
+    if (status == BC_OK && log_header_count(&l->header, LOG_TIME) == 0)
+        return bc_fail_at(f->err, BC_ERR_INPUT, l->path, f->row_line, "no column is the time; name it time, timestamp or date");
+    if (status == BC_OK)
+        log_header_tell_ignored(&l->header);
+    return status;
+}
+
 static void on_row(int end, void *data)
 {
     log_file *f = data;
 
     (void)end;
     if (f->status == BC_OK)
-        f->status = f->has_header ? log_take_row(f->l, f->row_line, f->err) : log_take_header(f->l, f->row_line, f->err);
+        f->status = f->has_header ? log_take_row(f->l, f->row_line, f->err) : take_header(f);
     f->has_header = true;
     f->in_row = false;
     f->l->cell_count = 0;

@@ -62,7 +62,7 @@ static void add_cover(const log_case *l, report *r, const bc_log_cover *cover)
     add_line(r, table, "usual step", cover->step_s / HOUR_S, 4, "h");
     add_line(r, table, "gaps", (double)cover->gaps, 0, "");
     add_line(r, table, "time in gaps, not counted", cover->gap_s / HOUR_S, 2, "h");
-    if (l->has_flow)
+    if (l->header.has_flow)
         add_line(r, table, "gross heat", cover->energy_j / J_PER_GJ, 1, "GJ");
 }
 
@@ -125,7 +125,7 @@ static void add_outside(const log_case *l, report *r)
     static const column COLUMNS[] = {{"limit", "limit", ""}, {"unit", "unit", ""}, {"min", "min", ""}, {"max", "max", ""},
                                      {"rows", "rows", ""}, {"hours", "hours", "h"}, {"share", "share", "%"}, {"energy", "heat", "GJ"}};
     const bc_contract *c = l->c->contract;
-    const size_t table = open_table(r, "outside", "Outside each limit", COLUMNS, BC_COUNT(COLUMNS) - (l->has_flow ? 0 : 1));
+    const size_t table = open_table(r, "outside", "Outside each limit", COLUMNS, BC_COUNT(COLUMNS) - (l->header.has_flow ? 0 : 1));
 
     for (size_t i = 0; i < c->limit_count; i++) {
         const bc_limit *limit = &c->limits[i];
@@ -139,7 +139,7 @@ static void add_outside(const log_case *l, report *r)
         report_add_number(r, table, (double)e.broken, 0);
         report_add_number(r, table, e.broken_s / HOUR_S, 2);
         report_add_number(r, table, e.judged_s > 0.0 ? 100.0 * e.broken_s / e.judged_s : 0.0, 2);
-        if (l->has_flow)
+        if (l->header.has_flow)
             report_add_number(r, table, e.broken_j / J_PER_GJ, 1);
     }
 }

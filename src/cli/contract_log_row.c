@@ -22,13 +22,13 @@ static bc_status take_number(const log_case *l, size_t i, double *value, bc_erro
         if (*p == ',')
             *p = '.';
     if (*bc_text_skip_space(text) == '\0')
-        return bc_fail(err, BC_ERR_INPUT, "'%s' is empty", l->columns[i].name);
+        return bc_fail(err, BC_ERR_INPUT, "'%s' is empty", l->header.columns[i].name);
     if (bc_number_parse(text, value, NULL) == BC_OK)
         return BC_OK;
     char shown[40];
 
     bc_text_show(shown, sizeof shown, l->cells[i]);
-    return bc_fail(err, BC_ERR_INPUT, "'%s' of '%s' is no number", shown, l->columns[i].name);
+    return bc_fail(err, BC_ERR_INPUT, "'%s' of '%s' is no number", shown, l->header.columns[i].name);
 }
 
 /* A date and a time in two columns are joined. A clock with a zone and one without do not mix. */
@@ -37,10 +37,10 @@ static bc_status take_time(const log_case *l, double *time_s, bool *has_zone, bc
     char text[2 * LOG_CELL_MAX] = "";
     bool zoned = false;
 
-    for (size_t i = 0; i < l->column_count; i++) {
+    for (size_t i = 0; i < l->header.column_count; i++) {
         const size_t used = strlen(text);
 
-        if (l->columns[i].kind == LOG_TIME)
+        if (l->header.columns[i].kind == LOG_TIME)
             (void)snprintf(text + used, sizeof text - used, "%s%s", used > 0 ? " " : "", l->cells[i]);
     }
     const bc_status status = bc_log_time_parse(text, time_s, &zoned, err);
@@ -58,8 +58,8 @@ static bc_status take_gas(const log_case *l, bc_gas *gas, bc_error *err)
     double amounts[BC_SPECIES_CAPACITY] = {0.0};
     double sum = 0.0;
 
-    for (size_t i = 0; i < l->column_count; i++) {
-        const log_column *column = &l->columns[i];
+    for (size_t i = 0; i < l->header.column_count; i++) {
+        const log_column *column = &l->header.columns[i];
         double value = 0.0;
 
         if (column->kind != LOG_COMPONENT)
@@ -83,16 +83,16 @@ static bc_status take_gas(const log_case *l, bc_gas *gas, bc_error *err)
 static void take_flow(log_case *l, bc_per_amount *flow, int line)
 {
     *flow = (bc_per_amount){.given = false};
-    for (size_t i = 0; i < l->column_count; i++) {
+    for (size_t i = 0; i < l->header.column_count; i++) {
         double value = 0.0;
 
-        if (l->columns[i].kind != LOG_FLOW)
+        if (l->header.columns[i].kind != LOG_FLOW)
             continue;
         if (take_number(l, i, &value, NULL) != BC_OK || value < 0.0) {
             l->flow_line = l->flows_missing++ == 0 ? line : l->flow_line;
             return;
         }
-        *flow = l->columns[i].flow;
+        *flow = l->header.columns[i].flow;
         flow->si *= value;
     }
 }
@@ -101,10 +101,10 @@ static bc_status check_cells(const log_case *l, bc_error *err)
 {
     size_t count = l->cell_count;
 
-    while (count > l->column_count && l->cells[count - 1][0] == '\0')
+    while (count > l->header.column_count && l->cells[count - 1][0] == '\0')
         count--;
-    if (count != l->column_count)
-        return bc_fail(err, BC_ERR_INPUT, "it has %zu cells, but the header names %zu", count, l->column_count);
+    if (count != l->header.column_count)
+        return bc_fail(err, BC_ERR_INPUT, "it has %zu cells, but the header names %zu", count, l->header.column_count);
     return BC_OK;
 }
 

@@ -20,9 +20,9 @@ static void warn_absent(const log_case *l, report *r)
 
         if (limit->kind == BC_LIMIT_QUANTITY || limit->kind == BC_LIMIT_INDEX || limit->has_min)
             continue;
-        for (size_t k = 0; k < l->column_count; k++)
+        for (size_t k = 0; k < l->header.column_count; k++)
             for (size_t s = 0; s < bc_species_count(); s++)
-                there += limit->weight[s] * l->columns[k].parts[s];
+                there += limit->weight[s] * l->header.columns[k].parts[s];
         if (there <= 0.0)
             (void)snprintf(list + used, sizeof list - used, "%s%s", used > 0 ? ", " : "", limit->id);
     }
@@ -55,8 +55,8 @@ void log_warn(const log_case *l, report *r)
 {
     char text[160];
 
-    for (size_t i = 0; i < l->remark_count; i++)
-        report_add_warning(r, l->remarks[i]);
+    for (size_t i = 0; i < l->header.remark_count; i++)
+        report_add_warning(r, l->header.remarks[i]);
     warn_absent(l, r);
     if (l->flows_missing == 0)
         return;

@@ -1,0 +1,266 @@
+/* SPDX-License-Identifier: MIT */
+/* log_header.c - what the columns of a log are: time, flow, components, and what is of no use. */
+#include "cli/log_header.h"
+
+#include "base/error_internal.h"
+#include "base/text.h"
+#include "gas/summation.h"
+
+#include <stdio.h>
+#include <stdlib.h>
+#include <string.h>
+
+#define VOLUMES_AT_C 15.0 /* shares of volume, as of a composition file that names no state */
+
+static void add_remark(log_header *h, const char *text)
+{
+    if (h->remark_count < BC_REMARK_MAX)
+        (void)snprintf(h->remarks[h->remark_count++], BC_REMARK_BYTES, "%s", text);
+}
+
+/* A heading in its parts: "flow [m3/h]", "Methane (mol %)", "CH4 %". */
+typedef struct {
+    char word[LOG_CELL_MAX], unit[LOG_CELL_MAX];
+} heading;
+
+static void take_apart(const char *text, heading *head)
+{
+    const size_t length = strlen(text);
+    const char last = length > 0 ? text[length - 1] : '\0';
+    const char *opens = last == ']' ? strrchr(text, '[') : last == ')' ? strrchr(text, '(') : NULL;
+
+    head->unit[0] = '\0';
+    if (!opens && last == '%')
+        opens = text + length - 1;
+    if (opens && last == '%')
+        (void)snprintf(head->unit, sizeof head->unit, "%%");
+    else if (opens)
+        (void)bc_text_copy(head->unit, sizeof head->unit, opens + 1, (size_t)(text + length - 1 - (opens + 1)));
+    (void)bc_text_copy(head->word, sizeof head->word, text, opens ? (size_t)(opens - text) : length);
+}
+
+static bool is_time(const char *word)
+{
+    static const char *const WORDS[] = {"time", "timestamp", "date", "datetime"};
+
+    for (size_t i = 0; i < BC_COUNT(WORDS); i++)
+        if (bc_text_same(word, WORDS[i]))
+            return true;
+    return false;
+}
+
+static bc_status take_flow(log_header *h, log_column *column, const heading *head, int line, bc_error *err)
+{
+    char one[LOG_CELL_MAX + 4];
+
+    if (h->has_flow)
+        return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "two columns of flow; keep the one that the analyses belong to");
+    (void)snprintf(one, sizeof one, "1 %s", head->unit);
+    if (head->unit[0] == '\0' || bc_flow_parse(one, &column->flow, NULL) != BC_OK)
+        return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "the column of flow needs its unit, as flow [m3/h], [kg/h] or [kmol/h]");
+    column->kind = LOG_FLOW;
+    h->has_flow = true;
+    return BC_OK;
+}
+
+/* A formula of several species must not be passed over as a word that nobody knows. */
+static bool is_formula(const char *word)
+{
+    for (size_t i = 0; i < bc_species_count(); i++)
+        if (bc_text_same(word, bc_species_formula(i)))
+            return true;
+    return false;
+}
+
+/* Mole shares may say so or not; others must. A log is on one basis. */
+static bc_status take_basis(log_header *h, const log_column *column, bc_basis basis, int line, bc_error *err)
+{
+    if (h->has_basis && h->basis != basis)
+        return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "'%s' is on another basis than the components before it; shares of a log are all mole, all volume or all mass",
+                          column->name);
+    h->has_basis = true;
+    h->basis = basis;
+    return BC_OK;
+}
+
+static bc_status take_unit(log_header *h, log_column *column, const char *unit, int line, bc_error *err)
+{
+    static const struct {
+        const char *word;
+        double fraction;
+        int basis; /* -1: that of the log */
+    } UNITS[] = {{"%", 1e-2, -1}, {"ppm", 1e-6, -1}, {"1", 1.0, -1}, {"fraction", 1.0, -1},
+                 {"mol%", 1e-2, BC_BASIS_MOLE}, {"mole%", 1e-2, BC_BASIS_MOLE}, {"%mol", 1e-2, BC_BASIS_MOLE}, {"mol/mol", 1.0, BC_BASIS_MOLE},
+                 {"molppm", 1e-6, BC_BASIS_MOLE}, {"ppmmol", 1e-6, BC_BASIS_MOLE},
+                 {"vol%", 1e-2, BC_BASIS_VOLUME}, {"%vol", 1e-2, BC_BASIS_VOLUME}, {"volppm", 1e-6, BC_BASIS_VOLUME}, {"ppmv", 1e-6, BC_BASIS_VOLUME},
+                 {"m3/m3", 1.0, BC_BASIS_VOLUME},
+                 {"mass%", 1e-2, BC_BASIS_MASS}, {"wt%", 1e-2, BC_BASIS_MASS}, {"%mass", 1e-2, BC_BASIS_MASS}, {"massppm", 1e-6, BC_BASIS_MASS},
+                 {"kg/kg", 1.0, BC_BASIS_MASS}};
+    char shown[LOG_CELL_MAX];
+
+    column->fraction = h->unit;
+    if (unit[0] == '\0')
+        return BC_OK;
+    for (size_t i = 0; i < BC_COUNT(UNITS); i++)
+        if (bc_text_same(unit, UNITS[i].word)) {
+            column->fraction = UNITS[i].fraction;
+            return UNITS[i].basis < 0 ? BC_OK : take_basis(h, column, (bc_basis)UNITS[i].basis, line, err);
+        }
+    bc_text_show(shown, sizeof shown, unit);
+    return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "a component in '%s' is not understood; write mol %%, vol %%, mass %%, ppm or fraction", shown);
+}
+
+static bool is_same_component(const log_column *a, const log_column *b)
+{
+    for (size_t i = 0; i < BC_COUNT(a->parts); i++)
+        if (a->parts[i] < b->parts[i] || a->parts[i] > b->parts[i])
+            return false;
+    return true;
+}
+
+static bc_status check_twice(const log_header *h, const log_column *column, int line, bc_error *err)
+{
+    for (size_t i = 0; i < h->column_count; i++) {
+        const log_column *other = &h->columns[i];
+
+        if (other->kind == LOG_COMPONENT && is_same_component(other, column))
+            return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "'%s' and '%s' are the same component; keep one of them", other->name, column->name);
+    }
+    return BC_OK;
+}
+
+/* A component is what the literal `word=100` would be: species, cuts with their default split, air. */
+static bc_status take_component(log_header *h, log_column *column, const heading *head, int line, bc_error *err)
+{
+    char literal[LOG_CELL_MAX + 8];
+    bc_composition *c = malloc(sizeof *c);
+
+    if (!c)
+        return bc_fail(err, BC_ERR_MEMORY, "not enough memory for a composition");
+    (void)snprintf(literal, sizeof literal, "%s=100", head->word);
+    for (char *p = literal; *p != '\0'; p++)
+        if (*p == ',')
+            *p = '-';
+    bc_error cause;
+    bc_status status = bc_composition_parse(literal, c, &cause);
+
+    if (status == BC_OK) {
+        memcpy(column->parts, c->entries[0].parts, sizeof column->parts);
+        column->kind = LOG_COMPONENT;
+        for (size_t i = 0; i < c->remark_count; i++)
+            add_remark(h, c->remarks[i]);
+        status = check_twice(h, column, line, err);
+        status = status == BC_OK ? take_unit(h, column, head->unit, line, err) : status;
+    } else {
+        status = is_formula(head->word) ? bc_fail_at(err, BC_ERR_INPUT, h->path, line, "%s", cause.message) : BC_OK;
+    }
+    free(c);
+    return status;
+}
+
+static bc_status take_column(log_header *h, const char *text, int line, bc_error *err)
+{
+    log_column *column = &h->columns[h->column_count];
+    bc_status status = BC_OK;
+    heading head;
+
+    memset(column, 0, sizeof *column);
+    take_apart(text, &head);
+    bc_text_show(column->name, sizeof column->name, head.word);
+    if (is_time(head.word))
+        column->kind = LOG_TIME;
+    else if (bc_text_same(head.word, "flow"))
+        status = take_flow(h, column, &head, line, err);
+    else if (head.word[0] != '\0')
+        status = take_component(h, column, &head, line, err);
+    if (column->name[0] == '\0')
+        (void)snprintf(column->name, sizeof column->name, "number %zu", h->column_count + 1);
+    h->column_count++;
+    return status;
+}
+
+size_t log_header_count(const log_header *h, log_column_kind kind)
+{
+    size_t count = 0;
+
+    for (size_t i = 0; i < h->column_count; i++)
+        count += h->columns[i].kind == kind;
+    return count;
+}
+
+/* Moles in a share of one: 1, 1/Z (a volume of real gas) or 1/M, up to a common factor. */
+static bc_status turn_to_moles(const log_header *h, log_column *column, int line, bc_error *err)
+{
+    double z = 0.0;
+    double mass = 0.0;
+
+    for (size_t i = 0; i < bc_species_count(); i++)
+        if (column->parts[i] > 0.0) {
+            z += column->parts[i] * bc_species_z(i, VOLUMES_AT_C);
+            mass += column->parts[i] * bc_species_molar_mass_kg_per_mol(i) * 1e3;
+        }
+    const double share = h->basis == BC_BASIS_VOLUME ? z : mass;
+
+    if (!(share > 0.0))
+        return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "'%s' is no gas at %g C, so its share cannot be one of volume; log mole or mass shares", column->name,
+                          VOLUMES_AT_C);
+    for (size_t i = 0; i < bc_species_count(); i++)
+        column->parts[i] /= share;
+    return BC_OK;
+}
+
+static bc_status take_bases(log_header *h, int line, bc_error *err)
+{
+    bc_status status = BC_OK;
+
+    if (!h->has_basis || h->basis == BC_BASIS_MOLE)
+        return BC_OK;
+    for (size_t i = 0; i < h->column_count && status == BC_OK; i++)
+        if (h->columns[i].kind == LOG_COMPONENT)
+            status = turn_to_moles(h, &h->columns[i], line, err);
+    return status;
+}
+
+void log_header_tell_ignored(log_header *h)
+{
+    char text[BC_REMARK_BYTES] = "Columns of the log that are ignored: ";
+    size_t told = 0;
+
+    for (size_t i = 0; i < h->column_count; i++) {
+        const size_t used = strlen(text);
+
+        if (h->columns[i].kind != LOG_IGNORED)
+            continue;
+        if (used + strlen(h->columns[i].name) + 8 < sizeof text)
+            (void)snprintf(text + used, sizeof text - used, "%s%s", told > 0 ? ", " : "", h->columns[i].name);
+        else if (strcmp(text + used - 3, "...") != 0)
+            (void)snprintf(text + used, sizeof text - used, " ...");
+        told++;
+    }
+    if (told > 0)
+        add_remark(h, text);
+}
+
+void log_header_start(log_header *h, const char *path)
+{
+    memset(h, 0, sizeof *h);
+    h->path = path;
+    h->unit = 1e-2;
+}
+
+bc_status log_header_take(log_header *h, char (*cells)[LOG_CELL_MAX], size_t count, int line, bc_error *err)
+{
+    bc_status status = BC_OK;
+
+    if (count > LOG_COLUMNS_MAX)
+        return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "more than %d cells in a row; is it a log?", LOG_COLUMNS_MAX);
+    for (size_t i = 0; i < count && status == BC_OK; i++)
+        status = take_column(h, cells[i], line, err);
+    if (status != BC_OK)
+        return status;
+    if (log_header_count(h, LOG_COMPONENT) == 0)
+        return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "no column is a component; the first row of a log names them, as in time,methane,ethane");
+    if (log_header_count(h, LOG_TIME) > 2)
+        return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "more than two columns of time; keep one, or a date and a time");
+    return take_bases(h, line, err);
+}
