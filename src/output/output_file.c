@@ -46,23 +46,6 @@ static int write_all(int fd, const char *bytes, size_t count)
     return 0;
 }
 
-/* Writes and closes; a network file system may tell only at the closing that it is full. */
-static int write_and_close(int fd, const char *bytes, size_t count)
-{
-    const int reason = write_all(fd, bytes, count);
-
-    if (close(fd) != 0 && reason == 0)
-        return errno;
-    return reason;
-}
-
-static int write_directly(const char *path, const char *bytes, size_t count)
-{
-    const int fd = open(path, O_WRONLY | O_NOCTTY | O_CLOEXEC);
-
-    return fd < 0 ? errno : write_and_close(fd, bytes, count);
-}
-
 /* The rights that a new file gets. POSIX can tell the mask only by setting it. */
 static mode_t rights_of_new_file(void)
 {
@@ -85,28 +68,28 @@ static char *temporary_name(const char *path)
     return temporary;
 }
 
-/* 0, or the reason why the file could not be replaced. */
-static int replace(const char *path, mode_t rights, const char *bytes, size_t count)
+/* Opens a file beside the one that is to be replaced; 0, or the reason why not. */
+static int open_beside(output_stream *s, const char *path, mode_t rights)
 {
-    char *temporary = temporary_name(path);
-    const int fd = temporary == NULL ? -1 : mkstemp(temporary);
-    int reason = temporary == NULL ? ENOMEM : errno;
+    s->temporary = temporary_name(path);
+    if (s->temporary == NULL)
+        return ENOMEM;
+    s->fd = mkstemp(s->temporary);
+    if (s->fd < 0) {
+        const int reason = errno;
 
-    if (fd >= 0) {
-        reason = fchmod(fd, rights) == 0 ? 0 : errno;
-        const int written = write_and_close(fd, bytes, count);
-        reason = reason == 0 ? written : reason;
-        if (reason == 0 && rename(temporary, path) != 0)
-            reason = errno;
-        if (reason != 0)
-            unlink(temporary);
+        free(s->temporary);
+        s->temporary = NULL;
+        return reason;
     }
-    free(temporary);
-    return reason;
+    s->target = strdup(path);
+    if (s->target == NULL)
+        return ENOMEM;
+    return fchmod(s->fd, rights) == 0 ? 0 : errno;
 }
 
 /* Replaces the file that is there: that behind a link, not the link, and none that is protected. */
-static int replace_existing(const char *path, mode_t mode, const char *bytes, size_t count)
+static int open_existing(output_stream *s, const char *path, mode_t mode)
 {
     if (access(path, W_OK) != 0)
         return errno;
@@ -114,9 +97,78 @@ static int replace_existing(const char *path, mode_t mode, const char *bytes, si
     char *real = realpath(path, NULL);
     if (real == NULL)
         return errno;
-    const int reason = replace(real, mode & RIGHTS, bytes, count);
+    const int reason = open_beside(s, real, mode & RIGHTS);
     free(real);
     return reason;
+}
+
+static int open_directly(output_stream *s, const char *path)
+{
+    s->fd = open(path, O_WRONLY | O_NOCTTY | O_CLOEXEC);
+    return s->fd < 0 ? errno : 0;
+}
+
+static int open_path(output_stream *s, const char *path)
+{
+    struct stat there;
+
+    if (stat(path, &there) == 0)
+        return S_ISREG(there.st_mode) ? open_existing(s, path, there.st_mode) : open_directly(s, path);
+    return errno == ENOENT ? open_beside(s, path, rights_of_new_file()) : errno;
+}
+
+bc_status output_open(output_stream *s, const char *path, bc_error *err)
+{
+    *s = (output_stream){.fd = STDOUT_FILENO, .path = path ? path : "standard output", .is_standard = path == NULL};
+    if (path == NULL)
+        return BC_OK;
+    s->fd = -1;
+    const int reason = open_path(s, path);
+
+    if (reason == 0)
+        return BC_OK;
+    output_discard(s);
+    return fail_with(reason, path, err);
+}
+
+bc_status output_put(output_stream *s, const char *bytes, size_t count, bc_error *err)
+{
+    const int reason = write_all(s->fd, bytes, count);
+
+    return reason == 0 ? BC_OK : fail_with(reason, s->path, err);
+}
+
+bc_status output_finish(output_stream *s, bc_error *err)
+{
+    int reason = 0;
+
+    if (s->is_standard)
+        return BC_OK;
+    /* a network file system may tell only at the closing that it is full */
+    if (close(s->fd) != 0)
+        reason = errno;
+    s->fd = -1;
+    if (reason == 0 && s->temporary != NULL && rename(s->temporary, s->target) != 0)
+        reason = errno;
+    if (reason == 0) {
+        free(s->temporary);
+        s->temporary = NULL;
+    }
+    output_discard(s);
+    return reason == 0 ? BC_OK : fail_with(reason, s->path, err);
+}
+
+void output_discard(output_stream *s)
+{
+    if (s->fd >= 0 && !s->is_standard)
+        (void)close(s->fd);
+    s->fd = -1;
+    if (s->temporary != NULL)
+        (void)unlink(s->temporary);
+    free(s->temporary);
+    free(s->target);
+    s->temporary = NULL;
+    s->target = NULL;
 }
 
 static bc_status write_standard_output(const char *bytes, size_t count, bc_error *err)
@@ -129,15 +181,17 @@ static bc_status write_standard_output(const char *bytes, size_t count, bc_error
 
 bc_status output_write(const char *path, const char *bytes, size_t count, bc_error *err)
 {
-    struct stat there;
-    int reason = 0;
+    output_stream s;
 
     if (path == NULL)
         return write_standard_output(bytes, count, err);
-    if (stat(path, &there) == 0)
-        reason = S_ISREG(there.st_mode) ? replace_existing(path, there.st_mode, bytes, count)
-                                        : write_directly(path, bytes, count);
-    else
-        reason = errno == ENOENT ? replace(path, rights_of_new_file(), bytes, count) : errno;
-    return reason == 0 ? BC_OK : fail_with(reason, path, err);
+    bc_status status = output_open(&s, path, err);
+
+    if (status != BC_OK)
+        return status;
+    status = output_put(&s, bytes, count, err);
+    if (status == BC_OK)
+        return output_finish(&s, err);
+    output_discard(&s);
+    return status;
 }

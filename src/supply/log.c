@@ -3,15 +3,11 @@
 #include "supply/log_internal.h"
 
 #include "base/error_internal.h"
-#include "bluecone/terms.h"
-#include "supply/limits_internal.h"
+#include "supply/row.h"
 
-#include <assert.h>
 #include <stdlib.h>
 
 #define FIRST_ROOM 1024
-
-static_assert(BC_LIMIT_MAX <= 64, "a set of limits is one word");
 
 bc_status bc_log_open(const bc_contract *contract, bc_log **log, bc_error *err)
 {
@@ -59,59 +55,6 @@ static bc_status make_room(bc_log *log, bc_error *err)
     return BC_OK;
 }
 
-/* Limits share reference states: the gas is evaluated once at each. */
-static bc_status make_subjects(const bc_contract *c, const bc_gas *gas, bc_subject subjects[], bc_error *err)
-{
-    bc_status status = BC_OK;
-
-    for (size_t i = 0; i < c->reference_count && status == BC_OK; i++)
-        status = bc_subject_make(&c->references[i], gas, NULL, &subjects[i], err);
-    return status;
-}
-
-static bc_status judge_row(const bc_log *log, const bc_gas *gas, log_row *row, double values[], bc_error *err)
-{
-    const bc_contract *c = log->contract;
-    bc_subject subjects[BC_LIMIT_REFERENCE_MAX];
-    bc_status status = make_subjects(c, gas, subjects, err);
-
-    for (size_t i = 0; i < log->limits && status == BC_OK; i++) {
-        const bc_limit *limit = &c->limits[i];
-        double own = 0.0;
-
-        values[i] = 0.0;
-        status = limit_figure(c, limit, &subjects[limit->reference], &own, err);
-        if (status == BC_ERR_RANGE) {
-            status = BC_OK;
-            continue;
-        }
-        values[i] = bc_unit_from_si(&limit->shown, bc_unit_to_si(&limit->own, own));
-        row->known |= (uint64_t)1 << i;
-        if (bc_limit_margin(limit, values[i]) < -BC_LIMIT_ROUNDING * bc_limit_scale(limit))
-            row->broken |= (uint64_t)1 << i;
-    }
-    return status;
-}
-
-/* Gross heat a second. */
-static bc_status take_flow(const bc_log *log, const bc_log_row *from, log_row *row, bc_error *err)
-{
-    bc_gas metered;
-    double amount = 0.0;
-
-    if (!from->flow.given)
-        return BC_OK;
-    bc_status status = bc_gas_for_state(&from->gas, &log->reference.state, &metered, err);
-
-    if (status == BC_OK)
-        status = bc_amount_per_mole(&from->flow, &log->reference, &metered, &amount, err);
-    if (status != BC_OK)
-        return status;
-    row->has_flow = true;
-    row->power_w = from->flow.si / amount * bc_value_of(&log->reference, &metered).gross_j_per_mol;
-    return BC_OK;
-}
-
 bc_status bc_log_add(bc_log *log, const bc_log_row *from, bc_error *err)
 {
     log_row row = {.time_s = from->time_s};
@@ -120,10 +63,11 @@ bc_status bc_log_add(bc_log *log, const bc_log_row *from, bc_error *err)
         return bc_fail(err, BC_ERR_INPUT, "its time is not after that of the row before");
     bc_status status = make_room(log, err);
 
+    row.has_flow = from->flow.given;
+    if (status == BC_OK && row.has_flow)
+        status = row_power_w(&log->reference, &from->gas, &from->flow, &row.power_w, err);
     if (status == BC_OK)
-        status = take_flow(log, from, &row, err);
-    if (status == BC_OK)
-        status = judge_row(log, &from->gas, &row, log->values + log->count * log->limits, err);
+        status = row_judge(log->contract, &from->gas, log->values + log->count * log->limits, &row.known, &row.broken, err);
     if (status == BC_OK)
         log->rows[log->count++] = row;
     return status;
