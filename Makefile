@@ -100,7 +100,7 @@ SCRIPTS     := $(sort .ci/run .ci/deps $(wildcard tests/*.sh tests/*/*.sh exampl
 LIB_OBJ     := $(LIB_SRC:%.c=$(OUT)/%.o)
 PROGRAM_OBJ := $(PROGRAM_SRC:%.c=$(OUT)/%.o)
 CHART_OBJ   := $(CHART_SRC:%.c=$(OUT)/%.o)
-CHART_TOO   := $(addprefix $(OUT)/src/output/,number_text.o plain_text.o)
+CHART_TOO   := $(addprefix $(OUT)/src/,base/digits.o output/number_text.o output/plain_text.o)
 BOOK_OBJ    := $(BOOK_SRC:%.c=$(OUT)/%.o)
 BOOK_TOO    := $(CHART_TOO) $(addprefix $(OUT)/src/output/,report_judged.o result_text.o section.o text_letter.o)
 PROGRAM_PARTS := $(filter-out %/cli/main.o,$(PROGRAM_OBJ))

@@ -30,6 +30,12 @@ BC_API BC_MUST_USE bc_status bc_quantity_evaluate(size_t index, const bc_subject
 /* The value alone, for what asks many times: sweeps and searches. `value` and errors as above. */
 BC_API BC_MUST_USE bc_status bc_quantity_value(size_t index, const bc_subject *subject, double *value, bc_error *err);
 
+/* Many values of one gas, faster than one after the other: what they share is worked out once.
+ *
+ *   wanted   bc_quantity_count() marks, by index
+ *   value    out: bc_quantity_count() values; NaN where none is wanted, or the gas has none */
+BC_API void bc_quantity_values(const bool wanted[], const bc_subject *subject, double value[]);
+
 #ifdef __cplusplus
 }
 #endif

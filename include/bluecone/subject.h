@@ -21,6 +21,7 @@ typedef struct {
     const bc_spread *spread; /* NULL: no uncertainty of the composition is known */
     double spread_scale;     /* of the spread, when the state adds water to the gas */
     bc_gas gas;              /* as metered */
+    double atoms[BC_ELEMENTS]; /* per molecule of it, by bc_element */
     bc_value value;
 } bc_subject;
 

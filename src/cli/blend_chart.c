@@ -82,18 +82,15 @@ bc_status sweep_chart(report *r, const sweep_table *t, const blend_case *c, bc_e
     for (size_t i = 0; i <= POINTS; i++) {
         const double place = (double)i / POINTS;
         const bc_gas gas = bc_line_gas(&t->line, place);
+        double row[SWEEP_COLUMNS_MAX];
         bc_subject here;
         const bc_status status = bc_subject_make(&c->parts.reference, &gas, NULL, &here, err);
 
         if (status != BC_OK)
             return status;
-        for (size_t k = 0; k < t->count; k++) {
-            double y = 0.0;
-
-            if (!sweep_figure(c, &t->column[k], &here, &y))
-                y = (double)NAN;
-            add_point(r, &panels[k], sweep_share_at(t, place), y);
-        }
+        sweep_row(t, c, &here, row);
+        for (size_t k = 0; k < t->count; k++)
+            add_point(r, &panels[k], sweep_share_at(t, place), row[k]);
     }
     return BC_OK;
 }

@@ -129,40 +129,50 @@ double sweep_place(const sweep_table *t, size_t point)
     return fmin((double)point * t->step / (t->high - t->low), 1.0);
 }
 
-bool sweep_figure(const blend_case *c, const sweep_column *column, const bc_subject *gas, double *value)
+void sweep_row(const sweep_table *t, const blend_case *c, const bc_subject *gas, double row[])
 {
-    double own = 0.0;
+    bc_quantity_values(t->wanted, gas, t->figure);
+    for (size_t k = 0; k < t->count; k++) {
+        const sweep_column *column = &t->column[k];
 
-    if (column->is_limit)
-        return bc_limit_value(c->within, column->index, &gas->gas, value, NULL) == BC_OK;
-    if (bc_quantity_value(column->index, gas, &own, NULL) != BC_OK)
-        return false;
-    *value = bc_unit_from_si(&column->shown, bc_unit_to_si(&column->own, own));
-    return true;
+        if (!column->is_limit)
+            row[k] = bc_unit_from_si(&column->shown, bc_unit_to_si(&column->own, t->figure[column->index]));
+        else if (bc_limit_value(c->within, column->index, &gas->gas, &row[k], NULL) != BC_OK)
+            row[k] = (double)NAN;
+    }
 }
 
-/* Subjects are made once a point; values go into t->value, not a number where a gas has no such figure. */
+static bc_status open_rows(sweep_table *t, size_t points, bc_error *err)
+{
+    t->wanted = calloc(bc_quantity_count(), sizeof *t->wanted);
+    t->figure = calloc(bc_quantity_count(), sizeof *t->figure);
+    t->value = malloc(points * t->count * sizeof *t->value);
+    if (!t->wanted || !t->figure || !t->value)
+        return bc_fail(err, BC_ERR_MEMORY, "not enough memory for %zu points", points);
+    for (size_t k = 0; k < t->count; k++)
+        if (!t->column[k].is_limit)
+            t->wanted[t->column[k].index] = true;
+    return BC_OK;
+}
+
+/* Subjects are made once a point. */
 static bc_status evaluate(sweep_table *t, const blend_case *c, bc_error *err)
 {
     const size_t points = sweep_points(t);
 
     if (t->count == 0)
         return bc_fail(err, BC_ERR_USAGE, "--show needs a quantity, as wobbe-gross,hhv");
-    t->value = malloc(points * t->count * sizeof *t->value);
-    if (!t->value)
-        return bc_fail(err, BC_ERR_MEMORY, "not enough memory for %zu points", points);
-    for (size_t i = 0; i < points; i++) {
+    bc_status status = open_rows(t, points, err);
+
+    for (size_t i = 0; status == BC_OK && i < points; i++) {
         const bc_gas gas = bc_line_gas(&t->line, sweep_place(t, i));
         bc_subject here;
-        const bc_status status = bc_subject_make(&c->parts.reference, &gas, NULL, &here, err);
 
-        if (status != BC_OK)
-            return status;
-        for (size_t k = 0; k < t->count; k++)
-            if (!sweep_figure(c, &t->column[k], &here, &t->value[i * t->count + k]))
-                t->value[i * t->count + k] = (double)NAN;
+        status = bc_subject_make(&c->parts.reference, &gas, NULL, &here, err);
+        if (status == BC_OK)
+            sweep_row(t, c, &here, &t->value[i * t->count]);
     }
-    return BC_OK;
+    return status;
 }
 
 static void add_table(report *r, const sweep_table *t, const blend_case *c)
@@ -229,6 +239,8 @@ int blend_sweep(blend_case *c, report *r)
     make_line(c, &t.line);
     const bc_status status = fill(r, &t, c, &allowed, &err);
 
+    free(t.wanted);
+    free(t.figure);
     free(t.value);
     if (status == BC_OK)
         return blend_answer(r, c, NULL, allowed ? 0 : 1);

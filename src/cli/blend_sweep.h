@@ -22,6 +22,8 @@ typedef struct {
     bc_blend_line line;
     size_t count;
     sweep_column column[SWEEP_COLUMNS_MAX];
+    bool *wanted;           /* by quantity: whether a column shows it */
+    double *figure;         /* by quantity, of the gas at hand */
     double *value;          /* point by point; NaN where the gas has no such figure */
 } sweep_table;
 
@@ -30,8 +32,8 @@ size_t sweep_points(const sweep_table *t);
 double sweep_place(const sweep_table *t, size_t point);
 double sweep_share_at(const sweep_table *t, double place);
 
-/* The figure of a column for a gas; false where it has none. */
-bool sweep_figure(const blend_case *c, const sweep_column *column, const bc_subject *gas, double *value);
+/* A row of the table for a gas: a value a column, NaN where it has no such figure. */
+void sweep_row(const sweep_table *t, const blend_case *c, const bc_subject *gas, double row[]);
 
 /* A panel a column, with the bounds of its limit and the shares at which they are crossed. */
 bc_status sweep_chart(report *r, const sweep_table *t, const blend_case *c, bc_error *err);

@@ -31,7 +31,7 @@ static bc_status diluent_of(const bc_gas *gas, double *fraction, bc_error *err)
     if (status != BC_OK)
         return status;
     for (size_t i = 0; i < SPECIES_COUNT; i++)
-        if (!combustible_is(i))
+        if (gas->x[i] != 0.0 && !combustible_is(i))
             inert_kg += gas->x[i] * bc_species_molar_mass_kg_per_mol(i);
     *fraction = inert_kg / bc_gas_molar_mass_kg_per_mol(gas) / (1.0 + demand.oxidant_kg);
     return BC_OK;

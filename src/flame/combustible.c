@@ -2,14 +2,14 @@
 /* combustible.c - the combustible part of a gas. */
 #include "flame/combustible_internal.h"
 
-#include "gas/species_index.h"
+#include "gas/species_atoms.h"
 
 /* Need of oxygen above zero, a = C + H/4 + S - O/2, in quarters of an atom so that it is exact. */
 bool combustible_is(size_t species)
 {
-    return 4 * bc_species_atoms(species, BC_C) + bc_species_atoms(species, BC_H) +
-               4 * bc_species_atoms(species, BC_S) >
-           2 * bc_species_atoms(species, BC_O);
+    const double *atoms = SPECIES_ATOMS[species];
+
+    return 4.0 * atoms[BC_C] + atoms[BC_H] + 4.0 * atoms[BC_S] > 2.0 * atoms[BC_O];
 }
 
 combustible_part combustible_part_of(const bc_gas *gas, bool (*is_known)(size_t species))

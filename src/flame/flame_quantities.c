@@ -7,9 +7,11 @@
 #include "bluecone/dewpoint.h"
 #include "bluecone/flame.h"
 #include "bluecone/flammability.h"
-#include "bluecone/flue.h"
 #include "bluecone/oxidant.h"
+#include "flame/flue_internal.h"
 #include "gas/species_index.h"
+
+#include <string.h>
 
 #define T_IN_K 298.15
 #define P_PA 101325.0
@@ -28,89 +30,111 @@ static const struct {
 #include "flame/quantities_flame.def"
 };
 
-static bc_status demand_of(const bc_subject *s, bc_demand *demand, bc_error *err)
+/* The gas and the dry air that just burns it; needs oxygen, as a fuel does. */
+static bc_status pair_of(const bc_subject *s, oxidant_pair *pair, bc_error *err)
 {
-    const bc_gas air = bc_oxidant_air();
-    const bc_status status = bc_fuel_check(&s->gas, err);
+    memcpy(pair->fuel, s->atoms, sizeof pair->fuel);
+    oxidant_air_atoms(pair->oxidant);
+    return oxidant_pair_balance(pair, err);
+}
 
-    return status == BC_OK ? bc_oxidant_demand(&s->gas, &air, demand, err) : status;
+/* The same for figures that say what is wrong with a gas that is no fuel. */
+static bc_status fuel_pair_of(const bc_subject *s, oxidant_pair *pair, bc_error *err)
+{
+    const bc_status status = pair_of(s, pair, NULL);
+
+    return status == BC_ERR_RANGE ? bc_fuel_check(&s->gas, err) : status;
 }
 
 static bc_status oxygen_demand(const bc_subject *s, double *value, bc_error *err)
 {
-    bc_demand demand;
-    const bc_status status = demand_of(s, &demand, err);
+    oxidant_pair pair;
+    const bc_status status = fuel_pair_of(s, &pair, err);
 
     if (status == BC_OK)
-        *value = demand.oxygen_mol;
+        *value = pair.need;
     return status;
 }
 
 static bc_status air_demand(const bc_subject *s, double *value, bc_error *err)
 {
-    bc_demand demand;
-    const bc_status status = demand_of(s, &demand, err);
+    oxidant_pair pair;
+    const bc_status status = fuel_pair_of(s, &pair, err);
 
     if (status == BC_OK)
-        *value = demand.oxidant_mol;
+        *value = pair.ratio;
     return status;
 }
 
 static bc_status air_demand_mass(const bc_subject *s, double *value, bc_error *err)
 {
-    bc_demand demand;
-    const bc_status status = demand_of(s, &demand, err);
+    oxidant_pair pair;
+    const bc_status status = fuel_pair_of(s, &pair, err);
 
-    if (status == BC_OK)
-        *value = demand.oxidant_kg;
-    return status;
-}
-
-static bc_status flue_of(const bc_subject *s, bc_flue *flue, bc_error *err)
-{
+    if (status != BC_OK)
+        return status;
     const bc_gas air = bc_oxidant_air();
 
-    return bc_flue_at(&s->gas, &air, 1.0, flue, err);
+    *value = pair.ratio * bc_gas_molar_mass_kg_per_mol(&air) / bc_gas_molar_mass_kg_per_mol(&s->gas);
+    return BC_OK;
+}
+
+/* Flue gas with the air that just suffices, mol per mol of gas. */
+typedef struct {
+    double wet, dry;
+    bc_gas amounts;
+} flue_figures;
+
+static bc_status flue_of(const bc_subject *s, flue_figures *flue, bc_error *err)
+{
+    oxidant_pair pair;
+    const bc_status status = pair_of(s, &pair, err);
+
+    if (status != BC_OK)
+        return status;
+    flue->dry = flue_amounts(&pair, 1.0, &flue->amounts);
+    flue->wet = flue->dry + flue->amounts.x[SPECIES_water];
+    return BC_OK;
 }
 
 static bc_status flue_wet(const bc_subject *s, double *value, bc_error *err)
 {
-    bc_flue flue;
+    flue_figures flue;
     const bc_status status = flue_of(s, &flue, err);
 
     if (status == BC_OK)
-        *value = flue.wet_mol;
+        *value = flue.wet;
     return status;
 }
 
 static bc_status flue_dry(const bc_subject *s, double *value, bc_error *err)
 {
-    bc_flue flue;
+    flue_figures flue;
     const bc_status status = flue_of(s, &flue, err);
 
     if (status == BC_OK)
-        *value = flue.dry_mol;
+        *value = flue.dry;
     return status;
 }
 
 static bc_status co2_max(const bc_subject *s, double *value, bc_error *err)
 {
-    double x = 0.0;
-    const bc_status status = bc_flue_co2_max(&s->gas, &x, err);
+    flue_figures flue;
+    const bc_status status = flue_of(s, &flue, err);
 
     if (status == BC_OK)
-        *value = 100.0 * x;
+        *value = flue.dry > 0.0 ? 100.0 * (flue.amounts.x[SPECIES_carbon_dioxide] / flue.dry) : 0.0;
     return status;
 }
 
 static bc_status flue_dew_point(const bc_subject *s, double *value, bc_error *err)
 {
-    bc_flue flue;
+    flue_figures flue;
     bc_dew dew;
     bc_status status = flue_of(s, &flue, err);
 
     if (status == BC_OK)
-        status = bc_dew_point(flue.wet.x[SPECIES_water], P_PA, &dew, err);
+        status = bc_dew_point(flue.amounts.x[SPECIES_water] / flue.wet, P_PA, &dew, err);
     if (status != BC_OK)
         return status;
     if (!dew.exists)
@@ -121,12 +145,13 @@ static bc_status flue_dew_point(const bc_subject *s, double *value, bc_error *er
 
 static bc_status acid_dew_point(const bc_subject *s, double *value, bc_error *err)
 {
-    bc_flue flue;
+    flue_figures flue;
     bc_acid_dew dew;
     bc_status status = flue_of(s, &flue, err);
 
     if (status == BC_OK)
-        status = bc_acid_dew_point_of(&flue.wet, BC_SO3_CONVERSION, P_PA, &dew, err);
+        status = bc_acid_dew_point(flue.amounts.x[SPECIES_water] / flue.wet,
+                                   BC_SO3_CONVERSION * (flue.amounts.x[SPECIES_sulfur_dioxide] / flue.wet), P_PA, &dew, err);
     if (status != BC_OK)
         return status;
     if (!dew.exists)
@@ -140,13 +165,13 @@ typedef bc_status flame_function(const bc_reactants *, bc_mixture *, bc_error *)
 static bc_status flame_with(const bc_subject *s, flame_function *flame_at, double *value, bc_error *err)
 {
     bc_reactants r = {.fuel = s->gas, .oxidant = bc_oxidant_air(), .fuel_t_k = T_IN_K, .oxidant_t_k = T_IN_K, .p_pa = P_PA};
-    bc_demand demand;
+    oxidant_pair pair;
     bc_mixture flame;
-    bc_status status = demand_of(s, &demand, err);
+    bc_status status = fuel_pair_of(s, &pair, err);
 
     if (status != BC_OK)
         return status;
-    r.oxidant_per_fuel = demand.oxidant_mol;
+    r.oxidant_per_fuel = pair.ratio;
     status = flame_at(&r, &flame, err);
     if (status == BC_OK)
         *value = flame.t_k - 273.15;
@@ -166,7 +191,7 @@ static bc_status flame_complete(const bc_subject *s, double *value, bc_error *er
 static bc_status co2_factor(const bc_subject *s, double heat_j_per_mol, double *value, bc_error *err)
 {
     bc_flue_factor factor;
-    const bc_status status = bc_flue_factor_of(&s->gas, heat_j_per_mol, &factor, err);
+    const bc_status status = flue_factor_of(s->atoms, heat_j_per_mol, &factor, err);
 
     if (status == BC_OK)
         *value = factor.carbon_dioxide * J_PER_GJ;
@@ -248,5 +273,5 @@ static bc_status evaluate(size_t index, const bc_subject *subject, bc_figure *fi
 
 quantity_source flame_quantities(void)
 {
-    return (quantity_source){BC_COUNT(ROWS), shown, evaluate, NULL};
+    return (quantity_source){BC_COUNT(ROWS), shown, evaluate, NULL, NULL};
 }

@@ -80,7 +80,8 @@ static double nitrogen_whole(const bc_gas *gas, bool cautious)
     double whole = 0.0;
 
     for (size_t i = 0; i < SPECIES_COUNT; i++)
-        whole += gas->x[i] * (combustible_is(i) ? 1.0 : equivalence(i, cautious));
+        if (gas->x[i] != 0.0)
+            whole += gas->x[i] * (combustible_is(i) ? 1.0 : equivalence(i, cautious));
     return whole;
 }
 

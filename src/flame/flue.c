@@ -4,7 +4,7 @@
 
 #include "base/error_internal.h"
 #include "bluecone/oxidant.h"
-#include "flame/oxidant_internal.h"
+#include "flame/flue_internal.h"
 #include "gas/species_index.h"
 
 #include <math.h>
@@ -35,6 +35,16 @@ static double burnt_amounts(const double atoms[BC_ELEMENTS], double oxygen_mol, 
            atoms[BC_AR];
 }
 
+double flue_amounts(const oxidant_pair *pair, double lambda, bc_gas *amounts)
+{
+    double atoms[BC_ELEMENTS];
+
+    for (int k = 0; k < BC_ELEMENTS; k++)
+        atoms[k] = pair->fuel[k] + lambda * pair->ratio * pair->oxidant[k];
+    /* (lambda - 1) a, not a difference of oxygen atoms: exactly none is left at lambda 1 */
+    return burnt_amounts(atoms, (lambda - 1.0) * pair->need, amounts);
+}
+
 static void divide_amounts(const bc_gas *amounts, bc_flue *flue)
 {
     for (size_t i = 0; i < BC_SPECIES_CAPACITY; i++) {
@@ -48,7 +58,6 @@ bc_status bc_flue_at(const bc_gas *fuel, const bc_gas *oxidant, double lambda, b
 {
     oxidant_pair pair;
     bc_gas amounts;
-    double atoms[BC_ELEMENTS];
 
     if (!(lambda >= 1.0) || !isfinite(lambda))
         return bc_fail(err, BC_ERR_RANGE,
@@ -60,10 +69,7 @@ bc_status bc_flue_at(const bc_gas *fuel, const bc_gas *oxidant, double lambda, b
         return status;
     flue->lambda = lambda;
     flue->oxidant_mol = lambda * pair.ratio;
-    for (int k = 0; k < BC_ELEMENTS; k++)
-        atoms[k] = pair.fuel[k] + flue->oxidant_mol * pair.oxidant[k];
-    /* (lambda - 1) a, not a difference of oxygen atoms: exactly none is left at lambda 1 */
-    flue->dry_mol = burnt_amounts(atoms, (lambda - 1.0) * pair.need, &amounts);
+    flue->dry_mol = flue_amounts(&pair, lambda, &amounts);
     flue->wet_mol = flue->dry_mol + amounts.x[SPECIES_water];
     divide_amounts(&amounts, flue);
     flue->fuel_kg_per_mol = bc_gas_molar_mass_kg_per_mol(fuel);
@@ -110,19 +116,24 @@ bc_status bc_flue_volume_at(const bc_flue *flue, double t_k, double p_pa, double
     return BC_OK;
 }
 
-bc_status bc_flue_factor_of(const bc_gas *fuel, double heat_j_per_mol, bc_flue_factor *factor, bc_error *err)
+bc_status flue_factor_of(const double atoms[BC_ELEMENTS], double heat_j_per_mol, bc_flue_factor *factor, bc_error *err)
 {
-    double atoms[BC_ELEMENTS];
-
     if (!is_positive(heat_j_per_mol))
         return bc_fail(err, BC_ERR_RANGE,
                        "the gas has a heat of %.6g J/mol; an emission factor needs one above 0",
                        heat_j_per_mol);
-    oxidant_atoms(fuel, atoms);
     factor->carbon_dioxide = mass(SPECIES_carbon_dioxide) * atoms[BC_C] / heat_j_per_mol;
     factor->sulfur_dioxide = mass(SPECIES_sulfur_dioxide) * atoms[BC_S] / heat_j_per_mol;
     factor->water = mass(SPECIES_water) * atoms[BC_H] / 2.0 / heat_j_per_mol;
     return BC_OK;
+}
+
+bc_status bc_flue_factor_of(const bc_gas *fuel, double heat_j_per_mol, bc_flue_factor *factor, bc_error *err)
+{
+    double atoms[BC_ELEMENTS];
+
+    oxidant_atoms(fuel, atoms);
+    return flue_factor_of(atoms, heat_j_per_mol, factor, err);
 }
 
 bc_flue_flow bc_flue_flow_at(const bc_flue *flue, double fuel_mol_per_s)

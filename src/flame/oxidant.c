@@ -5,23 +5,38 @@
 #include "base/error_internal.h"
 #include "bluecone/formation.h"
 #include "flame/oxidant_internal.h"
-#include "gas/species_index.h"
+#include "gas/species_atoms.h"
 
 #include <math.h>
 
 /* Differences of atom counts of a few: what is left of a balance that closes is below it. */
 #define NOTHING 1e-12
 
-void oxidant_atoms(const bc_gas *gas, double atoms[BC_ELEMENTS])
+static void clear(double atoms[BC_ELEMENTS])
 {
     for (int k = 0; k < BC_ELEMENTS; k++)
         atoms[k] = 0.0;
-    for (size_t i = 0; i < SPECIES_COUNT; i++) {
-        if (gas->x[i] == 0.0)
-            continue;
-        for (int k = 0; k < BC_ELEMENTS; k++)
-            atoms[k] += gas->x[i] * bc_species_atoms(i, (bc_element)k);
-    }
+}
+
+static void add(double atoms[BC_ELEMENTS], size_t species, double x)
+{
+    for (int k = 0; k < BC_ELEMENTS; k++)
+        atoms[k] += x * SPECIES_ATOMS[species][k];
+}
+
+void oxidant_atoms(const bc_gas *gas, double atoms[BC_ELEMENTS])
+{
+    clear(atoms);
+    for (size_t i = 0; i < SPECIES_COUNT; i++)
+        if (gas->x[i] != 0.0)
+            add(atoms, i, gas->x[i]);
+}
+
+void oxidant_air_atoms(double atoms[BC_ELEMENTS])
+{
+    clear(atoms);
+#define COMBUSTION_AIR(symbol, fraction, source) add(atoms, SPECIES_##symbol, fraction);
+#include "data/combustion_air.def"
 }
 
 double oxidant_oxygen_need(const double atoms[BC_ELEMENTS])
@@ -126,10 +141,8 @@ bc_status bc_oxidant_demand(const bc_gas *fuel, const bc_gas *oxidant, bc_demand
     return BC_OK;
 }
 
-bc_status oxidant_pair_of(const bc_gas *fuel, const bc_gas *oxidant, oxidant_pair *pair, bc_error *err)
+bc_status oxidant_pair_balance(oxidant_pair *pair, bc_error *err)
 {
-    oxidant_atoms(fuel, pair->fuel);
-    oxidant_atoms(oxidant, pair->oxidant);
     pair->need = oxidant_oxygen_need(pair->fuel);
     pair->give = -oxidant_oxygen_need(pair->oxidant);
     const bc_status status = check_gives(pair->give, err);
@@ -143,6 +156,13 @@ bc_status oxidant_pair_of(const bc_gas *fuel, const bc_gas *oxidant, oxidant_pai
                        pair->need);
     pair->ratio = pair->need / pair->give;
     return BC_OK;
+}
+
+bc_status oxidant_pair_of(const bc_gas *fuel, const bc_gas *oxidant, oxidant_pair *pair, bc_error *err)
+{
+    oxidant_atoms(fuel, pair->fuel);
+    oxidant_atoms(oxidant, pair->oxidant);
+    return oxidant_pair_balance(pair, err);
 }
 
 bc_status bc_lambda_from_excess(double excess, double *lambda, bc_error *err)

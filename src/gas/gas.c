@@ -4,8 +4,9 @@
 
 #include "base/error_internal.h"
 #include "bluecone/steam.h"
-#include "gas/species_index.h"
+#include "gas/species_atoms.h"
 
+#include <float.h>
 #include <math.h>
 
 bc_status bc_gas_from_amounts(const double amounts[], bc_gas *gas, bc_error *err)
@@ -13,14 +14,14 @@ bc_status bc_gas_from_amounts(const double amounts[], bc_gas *gas, bc_error *err
     double sum = 0.0;
 
     for (size_t i = 0; i < SPECIES_COUNT; i++) {
-        if (!(amounts[i] >= 0.0) || !isfinite(amounts[i]))
+        if (!(amounts[i] >= 0.0 && amounts[i] <= DBL_MAX))
             return bc_fail(err, BC_ERR_INPUT, "the amount of %s is negative or not a number", bc_species_id(i));
         sum += amounts[i];
     }
     if (!(sum > 0.0) || !isfinite(sum))
         return bc_fail(err, BC_ERR_INPUT, "the gas has no components; give at least one a share above zero");
     for (size_t i = 0; i < BC_SPECIES_CAPACITY; i++)
-        gas->x[i] = i < SPECIES_COUNT ? amounts[i] / sum : 0.0;
+        gas->x[i] = i < SPECIES_COUNT && amounts[i] > 0.0 ? amounts[i] / sum : 0.0;
     return BC_OK;
 }
 
@@ -40,7 +41,7 @@ double bc_gas_atoms(const bc_gas *gas, bc_element element)
 
     for (size_t i = 0; i < SPECIES_COUNT; i++)
         if (gas->x[i] != 0.0)
-            atoms += gas->x[i] * bc_species_atoms(i, element);
+            atoms += gas->x[i] * SPECIES_ATOMS[i][element];
     return atoms;
 }
 

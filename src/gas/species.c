@@ -5,7 +5,7 @@
 #include "base/compiler.h"
 #include "base/error_internal.h"
 #include "base/text.h"
-#include "gas/species_index.h"
+#include "gas/species_atoms.h"
 
 #include <assert.h>
 #include <stdbool.h>
@@ -20,6 +20,11 @@ typedef struct {
 static const species_row SPECIES_TABLE[] = {
 #define SPECIES(symbol, id, name, formula, c, h, n, o, s, he, ne, ar, cas, source) \
     {id, name, formula, cas, source, {c, h, n, o, s, he, ne, ar}},
+#include "data/species.def"
+};
+
+const double SPECIES_ATOMS[SPECIES_COUNT][BC_ELEMENTS] = {
+#define SPECIES(symbol, id, name, formula, c, h, n, o, s, he, ne, ar, cas, source) {c, h, n, o, s, he, ne, ar},
 #include "data/species.def"
 };
 
@@ -101,8 +106,10 @@ double bc_species_molar_mass_kg_per_mol(size_t index)
 {
     double mass = 0.0;
 
+    if (index >= SPECIES_COUNT)
+        return 0.0;
     for (size_t k = 0; k < BC_ELEMENTS; k++)
-        mass += row_of(index)->atoms[k] * ELEMENTS[k].mass;
+        mass += SPECIES_ATOMS[index][k] * ELEMENTS[k].mass;
     return mass * 1e-3;
 }
 

@@ -38,6 +38,19 @@ static double sum_terms(const term terms[], size_t count, double u)
     return sum;
 }
 
+/* The sum of PRESSURE, whose powers are halves: a dew point asks for it a dozen times, and pow() would be most of it. */
+static double pressure_sum(double tau)
+{
+    const double root = sqrt(tau);
+    const double tau3 = tau * tau * tau;
+    const double powers[BC_COUNT(PRESSURE)] = {tau, tau * root, tau3, tau3 * root, tau3 * tau, tau3 * tau3 * tau * root};
+    double sum = 0.0;
+
+    for (size_t i = 0; i < BC_COUNT(PRESSURE); i++)
+        sum += PRESSURE[i].a * powers[i];
+    return sum;
+}
+
 static double tau_at(double t_k)
 {
     return 1.0 - t_k / BC_STEAM_T_MAX_K;
@@ -45,7 +58,7 @@ static double tau_at(double t_k)
 
 static double liquid_pressure_pa(double t_k)
 {
-    return P_CRITICAL_PA * exp(BC_STEAM_T_MAX_K / t_k * sum_terms(PRESSURE, BC_COUNT(PRESSURE), tau_at(t_k)));
+    return P_CRITICAL_PA * exp(BC_STEAM_T_MAX_K / t_k * pressure_sum(tau_at(t_k)));
 }
 
 /* Derivative of equation (1): dp/dT = -(p/T) [ln(p/p_c) + sum a_i e_i tau^(e_i - 1)]. */

@@ -49,34 +49,41 @@ static bool is_formula(const char *text)
     return *text != '\0' && strchr("=+-@\t", *text) != NULL && strcmp(text, "-") != 0 && !is_number(text);
 }
 
-static void put_quoted(const csv_page *page, const char *text)
+/* render_csv() holds the stream: one lock, not one a character. */
+static void put_char(const csv_page *page, char c)
 {
-    fputc('"', page->out);
-    for (; *text != '\0'; text++) {
-        if (*text == '"')
-            fputc('"', page->out);
-        fputc(*text, page->out);
-    }
-    fputc('"', page->out);
+    (void)putc_unlocked(c, page->out);
+}
+
+/* Text of our own: no quotes are needed. */
+static void put(const csv_page *page, const char *text)
+{
+    for (; *text != '\0'; text++)
+        put_char(page, *text);
 }
 
 static void put_text(csv_page *page, const char *text)
 {
     char *plain = plain_text(text, PLAIN_CELL);
-    const size_t size = plain == NULL ? 0 : strlen(plain) + 2;
-    char *cell = malloc(size + 1);
 
-    if (plain == NULL || cell == NULL) {
+    if (plain == NULL) {
         page->failed = true;
-    } else {
-        snprintf(cell, size, "%s%s", is_formula(plain) ? "'" : "", plain);
-        if (cell[strcspn(cell, ",\"\n")] != '\0')
-            put_quoted(page, cell);
-        else
-            fputs(cell, page->out);
+        return;
     }
+    const bool quoted = plain[strcspn(plain, ",\"\n")] != '\0';
+
+    if (quoted)
+        put_char(page, '"');
+    if (is_formula(plain))
+        put_char(page, '\'');
+    for (const char *c = plain; *c != '\0'; c++) {
+        if (*c == '"')
+            put_char(page, '"');
+        put_char(page, *c);
+    }
+    if (quoted)
+        put_char(page, '"');
     free(plain);
-    free(cell);
 }
 
 static void put_number(const csv_page *page, double number)
@@ -84,24 +91,24 @@ static void put_number(const csv_page *page, double number)
     char text[NUMBER_TEXT_MAX];
 
     number_plain(number, page->digits, text);
-    fputs(text, page->out);
+    put(page, text);
 }
 
 static void put_result(csv_page *page, const report *r, const report_result *result)
 {
     put_text(page, result->id);
-    fputc(',', page->out);
+    put_char(page, ',');
     put_text(page, result->gas == REPORT_NO_GAS ? "" : r->gases[result->gas].name);
-    fputc(',', page->out);
+    put_char(page, ',');
     put_number(page, result->value);
-    fputc(',', page->out);
+    put_char(page, ',');
     put_text(page, result->unit);
-    fputc(',', page->out);
+    put_char(page, ',');
     if (result->has_uncertainty)
         put_number(page, result->uncertainty);
-    fputc(',', page->out);
+    put_char(page, ',');
     put_text(page, result->method);
-    fputc('\n', page->out);
+    put_char(page, '\n');
 }
 
 /* The id of a column, with its unit: a file of numbers without units would be a trap. */
@@ -138,17 +145,17 @@ static void put_table(csv_page *page, const report_table *table)
 
     for (size_t i = 0; i < count; i++) {
         if (i > 0)
-            fputc(',', page->out);
+            put_char(page, ',');
         put_heading(page, &table->columns[i]);
     }
-    fputc('\n', page->out);
+    put_char(page, '\n');
     for (size_t first = 0; count > 0 && first < table->cell_count; first += count) {
         for (size_t i = 0; i < count; i++) {
             if (i > 0)
-                fputc(',', page->out);
+                put_char(page, ',');
             put_cell(page, table, first + i);
         }
-        fputc('\n', page->out);
+        put_char(page, '\n');
     }
 }
 
@@ -157,19 +164,19 @@ static void put_maybe(csv_page *page, bool there, double number)
 {
     if (there)
         put_number(page, number);
-    fputc(',', page->out);
+    put_char(page, ',');
 }
 
 static void put_limit(csv_page *page, const report *r, const report_limit *limit)
 {
     put_text(page, limit->id);
-    fputc(',', page->out);
+    put_char(page, ',');
     put_text(page, limit->gas == REPORT_NO_GAS ? "" : r->gases[limit->gas].name);
-    fputc(',', page->out);
+    put_char(page, ',');
     put_text(page, limit->unit);
-    fputc(',', page->out);
+    put_char(page, ',');
     put_text(page, limit->state);
-    fputc(',', page->out);
+    put_char(page, ',');
     put_maybe(page, limit->has_min, limit->min);
     put_maybe(page, limit->has_max, limit->max);
     put_maybe(page, limit->has_value, limit->value);
@@ -178,14 +185,14 @@ static void put_limit(csv_page *page, const report *r, const report_limit *limit
     put_maybe(page, limit->has_percent, limit->percent);
     put_maybe(page, limit->has_probability, limit->probability);
     put_text(page, limit->verdict);
-    fputc('\n', page->out);
+    put_char(page, '\n');
 }
 
 static void put_limits(csv_page *page, const report *r)
 {
     if (r->limit_count == 0)
         return;
-    fputs("\nlimit,gas,unit,state,min,max,value,uncertainty,margin,margin_percent,probability,verdict\n", page->out);
+    put(page, "\nlimit,gas,unit,state,min,max,value,uncertainty,margin,margin_percent,probability,verdict\n");
     for (size_t i = 0; i < r->limit_count; i++)
         put_limit(page, r, &r->limits[i]);
 }
@@ -198,11 +205,11 @@ static bool has_figures(const report *r)
 static void put_named_tables(csv_page *page, const report *r)
 {
     for (size_t i = 0; i < r->table_count; i++) {
-        fputs("\ntable,", page->out);
+        put(page, "\ntable,");
         put_text(page, r->tables[i].id);
-        fputc(',', page->out);
+        put_char(page, ',');
         put_text(page, r->tables[i].title);
-        fputc('\n', page->out);
+        put_char(page, '\n');
         put_table(page, &r->tables[i]);
     }
 }
@@ -210,14 +217,14 @@ static void put_named_tables(csv_page *page, const report *r)
 static void put_report(csv_page *page, const report *r)
 {
     if (has_figures(r)) {
-        fputs("id,gas,value,unit,uncertainty,method\n", page->out);
+        put(page, "id,gas,value,unit,uncertainty,method\n");
         for (size_t i = 0; i < r->result_count; i++)
             put_result(page, r, &r->results[i]);
         return;
     }
     for (size_t i = 0; i < r->table_count; i++) {
         if (i > 0)
-            fputc('\n', page->out);
+            put_char(page, '\n');
         put_table(page, &r->tables[i]);
     }
 }
@@ -226,12 +233,14 @@ bc_status render_csv(const report *r, const render_style *style, FILE *out, bc_e
 {
     csv_page page = {.out = out, .digits = style->digits, .failed = !report_ok(r)};
 
+    flockfile(out);
     if (!page.failed)
         put_report(&page, r);
     if (!page.failed)
         put_limits(&page, r);
     if (!page.failed && has_figures(r))
         put_named_tables(&page, r);
+    funlockfile(out);
     if (page.failed)
         return bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
     return ferror(out) ? bc_fail(err, BC_ERR_FILE, "cannot write the report") : BC_OK;

@@ -2,6 +2,8 @@
 /* number_text.c - how many digits of a number are printed, and how. */
 #include "output/number_text_internal.h"
 
+#include "base/digits.h"
+
 #include <math.h>
 #include <stdbool.h>
 #include <stdio.h>
@@ -135,11 +137,16 @@ void number_uncertain(double value, double u, int digits, char out[NUMBER_TEXT_M
 
 void number_plain(double value, int digits, char out[NUMBER_TEXT_MAX])
 {
+    const int kept = digits > 0 ? within(digits, 1, DIGITS_MAX) : PLAIN_DIGITS;
+
     out[0] = '\0';
     if (!isfinite(value))
         return;
-
-    snprintf(out, NUMBER_TEXT_MAX, "%.*g", digits > 0 ? within(digits, 1, DIGITS_MAX) : PLAIN_DIGITS, value);
+    if (kept <= BC_DIGITS_MAX) {
+        (void)bc_digits_print(value, kept, '.', out);
+        return;
+    }
+    snprintf(out, NUMBER_TEXT_MAX, "%.*g", kept, value);
     use_point(out);
     drop_sign_of_zero(out);
 }

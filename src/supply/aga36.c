@@ -3,7 +3,6 @@
 #include "bluecone/aga36.h"
 
 #include "base/error_internal.h"
-#include "supply/constituents.h"
 #include "supply/index_internal.h"
 
 #include <math.h>

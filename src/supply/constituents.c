@@ -2,91 +2,61 @@
 /* constituents.c - sorts species into the groups of the interchangeability tables. */
 #include "supply/constituents.h"
 
-#include "flame/oxidant_internal.h"
 #include "gas/species_index.h"
 
+#include <assert.h>
 #include <string.h>
 
-static double atoms(size_t species, bc_element element)
+/* What sorting a species takes, worked out from its atoms when this is compiled. */
+typedef struct {
+    part group;
+    bool hydrocarbon, alkane; /* CnHm, CnH2n+2 */
+    double carbon, hydrogen;  /* atoms */
+    double oxygen;            /* mol O2 that a mole burns with, a = C + H/4 + S - O/2; below 0: what it gives */
+} species_row;
+
+#define HYDROCARBON(c, n, o, s, noble) ((c) > 0 && (n) + (o) + (s) + (noble) == 0)
+#define ALKANE(c, h) ((h) == 2 * (c) + 2)
+#define OXYGEN(c, h, o, s) ((c) + (h) / 4.0 + (s) - (o) / 2.0)
+
+static_assert(PART_BUTANES == PART_METHANE + 3 && PART_ALKANES == PART_METHANE + 4, "alkanes stand in the order of their carbon atoms");
+static_assert(PART_BUTENES == PART_ETHENE + 2, "alkenes stand in the order of their carbon atoms");
+
+#define HYDROCARBON_PART(i, c, h)                                          \
+    (ALKANE(c, h)                 ? PART_METHANE + ((c) < 5 ? (c) : 5) - 1 \
+     : (h) == 2 * (c) && (c) <= 4 ? PART_ETHENE + (c) - 2                  \
+     : (i) == SPECIES_benzene     ? PART_BENZENE                           \
+                                  : PART_HYDROCARBONS)
+
+#define PART_OF(i, c, h, n, o, s, noble)                                           \
+    ((i) == SPECIES_hydrogen                           ? PART_HYDROGEN             \
+     : (i) == SPECIES_carbon_monoxide                  ? PART_CARBON_MONOXIDE      \
+     : (i) == SPECIES_carbon_dioxide                   ? PART_CARBON_DIOXIDE       \
+     : (i) == SPECIES_nitrogen || (i) == SPECIES_argon ? PART_NITROGEN             \
+     : (i) == SPECIES_oxygen                           ? PART_OXYGEN               \
+     : HYDROCARBON(c, n, o, s, noble)                  ? HYDROCARBON_PART(i, c, h) \
+     : OXYGEN(c, h, o, s) > 0.0                        ? PART_FUELS                \
+                                                       : PART_INERTS)
+
+static const species_row ROWS[SPECIES_COUNT] = {
+#define SPECIES(symbol, id, name, formula, c, h, n, o, s, he, ne, ar, cas, source)                          \
+    {(part)(PART_OF(SPECIES_##symbol, c, h, n, o, s, he + ne + ar)), HYDROCARBON(c, n, o, s, he + ne + ar), \
+     HYDROCARBON(c, n, o, s, he + ne + ar) && ALKANE(c, h), c, h, OXYGEN(c, h, o, s)},
+#include "data/species.def"
+};
+
+static void add(constituents *c, const species_row *row, double x)
 {
-    return (double)bc_species_atoms(species, element);
-}
-
-/* mol O2 per mol of a species */
-static double oxygen_demand(size_t species)
-{
-    double count[BC_ELEMENTS];
-
-    for (size_t e = 0; e < BC_ELEMENTS; e++)
-        count[e] = atoms(species, (bc_element)e);
-    return oxidant_oxygen_need(count);
-}
-
-static bool is_hydrocarbon(size_t species)
-{
-    static const bc_element OTHERS[] = {BC_N, BC_O, BC_S, BC_HE, BC_NE, BC_AR};
-
-    for (size_t i = 0; i < sizeof OTHERS / sizeof *OTHERS; i++)
-        if (bc_species_atoms(species, OTHERS[i]) > 0)
-            return false;
-    return bc_species_atoms(species, BC_C) > 0;
-}
-
-static bool is_alkane(size_t species)
-{
-    return is_hydrocarbon(species) && bc_species_atoms(species, BC_H) == 2 * bc_species_atoms(species, BC_C) + 2;
-}
-
-static part hydrocarbon_part(size_t species)
-{
-    static const part ALKANES[] = {PART_METHANE, PART_ETHANE, PART_PROPANE, PART_BUTANES};
-    static const part ALKENES[] = {PART_ETHENE, PART_PROPENE, PART_BUTENES};
-    const int carbon = bc_species_atoms(species, BC_C);
-    const int hydrogen = bc_species_atoms(species, BC_H);
-
-    if (is_alkane(species))
-        return carbon <= 4 ? ALKANES[carbon - 1] : PART_ALKANES;
-    if (hydrogen == 2 * carbon && carbon <= 4)
-        return ALKENES[carbon - 2];
-    return species == SPECIES_benzene ? PART_BENZENE : PART_HYDROCARBONS;
-}
-
-static part part_of(size_t species)
-{
-    switch (species) {
-    case SPECIES_hydrogen:
-        return PART_HYDROGEN;
-    case SPECIES_carbon_monoxide:
-        return PART_CARBON_MONOXIDE;
-    case SPECIES_carbon_dioxide:
-        return PART_CARBON_DIOXIDE;
-    case SPECIES_nitrogen:
-    case SPECIES_argon:
-        return PART_NITROGEN;
-    case SPECIES_oxygen:
-        return PART_OXYGEN;
-    default:
-        if (is_hydrocarbon(species))
-            return hydrocarbon_part(species);
-        return oxygen_demand(species) > 0.0 ? PART_FUELS : PART_INERTS;
-    }
-}
-
-static void add(constituents *c, size_t species, double x)
-{
-    const part p = part_of(species);
-    const double demand = oxygen_demand(species);
-
-    c->x[p] += x;
-    if (demand > 0.0)
-        c->oxygen[p] += x * demand;
-    c->hydrogen_atoms += x * atoms(species, BC_H);
-    if (!is_hydrocarbon(species))
+    c->x[row->group] += x;
+    if (row->oxygen > 0.0)
+        c->oxygen[row->group] += x * row->oxygen;
+    c->hydrogen_atoms += x * row->hydrogen;
+    if (!row->hydrocarbon)
         return;
     c->hydrocarbons += x;
-    c->hydrocarbon_c += x * atoms(species, BC_C);
-    c->hydrocarbon_h += x * atoms(species, BC_H);
-    if (is_alkane(species))
+    c->hydrocarbon_c += x * row->carbon;
+    c->hydrocarbon_h += x * row->hydrogen;
+    if (row->alkane)
         c->alkanes += x;
 }
 
@@ -101,7 +71,7 @@ constituents constituents_of(const bc_gas *gas)
         return c;
     for (size_t i = 0; i < SPECIES_COUNT; i++)
         if (gas->x[i] > 0.0 && i != SPECIES_water)
-            add(&c, i, gas->x[i] / dry);
+            add(&c, &ROWS[i], gas->x[i] / dry);
     return c;
 }
 

@@ -4,7 +4,6 @@
 
 #include "base/error_internal.h"
 #include "gas/species_index.h"
-#include "supply/constituents.h"
 #include "supply/index_internal.h"
 
 #include <math.h>
@@ -47,23 +46,25 @@ static molar species_molar(const bc_reference *r, size_t species)
     return (molar){r->gross_j_per_mol[species], r->mass_kg_per_mol[species], r->factor[species]};
 }
 
-/* The nitrogen share that lowers the orifice heat of the hydrocarbons to that of the gas; falls with every step of
- * nitrogen, so halving the interval finds it: 60 times reach the last bit. */
+/* The nitrogen share x that lowers the orifice heat W of the hydrocarbons to that of the gas: Newton's root of
+ * h^2 - W^2 M (1 - s^2), where h, M and s are straight lines in x. It falls and bends upwards from x = 0, where it is
+ * above zero, to its root, as h^2 does, whose slope outweighs the others: the steps come from the left, halve the way at
+ * least and in the end double the digits, so that behind one of 1e-12 nothing is left. */
 static double nitrogen_share(const molar *fuel, const molar *nitrogen, double wanted)
 {
-    double low = 0.0;
-    double high = 1.0;
+    const molar slope = {nitrogen->h - fuel->h, nitrogen->m - fuel->m, nitrogen->s - fuel->s};
+    const double w2 = wanted * wanted;
+    double share = 0.0;
+    double step = 1.0;
 
-    for (int i = 0; i < 60; i++) {
-        const double middle = (low + high) / 2.0;
-        const molar x = mixed(fuel, nitrogen, middle);
+    for (int i = 0; i < 60 && fabs(step) > 1e-12; i++) {
+        const molar x = mixed(fuel, nitrogen, share);
+        const double z = 1.0 - x.s * x.s;
 
-        if (orifice_heat(&x) > wanted)
-            low = middle;
-        else
-            high = middle;
+        step = (x.h * x.h - w2 * x.m * z) / (2.0 * x.h * slope.h - w2 * (slope.m * z - 2.0 * x.m * x.s * slope.s));
+        share -= step;
     }
-    return (low + high) / 2.0;
+    return share;
 }
 
 /* C3H8 and CH4 for other hydrocarbons of n mol with c carbon atoms: dC3 = (c - n)/2, dCH4 = n - dC3. */
@@ -121,18 +122,17 @@ static void find_mixture(const bc_reference *r, const bc_value *value, double me
     d->pn_percent = d->propane_percent + d->nitrogen_percent;
 }
 
-bc_status bc_dutton_of(const bc_reference *reference, const bc_gas *gas, bc_dutton *out, bc_error *err)
+static bc_status dutton_of(const bc_reference *reference, const bc_gas *gas, const constituents *c, bc_dutton *out, bc_error *err)
 {
     bc_gas dry;
     double methane = 0.0;
     double propane = 0.0;
-    const constituents c = constituents_of(gas);
     bc_status status = bc_gas_dry(gas, &dry, err);
 
     if (status == BC_OK && !is_own_state(&reference->state))
         status = bc_fail(err, BC_ERR_USAGE, "Dutton's figures are those of 15/15 at 101.325 kPa; give that reference state");
     if (status == BC_OK)
-        status = reduce(&c, &methane, &propane, err);
+        status = reduce(c, &methane, &propane, err);
     if (status != BC_OK)
         return status;
     const bc_value value = bc_value_of(reference, &dry);
@@ -141,15 +141,21 @@ bc_status bc_dutton_of(const bc_reference *reference, const bc_gas *gas, bc_dutt
     find_mixture(reference, &value, methane, propane, &d);
     d.icf = bc_dutton_icf(d.wobbe_gross_j_per_m3, d.pn_percent);
     d.soot = bc_dutton_soot(d.propane_percent, d.nitrogen_percent);
-    d.outside = outside_of(&c, &d);
+    d.outside = outside_of(c, &d);
     *out = d;
     return BC_OK;
+}
+
+bc_status bc_dutton_of(const bc_reference *reference, const bc_gas *gas, bc_dutton *out, bc_error *err)
+{
+    const constituents c = constituents_of(gas);
+
+    return dutton_of(reference, gas, &c, out, err);
 }
 
 /* A gas that cannot be reduced has no value; that is told, not failed. */
 static bc_status read_gas(const index_case *c, index_room *room, const char **none, bc_error *err)
 {
-    const constituents parts = constituents_of(&c->new_gas->gas);
     const bc_reference *reference = NULL;
     double methane = 0.0;
     double propane = 0.0;
@@ -157,14 +163,14 @@ static bc_status read_gas(const index_case *c, index_room *room, const char **no
     *none = "";
     if (room->has_dutton)
         return BC_OK;
-    if (reduce(&parts, &methane, &propane, NULL) != BC_OK) {
+    if (reduce(&room->new_parts, &methane, &propane, NULL) != BC_OK) {
         *none = "the gas is no mixture of methane with some propane: Dutton's equivalent mixture does not exist";
         return BC_OK;
     }
     bc_status status = method_reference(c, STATE_15_15, &reference, err);
 
     if (status == BC_OK)
-        status = bc_dutton_of(reference, &c->new_gas->gas, &room->dutton, err);
+        status = dutton_of(reference, &c->new_gas->gas, &room->new_parts, &room->dutton, err);
     room->has_dutton = status == BC_OK;
     return status;
 }

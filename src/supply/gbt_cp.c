@@ -5,7 +5,6 @@
 #include "base/error_internal.h"
 #include "gas/species_index.h"
 #include "gas/summation.h"
-#include "supply/constituents.h"
 #include "supply/index_internal.h"
 
 #include <math.h>
@@ -47,7 +46,7 @@ bc_status bc_gbt_cp(const bc_reference *reference, const bc_gas *gas, double *cp
     *outside = "";
     if (c.x[PART_FUELS] > UNLISTED_MAX)
         *outside = "more than 1 % of fuels for which the standard gives no coefficient";
-    else if (constituents_of(gas).water > WATER_MAX)
+    else if (gas->x[SPECIES_water] > WATER_MAX)
         *outside = WET_TEXT;
     return BC_OK;
 }

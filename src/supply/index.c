@@ -5,7 +5,6 @@
 #include "base/compiler.h"
 #include "base/error_internal.h"
 #include "base/text.h"
-#include "supply/constituents.h"
 #include "supply/index_internal.h"
 
 #include <math.h>
@@ -91,17 +90,6 @@ static bc_status refuse_states(bc_error *err)
     return bc_fail(err, BC_ERR_USAGE, "the two gases refer to different states; evaluate both at one");
 }
 
-/* By its oxygen demand: the gross heat would count the water that only condenses. */
-static bool burns(const bc_subject *gas)
-{
-    const constituents c = constituents_of(&gas->gas);
-    double oxygen = 0.0;
-
-    for (size_t p = 0; p < PART_COUNT; p++)
-        oxygen += c.oxygen[p];
-    return oxygen > 0.0;
-}
-
 static bc_status read_index(const list_row *row, const index_case *c, reading *r, bc_error *err)
 {
     if (!c->new_burns || (row->shown.kind == BC_INDEX_AGAINST && !c->old_burns)) {
@@ -144,8 +132,9 @@ static void judge(const reading *r, bc_index *i)
         i->verdict = BC_VERDICT_OK;
 }
 
-static bc_status evaluate(const list_row *row, const index_case *c, bc_index *out, bc_error *err)
+bc_status index_of_case(const index_case *c, size_t index, bc_index *out, bc_error *err)
 {
+    const list_row *row = &ROWS[index];
     reading r;
     const bc_status status = read_index(row, c, &r, err);
 
@@ -162,7 +151,7 @@ static bc_status evaluate(const list_row *row, const index_case *c, bc_index *ou
 bc_status bc_index_evaluate(size_t index, const bc_subject *old_gas, const bc_subject *new_gas, bc_index *out, bc_error *err)
 {
     BC_UNFILLED index_room room;
-    const index_case c = {old_gas, new_gas, old_gas && burns(old_gas), burns(new_gas), &room};
+    index_case c;
 
     if (index >= BC_COUNT(ROWS))
         return bc_fail(err, BC_ERR_USAGE, "there is no index %zu", index);
@@ -170,21 +159,21 @@ bc_status bc_index_evaluate(size_t index, const bc_subject *old_gas, const bc_su
         return bc_fail(err, BC_ERR_USAGE, "%s compares two gases; name the one that the burner was set on", ROWS[index].shown.id);
     if (old_gas && !same_state(old_gas, new_gas))
         return refuse_states(err);
-    open_room(&room);
-    return evaluate(&ROWS[index], &c, out, err);
+    open_case(&c, old_gas, new_gas, &room);
+    return index_of_case(&c, index, out, err);
 }
 
 bc_status bc_index_evaluate_all(const bc_subject *old_gas, const bc_subject *new_gas, bc_index out[], bc_error *err)
 {
     BC_UNFILLED index_room room;
-    const index_case c = {old_gas, new_gas, burns(old_gas), burns(new_gas), &room};
+    index_case c;
     bc_index all[BC_COUNT(ROWS)];
 
     if (!same_state(old_gas, new_gas))
         return refuse_states(err);
-    open_room(&room);
+    open_case(&c, old_gas, new_gas, &room);
     for (size_t i = 0; i < BC_COUNT(ROWS); i++) {
-        const bc_status status = evaluate(&ROWS[i], &c, &all[i], err);
+        const bc_status status = index_of_case(&c, i, &all[i], err);
 
         if (status != BC_OK)
             return status;

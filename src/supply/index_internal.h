@@ -7,12 +7,21 @@
 #include "bluecone/dutton.h"
 #include "bluecone/index.h"
 #include "bluecone/weaver.h"
+#include "supply/constituents.h"
+
+/* The indices by function, in the order of the list. */
+enum {
+#define INDEX(id, method, ...) INDEX_##method,
+#include "data/indices.def"
+};
 
 /* The reference state that a method was published for. */
 typedef enum { STATE_60F_30INHG, STATE_15_15, STATE_0_0, METHOD_STATES } method_state;
 
-/* What several indices of one pair of gases share, each made when the first of them asks; open_room() empties it. */
+/* What several indices of one pair of gases share: the groups of both gases, and what is made when the first of them
+ * asks. */
 typedef struct {
+    constituents old_parts, new_parts; /* the former is unset without an old gas */
     bool has_reference[METHOD_STATES], has_weaver_old, has_weaver_new, has_aga, has_dutton;
     bc_reference reference[METHOD_STATES];
     bc_weaver_gas weaver_old, weaver_new;
@@ -56,9 +65,13 @@ static inline const char *first_of(const char *a, const char *b)
     return a[0] != '\0' ? a : b;
 }
 
-void open_room(index_room *room);
+/* Sets up a case in a room: what the room shares is empty but for the groups. */
+void open_case(index_case *c, const bc_subject *old_gas, const bc_subject *new_gas, index_room *room);
 
-/* The figures of a method's own state, in the edition of the new subject; *reference lies in the room. */
+/* Evaluates an index, INDEX_... of the list, of a case. */
+BC_MUST_USE bc_status index_of_case(const index_case *c, size_t index, bc_index *out, bc_error *err);
+
+/* The figures of a method's own state for the two gases, in the edition of the new subject; *reference lies in the room. */
 bc_status method_reference(const index_case *c, method_state state, const bc_reference **reference, bc_error *err);
 
 /* The methods: one function a row of indices.def. A failure is one of reading the gas, not of its range. */

@@ -4,7 +4,6 @@
 
 #include "base/compiler.h"
 #include "base/error_internal.h"
-#include "supply/constituents.h"
 #include "supply/index_internal.h"
 
 static const struct {
@@ -53,23 +52,29 @@ static double damping(const constituents *c, const sums *s, double air_free)
     return s->x / s->alpha_x * inert / air_free + nitrogen / air_free * (nitrogen / air_free);
 }
 
-bc_status bc_mcp(const bc_gas *gas, double *mcp, const char **outside, bc_error *err)
+static bc_status potential_of(const constituents *c, double *mcp, const char **outside, bc_error *err)
 {
-    const constituents c = constituents_of(gas);
-    const sums s = sum_over(&c);
-    const double air_free = 100.0 - 4.77 * 100.0 * c.x[PART_OXYGEN];
+    const sums s = sum_over(c);
+    const double air_free = 100.0 - 4.77 * 100.0 * c->x[PART_OXYGEN];
 
     if (!(s.x > 0.0) || !(air_free > 0.0))
         return bc_fail(err, BC_ERR_RANGE, "the gas holds nothing that burns beside air: it has no combustion potential");
-    *mcp = s.sfx / s.fx * (1.0 - damping(&c, &s, air_free));
+    *mcp = s.sfx / s.fx * (1.0 - damping(c, &s, air_free));
     *outside = "";
-    if (c.x[PART_FUELS] > UNLISTED_MAX)
+    if (c->x[PART_FUELS] > UNLISTED_MAX)
         *outside = "more than 1 % of fuels for which the regulations give no constants";
-    else if (c.water > WATER_MAX)
+    else if (c->water > WATER_MAX)
         *outside = WET_TEXT;
     else if (!(*mcp > 0.0))
         *outside = "so much inert gas that the formula has no flame left";
     return BC_OK;
+}
+
+bc_status bc_mcp(const bc_gas *gas, double *mcp, const char **outside, bc_error *err)
+{
+    const constituents c = constituents_of(gas);
+
+    return potential_of(&c, mcp, outside, err);
 }
 
 const bc_mcp_class *bc_mcp_class_of(double wobbe_j_per_m3)
@@ -117,7 +122,7 @@ bc_status mcp_index(const index_case *c, reading *r, bc_error *err)
     double mcp = 0.0;
     double old_wobbe = 0.0;
     double new_wobbe = 0.0;
-    bc_status status = bc_mcp(&c->new_gas->gas, &mcp, &outside, err);
+    bc_status status = potential_of(&c->room->new_parts, &mcp, &outside, err);
 
     if (status == BC_OK)
         status = class_wobbe(c, c->new_gas, &new_wobbe, err);

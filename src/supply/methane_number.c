@@ -3,7 +3,6 @@
 #include "bluecone/methane_number.h"
 
 #include "base/error_internal.h"
-#include "supply/constituents.h"
 #include "supply/index_internal.h"
 
 #include <math.h>
@@ -132,15 +131,15 @@ bc_status bc_methane_number_of(const bc_gas *gas, bc_methane_number *out, bc_err
 
 bc_status methane_number_index(const index_case *c, reading *r, bc_error *err)
 {
-    const constituents parts = constituents_of(&c->new_gas->gas);
-    const char *why = refusal(&parts);
+    const constituents *parts = &c->room->new_parts;
+    const char *why = refusal(parts);
 
     (void)err;
     if (why[0] != '\0') {
         *r = reading_none(why);
         return BC_OK;
     }
-    const bc_methane_number n = evaluate(&parts);
+    const bc_methane_number n = evaluate(parts);
 
     *r = reading_of(n.linear, n.outside);
     r->low = fmin(n.linear, n.ratio);

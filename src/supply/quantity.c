@@ -8,6 +8,7 @@
 #include "flame/flame_quantities.h"
 #include "gas/species_index.h"
 #include "supply/index_quantities.h"
+#include "value/subject_internal.h"
 #include "value/value_quantities.h"
 
 #include <math.h>
@@ -81,7 +82,7 @@ static bc_status slope(const quantity_source *source, size_t index, const bc_sub
 
         for (size_t j = 0; j < SPECIES_COUNT; j++)
             moved.gas.x[j] = fmax(subject->gas.x[j] + h * subject->spread_scale * dx[j], 0.0);
-        moved.value = bc_value_of(moved.reference, &moved.gas);
+        subject_weigh(&moved);
         const bc_status status = source->evaluate(index, &moved, &figure, err);
 
         if (status != BC_OK)
@@ -127,18 +128,48 @@ bc_status bc_quantity_evaluate(size_t index, const bc_subject *subject, bc_figur
     return BC_OK;
 }
 
-bc_status bc_quantity_value(size_t index, const bc_subject *subject, double *value, bc_error *err)
+static bc_status value_of(const quantity_source *source, size_t index, const bc_subject *subject, double *value, bc_error *err)
 {
-    quantity_source source;
     bc_figure f;
 
-    if (!find_floor(&index, &source))
-        return bc_fail(err, BC_ERR_USAGE, "there is no quantity of that number");
-    if (source.value)
-        return source.value(index, subject, value, err);
-    const bc_status status = source.evaluate(index, subject, &f, err);
+    if (source->value)
+        return source->value(index, subject, value, err);
+    const bc_status status = source->evaluate(index, subject, &f, err);
 
     if (status == BC_OK)
         *value = f.value;
     return status;
+}
+
+bc_status bc_quantity_value(size_t index, const bc_subject *subject, double *value, bc_error *err)
+{
+    quantity_source source;
+
+    if (!find_floor(&index, &source))
+        return bc_fail(err, BC_ERR_USAGE, "there is no quantity of that number");
+    return value_of(&source, index, subject, value, err);
+}
+
+static void values_of(const quantity_source *source, const bool wanted[], const bc_subject *subject, double value[])
+{
+    for (size_t i = 0; i < source->count; i++)
+        value[i] = (double)NAN;
+    if (source->values) {
+        source->values(subject, wanted, value);
+        return;
+    }
+    for (size_t i = 0; i < source->count; i++)
+        if (wanted[i])
+            (void)value_of(source, i, subject, &value[i], NULL); /* untouched where the gas has none */
+}
+
+void bc_quantity_values(const bool wanted[], const bc_subject *subject, double value[])
+{
+    for (size_t i = 0; i < BC_COUNT(FLOORS); i++) {
+        const quantity_source source = FLOORS[i]();
+
+        values_of(&source, wanted, subject, value);
+        wanted += source.count;
+        value += source.count;
+    }
 }

@@ -62,9 +62,9 @@ static bc_status aga_of(const switch_pair *p, bc_aga_gas *old_gas, bc_aga_gas *n
 {
     const bc_reference *reference = NULL;
     index_room room;
-    const index_case c = {p->old_gas, p->new_gas, true, true, &room};
+    index_case c;
 
-    open_room(&room);
+    open_case(&c, p->old_gas, p->new_gas, &room);
     bc_status status = method_reference(&c, STATE_60F_30INHG, &reference, NULL);
 
     if (status == BC_OK)

@@ -3,7 +3,6 @@
 #include "bluecone/weaver.h"
 
 #include "base/error_internal.h"
-#include "supply/constituents.h"
 #include "supply/index_internal.h"
 
 #include <math.h>
@@ -83,30 +82,36 @@ static void mark_range(const constituents *c, const sums *s, bc_weaver_gas *g)
     g->yellow_outside = first_of(foreign, is_lpg_air(c) ? "LPG with air: the yellow tip index rejects every such mixture" : "");
 }
 
-bc_status bc_weaver_gas_of(const bc_reference *reference, const bc_gas *gas, bc_weaver_gas *out, bc_error *err)
+static bc_status gas_of(const bc_reference *reference, const bc_gas *gas, const constituents *c, bc_weaver_gas *out, bc_error *err)
 {
     bc_gas dry;
     const bc_status status = bc_gas_dry(gas, &dry, err);
 
     if (status != BC_OK)
         return status;
-    const constituents c = constituents_of(gas);
     const bc_value value = bc_value_of(reference, &dry);
-    const sums s = sum_over(&c);
-    const double denominator = speed_denominator(&c, &s);
+    const sums s = sum_over(c);
+    const double denominator = speed_denominator(c, &s);
 
     if (!(value.gross_j_per_m3 > 0.0) || !(s.air - s.own_air > 0.0))
         return bc_fail(err, BC_ERR_RANGE, "the gas does not burn or holds the oxygen it needs: it has no Weaver index");
     bc_weaver_gas g = {.gross_j_per_m3 = value.gross_j_per_m3, .relative_density = value.relative_density, .air = s.air - s.own_air,
-                       .oxygen_percent = 100.0 * c.x[PART_OXYGEN], .carbon_excess = 100.0 * (c.hydrocarbon_c - c.alkanes)};
+                       .oxygen_percent = 100.0 * c->x[PART_OXYGEN], .carbon_excess = 100.0 * (c->hydrocarbon_c - c->alkanes)};
 
     g.has_speed = denominator > 0.0;
     g.speed = g.has_speed ? s.f / denominator : 0.0;
-    g.has_ratio = c.hydrocarbon_c > 0.0;
-    g.ratio = g.has_ratio ? c.hydrogen_atoms / c.hydrocarbon_c : 0.0;
-    mark_range(&c, &s, &g);
+    g.has_ratio = c->hydrocarbon_c > 0.0;
+    g.ratio = g.has_ratio ? c->hydrogen_atoms / c->hydrocarbon_c : 0.0;
+    mark_range(c, &s, &g);
     *out = g;
     return BC_OK;
+}
+
+bc_status bc_weaver_gas_of(const bc_reference *reference, const bc_gas *gas, bc_weaver_gas *out, bc_error *err)
+{
+    const constituents c = constituents_of(gas);
+
+    return gas_of(reference, gas, &c, out, err);
 }
 
 bc_weaver bc_weaver_compare(const bc_weaver_gas *a, const bc_weaver_gas *s)
@@ -134,8 +139,10 @@ typedef struct {
     bc_weaver index;
 } comparison;
 
-static bc_status read_gas(const index_case *c, const bc_subject *subject, bool *has, bc_weaver_gas *g, bc_error *err)
+static bc_status read_gas(const index_case *c, bool is_new, bc_error *err)
 {
+    index_room *room = c->room;
+    bool *has = is_new ? &room->has_weaver_new : &room->has_weaver_old;
     const bc_reference *reference = NULL;
 
     if (*has)
@@ -143,18 +150,19 @@ static bc_status read_gas(const index_case *c, const bc_subject *subject, bool *
     bc_status status = method_reference(c, STATE_60F_30INHG, &reference, err);
 
     if (status == BC_OK)
-        status = bc_weaver_gas_of(reference, &subject->gas, g, err);
+        status = is_new ? gas_of(reference, &c->new_gas->gas, &room->new_parts, &room->weaver_new, err)
+                        : gas_of(reference, &c->old_gas->gas, &room->old_parts, &room->weaver_old, err);
     *has = status == BC_OK;
     return status;
 }
 
 static bc_status compare(const index_case *c, comparison *v, bc_error *err)
 {
-    index_room *room = c->room;
-    bc_status status = read_gas(c, c->old_gas, &room->has_weaver_old, &room->weaver_old, err);
+    const index_room *room = c->room;
+    bc_status status = read_gas(c, false, err);
 
     if (status == BC_OK)
-        status = read_gas(c, c->new_gas, &room->has_weaver_new, &room->weaver_new, err);
+        status = read_gas(c, true, err);
     if (status == BC_OK)
         *v = (comparison){&room->weaver_old, &room->weaver_new, bc_weaver_compare(&room->weaver_old, &room->weaver_new)};
     return status;
@@ -234,7 +242,7 @@ bc_status weaver_yellow_tip_index(const index_case *c, reading *r, bc_error *err
 bc_status weaver_speed_index(const index_case *c, reading *r, bc_error *err)
 {
     const bc_weaver_gas *g = &c->room->weaver_new;
-    const bc_status status = read_gas(c, c->new_gas, &c->room->has_weaver_new, &c->room->weaver_new, err);
+    const bc_status status = read_gas(c, true, err);
 
     if (status == BC_OK)
         *r = g->has_speed ? reading_of(g->speed, g->speed_outside) : reading_none(g->speed_outside);

@@ -3,7 +3,6 @@
 #include "bluecone/wobbe.h"
 
 #include "base/error_internal.h"
-#include "supply/constituents.h"
 #include "supply/index_internal.h"
 
 #include <math.h>
@@ -65,8 +64,6 @@ bc_status bc_wobbe_modified(double net_j_per_m3, double relative_density, double
 
 bc_status wobbe_ratio_index(const index_case *c, reading *r, bc_error *err)
 {
-    const constituents old_parts = constituents_of(&c->old_gas->gas);
-    const constituents new_parts = constituents_of(&c->new_gas->gas);
     const bool holds = bc_value_in_range(&c->old_gas->value) && bc_value_in_range(&c->new_gas->value);
     double ratio = 0.0;
     const bc_status status = bc_wobbe_ratio(c->old_gas->value.wobbe_gross_j_per_m3, c->new_gas->value.wobbe_gross_j_per_m3, &ratio, err);
@@ -74,7 +71,7 @@ bc_status wobbe_ratio_index(const index_case *c, reading *r, bc_error *err)
     if (status != BC_OK)
         return status;
     *r = reading_of(ratio, holds ? "" : "Z is below 0.9, where ISO 6976 gives no volumes");
-    if (fabs(rich_part(&new_parts) - rich_part(&old_parts)) > RICH_CHANGE_MAX)
+    if (fabs(rich_part(&c->room->new_parts) - rich_part(&c->room->old_parts)) > RICH_CHANGE_MAX)
         r->caution = "hydrogen and carbon monoxide change by more than 5 %: equal heat input hides another burning velocity";
     return BC_OK;
 }

@@ -3,15 +3,9 @@
 #include "bluecone/formation.h"
 
 #include "base/error_internal.h"
-#include "gas/species_index.h"
+#include "gas/species_atoms.h"
 #include "value/formation_internal.h"
 #include "value/thermo_internal.h"
-
-/* Elements that burn, counted in one molecule. */
-static double count(size_t species, bc_element element)
-{
-    return (double)bc_species_atoms(species, element);
-}
 
 formation_products formation_products_at(double t_k)
 {
@@ -25,12 +19,13 @@ formation_products formation_products_at(double t_k)
 
 double formation_gross_with(const formation_products *p, size_t species)
 {
-    const double c = count(species, BC_C);
-    const double h = count(species, BC_H);
-    const double n = count(species, BC_N);
-    const double s = count(species, BC_S);
-    const double oxygen = c + h / 4.0 - count(species, BC_O) / 2.0 + s;
-    const double inert = count(species, BC_HE) + count(species, BC_NE) + count(species, BC_AR);
+    const double *atoms = SPECIES_ATOMS[species];
+    const double c = atoms[BC_C];
+    const double h = atoms[BC_H];
+    const double n = atoms[BC_N];
+    const double s = atoms[BC_S];
+    const double oxygen = c + h / 4.0 - atoms[BC_O] / 2.0 + s;
+    const double inert = atoms[BC_HE] + atoms[BC_NE] + atoms[BC_AR];
 
     if (inert > 0.0)
         return 0.0;

@@ -4,9 +4,10 @@
 
 #include "base/compiler.h"
 #include "base/error_internal.h"
-#include "gas/species_index.h"
+#include "gas/species_atoms.h"
 #include "gas/summation.h"
 #include "value/formation_internal.h"
+#include "value/reference_internal.h"
 
 #include <math.h>
 #include <string.h>
@@ -148,7 +149,7 @@ static void look_up_heat(bc_reference *r, size_t species, size_t column, const f
         r->u_gross_j_per_mol[species] = r->gross_j_per_mol[species] > 0.0 ? U_FORMATION_J_PER_MOL : 0.0;
         r->heat_origin[species] = BC_ORIGIN_FORMATION;
     }
-    r->net_j_per_mol[species] = r->gross_j_per_mol[species] - bc_species_atoms(species, BC_H) / 2.0 * r->vaporisation_j_per_mol;
+    r->net_j_per_mol[species] = r->gross_j_per_mol[species] - SPECIES_ATOMS[species][BC_H] / 2.0 * r->vaporisation_j_per_mol;
 }
 
 /* What is not combustible has a heat of zero by definition: no table is needed to say so. */
@@ -160,7 +161,16 @@ static void mark_inert(bc_reference *r, size_t species)
     }
 }
 
-bc_status bc_reference_at(const bc_state *state, bc_reference *reference, bc_error *err)
+static void look_up_factor(bc_reference *r, size_t species)
+{
+    const bc_summation factor = bc_summation_factor(species, r->state.edition, r->state.metering_c);
+
+    r->factor[species] = factor.s;
+    r->u_factor[species] = factor.u;
+    r->factor_origin[species] = (unsigned char)factor.origin;
+}
+
+bc_status reference_of(const bc_state *state, const bool wanted[SPECIES_COUNT], bc_reference *reference, bc_error *err)
 {
     const bc_status status = bc_state_check(state, err);
 
@@ -173,15 +183,22 @@ bc_status bc_reference_at(const bc_state *state, bc_reference *reference, bc_err
     const formation_products products = formation_products_at(state->combustion_c + 273.15);
 
     for (size_t i = 0; i < SPECIES_COUNT; i++) {
-        const bc_summation factor = bc_summation_factor(i, state->edition, state->metering_c);
-
+        if (!wanted[i])
+            continue;
         look_up_heat(reference, i, column, &products);
         mark_inert(reference, i);
-        reference->factor[i] = factor.s;
-        reference->u_factor[i] = factor.u;
-        reference->factor_origin[i] = (unsigned char)factor.origin;
+        look_up_factor(reference, i);
     }
     return BC_OK;
+}
+
+bc_status bc_reference_at(const bc_state *state, bc_reference *reference, bc_error *err)
+{
+    bool all[SPECIES_COUNT];
+
+    for (size_t i = 0; i < SPECIES_COUNT; i++)
+        all[i] = true;
+    return reference_of(state, all, reference, err);
 }
 
 /* The four sums over the components that every figure is made of. */

@@ -3,8 +3,22 @@
 #include "bluecone/subject.h"
 
 #include "base/error_internal.h"
-#include "gas/species_index.h"
+#include "gas/species_atoms.h"
 #include "value/formation_internal.h"
+#include "value/subject_internal.h"
+
+void subject_weigh(bc_subject *subject)
+{
+    for (size_t k = 0; k < BC_ELEMENTS; k++)
+        subject->atoms[k] = 0.0;
+    for (size_t i = 0; i < SPECIES_COUNT; i++) {
+        if (subject->gas.x[i] == 0.0)
+            continue;
+        for (size_t k = 0; k < BC_ELEMENTS; k++)
+            subject->atoms[k] += subject->gas.x[i] * SPECIES_ATOMS[i][k];
+    }
+    subject->value = bc_value_of(subject->reference, &subject->gas);
+}
 
 bc_status bc_subject_make(const bc_reference *reference, const bc_gas *gas, const bc_spread *spread, bc_subject *subject, bc_error *err)
 {
@@ -19,7 +33,7 @@ bc_status bc_subject_make(const bc_reference *reference, const bc_gas *gas, cons
     if (reference->state.saturated)
         subject->spread_scale = (1.0 - metered.x[SPECIES_water]) / (1.0 - gas->x[SPECIES_water]);
     subject->gas = metered;
-    subject->value = bc_value_of(reference, &metered);
+    subject_weigh(subject);
     /* below it the summation formula means nothing, and at 0 its roots are no numbers */
     if (!(subject->value.z > 0.05))
         return bc_fail(err, BC_ERR_RANGE, "at %.4g C the mixture is no gas: its compression factor by ISO 6976 would be %.2g",

@@ -86,7 +86,7 @@ static double mass_variance(const bc_subject *s)
     double variance = 0.0;
 
     for (size_t k = 0; k < BC_ELEMENTS; k++)
-        variance += square(bc_gas_atoms(&s->gas, (bc_element)k) * bc_element_mass_u_g_per_mol((bc_element)k) * 1e-3);
+        variance += square(s->atoms[k] * bc_element_mass_u_g_per_mol((bc_element)k) * 1e-3);
     return variance / square(s->value.molar_mass_kg_per_mol);
 }
 
@@ -101,7 +101,7 @@ static double heat_variance(const bc_subject *s, const exponents *e)
     for (size_t j = 0; j < SPECIES_COUNT; j++)
         variance += square(s->gas.x[j] * r->u_gross_j_per_mol[j]);
     if (e->net) /* d H_net / d Lo = - sum x_j b_j/2 */
-        variance += square(bc_gas_atoms(&s->gas, BC_H) / 2.0 * r->u_vaporisation_j_per_mol);
+        variance += square(s->atoms[BC_H] / 2.0 * r->u_vaporisation_j_per_mol);
     return variance / square(heat);
 }
 

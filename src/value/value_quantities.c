@@ -77,11 +77,11 @@ static bc_status formation_gap(const bc_subject *s, double *value, bc_error *err
 
 static bc_status hydrogen_carbon_ratio(const bc_subject *s, double *value, bc_error *err)
 {
-    const double carbon = bc_gas_atoms(&s->gas, BC_C);
+    const double carbon = s->atoms[BC_C];
 
     if (!(carbon > 0.0))
         return bc_fail(err, BC_ERR_RANGE, "the gas holds no carbon: it has no hydrogen-carbon ratio");
-    *value = bc_gas_atoms(&s->gas, BC_H) / carbon;
+    *value = s->atoms[BC_H] / carbon;
     return BC_OK;
 }
 
@@ -128,5 +128,5 @@ static bc_status evaluate(size_t index, const bc_subject *subject, bc_figure *fi
 
 quantity_source value_quantities(void)
 {
-    return (quantity_source){BC_COUNT(ROWS), shown, evaluate, value_alone};
+    return (quantity_source){BC_COUNT(ROWS), shown, evaluate, value_alone, NULL};
 }

@@ -32,6 +32,11 @@ echo "library: flames (targets 50 000 in equilibrium, 300 000 complete)"
 echo "library: HHV, LHV, Z, relative density and both Wobbe indices of one gas"
 "$work/bench_values"
 
+$cc -O2 -I "$SRC/include" -D_POSIX_C_SOURCE=200809L -o "$work/bench_quantity" "$SRC/tests/bench/bench_quantity.c" \
+    "$build/libbluecone.a" -liniparser -lm
+echo "library: a row of a log, 10 quantities one by one"
+"$work/bench_quantity"
+
 echo "blends, whole processes (targets: least cost of 5 parts within 8 limits 20 ms; 1001 points of every quantity 15 ms"
 echo "without and 150 ms with chemical equilibrium)"
 for name in least-cost sweep-without sweep-with; do ln -s "$(command -v bluecone)" "$work/$name"; done

@@ -86,6 +86,22 @@ static void a_gas_of_its_own_three_components_is_its_own_mixture(void **state)
     assert_within(d.nitrogen_percent, 5.3, 1e-6);
 }
 
+/* Up to a gas that is next to nothing but nitrogen. Rounding of the Wobbe index moves
+ * the share by about 1e-13 %; a hundred times that is asked. */
+static void any_share_of_nitrogen_is_found_again(void **state)
+{
+    static const double SHARES[] = {1e-6, 0.01, 1.0, 20.0, 60.0, 95.0, 99.9, 99.99999};
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(SHARES); i++) {
+        char literal[120];
+
+        (void)snprintf(literal, sizeof literal, "methane=%.17g,propane=%.17g,nitrogen=%.17g", 0.9 * (100.0 - SHARES[i]),
+                       0.1 * (100.0 - SHARES[i]), SHARES[i]);
+        assert_within_at(literal, dutton_of(literal).nitrogen_percent, SHARES[i], 1e-11);
+    }
+}
+
 static void a_mixture_that_needs_no_nitrogen_says_so(void **state)
 {
     const bc_dutton d = dutton_of(RICH);
@@ -289,6 +305,7 @@ int main(void)
         cmocka_unit_test(other_hydrocarbons_become_methane_and_propane),
         cmocka_unit_test(the_equivalent_mixture_has_the_wobbe_index_of_the_gas),
         cmocka_unit_test(a_gas_of_its_own_three_components_is_its_own_mixture),
+        cmocka_unit_test(any_share_of_nitrogen_is_found_again),
         cmocka_unit_test(a_mixture_that_needs_no_nitrogen_says_so),
         cmocka_unit_test(other_states_and_heavier_gases_are_refused),
         cmocka_unit_test(the_limits_of_great_britain_name_their_text),

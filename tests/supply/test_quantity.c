@@ -198,6 +198,65 @@ static void check_gap(const char *name, const char *path, void *data)
         assert_within_at(name, f.value, 0.0, 0.2);
 }
 
+/* The values of a gas together, apart, and with their uncertainties: the same to the last bit. */
+static void compare_all(const char *name, const char *path, void *data)
+{
+    const bc_reference *r = data;
+    const size_t count = bc_quantity_count();
+    bool wanted[256] = {false};
+    double value[256];
+    bc_composition c;
+    bc_subject subject;
+    bc_error err;
+
+    assert_true(count < COUNT(wanted));
+    assert_ok(bc_composition_read(path, &c, &err), &err);
+    assert_ok(bc_subject_make(r, &c.gas, &c.spread, &subject, &err), &err);
+    for (size_t i = 0; i < count; i++)
+        wanted[i] = i % 7 != 3;
+    bc_quantity_values(wanted, &subject, value);
+    for (size_t i = 0; i < count; i++) {
+        double alone = (double)NAN;
+        bc_figure f = {.value = (double)NAN};
+        const bool has = bc_quantity_value(i, &subject, &alone, &err) == BC_OK;
+
+        if (!wanted[i] || !has)
+            assert_true(isnan(value[i]));
+        else
+            assert_within_at(name, value[i], alone, 0.0);
+        assert_int_equal(bc_quantity_evaluate(i, &subject, &f, &err) == BC_OK, has);
+        assert_true(!has || (f.value >= alone && f.value <= alone));
+    }
+}
+
+static void values_together_are_those_of_each_quantity_alone(void **state)
+{
+    static const char *const STATES[] = {"15/15", "25/0", "37.3/17.9@93.1"};
+    bc_error err;
+
+    (void)state;
+    for (size_t k = 0; k < COUNT(STATES); k++) {
+        bc_reference r = reference_at(STATES[k]);
+
+        assert_ok(bc_composition_each(BUNDLED, compare_all, &r, &err), &err);
+    }
+}
+
+/* What a subject keeps beside its gas, for gases with every element. */
+static void a_subject_knows_its_atoms(void **state)
+{
+    const bc_reference r = reference_at("15/15");
+    bc_composition c;
+    bc_subject subject;
+
+    (void)state;
+    make_subject("methane=40,methanethiol=10,ammonia=10,carbon-dioxide=10,helium=10,neon=10,argon=10", &r, &c, &subject);
+    for (int k = 0; k < BC_ELEMENTS; k++) {
+        assert_within(subject.atoms[k], bc_gas_atoms(&subject.gas, (bc_element)k), 0.0);
+        assert_true(subject.atoms[k] > 0.0);
+    }
+}
+
 static void the_two_routes_to_the_heat_of_every_bundled_gas_agree_within_0_2_per_cent(void **state)
 {
     static const char *const STATES[] = {"0/0", "15/15", "60F/60F", "20/20", "25/0"};
@@ -291,6 +350,8 @@ int main(void)
         cmocka_unit_test(ids_are_found_in_any_spelling_and_unknown_ones_suggest),
         cmocka_unit_test(an_index_beyond_the_list_is_refused),
         cmocka_unit_test(every_quantity_of_every_bundled_gas_is_finite_or_refused_with_a_reason),
+        cmocka_unit_test(values_together_are_those_of_each_quantity_alone),
+        cmocka_unit_test(a_subject_knows_its_atoms),
         cmocka_unit_test(the_two_routes_to_the_heat_of_every_bundled_gas_agree_within_0_2_per_cent),
         cmocka_unit_test(shares_of_the_gap_add_up_to_it_and_name_the_component_to_blame),
         cmocka_unit_test(the_formation_route_is_a_route_of_its_own),
