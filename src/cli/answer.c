@@ -32,19 +32,25 @@ static bc_status choose_form(const arguments *a, bool brief, render_form *form, 
     return BC_OK;
 }
 
-static bc_status choose_style(const arguments *a, render_style *style, bc_error *err)
+bc_status digits_from(const arguments *a, int *digits, bc_error *err)
 {
-    const char *digits = a->value[OPTION_digits];
+    const char *text = a->value[OPTION_digits];
     double n = 0.0;
 
+    *digits = 0;
+    if (!text)
+        return BC_OK;
+    if (bc_number_parse(text, &n, NULL) != BC_OK || !(n >= 2.0 && n <= 15.0) || n != floor(n))
+        return bc_fail(err, BC_ERR_USAGE, "--digits %.20s: write a whole number from 2 to 15", text);
+    *digits = (int)n;
+    return BC_OK;
+}
+
+static bc_status choose_style(const arguments *a, render_style *style, bc_error *err)
+{
     *style = (render_style){.bare = a->value[OPTION_bare] != NULL, .quiet = a->value[OPTION_quiet] != NULL, .width = 80};
     style->color = !a->value[OPTION_no_color] && !a->value[OPTION_output] && !getenv("NO_COLOR") && isatty(STDOUT_FILENO);
-    if (!digits)
-        return BC_OK;
-    if (bc_number_parse(digits, &n, NULL) != BC_OK || !(n >= 2.0 && n <= 15.0) || n != floor(n))
-        return bc_fail(err, BC_ERR_USAGE, "--digits %.20s: write a whole number from 2 to 15", digits);
-    style->digits = (int)n;
-    return BC_OK;
+    return digits_from(a, &style->digits, err);
 }
 
 /* A number alone and a picture have no room for state and warnings: they go where messages go. */

@@ -18,6 +18,7 @@ enum {
 #define BLEND (1U << COMMAND_blend)
 #define SWITCH (1U << COMMAND_switch)
 #define CONTRACT (1U << COMMAND_contract)
+#define STREAM (1U << COMMAND_stream)
 #define LIST (1U << COMMAND_list)
 #define VERIFY (1U << COMMAND_verify)
 

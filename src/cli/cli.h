@@ -92,6 +92,9 @@ void state_text(const bc_state *state, char *text, size_t size);
 void report_state_of(report *r, const bc_state *state);
 size_t report_gas_of(report *r, const loaded_gas *gas, const bc_subject *subject);
 
+/* What the seller may deliver becomes limits, too, behind those of the contract. */
+bc_status contract_bind_ranges(bc_contract *contract, bc_error *err);
+
 /* A contract and those it follows, as files that a report was made from. */
 void report_contract_inputs(report *r, const bc_contract *contract);
 
@@ -113,6 +116,14 @@ bc_status report_quantity(const slot *where, size_t quantity, const bc_subject *
 /* The unit to print a figure in: the first of --unit that fits its own, else its own. */
 void unit_for(const arguments *a, const char *own, char *text, size_t size);
 
+#define QUANTITIES_MAX 64
+
+/* Reads "hhv,wobbe-gross": quantities by their index, QUANTITIES_MAX at most. */
+bc_status quantities_take(const char *list, size_t quantities[], size_t *count, bc_error *err);
+
+/* Reads --digits; 0 when it was not given. */
+bc_status digits_from(const arguments *a, int *digits, bc_error *err);
+
 /* Checks --unit before anything is computed: every unit must exist and fit one of the quantities. */
 bc_status units_check(const arguments *a, const bc_state *state, const size_t quantities[], size_t count, bc_error *err);
 
@@ -132,6 +143,7 @@ int run_burn(const arguments *a);
 int run_blend(const arguments *a);
 int run_switch(const arguments *a);
 int run_contract(const arguments *a);
+int run_stream(const arguments *a);
 int run_list(const arguments *a);
 int run_verify(const arguments *a);
 

@@ -44,13 +44,12 @@ static bc_status add_range(bc_contract *c, const bc_range *range, bc_error *err)
     return status;
 }
 
-static bc_status add_ranges(contract_case *c, bc_error *err)
+bc_status contract_bind_ranges(bc_contract *contract, bc_error *err)
 {
     bc_status status = BC_OK;
 
-    c->own_limits = c->contract->limit_count;
-    for (size_t i = 0; i < c->contract->range_count && status == BC_OK; i++)
-        status = add_range(c->contract, &c->contract->ranges[i], err);
+    for (size_t i = 0; i < contract->range_count && status == BC_OK; i++)
+        status = add_range(contract, &contract->ranges[i], err);
     return status;
 }
 
@@ -120,8 +119,9 @@ bc_status contract_open(contract_case *c, const arguments *a, bc_error *err)
     if (!c->contract)
         return bc_fail(err, BC_ERR_MEMORY, "not enough memory for the contract");
     status = contract_load(a->argument[0], c->contract, err);
+    c->own_limits = status == BC_OK ? c->contract->limit_count : 0;
     if (status == BC_OK)
-        status = add_ranges(c, err);
+        status = contract_bind_ranges(c->contract, err);
     return status == BC_OK ? load_gases(c, err) : status;
 }
 

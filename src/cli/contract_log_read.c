@@ -69,27 +69,6 @@ static void on_row(int end, void *data)
     f->l->cell_count = 0;
 }
 
-/* The sign that parts the cells of the header: the most frequent one outside quotes. */
-static char find_delimiter(const char *line)
-{
-    static const char SIGNS[] = ";\t,";
-    size_t count[sizeof SIGNS] = {0};
-    bool quoted = false;
-    size_t best = 2;
-
-    for (const char *p = line; *p != '\0'; p++) {
-        const char *sign = strchr(SIGNS, *p);
-
-        quoted = quoted != (*p == '"');
-        if (sign && !quoted)
-            count[sign - SIGNS]++;
-    }
-    for (size_t i = 0; i < 2; i++)
-        if (count[i] > count[best])
-            best = i;
-    return SIGNS[best];
-}
-
 static bc_status refuse_csv(log_file *f)
 {
     if (f->csv.error(&f->parser) != CSV_EPARSE)
@@ -106,7 +85,7 @@ static bc_status feed(log_file *f, const char *line, size_t length)
     if (!f->in_row)
         f->row_line = f->line;
     if (!f->has_header && !blank && !f->in_row) {
-        f->l->delimiter = find_delimiter(line);
+        f->l->delimiter = log_delimiter(line, length);
         f->csv.set_delim(&f->parser, (unsigned char)f->l->delimiter);
     }
     f->in_row = f->in_row || !blank;

@@ -1,34 +1,7 @@
 /* SPDX-License-Identifier: MIT */
 /* get.c - one line a quantity. */
 #include "base/error_internal.h"
-#include "base/text.h"
 #include "cli/subjects.h"
-
-#include <string.h>
-
-#define ASKED_MAX 64
-
-static bc_status take_quantities(const char *list, size_t quantities[], size_t *count, bc_error *err)
-{
-    *count = 0;
-    for (;;) {
-        char id[BC_WORD_MAX];
-        const size_t length = strcspn(list, ",");
-
-        if (!bc_text_copy(id, sizeof id, list, length) || id[0] == '\0')
-            return bc_fail(err, BC_ERR_USAGE, "a quantity is empty or too long; write them as hhv,wobbe-gross");
-        if (*count == ASKED_MAX)
-            return bc_fail(err, BC_ERR_USAGE, "more than %d quantities", ASKED_MAX);
-        const bc_status status = bc_quantity_find(id, &quantities[*count], err);
-
-        if (status != BC_OK)
-            return status;
-        (*count)++;
-        if (list[length] == '\0')
-            return BC_OK;
-        list += length + 1;
-    }
-}
 
 static bc_status fill(report *r, const subjects *s, const arguments *a, const size_t quantities[], size_t count, bc_error *err)
 {
@@ -48,12 +21,12 @@ static bc_status fill(report *r, const subjects *s, const arguments *a, const si
 
 int run_get(const arguments *a)
 {
-    size_t quantities[ASKED_MAX];
+    size_t quantities[QUANTITIES_MAX];
     size_t count = 0;
     subjects s = {.count = 0};
     report r;
     bc_error err;
-    bc_status status = take_quantities(a->argument[0], quantities, &count, &err);
+    bc_status status = quantities_take(a->argument[0], quantities, &count, &err);
 
     report_open(&r, BC_VERSION, "get", "Quantities");
     if (status == BC_OK)

@@ -83,31 +83,53 @@ static bc_status take_basis(log_header *h, const log_column *column, bc_basis ba
     return BC_OK;
 }
 
-static bc_status take_unit(log_header *h, log_column *column, const char *unit, int line, bc_error *err)
+/* What a share is written in. */
+typedef struct {
+    const char *word;
+    double fraction;
+    int basis; /* -1: that of the log */
+} share_unit;
+
+static const share_unit *find_unit(const char *word)
 {
-    static const struct {
-        const char *word;
-        double fraction;
-        int basis; /* -1: that of the log */
-    } UNITS[] = {{"%", 1e-2, -1}, {"ppm", 1e-6, -1}, {"1", 1.0, -1}, {"fraction", 1.0, -1},
-                 {"mol%", 1e-2, BC_BASIS_MOLE}, {"mole%", 1e-2, BC_BASIS_MOLE}, {"%mol", 1e-2, BC_BASIS_MOLE}, {"mol/mol", 1.0, BC_BASIS_MOLE},
-                 {"molppm", 1e-6, BC_BASIS_MOLE}, {"ppmmol", 1e-6, BC_BASIS_MOLE},
-                 {"vol%", 1e-2, BC_BASIS_VOLUME}, {"%vol", 1e-2, BC_BASIS_VOLUME}, {"volppm", 1e-6, BC_BASIS_VOLUME}, {"ppmv", 1e-6, BC_BASIS_VOLUME},
-                 {"m3/m3", 1.0, BC_BASIS_VOLUME},
-                 {"mass%", 1e-2, BC_BASIS_MASS}, {"wt%", 1e-2, BC_BASIS_MASS}, {"%mass", 1e-2, BC_BASIS_MASS}, {"massppm", 1e-6, BC_BASIS_MASS},
-                 {"kg/kg", 1.0, BC_BASIS_MASS}};
+    static const share_unit UNITS[] = {{"%", 1e-2, -1}, {"ppm", 1e-6, -1}, {"1", 1.0, -1}, {"fraction", 1.0, -1},
+                                       {"mol%", 1e-2, BC_BASIS_MOLE}, {"mole%", 1e-2, BC_BASIS_MOLE}, {"%mol", 1e-2, BC_BASIS_MOLE},
+                                       {"mol/mol", 1.0, BC_BASIS_MOLE}, {"molppm", 1e-6, BC_BASIS_MOLE}, {"ppmmol", 1e-6, BC_BASIS_MOLE},
+                                       {"vol%", 1e-2, BC_BASIS_VOLUME}, {"%vol", 1e-2, BC_BASIS_VOLUME}, {"m3/m3", 1.0, BC_BASIS_VOLUME},
+                                       {"volppm", 1e-6, BC_BASIS_VOLUME}, {"ppmv", 1e-6, BC_BASIS_VOLUME},
+                                       {"mass%", 1e-2, BC_BASIS_MASS}, {"wt%", 1e-2, BC_BASIS_MASS}, {"%mass", 1e-2, BC_BASIS_MASS},
+                                       {"kg/kg", 1.0, BC_BASIS_MASS}, {"massppm", 1e-6, BC_BASIS_MASS}};
+
+    for (size_t i = 0; i < BC_COUNT(UNITS); i++)
+        if (bc_text_same(word, UNITS[i].word))
+            return &UNITS[i];
+    return NULL;
+}
+
+static bc_status take_unit(log_header *h, log_column *column, const char *word, int line, bc_error *err)
+{
+    const share_unit *unit = find_unit(word);
     char shown[LOG_CELL_MAX];
 
-    column->fraction = h->unit;
-    if (unit[0] == '\0')
+    column->fraction = unit ? unit->fraction : h->unit;
+    if (word[0] == '\0' || (unit && unit->basis < 0))
         return BC_OK;
-    for (size_t i = 0; i < BC_COUNT(UNITS); i++)
-        if (bc_text_same(unit, UNITS[i].word)) {
-            column->fraction = UNITS[i].fraction;
-            return UNITS[i].basis < 0 ? BC_OK : take_basis(h, column, (bc_basis)UNITS[i].basis, line, err);
-        }
-    bc_text_show(shown, sizeof shown, unit);
+    if (unit)
+        return take_basis(h, column, (bc_basis)unit->basis, line, err);
+    bc_text_show(shown, sizeof shown, word);
     return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "a component in '%s' is not understood; write mol %%, vol %%, mass %%, ppm or fraction", shown);
+}
+
+bool log_header_shares(log_header *h, const char *word)
+{
+    const share_unit *unit = find_unit(word);
+
+    if (!unit)
+        return false;
+    h->unit = unit->fraction;
+    h->has_basis = unit->basis >= 0;
+    h->basis = unit->basis >= 0 ? (bc_basis)unit->basis : BC_BASIS_MOLE;
+    return true;
 }
 
 static bool is_same_component(const log_column *a, const log_column *b)
@@ -263,4 +285,24 @@ bc_status log_header_take(log_header *h, char (*cells)[LOG_CELL_MAX], size_t cou
     if (log_header_count(h, LOG_TIME) > 2)
         return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "more than two columns of time; keep one, or a date and a time");
     return take_bases(h, line, err);
+}
+
+char log_delimiter(const char *line, size_t length)
+{
+    static const char SIGNS[] = ";\t,";
+    size_t count[sizeof SIGNS] = {0};
+    bool quoted = false;
+    size_t best = 2;
+
+    for (const char *p = line; p < line + length && *p != '\0'; p++) {
+        const char *sign = strchr(SIGNS, *p);
+
+        quoted = quoted != (*p == '"');
+        if (sign && !quoted)
+            count[sign - SIGNS]++;
+    }
+    for (size_t i = 0; i < 2; i++)
+        if (count[i] > count[best])
+            best = i;
+    return SIGNS[best];
 }

@@ -52,4 +52,10 @@ size_t log_header_count(const log_header *h, log_column_kind kind);
 /* Adds a remark that names the columns that nothing is made of. */
 void log_header_tell_ignored(log_header *h);
 
+/* Sets what shares without a unit are in: "mass %", "ppm". False: no such unit. */
+bool log_header_shares(log_header *h, const char *word);
+
+/* The sign that parts the cells of a row: of ';', tab and ',' the most frequent one outside quotes. */
+char log_delimiter(const char *line, size_t length);
+
 #endif

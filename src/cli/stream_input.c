@@ -1,0 +1,177 @@
+/* SPDX-License-Identifier: MIT */
+/* stream_input.c - a log from a file, a pipe or a growing file, in blocks of whole rows. */
+#include "cli/stream.h"
+
+#include "base/error_internal.h"
+
+#include <errno.h>
+#include <fcntl.h>
+#include <poll.h>
+#include <stdlib.h>
+#include <string.h>
+#include <sys/stat.h>
+#include <unistd.h>
+
+#define WAIT_MS 250 /* between two looks at a file that is followed */
+
+static bc_status fail(const stream_plan *p, int reason, bc_error *err)
+{
+    char text[128];
+
+    if (strerror_r(reason, text, sizeof text) != 0)
+        text[0] = '\0';
+    return bc_fail_at(err, reason == EISDIR ? BC_ERR_INPUT : BC_ERR_FILE, p->path, 0, "the log cannot be read: %s", text);
+}
+
+bc_status stream_input_open(stream_input *in, const stream_plan *p, bc_error *err)
+{
+    const arguments *a = p->a;
+    struct stat there;
+
+    memset(in, 0, sizeof *in);
+    in->fd = -1;
+    in->is_standard = a->argument_count == 0 || strcmp(a->argument[0], "-") == 0;
+    in->follows = a->value[OPTION_follow] != NULL;
+    in->rest = malloc(STREAM_BLOCK);
+    if (!in->rest)
+        return bc_fail(err, BC_ERR_MEMORY, "not enough memory for a block of the log");
+    in->fd = in->is_standard ? STDIN_FILENO : open(p->path, O_RDONLY | O_CLOEXEC | O_NOCTTY);
+    if (in->fd < 0)
+        return bc_fail_at(err, BC_ERR_INPUT, p->path, 0, "the log cannot be opened; is the name right?");
+    in->regular = fstat(in->fd, &there) == 0 && S_ISREG(there.st_mode);
+    in->size = in->regular ? (uint64_t)there.st_size : 0;
+    if (in->follows && in->is_standard)
+        return bc_fail(err, BC_ERR_USAGE, "--follow waits for a file to grow; standard input is followed as it is");
+    return BC_OK;
+}
+
+void stream_input_close(stream_input *in)
+{
+    if (in->fd >= 0 && !in->is_standard)
+        (void)close(in->fd);
+    free(in->rest);
+    in->fd = -1;
+    in->rest = NULL;
+}
+
+/* A file that is shorter than what was read of it was written anew: what follows would be no continuation. */
+static bc_status check_shrunk(const stream_input *in, const stream_plan *p, bc_error *err)
+{
+    struct stat now;
+
+    if (fstat(in->fd, &now) == 0 && (uint64_t)now.st_size < in->bytes)
+        return bc_fail_at(err, BC_ERR_FILE, p->path, 0, "the log became shorter while it was followed; start again on the new one");
+    return BC_OK;
+}
+
+/* Reads once; *got is 0 at the end, and -1 when nothing has come yet. */
+static bc_status read_some(stream_input *in, const stream_plan *p, char *to, size_t room, bool wait, ssize_t *got, bc_error *err)
+{
+    struct pollfd ready = {in->fd, POLLIN, 0};
+
+    *got = -1;
+    if (!in->regular && !wait && poll(&ready, 1, 0) == 0)
+        return BC_OK;
+    do
+        *got = read(in->fd, to, room);
+    while (*got < 0 && errno == EINTR && !stream_interrupted());
+    if (*got < 0 && errno == EINTR) {
+        *got = 0;
+        return BC_OK;
+    }
+    if (*got < 0)
+        return fail(p, errno, err);
+    in->bytes += (uint64_t)*got;
+    if (*got > 0 || !in->follows)
+        return BC_OK;
+    const bc_status status = check_shrunk(in, p, err);
+
+    if (status == BC_OK && wait && !stream_interrupted())
+        (void)poll(NULL, 0, WAIT_MS);
+    *got = stream_interrupted() ? 0 : -1;
+    return status;
+}
+
+static size_t count_feeds(const char *text, size_t length)
+{
+    size_t count = 0;
+
+    for (size_t i = 0; i < length; i++)
+        count += text[i] == '\n';
+    return count;
+}
+
+/* The first row names the columns and the second shows the decimal mark; an object does both. */
+bc_status stream_input_begin(stream_input *in, const stream_plan *p, bc_error *err)
+{
+    bc_status status = BC_OK;
+
+    while (status == BC_OK && !in->ended && !stream_interrupted() && in->rest_length < STREAM_BLOCK) {
+        const size_t needed = p->has_header && in->rest_length > 0 && in->rest[0] != '{' ? 2 : 1;
+        ssize_t got = 0;
+
+        if (count_feeds(in->rest, in->rest_length) >= needed)
+            break;
+        status = read_some(in, p, in->rest + in->rest_length, STREAM_BLOCK - in->rest_length, true, &got, err);
+        in->ended = got == 0;
+        in->rest_length += got > 0 ? (size_t)got : 0;
+    }
+    return status;
+}
+
+void stream_input_skip(stream_input *in, size_t length)
+{
+    in->rest_length -= length;
+    memmove(in->rest, in->rest + length, in->rest_length);
+}
+
+/* Bytes of the whole rows in a block. Where no quote is, that is up to the last line feed. */
+static size_t whole_rows(const stream_plan *p, const char *block, size_t length, bool last)
+{
+    size_t at = 0;
+
+    if (last)
+        return length;
+    if (p->form == STREAM_NDJSON || !memchr(block, '"', length)) {
+        while (length > 0 && block[length - 1] != '\n')
+            length--;
+        return length;
+    }
+    while (at < length) {
+        const size_t row = stream_row_end(p, block + at, length - at, false);
+
+        if (row == 0)
+            break;
+        at += row;
+    }
+    return at;
+}
+
+bc_status stream_input_fill(stream_input *in, const stream_plan *p, char *block, size_t *length, bool wait, bc_error *err)
+{
+    size_t filled = in->rest_length;
+    bool ready = false;
+
+    memcpy(block, in->rest, filled);
+    *length = 0;
+    in->rest_length = 0;
+    ready = memchr(block, '\n', filled) != NULL;
+    while (!in->ended && filled < STREAM_BLOCK && !stream_interrupted()) {
+        ssize_t got = 0;
+        const bc_status status = read_some(in, p, block + filled, STREAM_BLOCK - filled, wait && !ready, &got, err);
+
+        if (status != BC_OK)
+            return status;
+        if (got < 0 && (!wait || ready))
+            break;
+        in->ended = got == 0;
+        filled += got > 0 ? (size_t)got : 0;
+        ready = ready || (got > 0 && memchr(block + filled - (size_t)got, '\n', (size_t)got));
+    }
+    *length = whole_rows(p, block, filled, in->ended);
+    if (*length == 0 && filled == STREAM_BLOCK)
+        return bc_fail_at(err, BC_ERR_INPUT, p->path, 0, "a row is longer than %zu KiB; is it a log?", STREAM_BLOCK >> 10);
+    in->rest_length = filled - *length;
+    memcpy(in->rest, block + *length, in->rest_length);
+    return BC_OK;
+}

@@ -1,0 +1,213 @@
+/* SPDX-License-Identifier: MIT */
+/* stream_result.c - from the amounts of a row to its figures, and the room for them. */
+#include "cli/stream_result.h"
+
+#include "base/digits.h"
+#include "base/error_internal.h"
+#include "supply/row.h"
+
+#include <math.h>
+#include <stdio.h>
+#include <stdlib.h>
+#include <string.h>
+
+#define SUM_MIN 0.98         /* as of a composition file: what is outside is no whole analysis */
+#define SUM_MAX 1.02
+#define CALIBRATION_NEAR 5e-4 /* mole fraction: analysers reproduce their calibration gas to a few hundredths of a per cent */
+#define MIX 0x9E3779B97F4A7C15U /* 2^64 over the golden ratio, as of Knuth's multiplicative hashing */
+
+void stream_put(stream_batch *b, const char *text, size_t length)
+{
+    memcpy(b->out + b->out_length, text, length);
+    b->out_length += length;
+}
+
+/* What the results of a row take at most, behind the row itself: figures, verdict, reason with every sign doubled, headings
+ * of NDJSON. */
+static size_t most_of(const stream_plan *p)
+{
+    return p->column_count + p->figure_count * (sizeof ((stream_cells *)0)->figure[0] + STREAM_HEADING_MAX + 8) + sizeof ((stream_cells *)0)->verdict
+        + 6 * STREAM_REASON_MAX + 512;
+}
+
+static bool grow(void **items, size_t size, size_t count)
+{
+    void *more = realloc(*items, size * count);
+
+    *items = more ? more : *items;
+    return more != NULL;
+}
+
+static bool grow_rows(const stream_plan *p, stream_batch *b)
+{
+    const size_t room = b->room > 0 ? 2 * b->room : 1024;
+
+    if (!grow((void **)&b->marks, sizeof *b->marks, room))
+        return false;
+    if (p->keeps && !grow((void **)&b->figures, sizeof *b->figures, room * p->figure_count))
+        return false;
+    if (p->contract && !grow((void **)&b->limits, sizeof *b->limits, room * BC_LIMIT_MAX))
+        return false;
+    b->room = room;
+    return true;
+}
+
+bool stream_make_room(const stream_plan *p, stream_batch *b, size_t length)
+{
+    const size_t needed = b->out_length + 2 * length + most_of(p); /* NDJSON escapes what is no JSON */
+
+    if (b->count == b->room && !grow_rows(p, b))
+        return false;
+    if (needed <= b->out_room)
+        return true;
+    if (!grow((void **)&b->out, 1, 2 * needed))
+        return false;
+    b->out_room = 2 * needed;
+    return true;
+}
+
+void stream_reading_start(stream_reading *r)
+{
+    memset(r->amounts, 0, sizeof r->amounts);
+    r->sum = 0.0;
+    r->fingerprint = 0;
+    r->flags = 0;
+    r->has_time = false;
+    r->zoned = false;
+    r->time_s = 0.0;
+    r->flow = -1.0;
+    r->reason[0] = '\0';
+}
+
+void stream_reading_add(const stream_plan *p, stream_reading *r, size_t column, double value)
+{
+    const stream_column *c = &p->columns[column];
+    const double share = value * c->fraction;
+    uint64_t bits = 0;
+
+    r->sum += share;
+    for (size_t i = 0; i < c->share_count; i++) {
+        const stream_share *to = &p->shares[c->first_share + i];
+
+        r->amounts[to->species] += share * to->moles;
+    }
+    memcpy(&bits, &value, sizeof bits);
+    r->fingerprint = (r->fingerprint ^ bits) * MIX;
+    r->fingerprint ^= r->fingerprint >> 32;
+}
+
+static bool is_calibration(const stream_plan *p, const bc_gas *gas)
+{
+    for (size_t i = 0; i < bc_species_count(); i++)
+        if (fabs(gas->x[i] - p->calibration.x[i]) > CALIBRATION_NEAR)
+            return false;
+    return true;
+}
+
+/* The first figure that a gas does not have is told of. */
+static void add_reason(stream_reading *r, const char *id, const bc_error *err)
+{
+    const bool named = strncmp(err->message, id, strlen(id)) == 0;
+
+    if (r->reason[0] == '\0')
+        (void)snprintf(r->reason, sizeof r->reason, "%.40s%s%.150s", named ? "" : id, named ? "" : ": ", err->message);
+}
+
+static void add_figure(const stream_plan *p, const stream_figure *f, size_t i, const bc_subject *subject, stream_cells *cells, double *kept, stream_reading *r)
+{
+    double value = 0.0;
+    bc_error err;
+
+    if (bc_quantity_value(f->quantity, subject, &value, &err) != BC_OK) {
+        add_reason(r, bc_quantity_at(f->quantity)->id, &err);
+        *kept = NAN;
+        return;
+    }
+    value = bc_unit_from_si(&f->shown, bc_unit_to_si(&f->own, value));
+    *kept = value;
+    if (isfinite(value))
+        cells->length[i] = (unsigned char)bc_digits_print(value, p->digits, p->mark, cells->figure[i]);
+}
+
+static void add_verdict(const stream_plan *p, const stream_mark *mark, char *verdict)
+{
+    const bc_contract *c = p->contract;
+    const uint64_t all = c->limit_count == 64 ? UINT64_MAX : ((uint64_t)1 << c->limit_count) - 1;
+    const uint64_t told = mark->broken ? mark->broken : all & ~mark->known;
+    size_t used = (size_t)snprintf(verdict, VERDICT_MAX, "%s", mark->broken ? "outside:" : told ? "not judged:" : "inside");
+
+    for (size_t i = 0; i < c->limit_count; i++)
+        if (told >> i & 1U)
+            used += (size_t)snprintf(verdict + used, VERDICT_MAX - used, " %s", c->limits[i].id);
+}
+
+static bc_status judge(const stream_plan *p, stream_batch *b, const bc_gas *gas, stream_mark *mark, stream_cells *cells, bc_error *err)
+{
+    const bc_status status = row_judge(p->contract, gas, b->limits + b->count * BC_LIMIT_MAX, &mark->known, &mark->broken, err);
+
+    if (status == BC_OK)
+        add_verdict(p, mark, cells->verdict);
+    return status;
+}
+
+/* Everything that makes a row bad fails here, before anything of it is kept. */
+static bc_status make_subject(const stream_plan *p, stream_batch *b, stream_reading *r, stream_mark *mark, stream_cells *cells, bc_subject *subject, bc_error *err)
+{
+    bc_gas gas;
+
+    if (r->reason[0] != '\0')
+        return bc_fail(err, BC_ERR_INPUT, "%s", r->reason);
+    if (!(r->sum >= SUM_MIN && r->sum <= SUM_MAX))
+        return bc_fail(err, BC_ERR_INPUT, "its components add up to %.6g %%, not to 100 %%", 100.0 * r->sum);
+    bc_status status = bc_gas_from_amounts(r->amounts, &gas, err);
+
+    if (status == BC_OK)
+        status = bc_subject_make(&p->reference, &gas, NULL, subject, err);
+    if (status == BC_OK && p->contract)
+        status = judge(p, b, &gas, mark, cells, err);
+    if (status == BC_OK && r->flow >= 0.0 && p->keeps) {
+        bc_per_amount flow = *r->flow_unit;
+
+        flow.si *= r->flow;
+        mark->has_power = flow.si > 0.0 && row_power_w(&p->reference, &gas, &flow, &mark->power_w, NULL) == BC_OK;
+    }
+    if (status == BC_OK && p->has_calibration && is_calibration(p, &gas))
+        r->flags |= 1U << STREAM_calibration;
+    return status;
+}
+
+void stream_evaluate(const stream_plan *p, stream_batch *b, stream_reading *r, stream_mark *mark, stream_cells *cells)
+{
+    bc_subject subject;
+    bc_error err;
+    double kept = 0.0;
+
+    memset(cells->length, 0, p->figure_count);
+    cells->verdict[0] = '\0';
+    mark->known = 0;
+    mark->broken = 0;
+    mark->has_power = false;
+    mark->good = make_subject(p, b, r, mark, cells, &subject, &err) == BC_OK;
+    if (!mark->good) {
+        (void)snprintf(r->reason, sizeof r->reason, "%.*s", STREAM_REASON_MAX - 1, err.message);
+        return;
+    }
+    mark->wobbe = subject.value.wobbe_gross_j_per_m3;
+    for (size_t i = 0; i < p->figure_count; i++)
+        add_figure(p, &p->figures[i], i, &subject, cells, p->keeps ? &b->figures[b->count * p->figure_count + i] : &kept, r);
+}
+
+void stream_add_mark(const stream_plan *p, stream_batch *b, stream_mark *mark, const stream_reading *r)
+{
+    (void)p;
+    mark->flags = r->flags;
+    mark->has_time = r->has_time;
+    mark->zoned = r->zoned;
+    mark->time_s = r->time_s;
+    mark->fingerprint = r->fingerprint;
+    if (!mark->good && b->refused++ == 0) {
+        b->first_refused = b->count;
+        memcpy(b->reason, r->reason, sizeof b->reason);
+    }
+    b->marks[b->count++] = *mark;
+}

@@ -1,0 +1,1 @@
+bluecone stream --help

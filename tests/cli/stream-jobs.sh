@@ -1,0 +1,10 @@
+# what comes out does not depend on the number of threads, nor on how the bytes come in
+awk 'BEGIN { srand(3); print "time,methane,ethane,nitrogen,note"
+    for (i = 0; i < 40000; i++) {
+        n = 1 + rand(); e = 2 + rand()
+        printf "2026-%02d-%02dT%02d:%02d,%.3f,%s,%.3f,%s\n", i / 1440 / 28 + 1, i / 1440 % 28 + 1, i / 60 % 24, i % 60,
+            i % 997 ? 100 - n - e : 7, i % 313 ? sprintf("%.3f", e) : "<0.01", n, i % 501 ? "" : "\"two\nlines, \"\"quoted\"\"\""
+    } }' >log.csv
+for jobs in 1 2 3 8; do bluecone stream --jobs $jobs --quiet log.csv 2>err.$jobs | cksum; done
+cmp err.1 err.8 && cat err.1 >&2
+dd if=log.csv bs=777 2>/dev/null | bluecone stream --jobs 2 --quiet 2>/dev/null | cksum
