@@ -61,5 +61,6 @@
 #include "bluecone/weaver.h"
 #include "bluecone/wobbe.h"
 #include "bluecone/worst.h"
+#include "bluecone/worst_burner.h"
 
 #endif

@@ -66,9 +66,12 @@ const char *option_word(const command *c, size_t index, const char **argument, c
 
 bool option_is_common(const char *word)
 {
-    for (size_t i = 0; i < OPTION_COUNT; i++)
-        if (strcmp(OPTIONS[i].word, word) == 0) /* more than one bit is set */
-            return (OPTIONS[i].commands & (OPTIONS[i].commands - 1U)) != 0;
+    for (size_t i = 0; i < OPTION_COUNT; i++) {
+        const unsigned but_one = OPTIONS[i].commands & (OPTIONS[i].commands - 1U);
+
+        if (strcmp(OPTIONS[i].word, word) == 0) /* more than two bits are set */
+            return (but_one & (but_one - 1U)) != 0;
+    }
     return false;
 }
 

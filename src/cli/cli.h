@@ -44,7 +44,7 @@ bc_status arguments_take(const command *c, int argc, char **argv, arguments *a, 
 /* The option words of a command, one a call; NULL at the end. *argument: its argument, "" for none. */
 const char *option_word(const command *c, size_t index, const char **argument, const char **help);
 
-/* True when more than one command takes an option. */
+/* True when more than two commands take an option. */
 bool option_is_common(const char *word);
 
 void help_command(const command *c);

@@ -76,8 +76,8 @@ static bc_status load_gases(contract_case *c, bc_error *err)
 /* A log stands in the place of gases; what asks about single ones, or about none, has no meaning then. */
 static bc_status check_log(const contract_case *c, bc_error *err)
 {
-    static const size_t OTHERS[] = {OPTION_air_free, OPTION_coverage, OPTION_traps, OPTION_worst, OPTION_printed};
-    static const char *const WORDS[] = {"air-free", "coverage", "traps", "worst", "printed"};
+    static const size_t OTHERS[] = {OPTION_air_free, OPTION_coverage, OPTION_traps, OPTION_worst, OPTION_printed, OPTION_burner};
+    static const char *const WORDS[] = {"air-free", "coverage", "traps", "worst", "printed", "burner"};
 
     if (!c->a->value[OPTION_log])
         return BC_OK;
@@ -100,7 +100,7 @@ static bc_status check_question(const contract_case *c, bc_error *err)
             return bc_fail(err, BC_ERR_USAGE, "--%s is about a gas: name one behind the contract", WORDS[i]);
     if (c->a->value[OPTION_printed] && c->a->argument_count != 2)
         return bc_fail(err, BC_ERR_USAGE, "--printed belongs to one gas; write [printed] into the files of several");
-    return BC_OK;
+    return contract_burner_check(c->a, err);
 }
 
 bc_status contract_open(contract_case *c, const arguments *a, bc_error *err)
@@ -122,7 +122,9 @@ bc_status contract_open(contract_case *c, const arguments *a, bc_error *err)
     c->own_limits = status == BC_OK ? c->contract->limit_count : 0;
     if (status == BC_OK)
         status = contract_bind_ranges(c->contract, err);
-    return status == BC_OK ? load_gases(c, err) : status;
+    if (status == BC_OK)
+        status = load_gases(c, err);
+    return status == BC_OK ? contract_burner_load(c, err) : status;
 }
 
 void contract_close(contract_case *c)

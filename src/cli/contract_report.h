@@ -5,7 +5,7 @@
 
 #include "cli/subjects.h"
 
-/* The contract and the gases of a command line. Not to be copied: the gases point into it. */
+/* The contract and the gases of a command line. Not to be copied: gases and burner point into it. */
 typedef struct {
     const arguments *a;
     bc_contract *contract;
@@ -13,6 +13,9 @@ typedef struct {
     subjects gases;        /* those to be judged, at the contract's state, and behind them the present one */
     size_t judged;         /* their number without the present one */
     bool has_present;
+    bool has_burner;       /* set on the present gas */
+    bc_burner burner;
+    bc_burner_case set;
     double coverage, k;    /* one-sided, 0.5..1, and its factor */
 } contract_case;
 
@@ -43,6 +46,12 @@ bc_status contract_log(report *r, const contract_case *c, bool *good, bc_error *
 
 /* The worst gas that ranges and limits let in; *good turns false when none is let in at all. */
 bc_status contract_worst(report *r, const contract_case *c, bool *good, bc_error *err);
+
+/* Whether --burner has what it needs; BC_ERR_USAGE otherwise. */
+bc_status contract_burner_check(const arguments *a, bc_error *err);
+
+/* Reads the burner, if there is one, and sets it on the present gas. */
+bc_status contract_burner_load(contract_case *c, bc_error *err);
 
 /* Which reference state explains the printed figures of each gas that has some. */
 bc_status contract_printed(report *r, const contract_case *c, bc_error *err);

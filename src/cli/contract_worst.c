@@ -175,6 +175,8 @@ static bc_status fill(worst_case *w, report *r, bool *good, bc_error *err)
         status = add_quantities(w, r, err);
     if (status == BC_OK)
         status = worst_against(w, r, err);
+    if (status == BC_OK && w->c->has_burner)
+        status = worst_burner(w, r, good, err);
     return status == BC_OK ? worst_standings(w, r, err) : status;
 }
 

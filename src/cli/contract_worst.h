@@ -29,6 +29,9 @@ void worst_add(worst_case *w, report *r, const worst_figure *f, const bc_extreme
 /* Indices against the present supply; nothing without one. */
 bc_status worst_against(worst_case *w, report *r, bc_error *err);
 
+/* The burner on what is allowed, and its limits; *good turns false when an allowed gas breaks one. */
+bc_status worst_burner(worst_case *w, report *r, bool *good, bc_error *err);
+
 /* Which limits are idle and which are open. */
 bc_status worst_standings(worst_case *w, report *r, bc_error *err);
 

@@ -39,7 +39,7 @@ static void print_line(const char *word, const char *argument, const char *help)
     printf("  %-19s %s\n", left, help);
 }
 
-/* Options that other commands take, too: their words alone, folded at 78 columns. */
+/* Options that several other commands take, too: their words alone, folded at 78 columns. */
 static void print_common(const command *c)
 {
     const char *argument = NULL;

@@ -36,6 +36,7 @@ static bc_status fill_alone(report *r, const contract_case *c, bool *good, bc_er
 static bc_status fill(report *r, const contract_case *c, bool *good, bc_error *err)
 {
     report_contract_inputs(r, c->contract);
+    report_add_input(r, c->burner.path);
     if (c->a->value[OPTION_log])
         return contract_log(r, c, good, err);
     if (c->judged == 0)

@@ -1,14 +1,12 @@
 /* SPDX-License-Identifier: MIT */
 /* switch_warnings.c - what is to be said of the new gas and of the burner beside the figures. */
+#include "cli/burner_notes.h"
 #include "cli/switch_report.h"
 
 #include <stdio.h>
-#include <string.h>
 
 #define RICH_TOLD 0.10       /* hydrogen and carbon monoxide: from here Weaver's indices do not follow */
 #define CO_TOLD 0.001        /* carbon monoxide that makes a leak poisonous before it burns */
-#define DISCHARGE_LEAST 0.5  /* below it no orifice has a coefficient, value from memory */
-#define EXPANDS 0.03         /* of the absolute pressure: Bernoulli's equation holds to 1 % below it */
 
 static double fraction_of(const bc_subject *s, const char *id)
 {
@@ -71,44 +69,14 @@ static void warn_air(report *r, const switch_case *c)
         report_add_warning(r, "On the new gas the flue gas leaves below its water dew point: condensate forms.");
 }
 
-static void warn_orifice(report *r, const switch_case *c)
-{
-    const bc_burner_case *set = &c->set;
-    char text[300];
-
-    if (set->has_implied && !(set->implied_discharge > DISCHARGE_LEAST && set->implied_discharge < 1.0)) {
-        (void)snprintf(text, sizeof text, "Heat input, gas pressure and orifice of the burner file agree only with a discharge coefficient of %.3g: check them.",
-                       set->implied_discharge);
-        report_add_warning(r, text);
-    }
-    if (set->has_pressure && set->gas_pa > EXPANDS * (set->gas_pa + c->burner.ambient_pa))
-        report_add_warning(r, "The gas pressure is above 3 % of the absolute one: the isentropic nozzle is used, and heat goes only nearly with the Wobbe index.");
-}
-
-static void warn_default_air(report *r, const switch_case *c)
-{
-    char text[300] = "";
-
-    for (size_t i = 0; i < bc_burner_key_count(); i++) {
-        const bc_burner_key *key = bc_burner_key_at(i);
-        char value[64];
-
-        bc_burner_key_text(&c->burner, i, value, sizeof value);
-        if (strcmp(key->section, "air") == 0 && strcmp(key->key, "lambda") == 0 && value[0] != '\0' && !c->burner.stated[i])
-            (void)snprintf(text, sizeof text, "The burner file states no air: lambda %s on the old gas is assumed, and the air figures rest on it.", value);
-    }
-    if (text[0] != '\0')
-        report_add_warning(r, text);
-}
-
 void switch_warnings(report *r, const switch_case *c)
 {
     warn_gas(r, c);
     warn_open(r, c);
     if (c->has_burner) {
         warn_air(r, c);
-        warn_orifice(r, c);
-        warn_default_air(r, c);
+        burner_note_orifice(r, &c->set);
+        burner_note_air(r, &c->burner);
     }
     report_add_warning(r, "No single index clears a gas: each compares two gases on one kind of burner, mostly old domestic ones.");
 }

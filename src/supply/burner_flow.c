@@ -9,7 +9,7 @@
 #define R_J_PER_MOL_K 8.31446261815324 /* SI, 2019 */
 #define P_HIGHEST_PA 1e8
 
-static double cp_of(const bc_gas *gas, double t_k)
+double jet_cp(const bc_gas *gas, double t_k)
 {
     double sum = 0.0;
 
@@ -22,11 +22,14 @@ static double cp_of(const bc_gas *gas, double t_k)
     return sum;
 }
 
+double jet_kappa(double cp)
+{
+    return cp / (cp - R_J_PER_MOL_K);
+}
+
 jet_gas jet_gas_of(const bc_subject *subject, double t_k)
 {
-    const double cp = cp_of(&subject->gas, t_k);
-
-    return (jet_gas){subject->value.molar_mass_kg_per_mol, subject->value.z, t_k, cp / (cp - R_J_PER_MOL_K)};
+    return (jet_gas){subject->value.molar_mass_kg_per_mol, subject->value.z, t_k, jet_kappa(jet_cp(&subject->gas, t_k))};
 }
 
 /* St. Venant and Wantzel: psi2 = 2k/(k - 1) [r^(2/k) - r^((k + 1)/k)], r = p_ambient/p, not below the critical

@@ -16,6 +16,10 @@ typedef struct {
     double kappa; /* cp/cv of the ideal gas */
 } jet_gas;
 
+/* Heat capacity of the ideal gas, J/(mol K), linear in the mole fractions, and cp/cv of it. */
+double jet_cp(const bc_gas *gas, double t_k);
+double jet_kappa(double cp);
+
 jet_gas jet_gas_of(const bc_subject *subject, double t_k);
 
 /* Throughput per area and discharge coefficient, mol/(m2 s).

@@ -1,7 +1,8 @@
 /* SPDX-License-Identifier: MIT */
 /* bench_worst.c - the worst gas of a contract with twenty components: certified and searched extremes. */
+#include "bluecone/composition.h"
 #include "bluecone/quantity.h"
-#include "bluecone/worst.h"
+#include "bluecone/worst_burner.h"
 
 #include <math.h>
 #include <stdio.h>
@@ -113,6 +114,47 @@ static void measure(const char *name, double target_ms, const char *const ids[],
     printf("  %-40s %8.2f ms   target %3.0f ms   %zu of %zu extremes exact\n", name, best, target_ms, exact, 2 * count);
 }
 
+/* A burner of one control on a natural gas: its first five figures, as far as it has them. */
+static void measure_burner(const char *name, double target_ms, bc_control control, double gas_pa)
+{
+    bc_burner burner = bc_burner_default();
+    double best = HUGE_VAL;
+    size_t exact = 0, asked = 0;
+    bc_composition present;
+    bc_reference reference;
+    bc_burner_case set;
+    bc_subject old_gas;
+    bc_error err;
+
+    reference_of("15/15", &reference);
+    need(bc_composition_parse("methane=92,ethane=4.5,propane=1.2,nitrogen=1.3,carbon-dioxide=1", &present, &err), &err);
+    need(bc_subject_make(&reference, &present.gas, NULL, &old_gas, &err), &err);
+    burner.control = control;
+    burner.trim_range = 0.01;
+    burner.has_pressure = gas_pa > 0.0;
+    burner.gas_pa = gas_pa;
+    need(bc_burner_set(&burner, &old_gas, &set, &err), &err);
+    for (int repeat = 0; repeat < REPEATS; repeat++) {
+        const double start = milliseconds();
+        bc_worst *worst = NULL;
+
+        exact = asked = 0;
+        need(bc_worst_open(&space, &worst, &err), &err);
+        for (int figure = 0; figure <= (int)BC_BURNER_FLAME; figure++) {
+            bc_extremes e;
+
+            if (figure == BC_BURNER_TRIM && control != BC_CONTROL_TRIM_GAS)
+                continue;
+            need(bc_worst_burner(worst, &set, (bc_burner_figure)figure, &e, &err), &err);
+            exact += (size_t)e.min.exact + (size_t)e.max.exact;
+            asked += 2;
+        }
+        bc_worst_close(worst);
+        best = fmin(best, milliseconds() - start);
+    }
+    printf("  %-40s %8.2f ms   target %3.0f ms   %zu of %zu extremes exact\n", name, best, target_ms, exact, asked);
+}
+
 int main(void)
 {
     static const char *const EXACT[] = {"hhv", "lhv", "wobbe-gross", "wobbe-net", "density", "relative-density", "z", "hhv-mass", "lhv-mole", "air-demand",
@@ -130,5 +172,8 @@ int main(void)
     add_limit("z", "15/15", 0.9965, 0.9985);
     measure("five limits, the same", 30.0, EXACT, sizeof EXACT / sizeof *EXACT);
     measure("five limits, 12 searched", 500.0, SEARCHED, sizeof SEARCHED / sizeof *SEARCHED);
+    measure_burner("five limits, a burner with orifice", 250.0, BC_CONTROL_FIXED, 0.0);
+    measure_burner("five limits, behind a nozzle", 250.0, BC_CONTROL_FIXED, 3e5);
+    measure_burner("five limits, a trim at its ends", 250.0, BC_CONTROL_TRIM_GAS, 0.0);
     return EXIT_SUCCESS;
 }
