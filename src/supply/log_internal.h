@@ -37,4 +37,7 @@ static inline bool log_bit(uint64_t set, size_t limit)
     return (set >> limit & 1U) != 0;
 }
 
+/* Days from 1970-01-01 to a day of the Gregorian calendar. */
+long log_days_from(int year, int month, int day);
+
 #endif

@@ -1,6 +1,6 @@
 /* SPDX-License-Identifier: MIT */
 /* log_time.c - times of ISO 8601 to seconds and back, without the clock and the zones of a machine. */
-#include "bluecone/log.h"
+#include "supply/log_internal.h"
 
 #include "base/error_internal.h"
 #include "base/text.h"
@@ -12,7 +12,7 @@
 
 /* Days from 1970-01-01 to a day of the Gregorian calendar; eras of 400 years start on 1 March. After H. Hinnant,
  * "chrono-Compatible Low-Level Date Algorithms", days_from_civil. */
-static long days_from(int year, int month, int day)
+long log_days_from(int year, int month, int day)
 {
     const int y = month <= 2 ? year - 1 : year;
     const int era = y / 400;
@@ -61,7 +61,7 @@ static bool take_date(const char **p, long *days)
     if (!take(p, 4, 1970, 9999, &year) || !take_sign(p, '-') || !take(p, 2, 1, 12, &month) || !take_sign(p, '-')
         || !take(p, 2, 1, days_in(year, month), &day))
         return false;
-    *days = days_from(year, month, day);
+    *days = log_days_from(year, month, day);
     return true;
 }
 
@@ -138,11 +138,11 @@ void bc_log_time_text(double time_s, char text[BC_LOG_TIME_TEXT])
     int year = 1970 + (int)(days / 366); /* not after the year looked for */
     int month = 1;
 
-    while (days >= days_from(year + 1, 1, 1))
+    while (days >= log_days_from(year + 1, 1, 1))
         year++;
-    while (month < 12 && days >= days_from(year, month + 1, 1))
+    while (month < 12 && days >= log_days_from(year, month + 1, 1))
         month++;
-    const int day = (int)(days - days_from(year, month, 1)) + 1;
+    const int day = (int)(days - log_days_from(year, month, 1)) + 1;
     const int used = snprintf(text, BC_LOG_TIME_TEXT, "%04d-%02d-%02d %02d:%02d", year % 10000, month, day % 100, (int)(of_day / 3600),
                               (int)(of_day / 60 % 60));
 
