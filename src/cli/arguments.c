@@ -163,7 +163,7 @@ static bc_status check_output(const command *c, const arguments *a, bc_error *er
 
     if (!path || !render_form_of(path, &form))
         return BC_OK;
-    if (render_form_is_chart(form) && !(c->bit & (BURN | BLEND | SWITCH | CONTRACT)))
+    if (render_form_is_chart(form) && !(c->bit & (BURN | BLEND | SWITCH | CONTRACT | STREAM)))
         return bc_fail(err, BC_ERR_USAGE, "-o %.200s: '%s' has no charts; write it to .txt .json .csv .html or .xlsx", path, c->word);
     if ((a->value[OPTION_json] && form != RENDER_JSON) || (a->value[OPTION_csv] && form != RENDER_CSV))
         return bc_fail(err, BC_ERR_USAGE, "-o %.200s: the ending contradicts --%s; keep one of them", path, a->value[OPTION_json] ? "json" : "csv");

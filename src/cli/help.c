@@ -39,24 +39,46 @@ static void print_line(const char *word, const char *argument, const char *help)
     printf("  %-19s %s\n", left, help);
 }
 
-/* Options that several other commands take, too: their words alone, folded at 78 columns. */
+#define LINE 78 /* columns */
+
+/* Adds a word to a paragraph, *column being where it stands; a long one goes on in the next line. */
+static void add_word(int *column, const char *word, const char *argument)
+{
+    const char *gap = argument[0] ? " " : "";
+
+    if (*column + (int)(strlen(word) + strlen(gap) + strlen(argument)) + 3 > LINE)
+        *column = printf("\n         ") - 1;
+    *column += printf(" --%s%s%s", word, gap, argument);
+}
+
+/* Options that their argument explains, in one paragraph. */
+static void print_plain(const command *c)
+{
+    const char *argument = NULL;
+    const char *help = NULL;
+    const char *word = NULL;
+    int column = 0;
+
+    for (size_t i = 0; (word = option_word(c, i, &argument, &help)) != NULL; i++)
+        if (help[0] == '\0') {
+            column = column > 0 ? column : printf("  more:  ");
+            add_word(&column, word, argument);
+        }
+    if (column > 0)
+        putchar('\n');
+}
+
+/* Options that several other commands take, too: their words alone. */
 static void print_common(const command *c)
 {
     const char *argument = NULL;
     const char *help = NULL;
+    const char *word = NULL;
     int column = printf("  common:");
 
-    for (size_t i = 0;; i++) {
-        const char *word = option_word(c, i, &argument, &help);
-
-        if (!word)
-            break;
-        if (!option_is_common(word))
-            continue;
-        if (column + (int)strlen(word) + 3 > 78)
-            column = printf("\n         ") - 1;
-        column += printf(" --%s", word);
-    }
+    for (size_t i = 0; (word = option_word(c, i, &argument, &help)) != NULL; i++)
+        if (option_is_common(word))
+            add_word(&column, word, "");
     putchar('\n');
 }
 
@@ -67,14 +89,12 @@ void help_command(const command *c)
     const char *help = NULL;
 
     printf("usage: bluecone %s [OPTIONS] %s\n\n%s\n\n", c->word, c->usage, c->help);
-    for (size_t i = 0;; i++) {
-        const char *word = option_word(c, i, &argument, &help);
+    const char *word = NULL;
 
-        if (!word)
-            break;
-        if (!crowded || !option_is_common(word))
+    for (size_t i = 0; (word = option_word(c, i, &argument, &help)) != NULL; i++)
+        if (help[0] != '\0' && (!crowded || !option_is_common(word)))
             print_line(word, argument, help);
-    }
+    print_plain(c);
     if (crowded)
         print_common(c);
     printf("\nman bluecone-%s tells more.\n", c->word);

@@ -1,6 +1,6 @@
 /* SPDX-License-Identifier: MIT */
 /* stream.c - a log in, the same rows with figures out. */
-#include "cli/stream.h"
+#include "cli/stream_sum.h"
 
 #include "base/error_internal.h"
 #include "bluecone/number.h"
@@ -23,6 +23,9 @@ typedef struct {
     bool is_open;             /* out is */
     stream_past past;
     stream_progress progress;
+    stream_sum sum;
+    tally_period by;
+    int code;                 /* of the exit */
     uint64_t lines;           /* of the log before the batch at hand */
     uint64_t rows, refused, flagged[STREAM_FLAGS], outside, unjudged;
     uint64_t first_refused;   /* its line */
@@ -109,7 +112,9 @@ static bc_status take_batch(void *data, stream_batch *b, bc_error *err)
     if (s->plan.a->value[OPTION_strict] && s->refused > 0)
         return bc_fail_at(err, BC_ERR_INPUT, s->plan.path, (int)s->first_refused, "%s", s->reason);
     s->lines += b->lines;
-    if (!s->plan.drops)
+    if (s->plan.keeps)
+        status = stream_sum_add(&s->sum, b, err);
+    if (status == BC_OK && !s->plan.drops)
         status = is_flagged(b) ? write_flagged(s, b, err) : output_put(&s->out, b->out, b->out_length, err);
     stream_progress_tell(&s->progress, &s->in, s->rows);
     return status;
@@ -148,11 +153,13 @@ static bc_status begin(stream_case *s, bc_error *err)
 
     if (status == BC_OK)
         status = stream_find_columns(&s->plan, s->in.rest, s->in.rest_length, s->in.ended, &header, err);
-    if (status == BC_OK)
+    if (status == BC_OK && s->plan.keeps)
+        status = stream_sum_open(&s->sum, &s->plan, s->by, err);
+    if (status == BC_OK && !s->plan.drops) {
         status = output_open(&s->out, s->plan.a->value[OPTION_output], err);
-    s->is_open = status == BC_OK;
-    if (status == BC_OK && !s->plan.drops)
-        status = write_header(s, header, err);
+        s->is_open = status == BC_OK;
+        status = s->is_open ? write_header(s, header, err) : status;
+    }
     s->lines = count_lines(s->in.rest, header);
     stream_input_skip(&s->in, header);
     return status;
@@ -183,20 +190,39 @@ static void tell_refused(const stream_case *s)
              (unsigned long long)s->first_refused, s->reason);
 }
 
-static bc_status finish(stream_case *s, bc_error *err)
+static bc_status check_end(const stream_case *s, bc_error *err)
 {
     const bool follows = s->plan.a->value[OPTION_follow] != NULL;
-    const bc_status status = stream_interrupted() && !follows ? bc_fail(err, BC_ERR_FILE, "stopped by a signal; %llu rows were read",
-                                                                        (unsigned long long)s->rows)
-                                                              : output_finish(&s->out, err);
 
-    if (status != BC_OK)
-        return status;
-    tell(s);
-    tell_refused(s);
-    if (s->rows == 0 && !follows)
+    if (stream_interrupted() && !follows)
+        return bc_fail(err, BC_ERR_FILE, "stopped by a signal; %llu rows were read", (unsigned long long)s->rows);
+    return BC_OK;
+}
+
+/* What the rows as a whole come to. */
+static bc_status answer_log(const stream_case *s, bc_error *err)
+{
+    if (s->rows == 0 && !s->plan.a->value[OPTION_follow])
         return bc_fail_at(err, BC_ERR_INPUT, s->plan.path, 0, "the log has no row behind its header");
     return BC_OK;
+}
+
+static bc_status finish(stream_case *s, bc_error *err)
+{
+    bc_status status = check_end(s, err);
+
+    if (status == BC_OK && s->is_open)
+        status = output_finish(&s->out, err);
+    if (status != BC_OK)
+        return status;
+    s->code = s->refused == s->rows ? bc_exit_code(BC_ERR_INPUT) : s->outside > 0 ? ANSWER_NO : 0;
+    if (!s->plan.a->value[OPTION_summary])
+        tell(s);
+    tell_refused(s);
+    status = answer_log(s, err);
+    if (status == BC_OK && s->plan.keeps && s->rows > s->refused)
+        status = stream_sum_end(&s->sum, &s->code, err);
+    return status;
 }
 
 static bc_status go(stream_case *s, const arguments *a, bc_error *err)
@@ -206,6 +232,8 @@ static bc_status go(stream_case *s, const arguments *a, bc_error *err)
 
     if (status == BC_OK)
         status = stream_plan_open(&s->plan, a, err);
+    if (status == BC_OK)
+        status = stream_sum_ask(&s->plan, &s->by, err);
     if (status == BC_OK)
         status = stream_input_open(&s->in, &s->plan, err);
     if (status == BC_OK)
@@ -220,25 +248,23 @@ static bc_status go(stream_case *s, const arguments *a, bc_error *err)
 
 int run_stream(const arguments *a)
 {
-    stream_case *s = calloc(1, sizeof *s);
+    stream_case *s = a->value[OPTION_merge] ? NULL : calloc(1, sizeof *s);
     bc_error err;
 
+    if (a->value[OPTION_merge])
+        return stream_merge(a);
     if (!s) {
         (void)bc_fail(&err, BC_ERR_MEMORY, "not enough memory for a log");
         return complain(&err);
     }
     stream_catch_signals();
     s->in.fd = -1;
-    const bc_status status = go(s, a, &err);
-    int code = status == BC_OK ? 0 : complain(&err);
+    const int code = go(s, a, &err) == BC_OK ? s->code : complain(&err);
 
     if (s->is_open)
         output_discard(&s->out);
-    if (code == 0 && s->rows > 0 && s->refused == s->rows)
-        code = bc_exit_code(BC_ERR_INPUT);
-    else if (code == 0 && s->outside > 0)
-        code = ANSWER_NO;
     stream_input_close(&s->in);
+    stream_sum_close(&s->sum);
     stream_plan_close(&s->plan);
     free(s->patched);
     free(s);

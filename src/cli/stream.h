@@ -53,6 +53,7 @@ typedef struct {
     size_t mark_length;                       /* bytes of the byte-order mark */
     bool has_header;                          /* the log names its columns */
     bool has_time;                            /* there is such a column, and it is asked for */
+    bc_per_amount flow;                       /* of one in the column of flow */
     size_t time_columns;                      /* a date and a time are joined */
     log_header header;
     size_t column_count, share_count;

@@ -147,6 +147,8 @@ static bc_status settle_columns(stream_plan *p, bc_error *err)
             p->columns[i].kind = LOG_IGNORED;
         if (from->kind == LOG_FLOW && !p->keeps)
             p->columns[i].kind = LOG_IGNORED;
+        if (from->kind == LOG_FLOW)
+            p->flow = from->flow;
         if (from->kind == LOG_COMPONENT)
             status = add_shares(p, i, err);
     }

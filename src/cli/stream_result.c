@@ -166,7 +166,7 @@ static bc_status make_subject(const stream_plan *p, stream_batch *b, stream_read
     if (status == BC_OK && p->contract)
         status = judge(p, b, &gas, mark, cells, err);
     if (status == BC_OK && r->flow >= 0.0 && p->keeps) {
-        bc_per_amount flow = *r->flow_unit;
+        bc_per_amount flow = p->flow;
 
         flow.si *= r->flow;
         mark->has_power = flow.si > 0.0 && row_power_w(&p->reference, &gas, &flow, &mark->power_w, NULL) == BC_OK;

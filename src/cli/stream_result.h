@@ -14,7 +14,6 @@ typedef struct {
     bool has_time, zoned;
     double time_s;
     double flow;                         /* in the unit of its column; negative: not given */
-    const bc_per_amount *flow_unit;
     char reason[STREAM_REASON_MAX];      /* why there are no results; "" when there are */
 } stream_reading;
 

@@ -5,6 +5,7 @@ awk 'BEGIN { srand(3); print "time,methane,ethane,nitrogen,note"
         printf "2026-%02d-%02dT%02d:%02d,%.3f,%s,%.3f,%s\n", i / 1440 / 28 + 1, i / 1440 % 28 + 1, i / 60 % 24, i % 60,
             i % 997 ? 100 - n - e : 7, i % 313 ? sprintf("%.3f", e) : "<0.01", n, i % 501 ? "" : "\"two\nlines, \"\"quoted\"\"\""
     } }' >log.csv
-for jobs in 1 2 3 8; do bluecone stream --jobs $jobs --quiet log.csv 2>err.$jobs | cksum; done
+for jobs in 1 2 3 8; do bluecone stream --jobs $jobs --quiet log.csv >rows.$jobs 2>err.$jobs; cmp rows.1 rows.$jobs && echo equal; done
 cmp err.1 err.8 && cat err.1 >&2
-dd if=log.csv bs=777 2>/dev/null | bluecone stream --jobs 2 --quiet 2>/dev/null | cksum
+dd if=log.csv bs=777 2>/dev/null | bluecone stream --jobs 2 --quiet 2>/dev/null | cmp - rows.1 && echo equal
+wc -l <rows.1
