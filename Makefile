@@ -39,7 +39,7 @@ MAKEFLAGS += --no-builtin-rules --no-print-directory
 .SUFFIXES:
 .DELETE_ON_ERROR:
 .SECONDARY:
-.PHONY: FORCE all deps deps-build deps-test deps-lint deps-cross check crosscheck run-tests sanitize clang demo bench lint metrics \
+.PHONY: FORCE all deps deps-build deps-test deps-lint deps-bench deps-cross check crosscheck run-tests sanitize clang demo bench lint metrics \
         symbols install uninstall clean help
 
 OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
@@ -49,6 +49,7 @@ SOVERSION := 0
 DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libxlsxwriter-dev libnlopt-dev libcsv-dev
 DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip
 DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv chromium
+DEPS_BENCH := $(DEPS_BUILD) mawk miller
 DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe
 
 # ---- flags ----------------------------------------------------------------------------------------
@@ -189,6 +190,7 @@ deps: deps-lint ## install what is missing of the Debian packages used here
 deps-build: ; @.ci/deps $(DEPS_BUILD)
 deps-test:  ; @.ci/deps $(DEPS_TEST)
 deps-lint:  ; @.ci/deps $(DEPS_LINT)
+deps-bench: ; @.ci/deps $(DEPS_BENCH)
 deps-cross: ; @.ci/deps $(DEPS_CROSS)
 
 # These start make again: what they build may need what `deps` has only just installed.
@@ -205,7 +207,7 @@ crosscheck: deps-cross ## compare with reference libraries from PyPI, pinned
 	@$(MAKE) all
 	@$(IN_BUILD) CC='$(CC)' bash tests/crosscheck/run.sh
 
-bench: deps-build ## build, then measure
+bench: deps-bench ## build, then measure
 	@$(MAKE) all
 	$(if $(wildcard tests/bench/run.sh),@$(IN_BUILD) bash tests/bench/run.sh)
 

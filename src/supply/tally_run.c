@@ -48,7 +48,11 @@ bool tally_stretch_before(const tally_stretch *a, const tally_stretch *b)
         return a->from_ms < b->from_ms;
     if (a->limit != b->limit)
         return a->limit < b->limit;
-    return a->rows > b->rows;
+    if (a->rows != b->rows)
+        return a->rows > b->rows;
+    if (a->worst < b->worst || a->worst > b->worst)
+        return a->worst > b->worst;
+    return tally_sum_value(&a->energy) > tally_sum_value(&b->energy);
 }
 
 bool tally_longest_open(tally_longest *l)
@@ -112,7 +116,7 @@ static int compare(const void *a, const void *b)
         return x->from_ms < y->from_ms ? -1 : 1;
     if (x->limit != y->limit)
         return x->limit < y->limit ? -1 : 1;
-    return (x->weight < y->weight) - (x->weight > y->weight);
+    return tally_stretch_before(y, x) - tally_stretch_before(x, y);
 }
 
 void tally_longest_sort(tally_longest *l)

@@ -34,7 +34,8 @@ typedef struct {
 /* One broken row, or a stretch of them, at the end of what is there. */
 void tally_stretch_join(tally_stretch *s, const tally_stretch *more, const tally_limit_name *limit);
 
-/* Longer first, then the earlier, then the earlier limit: an order of all excursions of a log. */
+/* Longer first, then the earlier, then the earlier limit: an order of all excursions of a log. Where a clock was put
+ * back two of one limit can have the same begin; then what else they are decides, never which came first. */
 bool tally_stretch_before(const tally_stretch *a, const tally_stretch *b);
 
 /* The longest excursions: a heap with the least of them on top. */

@@ -92,3 +92,6 @@ row "chart.svg, worst: 500 ms" "${wide[@]}" --worst -o "$work/chart.svg"
 echo "contracts, whole processes: what was done and its target, then what was measured (--worst searches flame temperature"
 echo "and interchangeability, too; with a chart it also traces the reachable region)"
 "$work/bench_start" 60 "${rows[@]:1}"
+
+echo "a log of a million rows, twelve components, whole processes"
+bash "$SRC/tests/bench/stream.sh"

@@ -31,11 +31,14 @@ static void merge_at(const tally_case *k, const tally *whole, const size_t edges
 /* A log whose clock is put back has no edge there: its parts would overlap. */
 static bool is_edge(const tally_case *k, size_t row)
 {
-    for (size_t i = 0; i < row; i++)
-        for (size_t j = row; j < row + 3 && j < k->count; j++)
-            if (i + 4 > row && k->rows[j].time_s < k->rows[i].time_s)
-                return false;
-    return true;
+    double latest = 0.0;
+    double earliest = HUGE_VAL;
+
+    for (size_t i = 0; i < k->count; i++) {
+        latest = i < row ? fmax(latest, k->rows[i].time_s) : latest;
+        earliest = i >= row ? fmin(earliest, k->rows[i].time_s) : earliest;
+    }
+    return earliest >= latest;
 }
 
 static void parts_split_at_every_row_merge_to_the_whole(void **state)
@@ -79,33 +82,38 @@ static void many_random_parts_merge_to_the_whole(void **state)
     }
 }
 
-static void parts_can_be_merged_in_any_grouping(void **state)
+static void merge_from_the_end(uint64_t start)
 {
-    tally_case *k = case_make(99, 900, 60.0, TALLY_HOUR);
+    tally_case *k = case_make(start, 900, 60.0, TALLY_HOUR);
     tally *whole = case_tally(k, 0, k->count);
-    tally *parts[9];
-
-    (void)state;
-    case_settle(whole);
-    for (size_t i = 0; i < COUNT(parts); i++)
-        parts[i] = NULL;
+    tally *parts[90];
     size_t from = 0;
 
+    case_settle(whole);
+
     for (size_t i = 0; i < COUNT(parts); i++) {
-        size_t to = i + 1 == COUNT(parts) ? k->count : 100 * (i + 1);
+        size_t to = i + 1 == COUNT(parts) ? k->count : 10 * (i + 1);
 
         while (to < k->count && !is_edge(k, to))
             to++;
-        parts[i] = case_tally(k, from, to);
+        parts[i] = case_open(k); /* a part can be merged from parts, too */
+        merge(parts[i], case_tally(k, from, to));
         from = to;
     }
-    for (size_t i = COUNT(parts) - 1; i > 0; i--) /* from the end: a + (b + (c + ...)) */
+    for (size_t i = COUNT(parts) - 1; i > 0; i--) /* a + (b + (c + ...)) */
         merge(parts[i - 1], parts[i]);
     case_settle(parts[0]);
     assert_same_tally(parts[0], whole);
     tally_close(parts[0]);
     tally_close(whole);
     free(k);
+}
+
+static void parts_can_be_merged_in_any_grouping(void **state)
+{
+    (void)state;
+    for (uint64_t start = 99; start < 139; start++)
+        merge_from_the_end(start);
 }
 
 /* Values over many octaves force coarser bins, a long log wider steps, in some parts before others. */
