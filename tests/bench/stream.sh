@@ -60,6 +60,8 @@ bluecone stream --quiet --add hhv "$log" | tail -n 1 | cut -d, -f15 >"$work/ours
 mawk "$program" "$log" | tail -n 1 | cut -d, -f15 >"$work/theirs"
 cmp -s "$work/ours" "$work/theirs" || echo "  the programs do not agree: $(cat "$work/ours") and $(cat "$work/theirs")"
 
+${CC:-gcc} -O2 -o "$work/bench_csv" "$SRC/tests/bench/bench_csv.c" -lcsv
+measure 'cells through libcsv, nothing else' "$work/bench_csv" "$log"
 measure 'six figures, one core' bluecone stream --quiet --jobs 1 "$log"
 measure 'six figures, two cores' bluecone stream --quiet --jobs 2 "$log"
 measure 'one figure, one core' bluecone stream --quiet --jobs 1 --add hhv "$log"
@@ -75,3 +77,4 @@ tell 'one figure, two cores' 'one figure in mawk' 'mawk'
 tell 'one figure, one core' 'one figure in Miller' 'Miller (target 15)'
 tell 'one figure in mawk' 'one figure in mawk' ''
 tell 'one figure in Miller' 'one figure in Miller' ''
+tell 'cells through libcsv, nothing else' 'six figures, one core' 'the whole stream'
