@@ -39,17 +39,18 @@ MAKEFLAGS += --no-builtin-rules --no-print-directory
 .SUFFIXES:
 .DELETE_ON_ERROR:
 .SECONDARY:
-.PHONY: FORCE all deps deps-build deps-test deps-lint deps-bench deps-cross check crosscheck run-tests sanitize clang demo bench lint metrics \
-        symbols install uninstall clean help
+.PHONY: FORCE all deps deps-build deps-test deps-lint deps-bench deps-coverage deps-cross check crosscheck run-tests sanitize clang demo bench lint metrics \
+        symbols thread run-threads coverage install uninstall clean help
 
 OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
 VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
 SOVERSION := 0
 
 DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libxlsxwriter-dev libnlopt-dev libcsv-dev
-DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip
+DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip python3
 DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv chromium
 DEPS_BENCH := $(DEPS_BUILD) mawk miller
+DEPS_COVERAGE := $(DEPS_TEST) gcovr
 DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe
 
 # ---- flags ----------------------------------------------------------------------------------------
@@ -64,7 +65,8 @@ CFLAGS.release  = -O2 -g $(FORTIFY) $(HARDENING)
 CFLAGS.clang    = $(CFLAGS.release) -Wno-unused-command-line-argument
 CFLAGS.sanitize = -O1 -g -fsanitize=address,undefined -fno-sanitize-recover=all -fno-omit-frame-pointer
 CFLAGS.thread   = -O1 -g -fsanitize=thread
-CFLAGS.coverage = -O0 -g --coverage
+CFLAGS.coverage = -O0 -g --coverage -fprofile-update=atomic
+INSTRUMENTS    := $(filter -fsanitize=% --coverage,$(CFLAGS.$(VARIANT)))
 
 CFLAGS_ALL   = -std=c11 $(WARNINGS) $(CFLAGS.$(VARIANT)) -fvisibility=hidden -fno-common -ffp-contract=off \
                -fno-math-errno "-ffile-prefix-map=$(CURDIR)=." $(CFLAGS)
@@ -95,13 +97,14 @@ HEADERS     := $(sort $(wildcard include/bluecone/*.h))
 COMPOSITIONS := $(sort $(wildcard compositions/*.ini))
 SPECIFICATIONS := $(sort $(wildcard compositions/specifications/*.ini))
 MAN_PAGES   := $(sort $(wildcard man/*.[1-9]))
+HEADER_PAGES := $(patsubst include/bluecone/%.h,$(OUT)/man/bluecone_%.3,$(filter-out %/bluecone.h,$(HEADERS)))
 EXAMPLES     = $(shell find examples -type f 2>/dev/null | LC_ALL=C sort)
 SCRIPTS     := $(sort .ci/run .ci/deps $(wildcard tests/*.sh tests/*/*.sh examples/*.sh))
 
 LIB_OBJ     := $(LIB_SRC:%.c=$(OUT)/%.o)
 PROGRAM_OBJ := $(PROGRAM_SRC:%.c=$(OUT)/%.o)
 CHART_OBJ   := $(CHART_SRC:%.c=$(OUT)/%.o)
-CHART_TOO   := $(addprefix $(OUT)/src/,base/digits.o output/number_text.o output/plain_text.o)
+CHART_TOO   := $(addprefix $(OUT)/src/,base/digits.o base/text.o output/number_text.o output/plain_text.o)
 BOOK_OBJ    := $(BOOK_SRC:%.c=$(OUT)/%.o)
 BOOK_TOO    := $(CHART_TOO) $(addprefix $(OUT)/src/output/,report_judged.o result_text.o section.o text_letter.o)
 PROGRAM_PARTS := $(filter-out %/cli/main.o,$(PROGRAM_OBJ))
@@ -111,11 +114,12 @@ RUNNER      := $(OUT)/tests/house/run_all
 PROGRAM     := $(OUT)/bluecone
 ARCHIVE     := $(OUT)/libbluecone.a
 SHARED      := $(OUT)/libbluecone.so.$(SOVERSION)
+PC_FILES    := $(OUT)/bluecone.pc $(OUT)/bluecone-uninstalled.pc
 CHART       := $(OUT)/bluecone_chart.so
 BOOK        := $(OUT)/bluecone_workbook.so
 COMPLETION  := $(if $(wildcard src/cli/completion.bash.in),$(OUT)/bluecone.bash)
 
-all: $(PROGRAM) $(CHART) $(BOOK) $(ARCHIVE) $(SHARED) $(OUT)/bluecone.pc $(COMPLETION) ## build the program and the library (default)
+all: $(PROGRAM) $(CHART) $(BOOK) $(ARCHIVE) $(SHARED) $(OUT)/libbluecone.so $(PC_FILES) $(HEADER_PAGES) $(COMPLETION) ## build the program and the library (default)
 	@echo '$(PROGRAM) is ready'
 
 # ---- rules ----------------------------------------------------------------------------------------
@@ -173,11 +177,22 @@ $(OUT)/tests/output/bluecone_%.so: $(OUT)/bluecone_%.so
 
 $(TESTS) $(RUNNER): $(OUT)/%: $(OUT)/%.o $(PROGRAM_PARTS) $(ARCHIVE)
 	@echo '  LD    $@'
-	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
+	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -pthread -o $@
 
-$(OUT)/bluecone.pc: src/bluecone.pc.in include/bluecone/status.h Makefile $(OUT)/flags
-	@sed -e 's|@prefix@|$(prefix)|' -e 's|@libdir@|$(libdir)|' -e 's|@includedir@|$(includedir)|' \
-	    -e 's|@version@|$(VERSION)|' $< >$@
+# The second is what pkg-config takes when it looks into a build folder: programs there find the library that
+# was just built. A library with instruments in it needs programs that have them, too.
+$(OUT)/bluecone.pc:             private PC = -e 's|@prefix@|$(prefix)|' -e 's|@libdir@|$(libdir)|' -e 's|@includedir@|$(includedir)|'
+$(OUT)/bluecone-uninstalled.pc: private PC = -e 's|@prefix@|$(CURDIR)|' -e 's|@libdir@|$(CURDIR)/$(OUT)|' -e 's|@includedir@|$(CURDIR)/include|'
+$(PC_FILES): src/bluecone.pc.in include/bluecone/status.h Makefile $(OUT)/flags
+	@sed $(PC) -e 's|@version@|$(VERSION)|' -e 's|@instruments@|$(INSTRUMENTS:%= %)|' $< >$@
+
+$(OUT)/libbluecone.so: $(SHARED)
+	@ln -sf $(notdir $<) $@
+
+# The pages of the headers bear the date of bluecone(3).
+$(OUT)/man/bluecone_%.3: include/bluecone/%.h src/header_page.awk man/bluecone.3
+	@mkdir -p $(@D)
+	@awk -v date="$$(sed -n 's/^\.Dd //p' man/bluecone.3)" -f src/header_page.awk $< >$@
 
 $(OUT)/bluecone.bash: src/cli/completion.bash.in include/bluecone/status.h Makefile
 	@mkdir -p $(@D)
@@ -191,6 +206,7 @@ deps-build: ; @.ci/deps $(DEPS_BUILD)
 deps-test:  ; @.ci/deps $(DEPS_TEST)
 deps-lint:  ; @.ci/deps $(DEPS_LINT)
 deps-bench: ; @.ci/deps $(DEPS_BENCH)
+deps-coverage: ; @.ci/deps $(DEPS_COVERAGE)
 deps-cross: ; @.ci/deps $(DEPS_CROSS)
 
 # These start make again: what they build may need what `deps` has only just installed.
@@ -198,6 +214,15 @@ check: deps-test ## build with the default compiler and run every test
 	@$(MAKE) run-tests
 sanitize: deps-test ## the tests under AddressSanitizer and UndefinedBehaviorSanitizer
 	@$(MAKE) VARIANT=sanitize run-tests
+thread: deps-test ## the library in many threads at once, under ThreadSanitizer
+	@$(MAKE) VARIANT=thread run-threads
+run-threads: $(OUT)/tests/library/test_threads
+	@TSAN_OPTIONS="suppressions=$(CURDIR)/tests/house/threads.supp:halt_on_error=1:exitcode=66" $<
+# What the tests reach of src/; the counters are atomic since the stream has threads.
+coverage: deps-coverage ## lines and branches that the tests reach, with the least that must be
+	@$(MAKE) VARIANT=coverage run-tests
+	@cd build/coverage && gcovr --root ../.. --object-directory . --filter ../../src/ --exclude-unreachable-branches --sort-percentage \
+	    --txt coverage.txt --html-details coverage.html --print-summary --fail-under-line 95 --fail-under-branch 85 .
 clang: deps-lint ## the program, the library and the test programs, by Clang with -Werror
 	@$(MAKE) VARIANT=clang WERROR=1 all tests
 demo: deps-build ## build, then play the examples
@@ -219,7 +244,7 @@ IN_BUILD = SRC="$(CURDIR)" PATH="$(CURDIR)/$(OUT):$$PATH" \
 tests: $(TESTS) $(RUNNER)
 run-tests: all tests
 	@$(IN_BUILD) CC='$(CC)' CXX='$(CXX)' $(RUNNER) $(TESTS) 'tests/run_cli.sh -b $(OUT)' \
-	    $(if $(wildcard tests/docs/run.sh),'bash tests/docs/run.sh')
+	    $(if $(wildcard tests/docs/run.sh),'bash tests/docs/run.sh') 'bash tests/library/run.sh $(OUT)'
 
 # One file a run: Clang-tidy 14 takes va_list for uninitialised in every file but the first.
 lint: deps-lint ## cppcheck, clang-tidy, mandoc and shellcheck
@@ -228,6 +253,8 @@ lint: deps-lint ## cppcheck, clang-tidy, mandoc and shellcheck
 	printf '%s\n' $(LIB_SRC) $(PROGRAM_SRC) $(CHART_SRC) $(BOOK_SRC) | xargs -P 4 -I FILE \
 	    clang-tidy --quiet FILE -- -std=c11 $(CPPFLAGS_ALL) $(call CAIRO,--cflags) '-DBC_DATA_DIR=""'
 	$(if $(MAN_PAGES),mandoc -T lint -W warning $(MAN_PAGES))
+	@$(MAKE) -s $(HEADER_PAGES)
+	mandoc -T lint -W warning $(HEADER_PAGES)
 	shellcheck $(filter-out tests/cli/%,$(SCRIPTS))
 	$(if $(filter tests/cli/%,$(SCRIPTS)),shellcheck --shell=sh $(filter tests/cli/%,$(SCRIPTS)))
 
@@ -235,8 +262,11 @@ metrics: deps-lint ## the figures of our own source beside their targets
 	@$(MAKE) $(ARCHIVE) >/dev/null
 	@SRC="$(CURDIR)" OUT="$(CURDIR)/$(OUT)" COMPILE='$(COMPILE)' bash tests/house/metrics.sh
 
-symbols: all ## accept the symbols the shared library exports now
+symbols: all ## accept the exported symbols and the binary interface as they are now
+	@mkdir -p tests/abi
 	@nm -D --defined-only --format=posix $(SHARED) | awk '{ print $$1 }' | LC_ALL=C sort >tests/abi/symbols
+	@SRC="$(CURDIR)" WORK="$(OUT)" CC='$(CC)' sh tests/house/interface.sh print >$(OUT)/interface.now
+	@cp $(OUT)/interface.now tests/abi/interface
 
 install: all ## copy everything below PREFIX (and DESTDIR)
 	$(INSTALL) -d $(foreach d,$(bindir) $(libdir)/bluecone $(pkgconfigdir) $(includedir)/bluecone \
@@ -250,7 +280,7 @@ install: all ## copy everything below PREFIX (and DESTDIR)
 	$(if $(COMPLETION),$(INSTALL_DATA) $(COMPLETION) "$(DESTDIR)$(bashcompletiondir)/bluecone")
 	$(if $(COMPOSITIONS),$(INSTALL_DATA) $(COMPOSITIONS) "$(DESTDIR)$(datadir)/bluecone/compositions")
 	$(if $(SPECIFICATIONS),$(INSTALL_DATA) $(SPECIFICATIONS) "$(DESTDIR)$(datadir)/bluecone/compositions/specifications")
-	for f in $(MAN_PAGES); do $(INSTALL_DATA) -D $$f "$(DESTDIR)$(mandir)/man$${f##*.}/$${f##*/}" || exit 1; done
+	for f in $(MAN_PAGES) $(HEADER_PAGES); do $(INSTALL_DATA) -D $$f "$(DESTDIR)$(mandir)/man$${f##*.}/$${f##*/}" || exit 1; done
 	for f in $(wildcard README.md) $(EXAMPLES); do $(INSTALL_DATA) -D $$f "$(DESTDIR)$(docdir)/$$f" || exit 1; done
 
 # Folders are removed only when they are ours and empty.
@@ -258,7 +288,7 @@ uninstall: ## remove what install put there
 	rm -f "$(DESTDIR)$(bindir)/bluecone" "$(DESTDIR)$(pkgconfigdir)/bluecone.pc" "$(DESTDIR)$(bashcompletiondir)/bluecone" \
 	    $(foreach f,libbluecone.a libbluecone.so $(notdir $(SHARED)) bluecone/$(notdir $(CHART)) bluecone/$(notdir $(BOOK)),"$(DESTDIR)$(libdir)/$f") \
 	    $(HEADERS:include/%="$(DESTDIR)$(includedir)/%") $(foreach f,$(COMPOSITIONS) $(SPECIFICATIONS),"$(DESTDIR)$(datadir)/bluecone/$f") \
-	    $(foreach f,$(MAN_PAGES),"$(DESTDIR)$(mandir)/man$(subst .,,$(suffix $f))/$(notdir $f)") \
+	    $(foreach f,$(MAN_PAGES) $(HEADER_PAGES),"$(DESTDIR)$(mandir)/man$(subst .,,$(suffix $f))/$(notdir $f)") \
 	    $(foreach f,README.md $(EXAMPLES),"$(DESTDIR)$(docdir)/$f")
 	for d in "$(includedir)/bluecone" "$(libdir)/bluecone" "$(datadir)/bluecone" "$(docdir)"; do \
 	    test ! -d "$(DESTDIR)$$d" || find "$(DESTDIR)$$d" -depth -type d -empty -delete; done

@@ -38,7 +38,7 @@ typedef struct {
  * not found. Nearest is least in |figure - aim|, or in the sum of squares of (figure - aim)/aim.
  *
  * BC_ERR_USAGE: another number of aims than free shares less one; BC_ERR_RANGE: no blend of the parts has the
- * figure; BC_ERR_FILE: NLopt, which several aims need, is not there. */
+ * figure; BC_ERR_FILE: NLopt, which several aims need, is not there; BC_ERR_MEMORY. */
 BC_API BC_MUST_USE bc_status bc_aim_find(const bc_aim_problem *problem, bc_aim *aim, bc_error *err);
 
 #ifdef __cplusplus

@@ -159,6 +159,7 @@ typedef struct {
     double gas_k;    /* temperature of the new gas at the burner, K; 0: as the old one */
 } bc_burner_setting;
 
+/* Nothing changed: all factors 1. */
 BC_API bc_burner_setting bc_burner_setting_as_found(void);
 
 /* What the burner does on a gas. Ratios are to the old gas on the setting as found. */

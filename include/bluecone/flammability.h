@@ -52,8 +52,11 @@ typedef struct {
 
 /* Limits and verdict of a gas.
  *
- *   L = 1/sum(x_i/L_i)/combustible over the combustibles, lower and upper alike; 25 C, 1 atm, upward
- *   ISO 10156: A'_i = 100 A_i/(sum A + sum K_k B_k), flammable when sum(A'_i/T_ci) > 1
+ *   L = 1/sum(x_i/L_i)/combustible
+ *   A'_i = 100 A_i/(sum A + sum K_k B_k)
+ *
+ * The first is Le Chatelier's over the combustibles, lower and upper alike, 25 C, 1 atm, upward; the second that of
+ * ISO 10156, by which a gas is flammable when sum(A'_i/T_ci) > 1.
  *
  *   flammability   out: untouched on failure
  *

@@ -16,7 +16,8 @@ extern "C" {
 /* Heat of combustion of one species, J/mol, all of it burnt with oxygen at t_k and its products brought
  * back to t_k: CO2, N2, SO2 as gases, H2O as liquid (gross) or vapour (net).
  *
- *   q = H(species) + a H(O2) - c H(CO2) - h/2 H(H2O) - n/2 H(N2) - s H(SO2),  a = c + h/4 - o/2 + s
+ *   q = H(species) + a H(O2) - c H(CO2) - h/2 H(H2O) - n/2 H(N2)
+ *     - s H(SO2),  a = c + h/4 - o/2 + s
  *
  *   t_k   BC_FORMATION_T_MIN_K..BC_FORMATION_T_MAX_K, else BC_ERR_RANGE; index out of range: BC_ERR_USAGE
  *   gross_j_per_mol, net_j_per_mol   out: untouched on failure

@@ -39,10 +39,12 @@ typedef struct {
 
 /* The path. Sums of the terms:
  *
- *   fuel_j, oxidant_j  = - sum mol increment     reactants to 298.15 K
- *   reaction_j         = sum mol formation of the products - of the reactants
- *   products_j         = sum mol increment       products to the exit temperature, all water as vapour
- *   condensation_j     = - condensate_mol (H vapour - H liquid) at the exit temperature */
+ *   fuel_j, oxidant_j = - sum mol increment
+ *   reaction_j        = sum mol formation of products - of reactants
+ *   products_j        = sum mol increment
+ *   condensation_j    = - condensate_mol (H vapour - H liquid)
+ *
+ * Reactants go to 298.15 K, products to the exit temperature, all water as vapour; there it condenses. */
 typedef struct {
     bc_flue flue;
     bc_condensation condensation; /* per mole of wet flue gas */

@@ -19,7 +19,7 @@ extern "C" {
 #define BC_LOG_GAP 3.0      /* usual steps; what is longer is a gap */
 #define BC_LOG_TIME_TEXT 20 /* bytes of a time as text with the final NUL */
 
-/* A log; opaque. */
+/* A log; opaque. One thread at a time. */
 typedef struct bc_log bc_log;
 
 /* One analysis. */

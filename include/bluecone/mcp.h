@@ -15,7 +15,8 @@ extern "C" {
 /* MCP (cm/s in kind, methane 36, hydrogen 282) of a dry gas:
  *
  *   MCP = [sum S f X/sum f X](1 - K),
- *   K = [sum X/sum alpha X][(2.5 CO2 + N2 - 3.77 O2)/(100 - 4.77 O2)] + [(N2 - 3.77 O2)/(100 - 4.77 O2)]^2,
+ *   K = [sum X/sum alpha X][(2.5 CO2 + N2 - 3.77 O2)/(100 - 4.77 O2)]
+ *     + [(N2 - 3.77 O2)/(100 - 4.77 O2)]^2,
  *
  * X combustibles, all in mol %.
  *

@@ -71,7 +71,7 @@ typedef struct {
  * they are broken alike, in parts of their scale, where the largest breach is least.
  *
  * BC_ERR_USAGE: a part without price, or in two currencies; a part whose amount the rate does not fix;
- * BC_ERR_FILE: NLopt is not there; BC_ERR_SOLVER: no descent could start. */
+ * BC_ERR_FILE: NLopt is not there; BC_ERR_SOLVER: no descent led anywhere; BC_ERR_MEMORY. */
 BC_API BC_MUST_USE bc_status bc_optimum_find(const bc_optimum_problem *problem, bc_optimum *optimum, bc_error *err);
 
 /* The objective at shares that add up to one, SI; for checking an optimum. Errors as above. */

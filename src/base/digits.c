@@ -3,10 +3,10 @@
 #include "base/digits.h"
 
 #include "base/compiler.h"
+#include "base/text.h"
 
 #include <math.h>
 #include <stdint.h>
-#include <stdio.h>
 #include <string.h>
 
 /* All of these are exact doubles: 5^22 < 2^53. */
@@ -94,15 +94,12 @@ static void put_digits(uint64_t number, int count, char *to)
 
 static size_t print_in_general(double value, int digits, char mark, char out[])
 {
-    (void)snprintf(out, BC_DIGITS_TEXT, "%.*g", digits, value);
-    /* all that is neither digit nor sign nor exponent is the mark of the locale, maybe several bytes */
-    const size_t before = strspn(out, "+-0123456789e");
-    const size_t wide = strcspn(out + before, "+-0123456789e");
+    char *point;
 
-    if (wide > 0) {
-        out[before] = mark;
-        memmove(out + before + 1, out + before + wide, strlen(out + before + wide) + 1);
-    }
+    (void)bc_text_format(out, BC_DIGITS_TEXT, "%.*g", digits, value);
+    point = strchr(out, '.');
+    if (point)
+        *point = mark;
     return strlen(out);
 }
 

@@ -3,6 +3,7 @@
 #include "base/file_text.h"
 
 #include "base/error_internal.h"
+#include "base/text.h"
 
 #include <errno.h>
 #include <fcntl.h>
@@ -13,10 +14,9 @@
 
 static bc_status fail_errno(bc_error *err, const char *path, const char *what)
 {
-    char reason[128] = "unknown error";
+    char reason[128];
 
-    if (strerror_r(errno, reason, sizeof reason) != 0)
-        reason[0] = '\0';
+    bc_text_of_errno(reason, sizeof reason, errno);
     return bc_fail_at(err, BC_ERR_FILE, path, 0, "%s: %s", what, reason);
 }
 

@@ -224,8 +224,27 @@ static bool write_all(int fd, const char *text, size_t length)
     return true;
 }
 
+/* For what iniparser would print: with checked text only that memory ran out, which the caller is told anyway. */
+static int say_nothing(const char *format, ...)
+{
+    (void)format;
+    return 0;
+}
+
+/* iniparser 4.1 uses the tables of a new dictionary without looking whether it got them. What it is going to need is
+ * asked for here first: where that much cannot be had it is not called. */
+static bool has_room(size_t length)
+{
+    void *room = malloc(2 * length + 65536); /* keys and values of the text; tables, buffer of the file */
+
+    free(room);
+    return room != NULL;
+}
+
 static dictionary *load_values(const char *text, size_t length)
 {
+    if (!has_room(length))
+        return NULL;
     const int fd = memfd_create("bluecone-ini", MFD_CLOEXEC);
     char path[64];
     dictionary *values = NULL;
@@ -233,14 +252,16 @@ static dictionary *load_values(const char *text, size_t length)
     if (fd < 0)
         return NULL;
     (void)snprintf(path, sizeof path, "/proc/self/fd/%d", fd);
+    iniparser_set_error_callback(say_nothing); /* the printer of iniparser is one for the process; it has no other way */
     if (write_all(fd, text, length))
         values = iniparser_load(path);
     (void)close(fd);
     return values;
 }
 
-/* iniparser's word for each scanned key. It stores "section:key" in lower case. */
-static bc_status attach_values(bc_ini *ini, const char *path, bc_error *err)
+/* iniparser's word for each scanned key: the first entry that it has none for, or NULL. It stores "section:key" in
+ * lower case. */
+static const bc_ini_entry *attach_values(bc_ini *ini)
 {
     for (size_t i = 0; i < ini->count; i++) {
         bc_ini_entry *entry = &ini->entries[i];
@@ -250,23 +271,32 @@ static bc_status attach_values(bc_ini *ini, const char *path, bc_error *err)
         lower_case(name);
         entry->value = iniparser_getstring(ini->values, name, NULL);
         if (!entry->value)
-            return bc_fail_at(err, BC_ERR_INPUT, path, entry->line, "'%s' cannot be read as key = value; remove quotes and special characters",
-                              entry->key);
+            return entry;
     }
-    return BC_OK;
+    return NULL;
 }
 
 static bc_status build(bc_ini *ini, const char *path, char *text, size_t length, bc_error *err)
 {
     scan s = {.path = path, .ini = ini, .err = err};
     const bc_status status = scan_lines(&s, text, length);
+    const bc_ini_entry *missing = NULL;
 
     if (status != BC_OK)
         return status;
-    ini->values = load_values(text, length);
-    if (!ini->values)
-        return bc_fail_at(err, BC_ERR_MEMORY, path, 0, "not enough memory to read the file");
-    return attach_values(ini, path, err);
+    /* A line that iniparser has no memory for it leaves out in silence: what is missing twice, it cannot read. */
+    for (int attempt = 0; attempt < 2; attempt++) {
+        if (ini->values)
+            iniparser_freedict(ini->values);
+        ini->values = load_values(text, length);
+        if (!ini->values)
+            return bc_fail_at(err, BC_ERR_MEMORY, path, 0, "not enough memory to read the file");
+        missing = attach_values(ini);
+        if (!missing)
+            return BC_OK;
+    }
+    return bc_fail_at(err, BC_ERR_INPUT, path, missing->line, "'%s' cannot be read as key = value; remove quotes and special characters",
+                      missing->key);
 }
 
 bc_status bc_ini_open(const char *path, bc_ini **ini, bc_error *err)

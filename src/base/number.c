@@ -6,7 +6,7 @@
 #include "base/text.h"
 
 #include <float.h>
-#include <locale.h>
+#include <langinfo.h>
 #include <math.h>
 #include <stdbool.h>
 #include <stdint.h>
@@ -103,7 +103,7 @@ static bool convert_exactly(const decimal *d, double *value)
 static double convert_by_library(const char *text, size_t length)
 {
     char local[NUMBER_MAX + 16];
-    const char *mark = localeconv()->decimal_point;
+    const char *mark = nl_langinfo(RADIXCHAR); /* localeconv() writes into an object that threads share */
     const size_t mark_length = strlen(mark);
     size_t n = 0;
 

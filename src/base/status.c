@@ -3,6 +3,7 @@
 #include "bluecone/status.h"
 
 #include "base/error_internal.h"
+#include "base/text.h"
 
 #include <stdarg.h>
 #include <stdio.h>
@@ -57,7 +58,7 @@ static void fill(bc_error *err, bc_status status, const char *file, int line, co
     err->status = status;
     err->line = line;
     (void)snprintf(err->file, sizeof err->file, "%s", file);
-    (void)vsnprintf(err->message, sizeof err->message, format, arguments);
+    (void)bc_text_vformat(err->message, sizeof err->message, format, arguments);
     disarm(err->file);
     disarm(err->message);
 }

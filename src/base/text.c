@@ -2,7 +2,57 @@
 /* text.c - trimming, folding, likeness and safe showing of words. */
 #include "base/text.h"
 
+#include <locale.h>
+#include <stdio.h>
 #include <string.h>
+
+/* This thread's locale while the C library writes for us: uselocale() changes that of no other thread. */
+typedef struct {
+    locale_t plain, kept;
+} locale_aside;
+
+static locale_aside put_locale_aside(void)
+{
+    const locale_t plain = newlocale(LC_ALL_MASK, "C", (locale_t)0); /* there without allocation or file */
+
+    return (locale_aside){plain, uselocale(plain)}; /* no locale would change none */
+}
+
+static void take_locale_back(locale_aside locale)
+{
+    (void)uselocale(locale.kept);
+    if (locale.plain != (locale_t)0)
+        freelocale(locale.plain);
+}
+
+int bc_text_vformat(char *to, size_t size, const char *format, va_list arguments)
+{
+    const locale_aside locale = put_locale_aside();
+    const int length = vsnprintf(to, size, format, arguments);
+
+    take_locale_back(locale);
+    return length;
+}
+
+void bc_text_of_errno(char *to, size_t size, int number)
+{
+    const locale_aside locale = put_locale_aside();
+
+    if (strerror_r(number, to, size) != 0)
+        (void)snprintf(to, size, "error %d", number);
+    take_locale_back(locale);
+}
+
+int bc_text_format(char *to, size_t size, const char *format, ...)
+{
+    va_list arguments;
+
+    va_start(arguments, format);
+    const int length = bc_text_vformat(to, size, format, arguments);
+
+    va_end(arguments);
+    return length;
+}
 
 const char *bc_text_skip_space(const char *text)
 {

@@ -3,10 +3,20 @@
 #ifndef TEXT_H
 #define TEXT_H
 
+#include "base/compiler.h"
+
+#include <stdarg.h>
 #include <stdbool.h>
 #include <stddef.h>
 
 #define BC_WORD_MAX 64 /* bytes of one word (an id, a component, a unit), with the final NUL */
+
+/* snprintf() that writes a decimal point in every locale: whatever holds a double goes through here. */
+int bc_text_format(char *to, size_t size, const char *format, ...) BC_PRINTF(3, 4);
+int bc_text_vformat(char *to, size_t size, const char *format, va_list arguments) BC_PRINTF(3, 0);
+
+/* What the system says of an errno, in English. */
+void bc_text_of_errno(char *to, size_t size, int number);
 
 /* The first character that is no blank, tab or carriage return. */
 const char *bc_text_skip_space(const char *text);

@@ -34,8 +34,10 @@ static bool grow(void **items, size_t size, size_t count)
 {
     void *more = realloc(*items, size * count);
 
-    *items = more ? more : *items;
-    return more != NULL;
+    if (!more)
+        return false;
+    *items = more;
+    return true;
 }
 
 static bool grow_rows(const stream_plan *p, stream_batch *b)

@@ -34,7 +34,7 @@ void composition_remark(bc_composition *c, const char *format, ...)
     if (c->remark_count == BC_REMARK_MAX)
         return;
     va_start(arguments, format);
-    (void)vsnprintf(c->remarks[c->remark_count], BC_REMARK_BYTES, format, arguments);
+    (void)bc_text_vformat(c->remarks[c->remark_count], BC_REMARK_BYTES, format, arguments);
     va_end(arguments);
     c->remark_count++;
 }

@@ -57,7 +57,7 @@ void cut_describe(const double parts[BC_SPECIES_CAPACITY], char *text, size_t si
     for (size_t i = 0; i < SPECIES_COUNT; i++) {
         if (parts[i] <= 0.0)
             continue;
-        const int n = snprintf(text + used, size - used, "%s%s %.4g %%", used ? ", " : "", bc_species_id(i), 100.0 * parts[i]);
+        const int n = bc_text_format(text + used, size - used, "%s%s %.4g %%", used ? ", " : "", bc_species_id(i), 100.0 * parts[i]);
 
         if (n < 0 || (size_t)n >= size - used)
             return;

@@ -172,7 +172,7 @@ static void tidy(const question *q, double share[])
         share[q->free_part[j]] = fmax(share[q->free_part[j]], 0.0);
 }
 
-static bc_status by_descents(const question *q, const nlopt_library *l, bc_aim *aim, bc_error *err)
+static bc_status by_descents(const question *q, nlopt_library *l, bc_aim *aim, bc_error *err)
 {
     bc_aim_problem copy = *q->p;
     double nearest[BC_BLEND_PARTS_MAX] = {0.0};
@@ -214,7 +214,7 @@ bc_status bc_aim_find(const bc_aim_problem *problem, bc_aim *aim, bc_error *err)
     else if (status == BC_OK)
         status = nlopt_library_open(&library, err);
     if (status == BC_OK && library)
-        status = by_descents(&q, library, &found, err);
+        status = nlopt_library_fed(library, by_descents(&q, library, &found, err), err);
     nlopt_library_close(library);
     if (status == BC_OK)
         *aim = found;

@@ -110,7 +110,7 @@ static void measure_text(const bc_burner *burner, const key_row *row, char *text
         memcpy(&there, (const char *)burner + row->flag, sizeof there);
     memcpy(&si, (const char *)burner + row->member, sizeof si);
     if (there)
-        (void)snprintf(text, size, "%.6g%s%s", burner_key_shown(row, si - row->added), unit[0] ? " " : "", unit);
+        (void)bc_text_format(text, size, "%.6g%s%s", burner_key_shown(row, si - row->added), unit[0] ? " " : "", unit);
 }
 
 void bc_burner_key_text(const bc_burner *burner, size_t index, char *text, size_t size)

@@ -145,20 +145,23 @@ static void tidy(const program *p, double x[])
         x[largest] = fmin(x[largest] + left, p->high[largest]);
 }
 
-bool program_descend(const nlopt_library *l, const program *p, double x[])
+bool program_descend(nlopt_library *l, const program *p, double x[])
 {
     descent d;
     double f = 0.0;
     nlopt_opt opt = l->create(NLOPT_LD_SLSQP, (unsigned)p->variables);
 
-    if (!opt)
+    if (!opt) {
+        l->starved = true;
         return false;
+    }
     memset(&d, 0, sizeof d); /* slopes along shares that are fixed stay zero */
     d.p = p;
-    const bool ready = set_up(l, opt, &d);
+    const bool ready = set_up(l, opt, &d); /* nothing that NLopt could refuse: what it lacks is memory */
 
-    if (ready)
-        (void)l->optimize(opt, x, &f); /* a descent that stops early is judged by where it stopped */
+    /* A descent that stops early is judged by where it stopped, but for that reason. */
+    if (!ready || l->optimize(opt, x, &f) == NLOPT_OUT_OF_MEMORY)
+        l->starved = true;
     l->destroy(opt);
     tidy(p, x);
     return ready;

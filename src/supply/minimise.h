@@ -32,9 +32,12 @@ typedef struct nlopt_library nlopt_library;
 BC_MUST_USE bc_status nlopt_library_open(nlopt_library **library, bc_error *err);
 void nlopt_library_close(nlopt_library *library);
 
+/* The status of work done with NLopt: BC_ERR_MEMORY when any descent lacked memory, whatever the others found. */
+BC_MUST_USE bc_status nlopt_library_fed(const nlopt_library *library, bc_status status, bc_error *err);
+
 /* One descent from x, which is replaced by its end; the caller judges by program_violation() whether the end
- * keeps the limits. False when NLopt refused to start. */
-bool program_descend(const nlopt_library *library, const program *p, double x[]);
+ * keeps the limits. False when NLopt could not start. */
+bool program_descend(nlopt_library *library, const program *p, double x[]);
 
 /* f at x, and the largest amount by which a limit or the sum is broken there; 0 or less when all are kept. */
 double program_value(const program *p, const double x[]);

@@ -4,9 +4,11 @@
 #define NLOPT_LIBRARY_H
 
 #include <nlopt.h>
+#include <stdbool.h>
 
 struct nlopt_library {
     void *handle;
+    bool starved; /* a descent lacked memory */
     nlopt_opt (*create)(nlopt_algorithm algorithm, unsigned n);
     void (*destroy)(nlopt_opt opt);
     nlopt_result (*optimize)(nlopt_opt opt, double *x, double *f);

@@ -13,7 +13,7 @@
 #define SHADOW_NOISE 1e-7  /* of the objective's scale per scale of the bound: below it a shadow price is none */
 
 /* The best end of all descents of a program that keeps its limits. False when none does. */
-static bool descend_all(const nlopt_library *l, const program *p, double best[], size_t *starts, size_t *agreed)
+static bool descend_all(nlopt_library *l, const program *p, double best[], size_t *starts, size_t *agreed)
 {
     double found[2 * PROGRAM_VARIABLES_MAX + 1];
     double x[PROGRAM_VARIABLES_MAX] = {0.0};
@@ -39,7 +39,7 @@ static bool descend_all(const nlopt_library *l, const program *p, double best[],
 }
 
 /* The optimum of the program again from where it was, after a bound has moved; false when it leads nowhere. */
-static bool solve_again(const nlopt_library *l, optimum_model *m, const double from[], double *f)
+static bool solve_again(nlopt_library *l, optimum_model *m, const double from[], double *f)
 {
     double x[PROGRAM_VARIABLES_MAX];
     program p;
@@ -53,7 +53,7 @@ static bool solve_again(const nlopt_library *l, optimum_model *m, const double f
 }
 
 /* -df/d(bound that gives way): over both sides where both can be solved. */
-static double shadow_price(const nlopt_library *l, optimum_model *m, size_t k, const double at[], double f)
+static double shadow_price(nlopt_library *l, optimum_model *m, size_t k, const double at[], double f)
 {
     const double step = RELAXED * m->limit[k].scale;
     double wider = f;
@@ -83,7 +83,7 @@ static bc_binding *add_binding(bc_optimum *o, const optimum_limit *limit)
     return b;
 }
 
-static void tell_what_holds(const nlopt_library *l, optimum_model *m, bc_optimum *o)
+static void tell_what_holds(nlopt_library *l, optimum_model *m, bc_optimum *o)
 {
     double c[PROGRAM_LIMITS_MAX];
     const double f = o->objective / m->scale;
@@ -98,7 +98,7 @@ static void tell_what_holds(const nlopt_library *l, optimum_model *m, bc_optimum
 }
 
 /* How far a limit would have to give way alone: its least breach with all others kept. */
-static void tell_needed(const nlopt_library *l, optimum_model *m, size_t k, bc_binding *b)
+static void tell_needed(nlopt_library *l, optimum_model *m, size_t k, bc_binding *b)
 {
     double x[PROGRAM_VARIABLES_MAX] = {0.0};
     size_t starts = 0;
@@ -126,7 +126,7 @@ static void take_end(const optimum_model *m, const double x[], bc_optimum *o)
 }
 
 /* The blend whose largest breach is least; the limits that are broken as much exclude each other. */
-static bc_status tell_conflict(const nlopt_library *l, optimum_model *m, bc_optimum *o, bc_error *err)
+static bc_status tell_conflict(nlopt_library *l, optimum_model *m, bc_optimum *o, bc_error *err)
 {
     double x[PROGRAM_VARIABLES_MAX] = {0.0};
     double c[PROGRAM_LIMITS_MAX];
@@ -156,7 +156,7 @@ static bc_status tell_conflict(const nlopt_library *l, optimum_model *m, bc_opti
     return BC_OK;
 }
 
-static bc_status find(const nlopt_library *l, optimum_model *m, bc_optimum *o, bc_error *err)
+static bc_status find(nlopt_library *l, optimum_model *m, bc_optimum *o, bc_error *err)
 {
     double x[PROGRAM_VARIABLES_MAX] = {0.0};
     program p;
@@ -184,7 +184,7 @@ bc_status bc_optimum_find(const bc_optimum_problem *problem, bc_optimum *optimum
         status = nlopt_library_open(&library, err);
     if (status != BC_OK)
         return status;
-    status = find(library, &model, &o, err);
+    status = nlopt_library_fed(library, find(library, &model, &o, err), err);
     nlopt_library_close(library);
     if (status == BC_OK)
         *optimum = o;

@@ -2,6 +2,8 @@
 /* tally_plan.c - whether two tallies are parts of one log's. */
 #include "supply/tally_internal.h"
 
+#include "base/text.h"
+
 #include <stdio.h>
 #include <string.h>
 
@@ -63,7 +65,7 @@ bool tally_plans_differ(const tally_plan *a, const tally_plan *b, char text[], s
     static const char *const PERIODS[] = {"nothing", "hour", "day", "month"};
 
     if (!same(a->step_s, b->step_s))
-        return snprintf(text, size, "usual steps of %.10g s and %.10g s", a->step_s, b->step_s) > 0;
+        return bc_text_format(text, size, "usual steps of %.10g s and %.10g s", a->step_s, b->step_s) > 0;
     if (a->by != b->by)
         return snprintf(text, size, "summed up by %s and by %s", PERIODS[a->by], PERIODS[b->by]) > 0;
     if (a->zoned != b->zoned)

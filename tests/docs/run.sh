@@ -1,7 +1,7 @@
 #!/bin/bash
 # Runs what the documents show: tests/docs/run.sh [DOCUMENT...]
 #
-# In README.md and DEVELOPERS.md each line "$ COMMAND" of a fenced block, in man/*.[157] of a block
+# In README.md and DEVELOPERS.md each line "$ COMMAND" of a fenced block, in man/*.[1357] of a block
 # .Bd -literal, is run by a shell, in a copy of the source tree's folders examples and compositions,
 # with bluecone first in PATH. The lines below it, up to the next command or the end of the block,
 # must be what it prints: both streams as a terminal shows them, or standard output alone. The
@@ -26,6 +26,13 @@ UPDATE=${UPDATE:-0}
 work=$(mktemp -d) || exit 2
 trap 'rm -rf "$work"' EXIT
 trap 'exit 2' INT TERM
+
+# Programs that a document compiles find the library that was built with the program.
+build=$(dirname "$(command -v bluecone)")
+export PKG_CONFIG_PATH=$build LD_LIBRARY_PATH=$build
+# shellcheck source=tests/library/python.sh
+. "$SRC/tests/library/python.sh"
+use_python "$build" "$work/bin"
 
 count=0
 failed=0
@@ -155,11 +162,11 @@ SECTIONS='NAME SYNOPSIS DESCRIPTION OPTIONS EXIT_STATUS EXAMPLES STANDARDS CAUTI
 check_pages() {
     local page
     : >"$work/missing"
-    for page in "$SRC"/man/*.[157]; do
+    for page in "$SRC"/man/*.[1357]; do
         # SEE ALSO and ENVIRONMENT stand where mdoc wants them, in pages that have them.
         test "$(sed -n -e '/^\.Sh SEE ALSO/d' -e '/^\.Sh ENVIRONMENT/d' -e 's/^\.Sh //p' "$page" | tr ' ' '_' | tr '\n' ' ')" = "$SECTIONS " ||
             case $page in
-            *.[57]) ;; # files and methods take no options and end with no code
+            *.[357]) ;; # the library, files and methods take no options and end with no code
             *) echo "${page##*/} does not have the sections $SECTIONS" >>"$work/missing" ;;
             esac
     done
@@ -167,7 +174,7 @@ check_pages() {
         test -e "$SRC/man/bluecone-$command.1" || echo "there is no man/bluecone-$command.1" >>"$work/missing"
     done
     point 'every command has its page, with all sections' "$work/missing"
-    mandoc -T lint -W warning "$SRC"/man/*.[157] >"$work/missing" 2>&1
+    mandoc -T lint -W warning "$SRC"/man/*.[1357] >"$work/missing" 2>&1
     point 'mandoc finds nothing in the pages' "$work/missing"
 }
 
@@ -209,7 +216,7 @@ check_methods_page() {
 if test $# -gt 0; then
     for document; do check_document "$document"; done
 else
-    for document in README.md DEVELOPERS.md man/*.[157]; do
+    for document in README.md DEVELOPERS.md man/*.[1357]; do
         case $document in
         man/*) for page in "$SRC"/$document; do check_document "man/${page##*/}"; done ;;
         *) check_document "$document" ;;

@@ -18,6 +18,10 @@ plant_sound_tree() {
 #ifdef __cplusplus
 extern "C" {
 #endif
+typedef struct {
+    int line; /* of a file */
+    double t_k;
+} bc_place;
 __attribute__((visibility("default"))) int bc_status_value(void);
 #ifdef __cplusplus
 }
@@ -75,10 +79,19 @@ refuses() {
     fresh_copy
 }
 
+# What the sound tree exports, needs and lays out is accepted.
+accept() {
+    put tests/abi/symbols <<<'bc_status_value
+bc_wobbe'
+    put tests/abi/needs <<<'sqrt   physics'
+    mkdir -p "$WORK/scratch" && WORK=$WORK/scratch sh "$rules/interface.sh" print | put tests/abi/interface
+}
+
 export SRC=$SOUND OUT=$SOUND/build
 plant_sound_tree
 build
-for rule in layers circles state headers symbols toplevel banned names; do
+accept
+for rule in layers circles state headers symbols interface toplevel banned names; do
     if ! said=$(run_rule $rule); then
         printf 'mutants: %s refuses the sound tree: %s\n' "$rule" "$said"
         failed=1
@@ -124,12 +137,22 @@ put src/value/extra.c <<<'__attribute__((visibility("default"))) int helper(void
 refuses symbols 'do not start with bc_'
 put tests/abi/symbols <<<'bc_wobbe'
 refuses symbols 'run make symbols'
+put tests/abi/needs <<<'sqrt'
+refuses symbols 'needs sqrt'
+put include/bluecone/wobbe.h <<<'/* Wobbe. */
+#include "bluecone/status.h"
+__attribute__((visibility("default"))) double bc_wobbe(double d, double h);'
+refuses interface '-__attribute__((visibility("default"))) double bc_wobbe(double h, double d)'
+sed -i 's/double t_k;/float t_k;/' "$SRC/include/bluecone/status.h"
+refuses interface '-  8+8 double t_k'
 for call in 'malloc:void *f(void) { return malloc(9); }' 'free:void f(void *p) { free(p); }' \
     'puts:int f(void) { return puts("x"); }' 'exit:void f(void) { exit(3); }' 'abort:void f(void) { abort(); }' \
     'printf:#undef _FORTIFY_SOURCE
 #define _FORTIFY_SOURCE 2
 int f(const char *s) { return printf("%s%d", s, 2); }' \
-    'getenv:char *f(void) { return getenv("X"); }' 'stderr:int f(void) { return fputs("x", stderr); }'; do
+    '__assert_fail:#include <assert.h>
+void f(int a) { assert(a == 3); }' 'localeconv:#include <locale.h>
+char *f(void) { return localeconv()->decimal_point; }' 'getenv:char *f(void) { return getenv("X"); }' 'stderr:int f(void) { return fputs("x", stderr); }'; do
     put src/value/extra.c <<<"#include <stdio.h>
 #include <stdlib.h>
 ${call#*:}"

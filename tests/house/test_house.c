@@ -61,6 +61,12 @@ static void the_library_exports_and_imports_only_what_it_may(void **state)
     run_rule("symbols");
 }
 
+static void the_binary_interface_is_the_accepted_one(void **state)
+{
+    (void)state;
+    run_rule("interface");
+}
+
 static void the_top_level_holds_only_what_belongs_there(void **state)
 {
     (void)state;
@@ -93,6 +99,7 @@ int main(void)
         cmocka_unit_test(the_library_has_no_writable_object),
         cmocka_unit_test(public_headers_compile_alone_as_c_and_cxx),
         cmocka_unit_test(the_library_exports_and_imports_only_what_it_may),
+        cmocka_unit_test(the_binary_interface_is_the_accepted_one),
         cmocka_unit_test(the_top_level_holds_only_what_belongs_there),
         cmocka_unit_test(unsafe_calls_are_not_made),
         cmocka_unit_test(file_names_are_unique_and_files_say_what_they_are),
