@@ -221,7 +221,7 @@ run-threads: $(OUT)/tests/library/test_threads
 # What the tests reach of src/; the counters are atomic since the stream has threads.
 coverage: deps-coverage ## lines and branches that the tests reach, with the least that must be
 	@$(MAKE) VARIANT=coverage run-tests
-	@cd build/coverage && gcovr --root ../.. --object-directory . --filter ../../src/ --exclude-unreachable-branches --sort-percentage \
+	@cd build/coverage && gcovr --root ../.. --object-directory . --filter ../../src/ --exclude-unreachable-branches --gcov-ignore-parse-errors --sort-percentage \
 	    --txt coverage.txt --html-details coverage.html --print-summary --fail-under-line 95 --fail-under-branch 85 .
 clang: deps-lint ## the program, the library and the test programs, by Clang with -Werror
 	@$(MAKE) VARIANT=clang WERROR=1 all tests

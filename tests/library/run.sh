@@ -131,8 +131,8 @@ build_c() {
     ldd "$work/gas_value" | grep libbluecone >>"$work/wrong"
     point 'it does so with the static library'
 
-    "${CXX:-g++}" -std=c++11 $STRICT -x c++ examples/library/gas_value.c -x none $(flags --cflags --libs) -o "$work/gas_value" >"$work/wrong" 2>&1 &&
-        check "$work/gas_value" >"$work/wrong"
+    "${CXX:-g++}" -std=c++11 $STRICT -x c++ examples/library/gas_value.c -x none $(flags --cflags --libs) -o "$work/gas_value_cpp" >"$work/wrong" 2>&1 &&
+        check "$work/gas_value_cpp" >"$work/wrong"
     point 'it does so as C++'
 }
 
