@@ -172,6 +172,7 @@ const char *stream_flag_meaning(size_t flag);
 
 /* Where the log comes from. */
 typedef struct {
+    const stream_plan *p;
     int fd;
     bool is_standard, follows, ended, regular;
     uint64_t bytes, size;                     /* read; of a regular file */
@@ -183,7 +184,7 @@ bc_status stream_input_open(stream_input *in, const stream_plan *p, bc_error *er
 void stream_input_close(stream_input *in);
 
 /* Reads so much into in->rest that the columns can be made out; errors as below. Some of it may then be skipped. */
-bc_status stream_input_begin(stream_input *in, const stream_plan *p, bc_error *err);
+bc_status stream_input_begin(stream_input *in, bc_error *err);
 void stream_input_skip(stream_input *in, size_t length);
 
 /* Fills a block with whole rows.
@@ -192,7 +193,7 @@ void stream_input_skip(stream_input *in, size_t length);
  *   length   out: bytes of whole rows; 0 at the end, or when `wait` is false and none have come
  *
  * BC_ERR_FILE: the device failed, or the file became shorter while it was followed; BC_ERR_INPUT: a row is longer than a block. */
-bc_status stream_input_fill(stream_input *in, const stream_plan *p, char *block, size_t *length, bool wait, bc_error *err);
+bc_status stream_input_fill(stream_input *in, char *block, size_t *length, bool wait, bc_error *err);
 
 /* Lets SIGINT, SIGTERM and SIGHUP end the stream in order instead of at once; those that are ignored stay so. */
 void stream_catch_signals(void);

@@ -240,10 +240,9 @@ bc_status stream_find_columns(stream_plan *p, const char *text, size_t length, b
 /* Adds a text; returns behind it. */
 static char *add(char *to, const char *text)
 {
-    const size_t length = strlen(text);
-
-    memcpy(to, text, length);
-    return to + length;
+    while (*text != '\0')
+        *to++ = *text++;
+    return to;
 }
 
 size_t stream_put_header(const stream_plan *p, const char *text, size_t length, char *out)

@@ -49,7 +49,7 @@ static void set(stream_mark *mark, stream_flag flag)
 /* The middle one of a few values, which are sorted by insertion. */
 static double median_of(const double values[], size_t count)
 {
-    double sorted[STREAM_STEPS];
+    double sorted[STREAM_STEPS] = {0.0};
 
     for (size_t i = 0; i < count; i++) {
         size_t at = i;

@@ -14,13 +14,13 @@
 
 #define WAIT_MS 250 /* between two looks at a file that is followed */
 
-static bc_status fail(const stream_plan *p, int reason, bc_error *err)
+static bc_status fail(const stream_input *in, int reason, bc_error *err)
 {
     char text[128];
 
     if (strerror_r(reason, text, sizeof text) != 0)
         text[0] = '\0';
-    return bc_fail_at(err, reason == EISDIR ? BC_ERR_INPUT : BC_ERR_FILE, p->path, 0, "the log cannot be read: %s", text);
+    return bc_fail_at(err, reason == EISDIR ? BC_ERR_INPUT : BC_ERR_FILE, in->p->path, 0, "the log cannot be read: %s", text);
 }
 
 bc_status stream_input_open(stream_input *in, const stream_plan *p, bc_error *err)
@@ -29,6 +29,7 @@ bc_status stream_input_open(stream_input *in, const stream_plan *p, bc_error *er
     struct stat there;
 
     memset(in, 0, sizeof *in);
+    in->p = p;
     in->fd = -1;
     in->is_standard = a->argument_count == 0 || strcmp(a->argument[0], "-") == 0;
     in->follows = a->value[OPTION_follow] != NULL;
@@ -55,17 +56,17 @@ void stream_input_close(stream_input *in)
 }
 
 /* A file that is shorter than what was read of it was written anew: what follows would be no continuation. */
-static bc_status check_shrunk(const stream_input *in, const stream_plan *p, bc_error *err)
+static bc_status check_shrunk(const stream_input *in, bc_error *err)
 {
     struct stat now;
 
     if (fstat(in->fd, &now) == 0 && (uint64_t)now.st_size < in->bytes)
-        return bc_fail_at(err, BC_ERR_FILE, p->path, 0, "the log became shorter while it was followed; start again on the new one");
+        return bc_fail_at(err, BC_ERR_FILE, in->p->path, 0, "the log became shorter while it was followed; start again on the new one");
     return BC_OK;
 }
 
 /* Reads once; *got is 0 at the end, and -1 when nothing has come yet. */
-static bc_status read_some(stream_input *in, const stream_plan *p, char *to, size_t room, bool wait, ssize_t *got, bc_error *err)
+static bc_status read_some(stream_input *in, char *to, size_t room, bool wait, ssize_t *got, bc_error *err)
 {
     struct pollfd ready = {in->fd, POLLIN, 0};
 
@@ -80,11 +81,11 @@ static bc_status read_some(stream_input *in, const stream_plan *p, char *to, siz
         return BC_OK;
     }
     if (*got < 0)
-        return fail(p, errno, err);
+        return fail(in, errno, err);
     in->bytes += (uint64_t)*got;
     if (*got > 0 || !in->follows)
         return BC_OK;
-    const bc_status status = check_shrunk(in, p, err);
+    const bc_status status = check_shrunk(in, err);
 
     if (status == BC_OK && wait && !stream_interrupted())
         (void)poll(NULL, 0, WAIT_MS);
@@ -102,17 +103,17 @@ static size_t count_feeds(const char *text, size_t length)
 }
 
 /* The first row names the columns and the second shows the decimal mark; an object does both. */
-bc_status stream_input_begin(stream_input *in, const stream_plan *p, bc_error *err)
+bc_status stream_input_begin(stream_input *in, bc_error *err)
 {
     bc_status status = BC_OK;
 
     while (status == BC_OK && !in->ended && !stream_interrupted() && in->rest_length < STREAM_BLOCK) {
-        const size_t needed = p->has_header && in->rest_length > 0 && in->rest[0] != '{' ? 2 : 1;
+        const size_t needed = in->p->has_header && in->rest_length > 0 && in->rest[0] != '{' ? 2 : 1;
         ssize_t got = 0;
 
         if (count_feeds(in->rest, in->rest_length) >= needed)
             break;
-        status = read_some(in, p, in->rest + in->rest_length, STREAM_BLOCK - in->rest_length, true, &got, err);
+        status = read_some(in, in->rest + in->rest_length, STREAM_BLOCK - in->rest_length, true, &got, err);
         in->ended = got == 0;
         in->rest_length += got > 0 ? (size_t)got : 0;
     }
@@ -147,7 +148,7 @@ static size_t whole_rows(const stream_plan *p, const char *block, size_t length,
     return at;
 }
 
-bc_status stream_input_fill(stream_input *in, const stream_plan *p, char *block, size_t *length, bool wait, bc_error *err)
+bc_status stream_input_fill(stream_input *in, char *block, size_t *length, bool wait, bc_error *err)
 {
     size_t filled = in->rest_length;
     bool ready = false;
@@ -158,7 +159,7 @@ bc_status stream_input_fill(stream_input *in, const stream_plan *p, char *block,
     ready = memchr(block, '\n', filled) != NULL;
     while (!in->ended && filled < STREAM_BLOCK && !stream_interrupted()) {
         ssize_t got = 0;
-        const bc_status status = read_some(in, p, block + filled, STREAM_BLOCK - filled, wait && !ready, &got, err);
+        const bc_status status = read_some(in, block + filled, STREAM_BLOCK - filled, wait && !ready, &got, err);
 
         if (status != BC_OK)
             return status;
@@ -168,9 +169,9 @@ bc_status stream_input_fill(stream_input *in, const stream_plan *p, char *block,
         filled += got > 0 ? (size_t)got : 0;
         ready = ready || (got > 0 && memchr(block + filled - (size_t)got, '\n', (size_t)got));
     }
-    *length = whole_rows(p, block, filled, in->ended);
+    *length = whole_rows(in->p, block, filled, in->ended);
     if (*length == 0 && filled == STREAM_BLOCK)
-        return bc_fail_at(err, BC_ERR_INPUT, p->path, 0, "a row is longer than %zu KiB; is it a log?", STREAM_BLOCK >> 10);
+        return bc_fail_at(err, BC_ERR_INPUT, in->p->path, 0, "a row is longer than %zu KiB; is it a log?", STREAM_BLOCK >> 10);
     in->rest_length = filled - *length;
     memcpy(in->rest, block + *length, in->rest_length);
     return BC_OK;

@@ -133,5 +133,5 @@ void stream_json_row(const stream_plan *p, stream_batch *b, const char *text, si
     stream_put(b, ",\"flags\":\"", 10);
     mark.end = b->out_length;
     stream_put(b, "\"}\n", 3);
-    stream_add_mark(p, b, &mark, &r);
+    stream_add_mark(b, &mark, &r);
 }

@@ -115,8 +115,9 @@ static void add_reason(stream_reading *r, const char *id, const bc_error *err)
         (void)snprintf(r->reason, sizeof r->reason, "%.40s%s%.150s", named ? "" : id, named ? "" : ": ", err->message);
 }
 
-static void add_figure(const stream_plan *p, const stream_figure *f, size_t i, const bc_subject *subject, stream_cells *cells, double *kept, stream_reading *r)
+static void add_figure(const stream_plan *p, size_t i, const bc_subject *subject, stream_cells *cells, double *kept, stream_reading *r)
 {
+    const stream_figure *f = &p->figures[i];
     double value = 0.0;
     bc_error err;
 
@@ -152,56 +153,53 @@ static bc_status judge(const stream_plan *p, stream_batch *b, const bc_gas *gas,
     return status;
 }
 
-/* Everything that makes a row bad fails here, before anything of it is kept. */
-static bc_status make_subject(const stream_plan *p, stream_batch *b, stream_reading *r, stream_mark *mark, stream_cells *cells, bc_subject *subject, bc_error *err)
+static bool make_gas(const stream_plan *p, const stream_reading *r, bc_gas *gas, bc_subject *subject, bc_error *err)
 {
-    bc_gas gas;
-
-    if (r->reason[0] != '\0')
-        return bc_fail(err, BC_ERR_INPUT, "%s", r->reason);
-    if (!(r->sum >= SUM_MIN && r->sum <= SUM_MAX))
-        return bc_fail(err, BC_ERR_INPUT, "its components add up to %.6g %%, not to 100 %%", 100.0 * r->sum);
-    bc_status status = bc_gas_from_amounts(r->amounts, &gas, err);
-
-    if (status == BC_OK)
-        status = bc_subject_make(&p->reference, &gas, NULL, subject, err);
-    if (status == BC_OK && p->contract)
-        status = judge(p, b, &gas, mark, cells, err);
-    if (status == BC_OK && r->flow >= 0.0 && p->keeps) {
-        bc_per_amount flow = p->flow;
-
-        flow.si *= r->flow;
-        mark->has_power = flow.si > 0.0 && row_power_w(&p->reference, &gas, &flow, &mark->power_w, NULL) == BC_OK;
+    if (r->reason[0] != '\0') {
+        (void)bc_fail(err, BC_ERR_INPUT, "%s", r->reason);
+        return false;
     }
-    if (status == BC_OK && p->has_calibration && is_calibration(p, &gas))
-        r->flags |= 1U << STREAM_calibration;
-    return status;
+    if (!(r->sum >= SUM_MIN && r->sum <= SUM_MAX)) {
+        (void)bc_fail(err, BC_ERR_INPUT, "its components add up to %.6g %%, not to 100 %%", 100.0 * r->sum);
+        return false;
+    }
+    return bc_gas_from_amounts(r->amounts, gas, err) == BC_OK && bc_subject_make(&p->reference, gas, NULL, subject, err) == BC_OK;
+}
+
+/* A flow of nothing carries no heat; a row is good without its flow, too. */
+static void take_power(const stream_plan *p, double flow, const bc_gas *gas, stream_mark *mark)
+{
+    bc_per_amount amount = p->flow;
+
+    amount.si *= flow;
+    mark->has_power = amount.si > 0.0 && row_power_w(&p->reference, gas, &amount, &mark->power_w, NULL) == BC_OK;
 }
 
 void stream_evaluate(const stream_plan *p, stream_batch *b, stream_reading *r, stream_mark *mark, stream_cells *cells)
 {
+    bc_gas gas;
     bc_subject subject;
     bc_error err;
     double kept = 0.0;
 
     memset(cells->length, 0, p->figure_count);
     cells->verdict[0] = '\0';
-    mark->known = 0;
-    mark->broken = 0;
-    mark->has_power = false;
-    mark->good = make_subject(p, b, r, mark, cells, &subject, &err) == BC_OK;
+    mark->good = make_gas(p, r, &gas, &subject, &err) && (!p->contract || judge(p, b, &gas, mark, cells, &err) == BC_OK);
     if (!mark->good) {
         (void)snprintf(r->reason, sizeof r->reason, "%.*s", STREAM_REASON_MAX - 1, err.message);
         return;
     }
+    if (p->keeps && r->flow >= 0.0)
+        take_power(p, r->flow, &gas, mark);
+    if (p->has_calibration && is_calibration(p, &gas))
+        r->flags |= 1U << STREAM_calibration;
     mark->wobbe = subject.value.wobbe_gross_j_per_m3;
     for (size_t i = 0; i < p->figure_count; i++)
-        add_figure(p, &p->figures[i], i, &subject, cells, p->keeps ? &b->figures[b->count * p->figure_count + i] : &kept, r);
+        add_figure(p, i, &subject, cells, p->keeps ? &b->figures[b->count * p->figure_count + i] : &kept, r);
 }
 
-void stream_add_mark(const stream_plan *p, stream_batch *b, stream_mark *mark, const stream_reading *r)
+void stream_add_mark(stream_batch *b, stream_mark *mark, const stream_reading *r)
 {
-    (void)p;
     mark->flags = r->flags;
     mark->has_time = r->has_time;
     mark->zoned = r->zoned;

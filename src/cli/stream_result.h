@@ -46,6 +46,6 @@ void stream_read_cells(const stream_plan *p, stream_batch *b, stream_reading *r,
 void stream_put(stream_batch *b, const char *text, size_t length);
 
 /* Adds the mark of a row to the batch. */
-void stream_add_mark(const stream_plan *p, stream_batch *b, stream_mark *mark, const stream_reading *r);
+void stream_add_mark(stream_batch *b, stream_mark *mark, const stream_reading *r);
 
 #endif

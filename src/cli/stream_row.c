@@ -250,7 +250,7 @@ static void work_row(const stream_plan *p, stream_batch *b, const char *text, si
     put_row(p, b, &at);
     put_results(p, b, &r, &mark, &cells);
     stream_put(b, feed ? end : p->line_end, feed ? ending : strlen(p->line_end));
-    stream_add_mark(p, b, &mark, &r);
+    stream_add_mark(b, &mark, &r);
 }
 
 static bool is_blank(const char *text, size_t length)

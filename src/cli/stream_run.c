@@ -124,7 +124,7 @@ static bc_status go_through(ring *r, stream_input *in, stream_take *take, void *
         const bool idle = r->tail == r->head;
         stream_batch *b = &r->batches[r->head % r->slots];
 
-        status = stream_input_fill(in, r->p, b->in, &b->in_length, idle, err);
+        status = stream_input_fill(in, b->in, &b->in_length, idle, err);
         if (status == BC_OK && b->in_length > 0)
             hand_out(r);
         else if (status == BC_OK && !in->ended && !stream_interrupted() && !idle)
@@ -139,7 +139,7 @@ static bc_status go_alone(const stream_plan *p, stream_batch *b, stream_input *i
     bc_status status = BC_OK;
 
     while (status == BC_OK && !in->ended && !stream_interrupted()) {
-        status = stream_input_fill(in, p, b->in, &b->in_length, true, err);
+        status = stream_input_fill(in, b->in, &b->in_length, true, err);
         if (status != BC_OK || b->in_length == 0)
             continue;
         stream_work(p, b);

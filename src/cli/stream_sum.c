@@ -167,7 +167,7 @@ static bc_status hold(stream_sum *s, const tally_row *row, bc_error *err)
 
     held->row = *row;
     memcpy(held->values, row->values, s->p->figure_count * sizeof *row->values);
-    if (s->p->contract)
+    if (s->p->contract && row->limit_values)
         memcpy(held->limits, row->limit_values, s->p->contract->limit_count * sizeof *row->limit_values);
     return s->first_count == STREAM_SUM_FIRST ? stream_sum_begin(s, err) : BC_OK;
 }

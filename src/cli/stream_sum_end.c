@@ -115,7 +115,7 @@ static bc_status merge(const arguments *a, tally *parts[], bc_error *err)
     if (status != BC_OK)
         return status;
     if (tally_plan_of(parts[0])->step_s > 0.0)
-        qsort(parts, a->argument_count, sizeof *parts, compare_begin);
+        qsort(parts, a->argument_count, sizeof(tally *), compare_begin);
     for (size_t i = 1; i < a->argument_count && status == BC_OK; i++)
         status = tally_merge(parts[0], parts[i], err);
     return status;
