@@ -123,7 +123,7 @@ static void add_figure(const stream_plan *p, size_t i, const bc_subject *subject
 
     if (bc_quantity_value(f->quantity, subject, &value, &err) != BC_OK) {
         add_reason(r, bc_quantity_at(f->quantity)->id, &err);
-        *kept = NAN;
+        *kept = (double)NAN;
         return;
     }
     value = bc_unit_from_si(&f->shown, bc_unit_to_si(&f->own, value));
