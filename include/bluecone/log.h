@@ -99,7 +99,8 @@ BC_API bool bc_log_held(const bc_log *log, size_t row, double *time_s, double *h
 /* The figure of a row; false when it has none. */
 BC_API bool bc_log_value(const bc_log *log, size_t row, size_t limit, double *value);
 
-/* Reads a time of ISO 8601: 2026-03-01T12:00, 2026-03-01 12:00:30, 2026-03-01; behind it Z or +01:00.
+/* Reads a time of ISO 8601: 2026-03-01T12:00, 2026-03-01 12:00:30, 2026-03-01; behind it Z or +01:00. The date may also be
+ * written 2026/03/01 or 01.03.2026 (day, month, year).
  *
  *   time_s   out: seconds since 1970-01-01 00:00; with a zone those of UTC; untouched on failure
  *   zoned    out: a zone was written

@@ -52,14 +52,19 @@ static bool take_sign(const char **p, char sign)
     return true;
 }
 
+/* 2026-03-01 of ISO 8601, 2026/03/01, or 01.03.2026: points stand behind a day and a month wherever they stand at all,
+ * while 01/03/2026 is one day here and another one there. */
 static bool take_date(const char **p, long *days)
 {
+    const bool day_first = strlen(*p) > 2 && (*p)[2] == '.';
+    const char sign = day_first ? '.' : strlen(*p) > 4 && (*p)[4] == '/' ? '/' : '-';
     int year = 0;
     int month = 0;
     int day = 0;
+    const bool found = day_first ? take(p, 2, 1, 31, &day) && take_sign(p, sign) && take(p, 2, 1, 12, &month) && take_sign(p, sign) && take(p, 4, 1970, 9999, &year)
+                                 : take(p, 4, 1970, 9999, &year) && take_sign(p, sign) && take(p, 2, 1, 12, &month) && take_sign(p, sign) && take(p, 2, 1, 31, &day);
 
-    if (!take(p, 4, 1970, 9999, &year) || !take_sign(p, '-') || !take(p, 2, 1, 12, &month) || !take_sign(p, '-')
-        || !take(p, 2, 1, days_in(year, month), &day))
+    if (!found || day > days_in(year, month))
         return false;
     *days = log_days_from(year, month, day);
     return true;

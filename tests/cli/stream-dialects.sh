@@ -17,3 +17,4 @@ printf 'methane [mass %%],nitrogen [mass %%]\n97.41,2.59\n' | show mass
 printf 'methane,nitrogen\n97.41,2.59\n' | show 'mass by an option' --shares 'mass %'
 printf 'methane [vol %%],nitrogen [vol %%]\n98.5,1.5\n' | show volume
 printf 'date,time,methane,nitrogen\n2026-03-01,00:00,98.5,1.5\n2026-03-01,00:00,98.5,1.5\n' | show 'date and time'
+printf 'date;CH4;N2\n24.12.2026 00:00;98,5;1,5\n24.12.2026 01:00;97,25;2,75\n24.12.2026 01:00;97,25;2,75\n' | show 'day, month, year'
