@@ -47,8 +47,8 @@ VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/blueco
 SOVERSION := 0
 
 DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libxlsxwriter-dev libnlopt-dev libcsv-dev
-DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip python3
-DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv chromium
+DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip parallel python3
+DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv chromium openjdk-17-jre-headless time
 DEPS_BENCH := $(DEPS_BUILD) mawk miller
 DEPS_COVERAGE := $(DEPS_TEST) gcovr
 DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe

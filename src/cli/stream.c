@@ -202,7 +202,7 @@ static bc_status check_end(const stream_case *s, bc_error *err)
 /* What the rows as a whole come to. */
 static bc_status answer_log(const stream_case *s, bc_error *err)
 {
-    if (s->rows == 0 && !s->plan.a->value[OPTION_follow])
+    if (s->rows == 0 && !s->plan.is_part && !s->plan.a->value[OPTION_follow])
         return bc_fail_at(err, BC_ERR_INPUT, s->plan.path, 0, "the log has no row behind its header");
     return BC_OK;
 }
@@ -215,12 +215,12 @@ static bc_status finish(stream_case *s, bc_error *err)
         status = output_finish(&s->out, err);
     if (status != BC_OK)
         return status;
-    s->code = s->refused == s->rows ? bc_exit_code(BC_ERR_INPUT) : s->outside > 0 ? ANSWER_NO : 0;
+    s->code = s->refused == s->rows && !s->plan.is_part ? bc_exit_code(BC_ERR_INPUT) : s->outside > 0 ? ANSWER_NO : 0;
     if (!s->plan.a->value[OPTION_summary])
         tell(s);
     tell_refused(s);
     status = answer_log(s, err);
-    if (status == BC_OK && s->plan.keeps && s->rows > s->refused)
+    if (status == BC_OK && s->plan.keeps && (s->rows > s->refused || s->plan.is_part))
         status = stream_sum_end(&s->sum, &s->code, err);
     return status;
 }

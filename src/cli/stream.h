@@ -13,7 +13,8 @@
 
 #include <stdint.h>
 
-#define STREAM_BLOCK ((size_t)256 << 10)      /* bytes of rows that are worked at in one piece; a longer row is no row */
+#define STREAM_BLOCK ((size_t)256 << 10)      /* bytes of rows that are worked at in one piece, at most; a longer row is no row */
+#define STREAM_MEMORY ((size_t)24 << 20)      /* of all batches together, by the usual length of what a row comes to */
 #define STREAM_QUOTED_MAX ((size_t)16 << 10)  /* a quote that is not closed within so many bytes is a slip */
 #define STREAM_FIGURES_MAX 64
 #define STREAM_STEPS 15                       /* of which the usual step is the median */
@@ -69,6 +70,7 @@ typedef struct {
     bool has_calibration;
     bc_gas calibration;
     bool alone;                               /* rows are not compared with each other */
+    bool is_part;                             /* of a log, maybe one without a row that can be used */
     bool keeps;                               /* figures of the rows are kept for a summary */
     bool drops;                               /* rows themselves are not written */
     double step_s;                            /* the usual step; 0: to be found out */
@@ -103,7 +105,7 @@ typedef struct {
     size_t out_length, out_room;
     stream_mark *marks;
     size_t count, room;
-    double *figures, *limits;                 /* by rows; only where they are kept */
+    double *figures, *limits;                 /* by rows, stream_limits() of these each; only where they are kept */
     size_t refused;
     size_t first_refused;                     /* index of its mark */
     char reason[STREAM_REASON_MAX];           /* of the first refused row */
@@ -142,6 +144,9 @@ typedef enum {
  * greater than LOG_COLUMNS_MAX, only so many are kept. */
 stream_cut stream_split(char delimiter, const char *text, size_t length, char (*cells)[LOG_CELL_MAX], size_t *count);
 
+/* Limits a row has room for; never none. */
+size_t stream_limits(const stream_plan *p);
+
 /* Makes the results of a block. */
 void stream_work(const stream_plan *p, stream_batch *b);
 
@@ -176,8 +181,11 @@ typedef struct {
     int fd;
     bool is_standard, follows, ended, regular;
     uint64_t bytes, size;                     /* read; of a regular file */
-    char *rest;                               /* begin of a row whose end has not come yet; STREAM_BLOCK bytes */
+    char *rest;                               /* what was read and is in no block yet; STREAM_BLOCK bytes */
     size_t rest_length;
+    bool waits;                               /* rows stand in rest that more bytes need not be read for */
+    size_t block, block_max;                  /* bytes to read for the next block, unless a row is longer */
+    size_t rows_max;                          /* in a block */
 } stream_input;
 
 bc_status stream_input_open(stream_input *in, const stream_plan *p, bc_error *err);
@@ -194,6 +202,12 @@ void stream_input_skip(stream_input *in, size_t length);
  *
  * BC_ERR_FILE: the device failed, or the file became shorter while it was followed; BC_ERR_INPUT: a row is longer than a block. */
 bc_status stream_input_fill(stream_input *in, char *block, size_t *length, bool wait, bc_error *err);
+
+/* Bounds what goes into one of so many batches, so that all of them stay within STREAM_MEMORY. */
+void stream_input_share(stream_input *in, size_t batches);
+
+/* True when no further row comes: at the end of the log, or after a signal. */
+bool stream_input_over(const stream_input *in);
 
 /* Lets SIGINT, SIGTERM and SIGHUP end the stream in order instead of at once; those that are ignored stay so. */
 void stream_catch_signals(void);

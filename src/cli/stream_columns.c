@@ -217,19 +217,19 @@ bc_status stream_find_columns(stream_plan *p, const char *text, size_t length, b
     const size_t mark = length >= strlen(BOM) && memcmp(text, BOM, strlen(BOM)) == 0 ? strlen(BOM) : 0;
     const char *form = p->a->value[OPTION_form];
     beginning b = {text, length, mark, last, 0};
-    const char *row = NULL;
+    const char *row = text;
     size_t row_length = 0;
 
     p->mark_length = mark;
     /* until the delimiter is known a row ends with its line, unless a quote at its begin goes on */
     p->delimiter = ',';
-    if (!next_row(p, &b, &row, &row_length))
+    if (!next_row(p, &b, &row, &row_length) && !(last && p->is_part))
         return bc_fail_at(err, BC_ERR_INPUT, p->path, 0, last ? "the log is empty; its first row names the columns" : "the first row is longer than 256 KiB; is it a log?");
     const char *first = row;
 
-    while (is_space(*first))
+    while (first < row + row_length && is_space(*first))
         first++;
-    if (form ? form[0] == 'n' : *first == '{') {
+    if (form ? form[0] == 'n' : first < row + row_length && *first == '{') {
         p->form = STREAM_NDJSON;
         return take_ndjson(p, &b, row, row_length, header, err);
     }

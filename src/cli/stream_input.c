@@ -13,6 +13,11 @@
 #include <unistd.h>
 
 #define WAIT_MS 250 /* between two looks at a file that is followed */
+#define BLOCK_LEAST ((size_t)16 << 10)
+#define ROWS_LEAST 64
+#define ROWS_MOST 4096
+#define VERDICT_WORD 16 /* about the length of the name of a limit */
+#define RESULT_REST 32  /* of the parting signs, and of what a flag or a reason takes in the mean */
 
 static bc_status fail(const stream_input *in, int reason, bc_error *err)
 {
@@ -124,55 +129,90 @@ void stream_input_skip(stream_input *in, size_t length)
 {
     in->rest_length -= length;
     memmove(in->rest, in->rest + length, in->rest_length);
+    in->waits = in->rest_length > 0;
 }
 
-/* Bytes of the whole rows in a block. Where no quote is, that is up to the last line feed. */
-static size_t whole_rows(const stream_plan *p, const char *block, size_t length, bool last)
+bool stream_input_over(const stream_input *in)
 {
+    return !in->waits && (in->ended || stream_interrupted());
+}
+
+static size_t within(size_t value, size_t least, size_t most)
+{
+    return value < least ? least : value > most ? most : value;
+}
+
+/* What a row comes to beside its own text: its mark, what is kept of it, what is written behind it. */
+static size_t row_bytes(const stream_plan *p)
+{
+    const size_t limits = p->contract ? p->contract->limit_count : 0;
+    size_t bytes = sizeof(stream_mark) + limits * sizeof(double) + (p->keeps ? p->figure_count * sizeof(double) : 0);
+
+    for (size_t i = 0; i < p->figure_count && !p->drops; i++)
+        bytes += (size_t)p->digits + 6 + (p->form == STREAM_NDJSON ? strlen(p->figures[i].heading) + 4 : 0);
+    return bytes + (p->drops ? 0 : limits * VERDICT_WORD + RESULT_REST);
+}
+
+/* Half of a share is for what the rows come to, half for their text, which stands in the block and in front of the results. */
+void stream_input_share(stream_input *in, size_t batches)
+{
+    const size_t share = STREAM_MEMORY / batches;
+
+    in->rows_max = within(share / 2 / row_bytes(in->p), ROWS_LEAST, ROWS_MOST);
+    in->block_max = within(share / 4, BLOCK_LEAST, STREAM_BLOCK);
+    in->block = in->block_max;
+}
+
+/* Bytes of the whole rows in a block, rows_max of them at most; *more: others may stand behind them. */
+static size_t whole_rows(const stream_input *in, const char *block, size_t length, bool *more)
+{
+    size_t rows = 0;
     size_t at = 0;
 
-    if (last)
-        return length;
-    if (p->form == STREAM_NDJSON || !memchr(block, '"', length)) {
-        while (length > 0 && block[length - 1] != '\n')
-            length--;
-        return length;
-    }
-    while (at < length) {
-        const size_t row = stream_row_end(p, block + at, length - at, false);
+    while (rows < in->rows_max && at < length) {
+        const size_t row = stream_row_end(in->p, block + at, length - at, in->ended);
 
         if (row == 0)
             break;
         at += row;
+        rows++;
     }
+    *more = rows == in->rows_max && at < length;
     return at;
+}
+
+/* Where short rows end a block early, the next one is read no longer than that. */
+static void keep_rest(stream_input *in, const char *block, size_t used, size_t filled)
+{
+    in->rest_length = filled - used;
+    memcpy(in->rest, block + used, in->rest_length);
+    in->block = within(in->waits ? used : 2 * in->block, BLOCK_LEAST, in->block_max);
 }
 
 bc_status stream_input_fill(stream_input *in, char *block, size_t *length, bool wait, bc_error *err)
 {
     size_t filled = in->rest_length;
-    bool ready = false;
 
     memcpy(block, in->rest, filled);
-    *length = 0;
     in->rest_length = 0;
-    ready = memchr(block, '\n', filled) != NULL;
-    while (!in->ended && filled < STREAM_BLOCK && !stream_interrupted()) {
+    *length = whole_rows(in, block, filled, &in->waits);
+    while (!in->ended && !stream_interrupted() && (filled < in->block || (*length == 0 && filled < STREAM_BLOCK))) {
+        const size_t aim = filled < in->block ? in->block : STREAM_BLOCK;
         ssize_t got = 0;
-        const bc_status status = read_some(in, block + filled, STREAM_BLOCK - filled, wait && !ready, &got, err);
+        const bc_status status = read_some(in, block + filled, aim - filled, wait && *length == 0, &got, err);
 
         if (status != BC_OK)
             return status;
-        if (got < 0 && (!wait || ready))
+        if (got < 0 && (!wait || *length > 0))
             break;
         in->ended = got == 0;
         filled += got > 0 ? (size_t)got : 0;
-        ready = ready || (got > 0 && memchr(block + filled - (size_t)got, '\n', (size_t)got));
+        if (*length == 0)
+            *length = whole_rows(in, block, filled, &in->waits);
     }
-    *length = whole_rows(in->p, block, filled, in->ended);
+    *length = whole_rows(in, block, filled, &in->waits);
     if (*length == 0 && filled == STREAM_BLOCK)
         return bc_fail_at(err, BC_ERR_INPUT, in->p->path, 0, "a row is longer than %zu KiB; is it a log?", STREAM_BLOCK >> 10);
-    in->rest_length = filled - *length;
-    memcpy(in->rest, block + *length, in->rest_length);
+    keep_rest(in, block, *length, filled);
     return BC_OK;
 }

@@ -82,15 +82,6 @@ bool part_group_from(const json_t *from, size_t figures, tally_group *g)
            && (g->last_ms < 0 ? g->first_ms == TALLY_NO_TIME : g->first_ms <= g->last_ms);
 }
 
-json_t *part_groups_to(const tally_groups *s, bool *failed)
-{
-    json_t *a = json_array();
-
-    for (size_t i = 0; i < s->count; i++)
-        part_append(a, part_group_to(s->groups[i], s->figures, failed), failed);
-    return a;
-}
-
 bool part_groups_from(const json_t *from, int64_t key_max, size_t most, tally_groups *s)
 {
     int64_t before = -1;

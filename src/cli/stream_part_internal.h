@@ -37,7 +37,6 @@ void part_append_sum(json_t *array, const tally_sum *s, bool *failed);
 
 json_t *part_plan_to(const tally_plan *plan, bool *failed);
 json_t *part_group_to(const tally_group *g, size_t figures, bool *failed);
-json_t *part_groups_to(const tally_groups *s, bool *failed);
 json_t *part_bins_to(const tally_bins *b, bool *failed);
 json_t *part_stretch_to(const tally_stretch *s, bool *failed);
 json_t *part_beyond_to(const tally_beyond *b, bool *failed);

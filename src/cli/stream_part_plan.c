@@ -2,6 +2,7 @@
 /* stream_part_plan.c - the plan of a tally to and from a part file. */
 #include "cli/stream_part_internal.h"
 
+#include <limits.h>
 #include <math.h>
 #include <string.h>
 
@@ -42,7 +43,8 @@ json_t *part_plan_to(const tally_plan *plan, bool *failed)
     part_put(o, "by", json_string(PERIODS[plan->by]), failed);
     part_put(o, "step_s", json_real(plan->step_s), failed);
     part_put(o, "zoned", json_boolean(plan->zoned), failed);
-    part_put(o, "state", json_string(plan->state), failed);
+    part_put(o, "state", json_pack("[fffbi]", plan->at.combustion_c, plan->at.metering_c, plan->at.metering_pa, (int)plan->at.saturated,
+                                plan->at.edition), failed);
     part_put(o, "contract", json_string(plan->contract), failed);
     part_put(o, "figures", names_to(plan, "figures", failed), failed);
     part_put(o, "limits", names_to(plan, "limits", failed), failed);
@@ -82,6 +84,24 @@ static bool limit_from(const json_t *from, tally_limit_name *n)
     return text_from(part_take(&l), n->id, sizeof n->id) && text_from(part_take(&l), n->unit, sizeof n->unit)
            && text_from(part_take(&l), n->state, sizeof n->state) && bound_from(part_take(&l), &n->has_min, &n->min)
            && bound_from(part_take(&l), &n->has_max, &n->max) && (n->has_min || n->has_max) && part_list_ended(&l);
+}
+
+static bool state_from(const json_t *from, tally_plan *plan)
+{
+    part_list l = part_list_of(from);
+    bc_state *at = &plan->at;
+
+    at->combustion_c = part_take_number(&l);
+    at->metering_c = part_take_number(&l);
+    at->metering_pa = part_take_number(&l);
+    const json_t *saturated = part_take(&l);
+
+    at->saturated = json_is_true(saturated);
+    const uint64_t edition = part_take_count(&l);
+
+    at->edition = edition < INT_MAX ? (int)edition : 0;
+    bc_state_describe(at, plan->state, sizeof plan->state);
+    return json_is_boolean(saturated) && part_list_ended(&l) && bc_state_check(at, NULL) == BC_OK;
 }
 
 static bool flag_from(const json_t *from, tally_flag_name *n)
@@ -134,6 +154,6 @@ bool part_plan_from(const json_t *from, tally_plan *plan)
     plan->step_s = json_number_value(step);
     plan->zoned = json_is_true(zoned);
     return json_is_number(step) && json_is_boolean(zoned) && period_from(json_object_get(from, "by"), &plan->by)
-           && text_from(json_object_get(from, "state"), plan->state, sizeof plan->state)
+           && state_from(json_object_get(from, "state"), plan)
            && text_from(json_object_get(from, "contract"), plan->contract, sizeof plan->contract) && names_from(from, plan);
 }

@@ -92,45 +92,84 @@ static json_t *all_bins_to(const tally *t, bool *failed)
     return a;
 }
 
-static json_t *tally_to(const tally *t, bool *failed)
-{
-    json_t *o = json_object();
+/* Where the part goes, piece by piece: as a whole the tree of a part is a hundred times its tally. */
+typedef struct {
+    output_stream out;
+    bool failed;     /* without memory */
+    bc_status status;
+    bc_error *err;
+} part_writer;
 
-    part_put(o, "tool", json_string("bluecone"), failed);
-    part_put(o, "part", json_integer(STREAM_PART_VERSION), failed);
-    part_put(o, "version", json_string(bc_version()), failed);
-    part_put(o, "plan", part_plan_to(&t->plan, failed), failed);
-    part_put(o, "counts", counts_to(t, failed), failed);
-    part_put(o, "times", times_to(t, failed), failed);
-    part_put(o, "flagged", flags_to(t, failed), failed);
-    part_put(o, "pending", pending_to(t, failed), failed);
-    part_put(o, "whole", part_group_to(t->whole, t->plan.figure_count, failed), failed);
-    part_put(o, "periods", part_groups_to(&t->periods, failed), failed);
-    part_put(o, "doubled", json_integer(t->trend_doubled), failed);
-    part_put(o, "trend", part_groups_to(&t->trend, failed), failed);
-    part_put(o, "bins", all_bins_to(t, failed), failed);
-    part_put(o, "limits", limits_to(t, failed), failed);
-    part_put(o, "longest", longest_to(t, failed), failed);
-    return o;
+static void put_text(part_writer *w, const char *text)
+{
+    if (w->status == BC_OK)
+        w->status = output_put(&w->out, text, strlen(text), w->err);
+}
+
+static void put_value(part_writer *w, json_t *value)
+{
+    char *text = w->failed || w->status != BC_OK ? NULL : json_dumps(value, JSON_COMPACT | JSON_ENCODE_ANY | JSON_REAL_PRECISION(17));
+
+    json_decref(value);
+    if (text)
+        put_text(w, text);
+    else
+        w->failed = true;
+    free(text);
+}
+
+static void put_member(part_writer *w, const char *key, json_t *value)
+{
+    put_text(w, ",\"");
+    put_text(w, key);
+    put_text(w, "\":");
+    put_value(w, value);
+}
+
+static void put_groups(part_writer *w, const char *key, const tally_groups *s)
+{
+    put_text(w, ",\"");
+    put_text(w, key);
+    put_text(w, "\":[");
+    for (size_t i = 0; i < s->count; i++) {
+        put_text(w, i > 0 ? "," : "");
+        put_value(w, part_group_to(s->groups[i], s->figures, &w->failed));
+    }
+    put_text(w, "]");
+}
+
+static void put_tally(part_writer *w, const tally *t)
+{
+    put_text(w, "{\"tool\":");
+    put_value(w, json_string("bluecone"));
+    put_member(w, "part", json_integer(STREAM_PART_VERSION));
+    put_member(w, "version", json_string(bc_version()));
+    put_member(w, "plan", part_plan_to(&t->plan, &w->failed));
+    put_member(w, "counts", counts_to(t, &w->failed));
+    put_member(w, "times", times_to(t, &w->failed));
+    put_member(w, "flagged", flags_to(t, &w->failed));
+    put_member(w, "pending", pending_to(t, &w->failed));
+    put_member(w, "whole", part_group_to(t->whole, t->plan.figure_count, &w->failed));
+    put_groups(w, "periods", &t->periods);
+    put_member(w, "doubled", json_integer(t->trend_doubled));
+    put_groups(w, "trend", &t->trend);
+    put_member(w, "bins", all_bins_to(t, &w->failed));
+    put_member(w, "limits", limits_to(t, &w->failed));
+    put_member(w, "longest", longest_to(t, &w->failed));
+    put_text(w, "}\n");
 }
 
 bc_status stream_part_write(tally *t, const char *path, bc_error *err)
 {
-    bool failed = false;
-    bc_status status = tally_flush(t, err);
+    part_writer w = {.status = tally_flush(t, err), .err = err};
 
-    if (status != BC_OK)
-        return status;
-    json_t *o = tally_to(t, &failed);
-    char *text = failed ? NULL : json_dumps(o, JSON_COMPACT | JSON_REAL_PRECISION(17));
-
-    json_decref(o);
-    if (!text)
-        return bc_fail(err, BC_ERR_MEMORY, "not enough memory to write the summary of a part");
-    const size_t length = strlen(text);
-
-    text[length] = '\n'; /* in the place of the final NUL */
-    status = output_write(path, text, length + 1, err);
-    free(text);
-    return status;
+    if (w.status == BC_OK)
+        w.status = output_open(&w.out, path, err);
+    if (w.status != BC_OK)
+        return w.status;
+    put_tally(&w, t);
+    if (w.status == BC_OK && !w.failed)
+        return output_finish(&w.out, err);
+    output_discard(&w.out);
+    return w.status != BC_OK ? w.status : bc_fail(err, BC_ERR_MEMORY, "not enough memory to write the summary of a part");
 }

@@ -127,6 +127,7 @@ bc_status stream_plan_open(stream_plan *p, const arguments *a, bc_error *err)
         return bc_fail(err, BC_ERR_USAGE, "'%s' is one argument too many: one log at a time; --merge takes several parts", a->argument[1]);
     p->path = a->argument_count > 0 && strcmp(a->argument[0], "-") != 0 ? a->argument[0] : "standard input";
     p->alone = a->value[OPTION_rows_alone] != NULL;
+    p->is_part = a->value[OPTION_no_header] && (a->value[OPTION_summary_part] || (p->alone && !a->value[OPTION_summary]));
     bc_status status = state_from(a, &p->state, err);
 
     if (status == BC_OK)

@@ -40,6 +40,11 @@ static bool grow(void **items, size_t size, size_t count)
     return true;
 }
 
+size_t stream_limits(const stream_plan *p)
+{
+    return p->contract && p->contract->limit_count > 0 ? p->contract->limit_count : 1;
+}
+
 static bool grow_rows(const stream_plan *p, stream_batch *b)
 {
     const size_t room = b->room > 0 ? 2 * b->room : 1024;
@@ -48,7 +53,7 @@ static bool grow_rows(const stream_plan *p, stream_batch *b)
         return false;
     if (p->keeps && !grow((void **)&b->figures, sizeof *b->figures, room * p->figure_count))
         return false;
-    if (p->contract && !grow((void **)&b->limits, sizeof *b->limits, room * BC_LIMIT_MAX))
+    if (p->contract && !grow((void **)&b->limits, sizeof *b->limits, room * stream_limits(p)))
         return false;
     b->room = room;
     return true;
@@ -128,7 +133,7 @@ static void add_figure(const stream_plan *p, size_t i, const bc_subject *subject
     }
     value = bc_unit_from_si(&f->shown, bc_unit_to_si(&f->own, value));
     *kept = value;
-    if (isfinite(value))
+    if (isfinite(value) && !p->drops)
         cells->length[i] = (unsigned char)bc_digits_print(value, p->digits, p->mark, cells->figure[i]);
 }
 
@@ -146,7 +151,7 @@ static void add_verdict(const stream_plan *p, const stream_mark *mark, char *ver
 
 static bc_status judge(const stream_plan *p, stream_batch *b, const bc_gas *gas, stream_mark *mark, stream_cells *cells, bc_error *err)
 {
-    const bc_status status = row_judge(p->contract, gas, b->limits + b->count * BC_LIMIT_MAX, &mark->known, &mark->broken, err);
+    const bc_status status = row_judge(p->contract, gas, b->limits + b->count * stream_limits(p), &mark->known, &mark->broken, err);
 
     if (status == BC_OK)
         add_verdict(p, mark, cells->verdict);

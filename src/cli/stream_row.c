@@ -292,6 +292,7 @@ void stream_work(const stream_plan *p, stream_batch *b)
         else
             work_row(p, b, text, length, b->lines);
         b->lines += memchr(text, '\n', length - 1) ? count_lines(text, length) : 1;
+        b->out_length = p->drops ? 0 : b->out_length;
         at += length;
     }
 }

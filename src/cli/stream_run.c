@@ -127,9 +127,9 @@ static bc_status go_through(ring *r, stream_input *in, stream_take *take, void *
         status = stream_input_fill(in, b->in, &b->in_length, idle, err);
         if (status == BC_OK && b->in_length > 0)
             hand_out(r);
-        else if (status == BC_OK && !in->ended && !stream_interrupted() && !idle)
+        else if (status == BC_OK && !stream_input_over(in) && !idle)
             (void)is_done(r, true);
-        more = !in->ended && !stream_interrupted();
+        more = !stream_input_over(in);
     }
     return status;
 }
@@ -138,7 +138,7 @@ static bc_status go_alone(const stream_plan *p, stream_batch *b, stream_input *i
 {
     bc_status status = BC_OK;
 
-    while (status == BC_OK && !in->ended && !stream_interrupted()) {
+    while (status == BC_OK && !stream_input_over(in)) {
         status = stream_input_fill(in, b->in, &b->in_length, true, err);
         if (status != BC_OK || b->in_length == 0)
             continue;
@@ -222,6 +222,7 @@ bc_status stream_run(const stream_plan *p, stream_input *in, size_t jobs, stream
     ring r = {.p = p, .slots = jobs > 1 ? 2 * jobs + 2 : 1, .lock = PTHREAD_MUTEX_INITIALIZER, .filled = PTHREAD_COND_INITIALIZER, .done = PTHREAD_COND_INITIALIZER};
     bc_status status = BC_ERR_MEMORY;
 
+    stream_input_share(in, r.slots);
     if (!make_ring(&r))
         status = bc_fail(err, BC_ERR_MEMORY, "not enough memory for %zu blocks of the log", r.slots);
     else if (jobs > 1)

@@ -144,6 +144,7 @@ bc_status stream_sum_begin(stream_sum *s, bc_error *err)
     name_figures(p, plan);
     name_limits(p, plan);
     name_flags(plan);
+    plan->at = p->state;
     bc_state_describe(&p->state, plan->state, sizeof plan->state);
     plan->by = s->by;
     plan->zoned = s->zoned;
@@ -191,7 +192,7 @@ bc_status stream_sum_add(stream_sum *s, const stream_batch *b, bc_error *err)
     for (size_t i = 0; i < b->count && status == BC_OK; i++) {
         const stream_mark *mark = &b->marks[i];
         const tally_row row = {.has_time = mark->has_time, .time_s = mark->time_s, .has_flow = mark->has_power, .power_w = mark->power_w,
-                               .values = b->figures + i * p->figure_count, .limit_values = p->contract ? b->limits + i * BC_LIMIT_MAX : NULL,
+                               .values = b->figures + i * p->figure_count, .limit_values = p->contract ? b->limits + i * stream_limits(p) : NULL,
                                .known = mark->known, .broken = mark->broken};
 
         for (size_t k = 0; mark->flags >> k; k++)

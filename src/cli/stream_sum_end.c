@@ -22,23 +22,18 @@ static bool is_outside(const tally *t)
     return cover.outside > 0;
 }
 
-/* The report's state is that of the figures; in parts only its text is left. */
+/* Of parts it is not known any more which files they were of. */
 static void open_report(report *r, const stream_plan *p, const tally *t, const char *title)
 {
     report_open(r, BC_VERSION, "stream", title);
+    report_state_of(r, &tally_plan_of(t)->at);
     if (p) {
-        report_state_of(r, &p->state);
         if (p->a->argument_count > 0 && strcmp(p->a->argument[0], "-") != 0)
             report_add_input(r, p->path);
         if (p->contract)
             report_contract_inputs(r, p->contract);
         for (size_t i = 0; i < p->header.remark_count; i++)
             report_add_warning(r, p->header.remarks[i]);
-    } else {
-        char text[240];
-
-        (void)snprintf(text, sizeof text, "Figures at: %s.", tally_plan_of(t)->state);
-        report_add_warning(r, text);
     }
     if (is_outside(t))
         report_set_caution(r, CAUTION);
@@ -136,6 +131,18 @@ static bc_status check_merge(const arguments *a, bc_error *err)
     return BC_OK;
 }
 
+/* A part may be one long outage, all of them together may not. */
+static bc_status settle(tally *t, bc_error *err)
+{
+    tally_cover cover;
+    const bc_status status = tally_settle(t, err);
+
+    tally_covers(t, &cover);
+    if (status == BC_OK && cover.rows == 0)
+        return bc_fail(err, BC_ERR_INPUT, "no row of any part could be used, of %llu that were read", (unsigned long long)cover.refused);
+    return status;
+}
+
 int stream_merge(const arguments *a)
 {
     tally *parts[ARGUMENTS_MAX] = {NULL};
@@ -147,7 +154,7 @@ int stream_merge(const arguments *a)
         status = merge(a, parts, &err);
     if (status == BC_OK && a->value[OPTION_summary_part])
         status = stream_part_write(parts[0], a->value[OPTION_output], &err);
-    else if (status == BC_OK && (status = tally_settle(parts[0], &err)) == BC_OK)
+    else if (status == BC_OK && (status = settle(parts[0], &err)) == BC_OK)
         code = write_settled(a, NULL, parts[0], true);
     for (size_t i = 0; i < a->argument_count; i++)
         tally_close(parts[i]);

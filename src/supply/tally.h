@@ -17,6 +17,7 @@
 #include <stdint.h>
 
 #include "bluecone/limits.h"
+#include "bluecone/state.h"
 #include "bluecone/status.h"
 
 #define TALLY_FIGURE_MAX 64
@@ -58,7 +59,8 @@ typedef struct {
     double step_s;               /* the usual step; 0: not known, rows count */
     tally_period by;
     bool zoned;                  /* times are those of UTC */
-    char state[160];             /* reference state of the figures, in one line */
+    bc_state at;                 /* reference state of the figures */
+    char state[160];             /* the same in one line */
     char contract[BC_NAME_MAX];  /* its name; "" without one */
 } tally_plan;
 

@@ -24,6 +24,20 @@ static bc_status check(const tally *into, const tally *later, bc_error *err)
     return bc_fail(err, BC_ERR_INPUT, "the parts overlap: one ends at %s, the next begins at %s; give parts that do not share a time", ends, begins);
 }
 
+static bool has_rows(const tally *t)
+{
+    return t->accounted || t->pending.there;
+}
+
+/* A part without rows has no clock of its own. */
+static void set_clocks(tally *into, tally *later)
+{
+    if (!has_rows(into))
+        into->plan.zoned = later->plan.zoned;
+    else if (!has_rows(later))
+        later->plan.zoned = into->plan.zoned;
+}
+
 static void merge_counts(tally *t, const tally *l)
 {
     t->refused += l->refused;
@@ -178,6 +192,7 @@ static bc_status merge_pending(tally *t, const tally *l, bc_error *err)
 
 bc_status tally_merge(tally *into, tally *later, bc_error *err)
 {
+    set_clocks(into, later);
     bc_status status = check(into, later, err);
 
     if (status == BC_OK && later->accounted)

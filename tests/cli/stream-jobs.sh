@@ -9,3 +9,9 @@ for jobs in 1 2 3 8; do bluecone stream --jobs $jobs --quiet log.csv >rows.$jobs
 cmp err.1 err.8 && cat err.1 >&2
 dd if=log.csv bs=777 2>/dev/null | bluecone stream --jobs 2 --quiet 2>/dev/null | cmp - rows.1 && echo equal
 wc -l <rows.1
+# a last row without a line feed is one, though it is the only one and nothing more comes
+for jobs in 1 2; do printf 'CH4,N2\n90,10' | bluecone stream --jobs $jobs --quiet --add hhv; echo; done
+# rows so short that a block has room for more than are worked at in one piece
+awk 'BEGIN { for (i = 0; i < 30000; i++) print i % 10 + 90 "," (i % 7 ? 10 - i % 10 : 40) }' >short.csv
+for jobs in 1 2 64; do bluecone stream --no-header --columns methane,nitrogen --add hhv --jobs $jobs --quiet short.csv >short.$jobs 2>err.$jobs; wc -l <short.$jobs; done
+cmp short.1 short.2 && cmp short.1 short.64 && cmp err.1 err.64 && cat err.1 >&2

@@ -199,6 +199,8 @@ static void what_is_wrong_is_told(void **state)
         {"\"tool\":\"bluecone\"", "\"tool\":\"other\"", "no summary of a part|--summary-part"},
         {"\"part\":1", "\"part\":2", "another version"},
         {"\"by\":\"day\"", "\"by\":\"week\"", "\"plan\" is damaged"},
+        {"\"state\":[25.0,", "\"state\":[125.0,", "\"plan\" is damaged"},
+        {"false,2016]", "false,2017]", "\"plan\" is damaged"},
         {"\"step_s\":900.0", "\"step_s\":-900.0", "\"plan\" is damaged"},
         {"\"counts\":[", "\"counts\":[-5,", "\"counts\" is damaged"},
         {"\"flagged\":[", "\"flagged\":[1,", "\"flagged\" is damaged"},

@@ -25,7 +25,8 @@ typedef struct {
 
 static inline tally_plan case_plan(double step_s, tally_period by)
 {
-    tally_plan plan = {.figure_count = CASE_FIGURES, .limit_count = CASE_LIMITS, .flag_count = 2, .step_s = step_s, .by = by};
+    tally_plan plan = {.figure_count = CASE_FIGURES, .limit_count = CASE_LIMITS, .flag_count = 2, .step_s = step_s, .by = by,
+                       .at = {25.0, 0.0, BC_P0_PA, false, 2016}};
 
     plan.figures[0] = (tally_figure_name){"wobbe-gross", "Wobbe index, gross", "MJ/m3"};
     plan.figures[1] = (tally_figure_name){"hydrogen", "hydrogen", "mol %"};
@@ -35,7 +36,7 @@ static inline tally_plan case_plan(double step_s, tally_period by)
     plan.limits[2] = (tally_limit_name){.id = "z", .unit = "1", .state = "0/0", .has_min = true, .min = 0.9971};
     plan.flags[0] = (tally_flag_name){"sum-off", "sum of the components is off"};
     plan.flags[1] = (tally_flag_name){"air", "air in the sample"};
-    (void)snprintf(plan.state, sizeof plan.state, "25/0, 101.325 kPa, dry");
+    bc_state_describe(&plan.at, plan.state, sizeof plan.state);
     (void)snprintf(plan.contract, sizeof plan.contract, "Marrowfen works");
     return plan;
 }

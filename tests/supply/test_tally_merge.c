@@ -201,9 +201,10 @@ static void parts_that_overlap_are_refused_and_stay_as_they_were(void **state)
 
 static void parts_of_different_plans_are_refused_with_what_differs(void **state)
 {
+    tally_case *k = case_make(31, 2, 60.0, TALLY_DAY);
     const tally_plan plan = case_plan(60.0, TALLY_DAY);
     tally_plan others[8];
-    static const char *const WORDS[] = {"usual steps of 60 s and 30 s", "by day and by month",  "UTC",    "25/0, 101.325 kPa, dry|15/15",
+    static const char *const WORDS[] = {"usual steps of 60 s and 30 s", "by day and by month",  "UTC",    "combustion 25 C|combustion 15 C",
                                         "the figure hydrogen",          "3 figures and 2",      "limit z", "contract|'Marrowfen works' and ''"};
     bc_error err;
 
@@ -213,7 +214,7 @@ static void parts_of_different_plans_are_refused_with_what_differs(void **state)
     others[0].step_s = 30.0;
     others[1].by = TALLY_MONTH;
     others[2].zoned = true;
-    (void)snprintf(others[3].state, sizeof others[3].state, "15/15, 101.325 kPa, dry");
+    (void)snprintf(others[3].state, sizeof others[3].state, "combustion 15 C, metering 15 C and 101.325 kPa");
     (void)snprintf(others[4].figures[1].unit, sizeof others[4].figures[1].unit, "ppm");
     others[5].figure_count = 2;
     others[6].limits[2].min = 0.9972;
@@ -224,10 +225,41 @@ static void parts_of_different_plans_are_refused_with_what_differs(void **state)
 
         assert_ok(tally_open(&plan, &a, &err), &err);
         assert_ok(tally_open(&others[i], &b, &err), &err);
+        assert_ok(tally_add(a, &k->rows[0], &err), &err);
+        assert_ok(tally_add(b, &k->rows[1], &err), &err);
         assert_refused_at(WORDS[i], tally_merge(a, b, &err), &err, BC_ERR_INPUT, WORDS[i]);
         tally_close(a);
         tally_close(b);
     }
+    free(k);
+}
+
+/* A part that is one long outage cannot know which clock the log has. */
+static void a_part_without_rows_takes_the_clock_of_the_others(void **state)
+{
+    tally_case *k = case_make(32, 1, 60.0, TALLY_DAY);
+    tally_plan plan = case_plan(60.0, TALLY_DAY);
+    tally *parts[3] = {NULL};
+    tally_cover cover;
+    bc_error err;
+
+    (void)state;
+    assert_ok(tally_open(&plan, &parts[0], &err), &err);
+    assert_ok(tally_open(&plan, &parts[2], &err), &err);
+    plan.zoned = true;
+    assert_ok(tally_open(&plan, &parts[1], &err), &err);
+    assert_ok(tally_add(parts[1], &k->rows[0], &err), &err);
+    for (size_t i = 0; i < COUNT(parts); i++)
+        tally_add_refused(parts[i], 7 + i);
+    merge(parts[0], parts[1]);
+    merge(parts[0], parts[2]);
+    assert_true(tally_plan_of(parts[0])->zoned);
+    assert_ok(tally_settle(parts[0], &err), &err);
+    tally_covers(parts[0], &cover);
+    assert_int_equal(cover.rows, 1);
+    assert_int_equal(cover.refused, 24);
+    tally_close(parts[0]);
+    free(k);
 }
 
 static void a_settled_tally_is_not_merged(void **state)
@@ -255,6 +287,7 @@ int main(void)
         cmocka_unit_test(an_excursion_over_the_edge_is_one),
         cmocka_unit_test(parts_that_overlap_are_refused_and_stay_as_they_were),
         cmocka_unit_test(parts_of_different_plans_are_refused_with_what_differs),
+        cmocka_unit_test(a_part_without_rows_takes_the_clock_of_the_others),
         cmocka_unit_test(a_settled_tally_is_not_merged),
     };
     return cmocka_run_group_tests(tests, NULL, NULL);
