@@ -7,7 +7,7 @@
 #include <string.h>
 
 enum {
-#define COMMAND(name, word, usage, help, least, most) COMMAND_##name,
+#define COMMAND(name, word, usage, help, example, least, most) COMMAND_##name,
 #include "cli/commands.def"
     COMMAND_COUNT
 };
@@ -23,7 +23,7 @@ enum {
 #define VERIFY (1U << COMMAND_verify)
 
 static const command COMMANDS[] = {
-#define COMMAND(name, word, usage, help, least, most) {word, usage, help, least, most, 1U << COMMAND_##name, run_##name},
+#define COMMAND(name, word, usage, help, example, least, most) {word, usage, help, example, least, most, 1U << COMMAND_##name, run_##name},
 #include "cli/commands.def"
 };
 

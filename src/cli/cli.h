@@ -28,7 +28,7 @@ typedef struct {
 } arguments;
 
 typedef struct command {
-    const char *word, *usage, *help;
+    const char *word, *usage, *help, *example;
     size_t least, most;
     unsigned bit;
     int (*run)(const arguments *); /* the exit code */

@@ -97,5 +97,5 @@ void help_command(const command *c)
     print_plain(c);
     if (crowded)
         print_common(c);
-    printf("\nman bluecone-%s tells more.\n", c->word);
+    printf("\n  bluecone %s\nman bluecone-%s tells more.\n", c->example, c->word);
 }

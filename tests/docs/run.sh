@@ -188,6 +188,15 @@ check_help() {
         awk -v c="$command" 'length > 80 { print "bluecone " c " --help is wider than 80 columns: " $0 }' "$work/help" >>"$work/missing"
     done
     point 'every help fits a screen' "$work/missing"
+    # An example may answer no, but not be refused; that of the log needs one.
+    cp "$SRC/examples/log-of-two-weeks.csv" "$work/cwd/log.csv"
+    : >"$work/missing"
+    for command in $(bluecone list commands --bare); do
+        bluecone "$command" --help | sed -n 's/^  \(bluecone .*\)/\1/p' >"$work/example"
+        test -s "$work/example" || echo "bluecone $command --help shows no example" >>"$work/missing"
+        (cd "$work/cwd" && bash "$work/example" >/dev/null 2>"$work/told") || test $? -eq 1 || cat "$work/example" "$work/told" >>"$work/missing"
+    done
+    point 'every example of a help runs' "$work/missing"
 }
 
 # check_listed TOPIC EXPRESSION FILE...: the ids that sed finds in the tables are those of `list TOPIC`.
