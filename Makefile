@@ -47,9 +47,10 @@ VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/blueco
 SOVERSION := 0
 
 DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libxlsxwriter-dev libnlopt-dev libcsv-dev
-DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip parallel python3
+DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip parallel python3 \
+              libsqlite3-dev sqlite3
 DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv chromium openjdk-17-jre-headless time
-DEPS_BENCH := $(DEPS_BUILD) mawk miller
+DEPS_BENCH := $(DEPS_BUILD) mawk miller libsqlite3-dev sqlite3
 DEPS_COVERAGE := $(DEPS_TEST) gcovr
 DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe
 
@@ -79,6 +80,7 @@ NLOPT        = $(shell $(PKG_CONFIG) $1 nlopt 2>/dev/null)
 CAIRO        = $(shell $(PKG_CONFIG) $1 cairo cairo-pdf cairo-svg 2>/dev/null)
 XLSXWRITER   = $(shell $(PKG_CONFIG) $1 xlsxwriter 2>/dev/null)
 JANSSON      = $(shell $(PKG_CONFIG) $1 jansson 2>/dev/null)
+SQLITE       = $(shell $(PKG_CONFIG) $1 sqlite3 2>/dev/null)
 CMOCKA       = $(shell $(PKG_CONFIG) $1 cmocka 2>/dev/null)
 
 # What one object is compiled with; MODE and EXTRA depend on where its source lives.
@@ -91,6 +93,7 @@ LIB_DIRS    := $(wildcard $(addprefix src/,base gas value flame supply))
 LIB_SRC     := $(sort $(wildcard $(LIB_DIRS:%=%/*.c)))
 CHART_SRC   := $(sort $(wildcard src/output/chart_draw*.c))
 BOOK_SRC    := $(sort $(wildcard src/output/book*.c))
+SQL_SRC     := $(sort $(wildcard src/sqlite/*.c))
 PROGRAM_SRC := $(sort $(filter-out $(CHART_SRC) $(BOOK_SRC),$(wildcard src/output/*.c src/cli/*.c)))
 TEST_SRC    := $(sort $(wildcard tests/*/test_*.c))
 HEADERS     := $(sort $(wildcard include/bluecone/*.h))
@@ -107,9 +110,12 @@ CHART_OBJ   := $(CHART_SRC:%.c=$(OUT)/%.o)
 CHART_TOO   := $(addprefix $(OUT)/src/,base/digits.o base/text.o output/number_text.o output/plain_text.o)
 BOOK_OBJ    := $(BOOK_SRC:%.c=$(OUT)/%.o)
 BOOK_TOO    := $(CHART_TOO) $(addprefix $(OUT)/src/output/,report_judged.o result_text.o section.o text_letter.o)
+# Only where SQLite's headers are: the one question that is asked before any recipe, and "no" without pkg-config.
+SQL         := $(if $(shell $(PKG_CONFIG) --exists sqlite3 2>/dev/null && echo yes),$(OUT)/bluecone_sqlite.so)
+SQL_OBJ     := $(SQL_SRC:%.c=$(OUT)/%.o)
 PROGRAM_PARTS := $(filter-out %/cli/main.o,$(PROGRAM_OBJ))
 # The house rules judge the released library; the other variants carry their instruments.
-TESTS       := $(filter-out $(if $(filter release,$(VARIANT)),,%/house/test_house),$(TEST_SRC:%.c=$(OUT)/%))
+TESTS       := $(filter-out $(if $(filter release,$(VARIANT)),,%/house/test_house) $(if $(SQL),,%/sqlite/test_sqlite),$(TEST_SRC:%.c=$(OUT)/%))
 RUNNER      := $(OUT)/tests/house/run_all
 PROGRAM     := $(OUT)/bluecone
 ARCHIVE     := $(OUT)/libbluecone.a
@@ -119,15 +125,16 @@ CHART       := $(OUT)/bluecone_chart.so
 BOOK        := $(OUT)/bluecone_workbook.so
 COMPLETION  := $(if $(wildcard src/cli/completion.bash.in),$(OUT)/bluecone.bash)
 
-all: $(PROGRAM) $(CHART) $(BOOK) $(ARCHIVE) $(SHARED) $(OUT)/libbluecone.so $(PC_FILES) $(HEADER_PAGES) $(COMPLETION) ## build the program and the library (default)
+all: $(PROGRAM) $(CHART) $(BOOK) $(SQL) $(ARCHIVE) $(SHARED) $(OUT)/libbluecone.so $(PC_FILES) $(HEADER_PAGES) $(COMPLETION) ## build the program and the library (default)
 	@echo '$(PROGRAM) is ready'
 
 # ---- rules ----------------------------------------------------------------------------------------
-$(LIB_OBJ) $(CHART_OBJ) $(BOOK_OBJ) $(BOOK_TOO): private MODE = -fPIC
+$(LIB_OBJ) $(CHART_OBJ) $(BOOK_OBJ) $(BOOK_TOO) $(SQL_OBJ): private MODE = -fPIC
 $(OUT)/src/output/%.o: private EXTRA = $(call JANSSON,--cflags) -DBC_LIB_DIR='"$(libdir)"'
 $(OUT)/src/supply/%.o: private EXTRA = $(call NLOPT,--cflags)
 $(CHART_OBJ):          private EXTRA = $(call CAIRO,--cflags)
 $(BOOK_OBJ):           private EXTRA = $(call XLSXWRITER,--cflags)
+$(SQL_OBJ):            private EXTRA = $(call SQLITE,--cflags) $(call JANSSON,--cflags) -DBC_DATA_DIR='"$(datadir)/bluecone"'
 $(OUT)/src/cli/%.o:    private EXTRA = $(call JANSSON,--cflags) -DBC_DATA_DIR='"$(datadir)/bluecone"'
 $(OUT)/tests/%.o:      private EXTRA = $(call CMOCKA,--cflags) -I tests \
                                -DBC_SOURCE_DIR='"$(CURDIR)"' -DBC_BUILD_DIR='"$(CURDIR)/$(OUT)"'
@@ -163,6 +170,11 @@ $(BOOK): $(BOOK_OBJ) $(BOOK_TOO)
 	@echo '  LD    $@'
 	$(V)$(CC) $(CFLAGS_ALL) -fPIC -shared $(LDFLAGS_ALL) -Wl,-z,defs $^ $(call XLSXWRITER,--libs) -lm -o $@
 
+# SQLite loads it into the program of somebody else, which may have a library of its own: nothing but the entry is seen.
+$(OUT)/bluecone_sqlite.so: $(SQL_OBJ) $(ARCHIVE)
+	@echo '  LD    $@'
+	$(V)$(CC) $(CFLAGS_ALL) -fPIC -shared $(LDFLAGS_ALL) -Wl,-z,defs -Wl,--exclude-libs,ALL $^ $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
+
 $(PROGRAM): $(PROGRAM_OBJ) $(ARCHIVE)
 	@echo '  LD    $@'
 	$(V)$(LINK) $^ $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
@@ -172,12 +184,14 @@ $(OUT)/tests/output/test_chart: $(OUT)/src/output/chart_draw_ticks.o $(OUT)/src/
     $(OUT)/src/output/chart_draw_range.o
 $(OUT)/tests/output/test_chart $(OUT)/tests/output/test_page: | $(OUT)/tests/output/bluecone_chart.so
 $(OUT)/tests/output/test_workbook: | $(OUT)/tests/output/bluecone_workbook.so
+$(OUT)/tests/sqlite/test_sqlite: private TEST_LIBS = $(call SQLITE,--libs)
+$(OUT)/tests/sqlite/test_sqlite: | $(SQL)
 $(OUT)/tests/output/bluecone_%.so: $(OUT)/bluecone_%.so
 	@mkdir -p $(@D) && ln -sf $(abspath $<) $@
 
 $(TESTS) $(RUNNER): $(OUT)/%: $(OUT)/%.o $(PROGRAM_PARTS) $(ARCHIVE)
 	@echo '  LD    $@'
-	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -pthread -o $@
+	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(TEST_LIBS) $(call JANSSON,--libs) $(LDLIBS_LIB) -pthread -o $@
 
 # The second is what pkg-config takes when it looks into a build folder: programs there find the library that
 # was just built. A library with instruments in it needs programs that have them, too.
@@ -198,7 +212,7 @@ $(OUT)/bluecone.bash: src/cli/completion.bash.in include/bluecone/status.h Makef
 	@mkdir -p $(@D)
 	@sed 's|@version@|$(VERSION)|' $< >$@
 
--include $(LIB_OBJ:.o=.d) $(PROGRAM_OBJ:.o=.d) $(CHART_OBJ:.o=.d) $(BOOK_OBJ:.o=.d) $(TESTS:=.d) $(RUNNER).d
+-include $(LIB_OBJ:.o=.d) $(PROGRAM_OBJ:.o=.d) $(CHART_OBJ:.o=.d) $(BOOK_OBJ:.o=.d) $(SQL_OBJ:.o=.d) $(TESTS:=.d) $(RUNNER).d
 
 # ---- targets --------------------------------------------------------------------------------------
 deps: deps-lint ## install what is missing of the Debian packages used here
@@ -244,13 +258,13 @@ IN_BUILD = SRC="$(CURDIR)" PATH="$(CURDIR)/$(OUT):$$PATH" \
 tests: $(TESTS) $(RUNNER)
 run-tests: all tests
 	@$(IN_BUILD) CC='$(CC)' CXX='$(CXX)' $(RUNNER) $(TESTS) 'tests/run_cli.sh -b $(OUT)' \
-	    $(if $(wildcard tests/docs/run.sh),'bash tests/docs/run.sh') 'bash tests/library/run.sh $(OUT)'
+	    $(if $(SQL),'bash tests/sqlite/run.sh') $(if $(wildcard tests/docs/run.sh),'bash tests/docs/run.sh') 'bash tests/library/run.sh $(OUT)'
 
 # One file a run: Clang-tidy 14 takes va_list for uninitialised in every file but the first.
 lint: deps-lint ## cppcheck, clang-tidy, mandoc and shellcheck
 	cppcheck --quiet --std=c11 --enable=warning,performance,portability --inline-suppr --error-exitcode=1 \
 	    --suppress=missingIncludeSystem -D_POSIX_C_SOURCE=200809L '-DBC_DATA_DIR=""' -I include -I src src
-	printf '%s\n' $(LIB_SRC) $(PROGRAM_SRC) $(CHART_SRC) $(BOOK_SRC) | xargs -P 4 -I FILE \
+	printf '%s\n' $(LIB_SRC) $(PROGRAM_SRC) $(CHART_SRC) $(BOOK_SRC) $(if $(SQL),$(SQL_SRC)) | xargs -P 4 -I FILE \
 	    clang-tidy --quiet FILE -- -std=c11 $(CPPFLAGS_ALL) $(call CAIRO,--cflags) '-DBC_DATA_DIR=""'
 	$(if $(MAN_PAGES),mandoc -T lint -W warning $(MAN_PAGES))
 	@$(MAKE) -s $(HEADER_PAGES)
@@ -273,7 +287,7 @@ install: all ## copy everything below PREFIX (and DESTDIR)
 	    $(datadir)/bluecone/compositions/specifications $(docdir) $(bashcompletiondir),"$(DESTDIR)$d")
 	$(INSTALL_PROGRAM) $(PROGRAM) "$(DESTDIR)$(bindir)/bluecone"
 	$(INSTALL_DATA) $(ARCHIVE) $(SHARED) "$(DESTDIR)$(libdir)"
-	$(INSTALL_DATA) $(CHART) $(BOOK) "$(DESTDIR)$(libdir)/bluecone"
+	$(INSTALL_DATA) $(CHART) $(BOOK) $(SQL) "$(DESTDIR)$(libdir)/bluecone"
 	ln -sf $(notdir $(SHARED)) "$(DESTDIR)$(libdir)/libbluecone.so"
 	$(INSTALL_DATA) $(OUT)/bluecone.pc "$(DESTDIR)$(pkgconfigdir)"
 	$(INSTALL_DATA) $(HEADERS) "$(DESTDIR)$(includedir)/bluecone"
@@ -286,7 +300,7 @@ install: all ## copy everything below PREFIX (and DESTDIR)
 # Folders are removed only when they are ours and empty.
 uninstall: ## remove what install put there
 	rm -f "$(DESTDIR)$(bindir)/bluecone" "$(DESTDIR)$(pkgconfigdir)/bluecone.pc" "$(DESTDIR)$(bashcompletiondir)/bluecone" \
-	    $(foreach f,libbluecone.a libbluecone.so $(notdir $(SHARED)) bluecone/$(notdir $(CHART)) bluecone/$(notdir $(BOOK)),"$(DESTDIR)$(libdir)/$f") \
+	    $(foreach f,libbluecone.a libbluecone.so $(notdir $(SHARED)) bluecone/$(notdir $(CHART)) bluecone/$(notdir $(BOOK)) bluecone/bluecone_sqlite.so,"$(DESTDIR)$(libdir)/$f") \
 	    $(HEADERS:include/%="$(DESTDIR)$(includedir)/%") $(foreach f,$(COMPOSITIONS) $(SPECIFICATIONS),"$(DESTDIR)$(datadir)/bluecone/$f") \
 	    $(foreach f,$(MAN_PAGES) $(HEADER_PAGES),"$(DESTDIR)$(mandir)/man$(subst .,,$(suffix $f))/$(notdir $f)") \
 	    $(foreach f,README.md $(EXAMPLES),"$(DESTDIR)$(docdir)/$f")

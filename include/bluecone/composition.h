@@ -43,6 +43,9 @@ typedef enum {
 #define BC_PRINTED_MAX 16      /* lines of [printed] */
 #define BC_PRINTED_BYTES 48    /* bytes of the figure of one with the final NUL */
 
+#define BC_SUM_MIN 0.98        /* what the shares of a whole analysis add up to: outside it is refused, within normalised */
+#define BC_SUM_MAX 1.02
+
 /* One line of [components]. */
 typedef struct {
     char word[BC_COMPONENT_MAX]; /* as written */
@@ -107,6 +110,14 @@ BC_API BC_MUST_USE bc_status bc_composition_parse(const char *literal, bc_compos
  * BC_ERR_INPUT with the nearest bundled name when nothing fits. */
 BC_API BC_MUST_USE bc_status bc_composition_find(const char *word, const char *const folders[], size_t folder_count,
                                                  bc_composition *composition, bc_error *err);
+
+/* What a component's word stands for: a species by any of its names, a cut (`c6+`) with its default split, or `air`.
+ *
+ *   parts    out: BC_SPECIES_CAPACITY mole fractions; untouched on failure
+ *   remark   out: BC_REMARK_BYTES; what was assumed, as a sentence, "" for nothing; may be NULL
+ *
+ * BC_ERR_INPUT with the nearest known word. */
+BC_API BC_MUST_USE bc_status bc_composition_component(const char *word, double parts[], char remark[], bc_error *err);
 
 /* The gas if the share that is missing from the sum (1 - composition->sum) had been measured as one
  * species instead of being normalised away; on the basis of the composition.

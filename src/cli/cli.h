@@ -4,6 +4,7 @@
 #define CLI_H
 
 #include "base/compiler.h"
+#include "base/folder_list.h"
 #include "bluecone/bluecone.h"
 #include "output/render.h"
 
@@ -51,12 +52,7 @@ void help_command(const command *c);
 void help_all(void);
 
 /* Folders of bundled gases: $BLUECONE_PATH, the source tree, the installed data folder. */
-#define FOLDERS_MAX 16
-typedef struct {
-    size_t count;
-    const char *path[FOLDERS_MAX];
-    char text[FOLDERS_MAX][BC_FILE_MAX];
-} folders;
+typedef bc_folders folders;
 
 void folders_find(folders *f);
 

@@ -11,35 +11,7 @@
 #define BC_DATA_DIR "/usr/local/share/bluecone"
 #endif
 
-/* One more folder: text[0..length) and a tail behind it. */
-static void add(folders *f, const char *text, size_t length, const char *tail)
-{
-    if (f->count == FOLDERS_MAX)
-        return;
-    char *to = f->text[f->count];
-    const int n = snprintf(to, BC_FILE_MAX, "%.*s%s", (int)length, text, tail);
-
-    if (n > 0 && n < BC_FILE_MAX)
-        f->path[f->count++] = to;
-}
-
-/* Each part of $BLUECONE_PATH is a folder of compositions or holds one. */
-static void add_environment(folders *f)
-{
-    const char *path = getenv("BLUECONE_PATH");
-
-    while (path && *path != '\0') {
-        const size_t length = strcspn(path, ":");
-
-        if (length > 0 && length < BC_FILE_MAX) {
-            add(f, path, length, "");
-            add(f, path, length, "/compositions");
-        }
-        path += length + (path[length] == ':');
-    }
-}
-
-/* The program may stand in build/VARIANT of the source tree, or in bin beside share. */
+/* The program may stand in bin beside share, or in build/VARIANT of the source tree. */
 static void add_beside_program(folders *f)
 {
     char program[BC_FILE_MAX];
@@ -48,25 +20,16 @@ static void add_beside_program(folders *f)
     if (n <= 0)
         return;
     program[n] = '\0';
-    for (int level = 0; level < 3; level++) {
-        char *slash = strrchr(program, '/');
-
-        if (!slash)
-            return;
-        *slash = '\0';
-        if (level == 1)
-            add(f, program, strlen(program), "/share/bluecone/compositions");
-        if (level == 2)
-            add(f, program, strlen(program), "/compositions");
-    }
+    bc_folders_add_above(f, program, 2, "/share/bluecone/compositions");
+    bc_folders_add_above(f, program, 3, "/compositions");
 }
 
 void folders_find(folders *f)
 {
     f->count = 0;
-    add_environment(f);
+    bc_folders_add_path(f, getenv("BLUECONE_PATH"));
     add_beside_program(f);
-    add(f, BC_DATA_DIR, strlen(BC_DATA_DIR), "/compositions");
+    bc_folders_add(f, BC_DATA_DIR, strlen(BC_DATA_DIR), "/compositions");
 }
 
 void folders_of_specifications(folders *f)
@@ -75,7 +38,7 @@ void folders_of_specifications(folders *f)
     for (size_t i = 0; i < f->count; i++) {
         const size_t used = strlen(f->text[i]);
 
-        (void)snprintf(f->text[i] + used, BC_FILE_MAX - used, "/specifications");
+        (void)snprintf(f->text[i] + used, BC_FOLDER_BYTES - used, "/specifications");
     }
 }
 

@@ -7,7 +7,6 @@
 #include "gas/summation.h"
 
 #include <stdio.h>
-#include <stdlib.h>
 #include <string.h>
 
 #define VOLUMES_AT_C 15.0 /* shares of volume, as of a composition file that names no state */
@@ -151,33 +150,19 @@ static bc_status check_twice(const log_header *h, const log_column *column, int 
     return BC_OK;
 }
 
-/* A component is what the literal `word=100` would be: species, cuts with their default split, air. */
 static bc_status take_component(log_header *h, log_column *column, const heading *head, int line, bc_error *err)
 {
-    char literal[LOG_CELL_MAX + 8];
-    bc_composition *c = malloc(sizeof *c);
-
-    if (!c)
-        return bc_fail(err, BC_ERR_MEMORY, "not enough memory for a composition");
-    (void)snprintf(literal, sizeof literal, "%s=100", head->word);
-    for (char *p = literal; *p != '\0'; p++)
-        if (*p == ',')
-            *p = '-';
+    char remark[BC_REMARK_BYTES];
     bc_error cause;
-    bc_status status = bc_composition_parse(literal, c, &cause);
 
-    if (status == BC_OK) {
-        memcpy(column->parts, c->entries[0].parts, sizeof column->parts);
-        column->kind = LOG_COMPONENT;
-        for (size_t i = 0; i < c->remark_count; i++)
-            add_remark(h, c->remarks[i]);
-        status = check_twice(h, column, line, err);
-        status = status == BC_OK ? take_unit(h, column, head->unit, line, err) : status;
-    } else {
-        status = is_formula(head->word) ? bc_fail_at(err, BC_ERR_INPUT, h->path, line, "%s", cause.message) : BC_OK;
-    }
-    free(c);
-    return status;
+    if (bc_composition_component(head->word, column->parts, remark, &cause) != BC_OK)
+        return is_formula(head->word) ? bc_fail_at(err, BC_ERR_INPUT, h->path, line, "%s", cause.message) : BC_OK;
+    column->kind = LOG_COMPONENT;
+    if (remark[0] != '\0')
+        add_remark(h, remark);
+    const bc_status status = check_twice(h, column, line, err);
+
+    return status == BC_OK ? take_unit(h, column, head->unit, line, err) : status;
 }
 
 static bc_status take_column(log_header *h, const char *text, int line, bc_error *err)

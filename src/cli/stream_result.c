@@ -11,8 +11,6 @@
 #include <stdlib.h>
 #include <string.h>
 
-#define SUM_MIN 0.98         /* as of a composition file: what is outside is no whole analysis */
-#define SUM_MAX 1.02
 #define CALIBRATION_NEAR 5e-4 /* mole fraction: analysers reproduce their calibration gas to a few hundredths of a per cent */
 #define MIX 0x9E3779B97F4A7C15U /* 2^64 over the golden ratio, as of Knuth's multiplicative hashing */
 
@@ -164,7 +162,7 @@ static bool make_gas(const stream_plan *p, const stream_reading *r, bc_gas *gas,
         (void)bc_fail(err, BC_ERR_INPUT, "%s", r->reason);
         return false;
     }
-    if (!(r->sum >= SUM_MIN && r->sum <= SUM_MAX)) {
+    if (!(r->sum >= BC_SUM_MIN && r->sum <= BC_SUM_MAX)) {
         (void)bc_fail(err, BC_ERR_INPUT, "its components add up to %.6g %%, not to 100 %%", 100.0 * r->sum);
         return false;
     }

@@ -13,8 +13,6 @@
 #include <stdio.h>
 #include <string.h>
 
-#define SUM_MIN 0.98            /* a sum outside is refused */
-#define SUM_MAX 1.02
 #define SUM_TOLD 0.0005         /* a normalisation that moves the sum more than this is told */
 #define SUM_ROUNDING 1e-9       /* of a `rest` that comes out at minus nothing */
 
@@ -49,39 +47,15 @@ static bc_status blame(const bc_composition *c, int line, bc_status status, bc_e
     return status;
 }
 
-static bc_status resolve_cut(bc_composition *c, bc_entry *entry, bc_error *err)
-{
-    char split[160];
-
-    if (!cut_default(entry->word, entry->parts)) {
-        const bc_status status = bc_fail(err, BC_ERR_INPUT, "the cut '%s' has no default split; state one in a section [cut %s]",
-                                         entry->word, entry->word);
-
-        return blame(c, entry->line, status, err);
-    }
-    cut_describe(entry->parts, split, sizeof split);
-    composition_remark(c, "%s has no split of its own: taken as %s (mole, common practice).", entry->word, split);
-    return BC_OK;
-}
-
 bc_status composition_resolve(bc_composition *c, bc_entry *entry, bc_error *err)
 {
-    size_t species = 0;
-    int carbon = 0;
-
-    if (cut_word(entry->word, &carbon))
-        return resolve_cut(c, entry, err);
-    if (bc_text_same(entry->word, "air")) {
-        const bc_gas air = bc_gas_air();
-
-        memcpy(entry->parts, air.x, sizeof entry->parts);
-        return BC_OK;
-    }
-    const bc_status status = bc_species_find(entry->word, &species, err);
+    char remark[BC_REMARK_BYTES];
+    const bc_status status = bc_composition_component(entry->word, entry->parts, remark, err);
 
     if (status != BC_OK)
         return blame(c, entry->line, status, err);
-    entry->parts[species] = 1.0;
+    if (remark[0] != '\0')
+        composition_remark(c, "%s", remark);
     return BC_OK;
 }
 
@@ -163,10 +137,10 @@ static bc_status check_sum(bc_composition *c, bc_error *err)
 {
     const double percent = 100.0 * c->sum;
 
-    if (c->sum < SUM_MIN || c->sum > SUM_MAX) {
+    if (c->sum < BC_SUM_MIN || c->sum > BC_SUM_MAX) {
         const char *remedy = "correct the shares, or write one of them as rest";
-        const bool fractions = c->sum > 0.01 * SUM_MIN && c->sum < 0.01 * SUM_MAX;
-        const bool percents = c->sum > 100.0 * SUM_MIN && c->sum < 100.0 * SUM_MAX;
+        const bool fractions = c->sum > 0.01 * BC_SUM_MIN && c->sum < 0.01 * BC_SUM_MAX;
+        const bool percents = c->sum > 100.0 * BC_SUM_MIN && c->sum < 100.0 * BC_SUM_MAX;
 
         if (fractions)
             remedy = "these look like fractions of one: write per cent, or unit = fraction";

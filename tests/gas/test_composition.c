@@ -132,6 +132,31 @@ static void order_of_keys_words_and_units_are_irrelevant(void **state)
         assert_within_at(bc_species_id(i), u_of(&b, i), u_of(&a, i), 1e-16);
 }
 
+static void a_word_alone_is_a_species_a_cut_or_air(void **state)
+{
+    double parts[BC_SPECIES_CAPACITY];
+    char remark[BC_REMARK_BYTES];
+    bc_error err;
+    size_t species = 0;
+    const bc_gas air = bc_gas_air();
+
+    (void)state;
+    assert_ok(bc_composition_component("n-C4", parts, remark, &err), &err);
+    assert_ok(bc_species_find("n-butane", &species, &err), &err);
+    for (size_t i = 0; i < BC_SPECIES_CAPACITY; i++)
+        assert_within(parts[i], i == species ? 1.0 : 0.0, 0.0);
+    assert_string_equal(remark, "");
+    assert_ok(bc_composition_component("C6+", parts, remark, &err), &err);
+    assert_ok(bc_species_find("n-hexane", &species, &err), &err);
+    assert_within(parts[species], 0.6, 0.0); /* src/data/cuts.def */
+    assert_string_equal(remark, "C6+ has no split of its own: taken as n-hexane 60 %, n-heptane 30 %, n-octane 10 % (mole, common practice).");
+    assert_ok(bc_composition_component("Air", parts, NULL, &err), &err);
+    assert_memory_equal(parts, air.x, sizeof parts);
+    assert_refused(bc_composition_component("c5+", parts, remark, &err), &err, BC_ERR_INPUT, "'c5+' has no default split");
+    assert_refused(bc_composition_component("methan", parts, remark, &err), &err, BC_ERR_INPUT, "'methan'|'methane'");
+    assert_memory_equal(parts, air.x, sizeof parts); /* untouched */
+}
+
 static void a_cut_may_bring_its_own_split(void **state)
 {
     bc_composition c;
@@ -760,6 +785,7 @@ int main(void)
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(a_certificate_is_read_as_it_is_written),
         cmocka_unit_test(order_of_keys_words_and_units_are_irrelevant),
+        cmocka_unit_test(a_word_alone_is_a_species_a_cut_or_air),
         cmocka_unit_test(a_cut_may_bring_its_own_split),
         cmocka_unit_test(a_saturated_gas_gets_the_water_of_its_temperature_and_pressure),
         cmocka_unit_test(water_counts_as_listed_only_when_the_file_says_so),

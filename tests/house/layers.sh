@@ -1,6 +1,6 @@
 #!/bin/sh
 # A file includes its own floor and those below it. The output floor knows the floors base and data
-# and nothing of gases. Public headers live on the floor of the .c file that has their name; those
+# and nothing of gases; the floor of SQLite, beside the command line, knows the public headers and base. Public headers live on the floor of the .c file that has their name; those
 # without one are listed here.
 set -eu
 
@@ -12,6 +12,7 @@ set -eu
 BEGIN {
     count = split("data base gas value flame supply output cli", name, " ")
     for (i = 1; i <= count; i++) floor[name[i]] = i
+    floor["sqlite"] = floor["cli"]
     listed["include/bluecone/bluecone.h"] = "supply"
 }
 function stem(path) { sub(/.*\//, "", path); sub(/\.[a-z]*$/, "", path); return path }
@@ -37,6 +38,10 @@ $2 ~ /^\?/ { complain($1 " includes " substr($2, 2) ", which is not there"); nex
         complain($1 " (floor " from ") includes " $2 " (floor " to ")")
     else if (from == "output" && to ~ /^(gas|value|flame|supply)$/)
         complain($1 " includes " $2 ": the output floor knows nothing of gases")
+    else if (from != "sqlite" && to == "sqlite")
+        complain($1 " includes " $2 ": nothing rests on the floor of SQLite")
+    else if (from == "sqlite" && to !~ /^(sqlite|base)$/ && $2 !~ /^include\//)
+        complain($1 " includes " $2 ": the floor of SQLite knows the public headers and base alone")
 }
 END {
     for (i = 1; i <= total; i++)

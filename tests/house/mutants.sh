@@ -106,6 +106,12 @@ put src/value/wobbe.c <<<'  #  include "../flame/flue.h"'
 refuses layers 'src/value/wobbe.c (floor value) includes src/flame/flue.h (floor flame)'
 put src/output/text.c <<<'#include <bluecone/wobbe.h>'
 refuses layers 'the output floor knows nothing of gases'
+put src/cli/line.h </dev/null
+put src/sqlite/module.h <<<'#include "cli/line.h"'
+refuses layers 'the floor of SQLite knows the public headers and base alone'
+put src/sqlite/module.h </dev/null
+put src/cli/line.c <<<'#include "sqlite/module.h"'
+refuses layers 'nothing rests on the floor of SQLite'
 put include/bluecone/orphan.h </dev/null
 refuses layers 'include/bluecone/orphan.h: its floor is unknown'
 put src/base/status.c <<<'#include "nowhere.h"'

@@ -84,6 +84,20 @@ static inline void exercise_quantities(const bc_subject *s, exercise_row *row)
     }
 }
 
+static inline void exercise_components(exercise_row *row)
+{
+    static const char *const WORDS[] = {"nC4", "c6+", "air", "c5+", "methan"};
+    double parts[BC_SPECIES_CAPACITY];
+    char remark[BC_REMARK_BYTES];
+    bc_error err;
+
+    for (size_t i = 0; i < sizeof WORDS / sizeof *WORDS; i++)
+        if (did(row, bc_composition_component(WORDS[i], parts, remark, &err), &err)) {
+            note_all(row, parts, BC_SPECIES_CAPACITY);
+            note(row, (double)strlen(remark));
+        }
+}
+
 static inline void exercise_flames(const bc_gas *gas, exercise_row *row)
 {
     static const double LAMBDAS[] = {0.63, 1.0, 1.37};
@@ -272,6 +286,7 @@ static inline void exercise(const exercise_of *e, exercise_row *row)
             exercise_quantities(&s, row);
             exercise_switch(e, &s, row);
         }
+    exercise_components(row);
     exercise_flames(&e->gas, row);
     exercise_flue(&e->gas, row);
     exercise_blend(e, row);
