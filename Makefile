@@ -39,19 +39,21 @@ MAKEFLAGS += --no-builtin-rules --no-print-directory
 .SUFFIXES:
 .DELETE_ON_ERROR:
 .SECONDARY:
-.PHONY: FORCE all deps deps-build deps-test deps-lint deps-bench deps-coverage deps-cross check crosscheck run-tests sanitize clang demo bench lint metrics \
-        symbols thread run-threads coverage install uninstall clean help
+.PHONY: FORCE all deps deps-build deps-test deps-lint deps-bench deps-coverage deps-cross deps-dist deps-deb check crosscheck run-tests \
+        sanitize clang demo bench lint metrics symbols thread run-threads coverage install uninstall dist deb clean help
 
 OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
 VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
 SOVERSION := 0
 
 DEPS_BUILD := gcc libc6-dev make pkg-config libiniparser-dev libjansson-dev libcairo2-dev libxlsxwriter-dev libnlopt-dev libcsv-dev
-DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc locales universal-ctags libxml2-utils unzip parallel python3 \
-              libsqlite3-dev sqlite3
+DEPS_TEST  := $(DEPS_BUILD) g++ binutils libcmocka-dev mandoc groff-base locales universal-ctags libxml2-utils unzip parallel python3 \
+              git xz-utils libsqlite3-dev sqlite3
 DEPS_CROSS := $(DEPS_BUILD) python3 python3-venv chromium openjdk-17-jre-headless time
 DEPS_BENCH := $(DEPS_BUILD) mawk miller libsqlite3-dev sqlite3
 DEPS_COVERAGE := $(DEPS_TEST) gcovr
+DEPS_DIST  := git tar xz-utils coreutils
+DEPS_DEB   := $(DEPS_BUILD) $(DEPS_DIST) libsqlite3-dev dpkg-dev debhelper fakeroot lintian mmdebstrap
 DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe
 
 # ---- flags ----------------------------------------------------------------------------------------
@@ -102,7 +104,7 @@ SPECIFICATIONS := $(sort $(wildcard compositions/specifications/*.ini))
 MAN_PAGES   := $(sort $(wildcard man/*.[1-9]))
 HEADER_PAGES := $(patsubst include/bluecone/%.h,$(OUT)/man/bluecone_%.3,$(filter-out %/bluecone.h,$(HEADERS)))
 EXAMPLES     = $(shell find examples -type f 2>/dev/null | LC_ALL=C sort)
-SCRIPTS     := $(sort .ci/run .ci/deps $(wildcard tests/*.sh tests/*/*.sh examples/*.sh))
+SCRIPTS     := $(sort .ci/run .ci/deps .package/dist .package/deb $(wildcard tests/*.sh tests/*/*.sh examples/*.sh examples/*/*.sh))
 
 LIB_OBJ     := $(LIB_SRC:%.c=$(OUT)/%.o)
 PROGRAM_OBJ := $(PROGRAM_SRC:%.c=$(OUT)/%.o)
@@ -222,6 +224,8 @@ deps-lint:  ; @.ci/deps $(DEPS_LINT)
 deps-bench: ; @.ci/deps $(DEPS_BENCH)
 deps-coverage: ; @.ci/deps $(DEPS_COVERAGE)
 deps-cross: ; @.ci/deps $(DEPS_CROSS)
+deps-dist:  ; @.ci/deps $(DEPS_DIST)
+deps-deb:   ; @.ci/deps $(DEPS_DEB)
 
 # These start make again: what they build may need what `deps` has only just installed.
 check: deps-test ## build with the default compiler and run every test
@@ -258,7 +262,8 @@ IN_BUILD = SRC="$(CURDIR)" PATH="$(CURDIR)/$(OUT):$$PATH" \
 tests: $(TESTS) $(RUNNER)
 run-tests: all tests
 	@$(IN_BUILD) CC='$(CC)' CXX='$(CXX)' $(RUNNER) $(TESTS) 'tests/run_cli.sh -b $(OUT)' \
-	    $(if $(SQL),'bash tests/sqlite/run.sh') $(if $(wildcard tests/docs/run.sh),'bash tests/docs/run.sh') 'bash tests/library/run.sh $(OUT)'
+	    $(if $(SQL),'bash tests/sqlite/run.sh') $(if $(wildcard tests/docs/run.sh),'bash tests/docs/run.sh') 'bash tests/library/run.sh $(OUT)' \
+	    'bash tests/package/run.sh'
 
 # One file a run: Clang-tidy 14 takes va_list for uninitialised in every file but the first.
 lint: deps-lint ## cppcheck, clang-tidy, mandoc and shellcheck
@@ -306,6 +311,13 @@ uninstall: ## remove what install put there
 	    $(foreach f,README.md $(EXAMPLES),"$(DESTDIR)$(docdir)/$f")
 	for d in "$(includedir)/bluecone" "$(libdir)/bluecone" "$(datadir)/bluecone" "$(docdir)"; do \
 	    test ! -d "$(DESTDIR)$$d" || find "$(DESTDIR)$$d" -depth -type d -empty -delete; done
+
+dist: deps-dist ## the source archive of the last commit, the same bytes every time
+	@.package/dist build $(VERSION)
+
+deb: deps-deb dist ## Debian packages from that archive, judged by lintian, tried in a fresh Debian
+	@.package/deb build $(VERSION) $(DEPS_BUILD) libsqlite3-dev
+	@tests/package/trial.sh build/deb
 
 clean: ## remove build/
 	rm -rf build

@@ -276,6 +276,14 @@ static const bc_ini_entry *attach_values(bc_ini *ini)
     return NULL;
 }
 
+/* Why there are no values. */
+static bc_status refuse_values(const char *path, bc_error *err)
+{
+    if (access("/proc/self/fd", F_OK) != 0)
+        return bc_fail_at(err, BC_ERR_FILE, path, 0, "cannot be parsed without /proc, through which iniparser gets its text; mount /proc");
+    return bc_fail_at(err, BC_ERR_MEMORY, path, 0, "not enough memory to read the file");
+}
+
 static bc_status build(bc_ini *ini, const char *path, char *text, size_t length, bc_error *err)
 {
     scan s = {.path = path, .ini = ini, .err = err};
@@ -290,7 +298,7 @@ static bc_status build(bc_ini *ini, const char *path, char *text, size_t length,
             iniparser_freedict(ini->values);
         ini->values = load_values(text, length);
         if (!ini->values)
-            return bc_fail_at(err, BC_ERR_MEMORY, path, 0, "not enough memory to read the file");
+            return refuse_values(path, err);
         missing = attach_values(ini);
         if (!missing)
             return BC_OK;

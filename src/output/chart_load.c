@@ -9,7 +9,7 @@
 #include <assert.h>
 #include <string.h>
 
-static const module_name MODULE = {CHART_MODULE, CHART_SYMBOL, "charts"};
+static const module_name MODULE = {CHART_MODULE, CHART_SYMBOL, "charts", "libcairo2"};
 
 /* ISO C knows no cast between pointers to objects and to functions; POSIX wants them alike. */
 static bc_status take(bc_status status, void *symbol, chart_draw **draw)

@@ -25,8 +25,8 @@ static bc_status open_module(const module_name *module, const char *path, void *
 
         if (opened != NULL)
             dlclose(opened);
-        return bc_fail(err, BC_ERR_FILE, "cannot load the module for %s: %.400s", module->task,
-                       reason == NULL ? path : reason);
+        return bc_fail(err, BC_ERR_FILE, "cannot load the module for %s: %.300s; install bluecone anew, with what it needs (Debian: %s)",
+                       module->task, reason == NULL ? path : reason, module->needs);
     }
     *function = symbol;
     return BC_OK;

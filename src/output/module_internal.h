@@ -11,6 +11,7 @@ typedef struct {
     const char *file;   /* as "bluecone_chart.so" */
     const char *symbol; /* its one function */
     const char *task;   /* for messages: "the module for TASK" */
+    const char *needs;  /* the Debian package of the library it is made with */
 } module_name;
 
 /* Loads the module from the first of these folders that has it; it stays loaded. *function points to

@@ -9,7 +9,7 @@
 #include <assert.h>
 #include <string.h>
 
-static const module_name MODULE = {WORKBOOK_MODULE, WORKBOOK_SYMBOL, "workbooks"};
+static const module_name MODULE = {WORKBOOK_MODULE, WORKBOOK_SYMBOL, "workbooks", "libxlsxwriter4"};
 
 bc_status render_xlsx(const report *r, const render_style *style, FILE *out, bc_error *err)
 {

@@ -1,6 +1,6 @@
 # Other ways to ask for help.
-bluecone help | head -n 1
-bluecone -h | head -n 1
-bluecone get -h | head -n 1
+bluecone help | sed -n 1p
+bluecone -h | sed -n 1p
+bluecone get -h | sed -n 1p
 bluecone sheet --help g20 --bogus
 echo "exit $?" >&2

@@ -9,7 +9,7 @@
 # files shown whole must be accepted.
 # UPDATE=1 writes the outputs into the documents instead of comparing.
 #
-# Then: every option stands in the page and the help of its command, and only there; every help fits
+# Then: links and pictures; every option stands in the page and the help of its command, and only there; every help fits
 # a screen; every quantity and method is listed; the completion of the shell answers.
 #
 # Speaks the Test Anything Protocol; exit 1 when one test fails.
@@ -129,6 +129,38 @@ check_file() {
     point "the composition file shown in $1 is accepted" "$work/missing"
 }
 
+# check_links NAME: what a document links to in this tree is there.
+check_links() {
+    grep -o '](\([^)]*\))' "$SRC/$1" | sed -e 's/^](//' -e 's/)$//' -e 's/#.*//' | grep -v -e '^$' -e '^[a-z]*:' | while read -r path; do
+        test -e "$SRC/$path" || echo "$1 links to $path, which is not there"
+    done >"$work/missing"
+    point "the links of $1 lead somewhere" "$work/missing"
+}
+
+# What a chart says in words, which do not hang on the fonts of a machine as its lines do.
+words_of_chart() { sed -n '/<title>/,/<\/desc>/p' "$1"; }
+
+check_pictures() {
+    local picture
+    for picture in blend.svg report.png report.txt; do
+        grep -q "(examples/pictures/$picture)" "$SRC/README.md" || echo "README.md does not show $picture"
+        test "$(stat -c %s "$SRC/examples/pictures/$picture")" -lt 200000 || echo "$picture is larger than 200 kB"
+    done >"$work/missing"
+    test "$(head -c 8 "$SRC/examples/pictures/report.png" | od -An -c | tr -d ' ')" = '211PNG\r\n032\n' || echo 'report.png is none' >>"$work/missing"
+    point 'README.md shows its pictures, which are small' "$work/missing"
+
+    mkdir -p "$work/pictures"
+    {
+        sh "$SRC/examples/pictures/make.sh" "$work/pictures"
+        diff -u --label stored --label now "$SRC/examples/pictures/report.txt" "$work/pictures/report.txt"
+        words_of_chart "$SRC/examples/pictures/blend.svg" >"$work/want"
+        words_of_chart "$work/pictures/blend.svg" | diff -u --label stored --label now "$work/want" -
+        test -s "$work/want" || echo 'blend.svg says nothing'
+    } >"$work/missing" 2>&1
+    test ! -s "$work/missing" || echo 'run examples/pictures/make.sh, and look at the pictures' >>"$work/missing"
+    point 'the pictures show what the program answers now' "$work/missing"
+}
+
 # ---- help, pages and lists ------------------------------------------------------------------------
 # Rows "option command" of options.def.
 options_of_table() {
@@ -178,6 +210,10 @@ check_pages() {
     point 'every command has its page, with all sections' "$work/missing"
     mandoc -T lint -W warning "$SRC"/man/*.[1357] >"$work/missing" 2>&1
     point 'mandoc finds nothing in the pages' "$work/missing"
+    for page in "$SRC"/man/*.[1357]; do
+        groff -mdoc -ww -T utf8 -z "$page" 2>&1 | sed "s|$SRC/||"
+    done >"$work/missing"
+    point 'groff finds nothing in the pages' "$work/missing"
 }
 
 check_help() {
@@ -244,6 +280,9 @@ else
     done
     check_file README.md
     check_file man/bluecone-composition.5
+    check_links README.md
+    check_links DEVELOPERS.md
+    check_pictures
     check_options
     check_pages
     check_help

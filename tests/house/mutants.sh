@@ -79,6 +79,34 @@ refuses() {
     fresh_copy
 }
 
+# forge FLAGS...: what is installed, in small, hardened as the Makefile does it, but for FLAGS; $program as a program.
+forge() {
+    local hard=(-w -O2 -fPIC -U_FORTIFY_SOURCE -D_FORTIFY_SOURCE=3 -fstack-protector-strong -z relro -z now -z noexecstack)
+    case $("$CC" -dumpmachine) in x86_64* | i?86*) hard+=(-fcf-protection) ;; esac
+    put src/base/guarded.c <<<'#include <stdio.h>
+#include <string.h>
+#ifdef WRITTEN_AND_RUN
+__attribute__((section(".odd,\"awx\",@progbits #"))) int odd = 3;
+#endif
+int main(int n, char **words) { char text[16]; memcpy(text, words[0], strlen(words[0]) + 1); return printf("%s%d", text, n); }'
+    mkdir -p "$OUT/src/base"
+    rm -f "$OUT"/src/*/*.o
+    printf '%s\n' "$*" >"$OUT/flags"
+    "$CC" "${hard[@]}" "$@" -c "$SRC/src/base/guarded.c" -o "$OUT/src/base/guarded.o"
+    "$CC" "${hard[@]}" "${program--pie}" "$@" "$OUT/src/base/guarded.o" -o "$OUT/bluecone"
+    for file in libbluecone.so.0 bluecone_chart.so bluecone_workbook.so; do
+        "$CC" "${hard[@]}" -shared "$@" "$OUT/src/base/guarded.o" -o "$OUT/$file"
+    done
+}
+
+# unhardened WORDS FLAGS...: forged with these flags it is refused.
+unhardened() {
+    local words=$1
+    shift
+    forge "$@"
+    refuses hardening "$words"
+}
+
 # What the sound tree exports, needs and lays out is accepted.
 accept() {
     put tests/abi/symbols <<<'bc_status_value
@@ -180,5 +208,24 @@ put src/cli/wobbe.c <<<'/* Wobbe. */'
 refuses names 'wobbe.c is there more than once'
 put src/base/extra.def <<<'ROW(1)'
 refuses names 'src/base/extra.def does not open with a comment'
+
+forge
+said=$(run_rule hardening) || { printf 'mutants: hardening refuses what is hardened: %s\n' "$said"; failed=1; }
+program=-no-pie unhardened 'bluecone is not position independent'
+program=-shared unhardened 'bluecone is no position independent program'
+unhardened 'bluecone_chart.so has no read-only relocations' -Wl,-z,norelro
+unhardened 'libbluecone.so.0 binds symbols as it goes' -Wl,-z,lazy
+unhardened 'bluecone_workbook.so has a stack that can be run' -Wl,-z,execstack
+unhardened 'bluecone has a segment that is both written and run' -DWRITTEN_AND_RUN -Wl,--no-warn-rwx-segments
+unhardened 'bluecone brings a path of its own' -Wl,-rpath,/opt/lib
+unhardened 'bluecone does not watch its stack' -fno-stack-protector
+unhardened 'bluecone has no call of the C library checked' -U_FORTIFY_SOURCE
+unhardened 'bluecone prints by unchecked calls' -U_FORTIFY_SOURCE
+case $("$CC" -dumpmachine) in
+x86_64*)
+    unhardened 'bluecone_chart.so has relocations in its code' -fno-pic -mcmodel=large -Wl,-z,notext
+    unhardened 'guarded.o is compiled without -fcf-protection' -fcf-protection=none
+    ;;
+esac
 
 exit $failed

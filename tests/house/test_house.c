@@ -85,6 +85,12 @@ static void file_names_are_unique_and_files_say_what_they_are(void **state)
     run_rule("names");
 }
 
+static void what_is_installed_is_hardened(void **state)
+{
+    (void)state;
+    run_rule("hardening");
+}
+
 static void every_rule_refuses_its_violation(void **state)
 {
     (void)state;
@@ -103,6 +109,7 @@ int main(void)
         cmocka_unit_test(the_top_level_holds_only_what_belongs_there),
         cmocka_unit_test(unsafe_calls_are_not_made),
         cmocka_unit_test(file_names_are_unique_and_files_say_what_they_are),
+        cmocka_unit_test(what_is_installed_is_hardened),
         cmocka_unit_test(every_rule_refuses_its_violation),
     };
 

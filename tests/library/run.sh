@@ -62,6 +62,9 @@ point 'every public header has its page'
 mandoc -T lint -W warning "$root"/share/man/man3/*.3 >"$work/wrong" 2>&1
 point 'mandoc finds nothing in the pages of the headers'
 
+for page in "$root"/share/man/man3/*.3; do groff -mdoc -ww -T utf8 -z "$page"; done >"$work/wrong" 2>&1
+point 'groff finds nothing in the pages of the headers'
+
 for page in "$root"/share/man/man3/bluecone_*.3; do
     name=$(basename "$page" .3)
     grep -q "^\.Xr $name 3" man/bluecone.3 || echo "bluecone(3) does not name $name(3)"

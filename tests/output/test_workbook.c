@@ -318,7 +318,7 @@ static void the_locale_does_not_matter(void **state)
 
 static void the_module_refuses_a_stranger_and_a_missing_one_is_named(void **state)
 {
-    static const module_name NAME = {WORKBOOK_MODULE, WORKBOOK_SYMBOL, "workbooks"};
+    static const module_name NAME = {WORKBOOK_MODULE, WORKBOOK_SYMBOL, "workbooks", "libxlsxwriter4"};
     static const char *const HERE[] = {BC_BUILD_DIR}, *const NOWHERE[] = {"/nowhere/lib/bluecone"};
     workbook_write *write = NULL;
     void *symbol = NULL;
