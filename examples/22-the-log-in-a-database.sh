@@ -8,9 +8,10 @@ set -eu
 cd "$(dirname "$0")"
 PATH=$PATH:../build/release # a bluecone that was installed goes first
 
-program=$(command -v bluecone)
-module=${program%/*}/bluecone_sqlite                                          # in a build tree
-test -e "$module.so" || module=${program%/*}/../lib/bluecone/bluecone_sqlite # installed
+bin=$(dirname "$(command -v bluecone)")
+for module in "$bin/bluecone_sqlite.so" "$bin"/../lib/bluecone/bluecone_sqlite.so "$bin"/../lib/*/bluecone/bluecone_sqlite.so; do
+    test ! -e "$module" || break # in a build tree, below /usr/local, of a Debian package
+done
 
 sqlite3 -batch <<END
 .load '$module'
