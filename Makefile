@@ -9,6 +9,7 @@ VARIANT = release
 WERROR  =
 V       = @
 PREFIX  = /usr/local
+SECONDS = 60
 
 prefix      = $(PREFIX)
 exec_prefix = $(prefix)
@@ -29,7 +30,7 @@ INSTALL_DATA    = $(INSTALL) -m 644
 PKG_CONFIG      = pkg-config
 
 ifeq ($(origin CC),default)
-CC := $(if $(filter clang,$(VARIANT)),clang,gcc)
+CC := $(if $(filter clang fuzz,$(VARIANT)),clang,gcc)
 endif
 CXX = g++
 # ---- end of settings ------------------------------------------------------------------------------
@@ -40,7 +41,7 @@ MAKEFLAGS += --no-builtin-rules --no-print-directory
 .DELETE_ON_ERROR:
 .SECONDARY:
 .PHONY: FORCE all deps deps-build deps-test deps-lint deps-bench deps-coverage deps-cross deps-dist deps-deb check crosscheck run-tests \
-        sanitize clang demo bench lint metrics symbols thread run-threads coverage install uninstall dist deb clean help
+        sanitize clang fuzz faults valgrind demo bench lint metrics symbols thread run-threads coverage install uninstall dist deb clean help
 
 OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
 VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
@@ -54,7 +55,7 @@ DEPS_BENCH := $(DEPS_BUILD) mawk miller libsqlite3-dev sqlite3
 DEPS_COVERAGE := $(DEPS_TEST) gcovr
 DEPS_DIST  := git tar xz-utils coreutils
 DEPS_DEB   := $(DEPS_BUILD) $(DEPS_DIST) libsqlite3-dev dpkg-dev debhelper fakeroot lintian mmdebstrap
-DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe
+DEPS_LINT  := $(DEPS_TEST) clang clang-tidy cppcheck shellcheck pmccabe valgrind
 
 # ---- flags ----------------------------------------------------------------------------------------
 WARNINGS := -Wall -Wextra -Wpedantic -Wshadow -Wconversion -Wsign-conversion -Wdouble-promotion \
@@ -70,6 +71,7 @@ CFLAGS.sanitize = -O1 -g -fsanitize=address,undefined -fno-sanitize-recover=all 
 CFLAGS.thread   = -O1 -g -fsanitize=thread
 CFLAGS.coverage = -O0 -g --coverage -fprofile-update=atomic
 INSTRUMENTS    := $(filter -fsanitize=% --coverage,$(CFLAGS.$(VARIANT)))
+CFLAGS.fuzz     = -O1 -g -fsanitize=fuzzer-no-link,address,undefined -fno-sanitize-recover=all -fno-omit-frame-pointer
 
 CFLAGS_ALL   = -std=c11 $(WARNINGS) $(CFLAGS.$(VARIANT)) -fvisibility=hidden -fno-common -ffp-contract=off \
                -fno-math-errno "-ffile-prefix-map=$(CURDIR)=." $(CFLAGS)
@@ -109,7 +111,7 @@ SCRIPTS     := $(sort .ci/run .ci/deps .package/dist .package/deb $(wildcard tes
 LIB_OBJ     := $(LIB_SRC:%.c=$(OUT)/%.o)
 PROGRAM_OBJ := $(PROGRAM_SRC:%.c=$(OUT)/%.o)
 CHART_OBJ   := $(CHART_SRC:%.c=$(OUT)/%.o)
-CHART_TOO   := $(addprefix $(OUT)/src/,base/digits.o base/text.o output/number_text.o output/plain_text.o)
+CHART_TOO   := $(addprefix $(OUT)/src/,base/digits.o output/memory_stream.o base/text.o output/number_text.o output/plain_text.o)
 BOOK_OBJ    := $(BOOK_SRC:%.c=$(OUT)/%.o)
 BOOK_TOO    := $(CHART_TOO) $(addprefix $(OUT)/src/output/,report_judged.o result_text.o section.o text_letter.o)
 # Only where SQLite's headers are: the one question that is asked before any recipe, and "no" without pkg-config.
@@ -119,6 +121,14 @@ PROGRAM_PARTS := $(filter-out %/cli/main.o,$(PROGRAM_OBJ))
 # The house rules judge the released library; the other variants carry their instruments.
 TESTS       := $(filter-out $(if $(filter release,$(VARIANT)),,%/house/test_house) $(if $(SQL),,%/sqlite/test_sqlite),$(TEST_SRC:%.c=$(OUT)/%))
 RUNNER      := $(OUT)/tests/house/run_all
+# The interposer takes the place of malloc(), as sanitizers do.
+FAULTS      := $(if $(filter release clang,$(VARIANT)),$(OUT)/tests/faults/faults $(OUT)/tests/faults/inject.so)
+RUN_FAULTS   = bash tests/faults/run.sh -b $(OUT)
+# A fuzz target replays its seeds in the tests; in the variant `fuzz` libFuzzer drives it.
+FUZZ_SRC    := $(sort $(wildcard tests/fuzz/fuzz_*.c))
+FUZZERS     := $(FUZZ_SRC:%.c=$(OUT)/%)
+FUZZ_DRIVER  = $(if $(filter fuzz,$(VARIANT)),-fsanitize=fuzzer,$(OUT)/tests/fuzz/replay.o)
+REPLAYS      = $(foreach f,$(FUZZERS),'$f tests/fuzz/seeds/$(patsubst fuzz_%,%,$(notdir $f))')
 PROGRAM     := $(OUT)/bluecone
 ARCHIVE     := $(OUT)/libbluecone.a
 SHARED      := $(OUT)/libbluecone.so.$(SOVERSION)
@@ -195,6 +205,19 @@ $(TESTS) $(RUNNER): $(OUT)/%: $(OUT)/%.o $(PROGRAM_PARTS) $(ARCHIVE)
 	@echo '  LD    $@'
 	$(V)$(LINK) $^ $(call CMOCKA,--libs) $(TEST_LIBS) $(call JANSSON,--libs) $(LDLIBS_LIB) -pthread -o $@
 
+$(OUT)/tests/faults/faults: $(OUT)/tests/faults/faults.o
+	@echo '  LD    $@'
+	$(V)$(LINK) $^ -o $@
+
+$(OUT)/tests/faults/inject.o: private MODE = -fPIC -fvisibility=default
+$(OUT)/tests/faults/inject.so: $(OUT)/tests/faults/inject.o
+	@echo '  LD    $@'
+	$(V)$(CC) $(CFLAGS_ALL) -fPIC -shared $(LDFLAGS_ALL) $^ -ldl -o $@
+
+$(FUZZERS): $(OUT)/%: $(OUT)/%.o $(OUT)/tests/fuzz/replay.o $(PROGRAM_PARTS) $(ARCHIVE)
+	@echo '  LD    $@'
+	$(V)$(LINK) $< $(FUZZ_DRIVER) $(PROGRAM_PARTS) $(ARCHIVE) $(call JANSSON,--libs) $(LDLIBS_LIB) -o $@
+
 # The second is what pkg-config takes when it looks into a build folder: programs there find the library that
 # was just built. A library with instruments in it needs programs that have them, too.
 $(OUT)/bluecone.pc:             private PC = -e 's|@prefix@|$(prefix)|' -e 's|@libdir@|$(libdir)|' -e 's|@includedir@|$(includedir)|'
@@ -214,7 +237,7 @@ $(OUT)/bluecone.bash: src/cli/completion.bash.in include/bluecone/status.h Makef
 	@mkdir -p $(@D)
 	@sed 's|@version@|$(VERSION)|' $< >$@
 
--include $(LIB_OBJ:.o=.d) $(PROGRAM_OBJ:.o=.d) $(CHART_OBJ:.o=.d) $(BOOK_OBJ:.o=.d) $(SQL_OBJ:.o=.d) $(TESTS:=.d) $(RUNNER).d
+-include $(LIB_OBJ:.o=.d) $(PROGRAM_OBJ:.o=.d) $(CHART_OBJ:.o=.d) $(BOOK_OBJ:.o=.d) $(SQL_OBJ:.o=.d) $(TESTS:=.d) $(FUZZERS:=.d) $(OUT)/tests/faults/faults.d $(OUT)/tests/faults/inject.d $(RUNNER).d
 
 # ---- targets --------------------------------------------------------------------------------------
 deps: deps-lint ## install what is missing of the Debian packages used here
@@ -243,6 +266,16 @@ coverage: deps-coverage ## lines and branches that the tests reach, with the lea
 	    --txt coverage.txt --html-details coverage.html --print-summary --fail-under-line 95 --fail-under-branch 85 .
 clang: deps-lint ## the program, the library and the test programs, by Clang with -Werror
 	@$(MAKE) VARIANT=clang WERROR=1 all tests
+fuzz: deps-lint ## every fuzz target by libFuzzer, SECONDS=60 each; FUZZ=stream: that one alone
+	@$(MAKE) VARIANT=fuzz fuzzers
+	@bash tests/fuzz/run.sh -b build/fuzz $(SECONDS) $(FUZZ)
+faults: deps-test ## calls of the C library fail one after the other, in every command; thousand hostile inputs
+	@$(MAKE) all tests
+	@$(RUN_FAULTS) 400
+	@$(IN_BUILD) bash tests/faults/hostile.sh -b $(OUT) 1000
+valgrind: deps-lint ## every command once under Valgrind
+	@$(MAKE) all
+	@$(IN_BUILD) bash tests/faults/valgrind.sh -b $(OUT)
 demo: deps-build ## build, then play the examples
 	@$(MAKE) all
 	$(if $(wildcard examples/demo.sh),@$(IN_BUILD) bash examples/demo.sh)
@@ -258,10 +291,12 @@ bench: deps-bench ## build, then measure
 IN_BUILD = SRC="$(CURDIR)" PATH="$(CURDIR)/$(OUT):$$PATH" \
     $(if $(filter sanitize,$(VARIANT)),LSAN_OPTIONS="suppressions=$(CURDIR)/tests/house/leaks.supp:print_suppressions=0")
 
-.PHONY: tests
-tests: $(TESTS) $(RUNNER)
+.PHONY: tests fuzzers
+fuzzers: $(FUZZERS)
+tests: $(TESTS) $(FUZZERS) $(FAULTS) $(RUNNER)
 run-tests: all tests
-	@$(IN_BUILD) CC='$(CC)' CXX='$(CXX)' $(RUNNER) $(TESTS) 'tests/run_cli.sh -b $(OUT)' \
+	@$(IN_BUILD) CC='$(CC)' CXX='$(CXX)' $(RUNNER) $(TESTS) $(REPLAYS) 'tests/run_cli.sh -b $(OUT)' \
+	    $(if $(FAULTS),'$(RUN_FAULTS) 5 daily') 'bash tests/faults/hostile.sh -b $(OUT) 12' \
 	    $(if $(SQL),'bash tests/sqlite/run.sh') $(if $(wildcard tests/docs/run.sh),'bash tests/docs/run.sh') 'bash tests/library/run.sh $(OUT)' \
 	    'bash tests/package/run.sh'
 

@@ -26,6 +26,9 @@ extern "C" {
 #define BC_EQUILIBRIUM_P_MIN_PA 1.0e2 /* ideal gases; tested from 5 kPa */
 #define BC_EQUILIBRIUM_P_MAX_PA 1.0e8 /* tested to 10 MPa; real-gas effects are not in the data */
 
+#define BC_EQUILIBRIUM_MOL_MIN 1.0e-200 /* of atoms in all: beyond these a result would leave the range of a double */
+#define BC_EQUILIBRIUM_MOL_MAX 1.0e200
+
 /* A mixture of products of combustion, a plain value. */
 typedef struct {
     double moles[BC_PRODUCT_CAPACITY]; /* amount of each product, mol */
@@ -55,13 +58,13 @@ BC_API size_t bc_product_of(size_t thermo_index);
 
 /* Equilibrium at temperature and pressure.
  *
- *   element_moles   amount of each element, mol of atoms, BC_ELEMENTS of them, not negative; shares of all
- *                   atoms below 1e-14 are left out
+ *   element_moles   amount of each element, mol of atoms, BC_ELEMENTS of them, not negative, in all
+ *                   BC_EQUILIBRIUM_MOL_MIN..BC_EQUILIBRIUM_MOL_MAX; shares of all atoms below 1e-14 are left out
  *   t_k             BC_THERMO_T_MIN_K..BC_THERMO_T_MAX_K
  *   p_pa            BC_EQUILIBRIUM_P_MIN_PA..BC_EQUILIBRIUM_P_MAX_PA
  *   mixture         out: untouched on failure
  *
- * BC_ERR_RANGE: t_k or p_pa outside; BC_ERR_INPUT: a negative, non-finite or empty sum of elements, or
+ * BC_ERR_RANGE: t_k or p_pa outside; BC_ERR_INPUT: a negative, non-finite, empty or too large or small sum of elements, or
  * elements that no gas of the list can hold (carbon alone); BC_ERR_SOLVER: not found (a defect).
  * Source: Gordon and McBride, NASA RP-1311 (1994), sections 2.3 and 3. */
 BC_API BC_MUST_USE bc_status bc_equilibrium_tp(const double element_moles[BC_ELEMENTS], double t_k,

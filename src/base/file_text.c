@@ -20,6 +20,11 @@ static bc_status fail_errno(bc_error *err, const char *path, const char *what)
     return bc_fail_at(err, BC_ERR_FILE, path, 0, "%s: %s", what, reason);
 }
 
+bool bc_file_is_misnamed(int reason)
+{
+    return reason == ENOENT || reason == EACCES || reason == ENOTDIR || reason == ELOOP || reason == ENAMETOOLONG || reason == EISDIR;
+}
+
 /* Only a regular file has a size that can be checked and can be read again by the INI library. */
 static bc_status check_kind(int fd, const char *path, size_t limit, size_t *size, bc_error *err)
 {
@@ -52,7 +57,7 @@ static bc_status read_all(int fd, const char *path, char *text, size_t size, siz
         if (got < 0)
             return fail_errno(err, path, "cannot be read");
         if (got == 0)
-            break;
+            return bc_fail_at(err, BC_ERR_FILE, path, 0, "the file became shorter while it was read; start again when it is whole");
         n += (size_t)got;
     }
     text[n] = '\0';
@@ -109,7 +114,7 @@ bc_status bc_file_text(const char *path, size_t limit, char **text, size_t *leng
     const int fd = open(path, O_RDONLY | O_CLOEXEC | O_NONBLOCK);
 
     if (fd < 0) {
-        if (errno == ENOENT || errno == EACCES || errno == ENOTDIR || errno == ELOOP || errno == ENAMETOOLONG) {
+        if (bc_file_is_misnamed(errno)) {
             fail_errno(err, path, "cannot be opened");
             if (err)
                 err->status = BC_ERR_INPUT;

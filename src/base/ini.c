@@ -7,6 +7,7 @@
 #include "base/file_text.h"
 #include "base/text.h"
 
+#include <errno.h>
 #include <iniparser/iniparser.h>
 #include <stdbool.h>
 #include <stdio.h>
@@ -216,6 +217,8 @@ static bool write_all(int fd, const char *text, size_t length)
     while (length > 0) {
         const ssize_t n = write(fd, text, length);
 
+        if (n < 0 && errno == EINTR)
+            continue;
         if (n <= 0)
             return false;
         text += n;
@@ -292,7 +295,8 @@ static bc_status build(bc_ini *ini, const char *path, char *text, size_t length,
 
     if (status != BC_OK)
         return status;
-    /* A line that iniparser has no memory for it leaves out in silence: what is missing twice, it cannot read. */
+    /* A line that iniparser has no memory for, or cannot read, it leaves out in silence. All that it could not make sense
+     * of was refused above: what is missing twice is no fault of the file. */
     for (int attempt = 0; attempt < 2; attempt++) {
         if (ini->values)
             iniparser_freedict(ini->values);
@@ -303,7 +307,7 @@ static bc_status build(bc_ini *ini, const char *path, char *text, size_t length,
         if (!missing)
             return BC_OK;
     }
-    return bc_fail_at(err, BC_ERR_INPUT, path, missing->line, "'%s' cannot be read as key = value; remove quotes and special characters",
+    return bc_fail_at(err, BC_ERR_FILE, path, missing->line, "'%s' did not come back from iniparser: memory is short or the system failed; try again",
                       missing->key);
 }
 

@@ -6,6 +6,7 @@
 #include "base/text.h"
 #include "bluecone/number.h"
 
+#include <math.h>
 #include <string.h>
 
 #define NO_STATE (-1000.0)                 /* no temperature of the trade */
@@ -175,6 +176,9 @@ bc_status bc_measure_parse(const char *text, const char *like, const char *bare,
         return status;
     if (!bc_unit_matches(&unit, &wanted))
         return bc_fail(err, BC_ERR_USAGE, "the unit of '%s' does not fit here; write one that converts to %s", text, like);
-    *si = bc_unit_to_si(&unit, value);
+    value = bc_unit_to_si(&unit, value);
+    if (!isfinite(value))
+        return bc_fail(err, BC_ERR_INPUT, "'%s' is beyond the range of numbers; correct it", text);
+    *si = value;
     return BC_OK;
 }

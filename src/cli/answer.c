@@ -81,7 +81,9 @@ static bc_status render(report *r, const arguments *a, bool brief, bc_error *err
     if (status != BC_OK)
         return status;
     if (tells_inputs(form))
-        inputs_identify(r);
+        status = inputs_identify(r, err);
+    if (status != BC_OK)
+        return status;
     if (!report_ok(r))
         return bc_fail(err, BC_ERR_MEMORY, "not enough memory for the report");
     if (form == RENDER_BRIEF) {

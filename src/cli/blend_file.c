@@ -1,6 +1,7 @@
 /* SPDX-License-Identifier: MIT */
 /* blend_file.c - a blend as a composition file, and the answer that may be one. */
 #include "base/error_internal.h"
+#include "output/memory_stream_internal.h"
 #include "base/text.h"
 #include "cli/blend_report.h"
 #include "output/output_file_internal.h"
@@ -116,7 +117,9 @@ bc_status blend_write_file(const blend_case *c, const double share[], const char
         put_uncertainty(f, spread);
         put_supply(f, c, share);
     }
-    if (!f || !spread || (fclose(f) != 0))
+    const bool kept = f && bc_memory_stream_close(f, &bytes);
+
+    if (!kept || !spread)
         status = bc_fail(err, BC_ERR_MEMORY, "not enough memory for the blend");
     if (status == BC_OK)
         status = output_write(path, bytes, count, err);

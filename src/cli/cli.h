@@ -95,7 +95,7 @@ bc_status contract_bind_ranges(bc_contract *contract, bc_error *err);
 void report_contract_inputs(report *r, const bc_contract *contract);
 
 /* Reads the files of a report again, for their SHA-256. Only for forms that are kept: it costs time. */
-void inputs_identify(report *r);
+bc_status inputs_identify(report *r, bc_error *err);
 
 /* Where a result goes: section and gas of a report. */
 typedef struct {

@@ -5,17 +5,14 @@
 
 #include <stdarg.h>
 #include <stdio.h>
-#include <stdlib.h>
 
 #define LINE_BYTES 1536 /* a file name, a line number and a sentence */
 
 /* Words and file names of the user are quoted in the line: a terminal must not obey them. */
-static void tell(const char *text)
+static void tell(char *text)
 {
-    char *shown = plain_text(text, PLAIN_LINE);
-
-    (void)fprintf(stderr, "bluecone: %s\n", shown ? shown : "out of memory");
-    free(shown);
+    plain_text_in_place(text, PLAIN_LINE);
+    (void)fprintf(stderr, "bluecone: %s\n", text);
 }
 
 int complain(const bc_error *err)

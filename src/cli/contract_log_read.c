@@ -4,6 +4,7 @@
 #include "cli/csv_library.h"
 
 #include "base/error_internal.h"
+#include "base/file_text.h"
 #include "base/text.h"
 
 #include <errno.h>
@@ -138,7 +139,7 @@ static bc_status read_file(log_file *f)
 {
     f->file = fopen(f->l->path, "re");
     if (!f->file)
-        return bc_fail_at(f->err, BC_ERR_INPUT, f->l->path, 0, "the log cannot be opened; is the name right?");
+        return bc_fail_at(f->err, bc_file_is_misnamed(errno) ? BC_ERR_INPUT : BC_ERR_FILE, f->l->path, 0, "the log cannot be opened; is the name right?");
     const bc_status status = read_lines(f);
 
     (void)fclose(f->file);

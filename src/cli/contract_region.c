@@ -10,7 +10,7 @@ static bool place(const bc_ratio axes[2], const bc_gas *gas, report_point *p)
 }
 
 /* The lowest and highest gas of a slice; a slice that lets no gas in, or none that could be found, is passed over. */
-static void add_slice(bc_space *space, const bc_ratio axes[2], double at, double half, region_outline *o)
+static bc_status add_slice(bc_space *space, const bc_ratio axes[2], double at, double half, region_outline *o, bc_error *err)
 {
     bc_space_limit *slice = &space->limits[space->limit_count];
     bc_worst *worst = NULL;
@@ -18,22 +18,29 @@ static void add_slice(bc_space *space, const bc_ratio axes[2], double at, double
 
     *slice = (bc_space_limit){.ratio = axes[0], .min = at - half, .max = at + half};
     space->limit_count++;
-    const bool found = bc_worst_open(space, &worst, NULL) == BC_OK && bc_worst_ratio(worst, &axes[1], &e, NULL) == BC_OK &&
-                       place(axes, &e.min.gas, &o->lower[o->count]) && place(axes, &e.max.gas, &o->upper[o->count]);
+    bc_status status = bc_worst_open(space, &worst, err);
+
+    if (status == BC_OK)
+        status = bc_worst_ratio(worst, &axes[1], &e, err);
+    const bool found = status == BC_OK && place(axes, &e.min.gas, &o->lower[o->count]) && place(axes, &e.max.gas, &o->upper[o->count]);
 
     space->limit_count--;
     bc_worst_close(worst);
     o->count += found;
+    return status == BC_ERR_MEMORY || status == BC_ERR_FILE ? status : BC_OK;
 }
 
 /* Slices from one end to the other; those at the ends lie within it. */
-static void trace(bc_space *space, const bc_ratio axes[2], const bc_extremes *ends, region_outline *o)
+static bc_status trace(bc_space *space, const bc_ratio axes[2], const bc_extremes *ends, region_outline *o, bc_error *err)
 {
+    bc_status status = BC_OK;
+
     const double span = ends->max.value - ends->min.value;
     const double half = SLICE_HALF * span;
 
-    for (size_t k = 0; k <= REGION_SLICES; k++)
-        add_slice(space, axes, ends->min.value + half + (span - 2.0 * half) * (double)k / REGION_SLICES, half, o);
+    for (size_t k = 0; k <= REGION_SLICES && status == BC_OK; k++)
+        status = add_slice(space, axes, ends->min.value + half + (span - 2.0 * half) * (double)k / REGION_SLICES, half, o, err);
+    return status;
 }
 
 bc_status region_trace(const contract_case *c, const bc_ratio axes[2], region_outline *o, bc_error *err)
@@ -47,7 +54,7 @@ bc_status region_trace(const contract_case *c, const bc_ratio axes[2], region_ou
     if (status == BC_OK && !bc_worst_is_empty(w.worst) && !o->untraced) {
         status = bc_worst_ratio(w.worst, &axes[0], &ends, err);
         if (status == BC_OK)
-            trace(w.space, axes, &ends, o);
+            status = trace(w.space, axes, &ends, o, err);
     }
     worst_close(&w);
     return status;

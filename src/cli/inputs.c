@@ -29,8 +29,8 @@ static const char *name_of(const folders *f, const char *path)
     return path;
 }
 
-/* A file that has gone since it was read stays without. */
-void inputs_identify(report *r)
+/* A file that has gone since it was read stays without; one that cannot be read for another reason is told of. */
+bc_status inputs_identify(report *r, bc_error *err)
 {
     folders f = {.count = 0};
 
@@ -41,10 +41,15 @@ void inputs_identify(report *r)
         size_t count = 0;
         char digest[SHA256_TEXT];
 
-        if (bc_file_text(r->inputs[i].path, INPUT_BYTES_MAX, &bytes, &count, NULL) != BC_OK)
+        const bc_status status = bc_file_text(r->inputs[i].path, INPUT_BYTES_MAX, &bytes, &count, err);
+
+        if (status == BC_ERR_FILE || status == BC_ERR_MEMORY)
+            return status;
+        if (status != BC_OK)
             continue;
         bc_sha256(bytes, count, digest);
         report_identify_input(r, i, name_of(&f, r->inputs[i].path), digest);
         free(bytes);
     }
+    return BC_OK;
 }

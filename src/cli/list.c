@@ -22,6 +22,8 @@ void list_row(report *r, size_t table, const char *const cells[], size_t count)
 
 bool list_has(const report *r, size_t table, const char *name)
 {
+    if (!report_ok(r)) /* without memory a table, or a column, may not be there */
+        return false;
     const report_table *t = &r->tables[table];
 
     for (size_t i = 0; i < t->cell_count; i += t->column_count)

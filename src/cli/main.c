@@ -3,6 +3,7 @@
 #include "base/error_internal.h"
 #include "base/text.h"
 #include "cli/cli.h"
+#include "cli/json_memory.h"
 
 #include <errno.h>
 #include <signal.h>
@@ -60,6 +61,7 @@ int main(int argc, char **argv)
     (void)signal(SIGPIPE, SIG_IGN);
     /* a file over the size limit likewise: else a half-written one would be left behind */
     (void)signal(SIGXFSZ, SIG_IGN);
+    json_memory_watch();
     if (argc < 2) {
         (void)fputs("bluecone: no command given; see bluecone --help\n", stderr);
         return bc_exit_code(BC_ERR_USAGE);

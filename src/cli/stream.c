@@ -149,7 +149,7 @@ static uint64_t count_lines(const char *text, size_t length)
 static bc_status begin(stream_case *s, bc_error *err)
 {
     size_t header = 0;
-    bc_status status = stream_input_begin(&s->in, err);
+    bc_status status = stream_input_begin(&s->in, &s->plan, err);
 
     if (status == BC_OK)
         status = stream_find_columns(&s->plan, s->in.rest, s->in.rest_length, s->in.ended, &header, err);

@@ -118,6 +118,10 @@ typedef struct {
 bc_status stream_plan_open(stream_plan *p, const arguments *a, bc_error *err);
 void stream_plan_close(stream_plan *p);
 
+/* Whether the beginning of the log holds all that stream_find_columns() looks at: the same must be made of a log however
+ * it arrives. */
+bool stream_has_beginning(stream_plan *p, const char *text, size_t length);
+
 /* Makes out form, dialect and columns by the beginning of the log.
  *
  *   text     its first bytes; at least one whole row, unless no more follow
@@ -133,6 +137,9 @@ size_t stream_put_header(const stream_plan *p, const char *text, size_t length, 
 /* Where the row that begins at text ends: behind its line feed. `last` says that no more bytes follow. 0: it does not
  * end within length. */
 size_t stream_row_end(const stream_plan *p, const char *text, size_t length, bool last);
+
+/* Whether a row ends within a quote, which would swallow what is written behind it. */
+bool stream_is_open(char delimiter, const char *text, size_t length);
 
 typedef enum {
     STREAM_CUT_WHOLE,
@@ -192,7 +199,7 @@ bc_status stream_input_open(stream_input *in, const stream_plan *p, bc_error *er
 void stream_input_close(stream_input *in);
 
 /* Reads so much into in->rest that the columns can be made out; errors as below. Some of it may then be skipped. */
-bc_status stream_input_begin(stream_input *in, bc_error *err);
+bc_status stream_input_begin(stream_input *in, stream_plan *p, bc_error *err);
 void stream_input_skip(stream_input *in, size_t length);
 
 /* Fills a block with whole rows.

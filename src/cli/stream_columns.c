@@ -4,6 +4,7 @@
 
 #include "base/error_internal.h"
 #include "base/text.h"
+#include "cli/json_memory.h"
 
 #include <jansson.h>
 #include <stdio.h>
@@ -95,7 +96,7 @@ static bc_status name_keys(stream_plan *p, const char *text, size_t length, int 
     json_t *value = NULL;
     bc_status status = BC_OK;
 
-    if (!cells)
+    if (json_memory_was_short() || !cells)
         status = bc_fail(err, BC_ERR_MEMORY, "not enough memory for the columns");
     else if (!json_is_object(object))
         status = bc_fail_at(err, BC_ERR_INPUT, p->path, line, "the first line is no JSON object; its keys name the columns, or --no-header --columns does");
@@ -179,8 +180,6 @@ static bc_status take_csv(stream_plan *p, beginning *b, const char *text, size_t
 {
     const char *names = p->a->value[OPTION_columns];
     const size_t bare = without_end(p, text, length);
-
-    p->delimiter = log_delimiter(text, bare);
     bc_status status = names ? name_columns(p, ',', names, strlen(names), 0, err) : name_columns(p, p->delimiter, text, bare, b->line, err);
 
     if (status == BC_OK)
@@ -212,28 +211,63 @@ static bc_status take_ndjson(stream_plan *p, const beginning *b, const char *tex
     return status == BC_OK ? settle_columns(p, err) : status;
 }
 
+static size_t mark_of(const char *text, size_t length)
+{
+    return length >= strlen(BOM) && memcmp(text, BOM, strlen(BOM)) == 0 ? strlen(BOM) : 0;
+}
+
+/* An object, by its first byte: its quotes are not those of CSV. */
+static bool is_ndjson(const stream_plan *p, const char *text, size_t length)
+{
+    const char *form = p->a->value[OPTION_form];
+    size_t at = 0;
+
+    while (at < length && is_space(text[at]))
+        at++;
+    return form ? form[0] == 'n' : at < length && text[at] == '{';
+}
+
+/* The header, or the first analysis: cut as a row of commas it shows its delimiter, by which it is then cut. */
+static bool cut_first(stream_plan *p, beginning *b, const char **text, size_t *length)
+{
+    beginning at = *b;
+
+    p->form = is_ndjson(p, b->text + b->at, b->length - b->at) ? STREAM_NDJSON : STREAM_CSV;
+    p->delimiter = ',';
+    if (!next_row(p, &at, text, length))
+        return false;
+    if (p->form == STREAM_CSV)
+        p->delimiter = log_delimiter(*text, without_end(p, *text, *length));
+    return next_row(p, b, text, length);
+}
+
+/* The first row names the columns and the second shows the decimal mark; an object does both. */
+bool stream_has_beginning(stream_plan *p, const char *text, size_t length)
+{
+    beginning b = {text, length, mark_of(text, length), false, 0};
+    const char *row = NULL;
+    size_t row_length = 0;
+
+    if (!cut_first(p, &b, &row, &row_length))
+        return false;
+    if (p->form == STREAM_NDJSON)
+        return true;
+    b.at = p->has_header ? b.at : mark_of(text, length);
+    return next_row(p, &b, &row, &row_length);
+}
+
 bc_status stream_find_columns(stream_plan *p, const char *text, size_t length, bool last, size_t *header, bc_error *err)
 {
-    const size_t mark = length >= strlen(BOM) && memcmp(text, BOM, strlen(BOM)) == 0 ? strlen(BOM) : 0;
-    const char *form = p->a->value[OPTION_form];
+    const size_t mark = mark_of(text, length);
     beginning b = {text, length, mark, last, 0};
     const char *row = text;
     size_t row_length = 0;
 
     p->mark_length = mark;
-    /* until the delimiter is known a row ends with its line, unless a quote at its begin goes on */
-    p->delimiter = ',';
-    if (!next_row(p, &b, &row, &row_length) && !(last && p->is_part))
+    if (!cut_first(p, &b, &row, &row_length) && !(last && p->is_part))
         return bc_fail_at(err, BC_ERR_INPUT, p->path, 0, last ? "the log is empty; its first row names the columns" : "the first row is longer than 256 KiB; is it a log?");
-    const char *first = row;
-
-    while (first < row + row_length && is_space(*first))
-        first++;
-    if (form ? form[0] == 'n' : first < row + row_length && *first == '{') {
-        p->form = STREAM_NDJSON;
+    if (p->form == STREAM_NDJSON)
         return take_ndjson(p, &b, row, row_length, header, err);
-    }
-    p->form = STREAM_CSV;
     return take_csv(p, &b, row, row_length, header, err);
 }
 

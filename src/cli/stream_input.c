@@ -3,6 +3,7 @@
 #include "cli/stream.h"
 
 #include "base/error_internal.h"
+#include "base/file_text.h"
 
 #include <errno.h>
 #include <fcntl.h>
@@ -43,7 +44,7 @@ bc_status stream_input_open(stream_input *in, const stream_plan *p, bc_error *er
         return bc_fail(err, BC_ERR_MEMORY, "not enough memory for a block of the log");
     in->fd = in->is_standard ? STDIN_FILENO : open(p->path, O_RDONLY | O_CLOEXEC | O_NOCTTY);
     if (in->fd < 0)
-        return bc_fail_at(err, BC_ERR_INPUT, p->path, 0, "the log cannot be opened; is the name right?");
+        return bc_file_is_misnamed(errno) ? bc_fail_at(err, BC_ERR_INPUT, p->path, 0, "the log cannot be opened; is the name right?") : fail(in, errno, err);
     in->regular = fstat(in->fd, &there) == 0 && S_ISREG(there.st_mode);
     in->size = in->regular ? (uint64_t)there.st_size : 0;
     if (in->follows && in->is_standard)
@@ -98,26 +99,14 @@ static bc_status read_some(stream_input *in, char *to, size_t room, bool wait, s
     return status;
 }
 
-static size_t count_feeds(const char *text, size_t length)
-{
-    size_t count = 0;
-
-    for (size_t i = 0; i < length; i++)
-        count += text[i] == '\n';
-    return count;
-}
-
-/* The first row names the columns and the second shows the decimal mark; an object does both. */
-bc_status stream_input_begin(stream_input *in, bc_error *err)
+bc_status stream_input_begin(stream_input *in, stream_plan *p, bc_error *err)
 {
     bc_status status = BC_OK;
 
-    while (status == BC_OK && !in->ended && !stream_interrupted() && in->rest_length < STREAM_BLOCK) {
-        const size_t needed = in->p->has_header && in->rest_length > 0 && in->rest[0] != '{' ? 2 : 1;
+    while (status == BC_OK && !in->ended && !stream_interrupted() && in->rest_length < STREAM_BLOCK
+           && !stream_has_beginning(p, in->rest, in->rest_length)) {
         ssize_t got = 0;
 
-        if (count_feeds(in->rest, in->rest_length) >= needed)
-            break;
         status = read_some(in, in->rest + in->rest_length, STREAM_BLOCK - in->rest_length, true, &got, err);
         in->ended = got == 0;
         in->rest_length += got > 0 ? (size_t)got : 0;

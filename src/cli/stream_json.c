@@ -3,6 +3,7 @@
 #include "cli/stream_result.h"
 
 #include "base/text.h"
+#include "cli/json_memory.h"
 
 #include <jansson.h>
 #include <stdio.h>
@@ -65,6 +66,8 @@ static void read_row(const stream_plan *p, stream_batch *b, stream_reading *r, c
         bc_text_show(shown, sizeof shown, object ? "the line is no object" : cause.text);
         (void)snprintf(r->reason, sizeof r->reason, "no JSON object: %s", shown);
     }
+    if (json_memory_was_short())
+        b->status = BC_ERR_MEMORY;
     json_decref(object);
 }
 

@@ -4,6 +4,7 @@
 
 #include "base/error_internal.h"
 #include "base/file_text.h"
+#include "cli/json_memory.h"
 #include "cli/stream_part_internal.h"
 
 #include <stdlib.h>
@@ -55,6 +56,10 @@ bc_status stream_part_read(const char *path, tally **t, bc_error *err)
     json_t *o = json_loadb(text, length, JSON_REJECT_DUPLICATES, &where);
 
     free(text);
+    if (json_memory_was_short()) { /* also when it says nothing: letters are missing then */
+        json_decref(o);
+        return bc_fail(err, BC_ERR_MEMORY, "not enough memory to read the summary of a part");
+    }
     if (!o)
         return bc_fail_at(err, BC_ERR_INPUT, path, where.line, "it is not JSON, or not all of it: %.120s; write it anew with --summary-part",
                           where.text);

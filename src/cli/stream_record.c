@@ -7,26 +7,34 @@
 #include <string.h>
 
 /* The end of a row whose quotes may hold line feeds: a quote opens at the beginning of a cell, and doubled it stands
- * for itself. NULL when it is not found. */
-static const char *find_quoted_end(char delimiter, const char *text, const char *end)
+ * for itself. NULL when it is not found; *open then says that a quote is to blame. */
+static const char *find_quoted_end(char delimiter, const char *text, const char *end, bool *open)
 {
-    bool quoted = false;
     bool at_begin = true;
 
+    *open = false;
     for (const char *p = text; p < end; p++) {
-        if (quoted) {
+        if (*open) {
             if (*p == '"' && !(p + 1 < end && p[1] == '"'))
-                quoted = false;
+                *open = false;
             else if (*p == '"')
                 p++;
             continue;
         }
         if (*p == '\n')
             return p + 1;
-        quoted = at_begin && *p == '"';
+        *open = at_begin && *p == '"';
         at_begin = *p == delimiter;
     }
     return NULL;
+}
+
+bool stream_is_open(char delimiter, const char *text, size_t length)
+{
+    bool open = false;
+
+    (void)find_quoted_end(delimiter, text, text + length, &open);
+    return open;
 }
 
 /* A quote that nobody closes must not swallow the log: its line is then a row by itself. That is a matter of the bytes
@@ -41,7 +49,8 @@ size_t stream_row_end(const stream_plan *p, const char *text, size_t length, boo
     if (p->form == STREAM_NDJSON || !memchr(text, '"', line))
         return line;
     const size_t seen = length < STREAM_QUOTED_MAX ? length : STREAM_QUOTED_MAX;
-    const char *end = find_quoted_end(p->delimiter, text, text + seen);
+    bool open = false;
+    const char *end = find_quoted_end(p->delimiter, text, text + seen, &open);
 
     if (end)
         return (size_t)(end - text);

@@ -178,11 +178,11 @@ static void read_any_row(const stream_plan *p, stream_batch *b, stream_reading *
     const stream_cut cut = stream_split(p->delimiter, at->text, length, cells, &at->count);
 
     stream_reading_start(r);
-    at->open = cut == STREAM_CUT_OPEN;
+    at->open = cut != STREAM_CUT_WHOLE && stream_is_open(p->delimiter, at->text, length);
     if (memchr(at->text, '\0', length))
         refuse(r, "it holds a NUL byte");
     else if (cut != STREAM_CUT_WHOLE)
-        refuse(r, at->open ? "a quote opens and does not close its cell" : "text follows behind the quote that closes a cell");
+        refuse(r, cut == STREAM_CUT_OPEN ? "a quote opens and does not close its cell" : "text follows behind the quote that closes a cell");
     else
         cut_empty(p, at, cells);
     if (r->reason[0] == '\0' && at->count != p->column_count)
@@ -291,6 +291,8 @@ void stream_work(const stream_plan *p, stream_batch *b)
             stream_json_row(p, b, text, length, b->lines);
         else
             work_row(p, b, text, length, b->lines);
+        if (b->status != BC_OK)
+            return;
         b->lines += memchr(text, '\n', length - 1) ? count_lines(text, length) : 1;
         b->out_length = p->drops ? 0 : b->out_length;
         at += length;

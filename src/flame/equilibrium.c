@@ -43,6 +43,9 @@ static bc_status check_elements(const double element_moles[BC_ELEMENTS], bc_erro
     if (!(sum > 0.0 && isfinite(sum)))
         return bc_fail(err, BC_ERR_INPUT,
                        "a mixture without elements has no equilibrium; give it at least one");
+    if (!(sum >= BC_EQUILIBRIUM_MOL_MIN && sum <= BC_EQUILIBRIUM_MOL_MAX))
+        return bc_fail(err, BC_ERR_INPUT, "%g mol of atoms are outside of %g to %g mol; scale the mixture", sum,
+                       BC_EQUILIBRIUM_MOL_MIN, BC_EQUILIBRIUM_MOL_MAX);
     if (element_moles[BC_C] > carbon_held(element_moles) + AMOUNT_MIN * sum)
         return bc_fail(
             err, BC_ERR_INPUT,

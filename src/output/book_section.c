@@ -2,6 +2,7 @@
 /* book_section.c - a section of a report as a sheet: figures as numbers, units beside them. */
 #include "output/book_internal.h"
 
+#include "output/memory_stream_internal.h"
 #include "output/result_text_internal.h"
 #include "output/section_internal.h"
 #include "output/text_internal.h"
@@ -80,7 +81,7 @@ static char *row_notes(const section *of, size_t row)
         text_letter(gas, letter);
         fprintf(out, "%s%s: %s", ftell(out) > 0 ? "; " : "", letter, of->r->results[i].note);
     }
-    if (fclose(out) == 0)
+    if (bc_memory_stream_close(out, &text))
         return text;
     free(text);
     return NULL;

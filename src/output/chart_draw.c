@@ -2,6 +2,7 @@
 /* chart_draw.c - the module's one function: a page of panels on the surface that the form asks for. */
 #include "output/chart_internal.h"
 
+#include "output/memory_stream_internal.h"
 #include "output/chart_draw_internal.h"
 #include "output/chart_draw_svg_internal.h"
 
@@ -75,7 +76,7 @@ static cairo_status_t draw_svg(chart_canvas *canvas, const chart_plan *plan, FIL
     chart_draw_page(canvas, plan, 0);
 
     cairo_status_t status = close_both(canvas->cr, surface);
-    if (fclose(memory) != 0)
+    if (!bc_memory_stream_close(memory, &bytes))
         status = CAIRO_STATUS_NO_MEMORY;
     if (status == CAIRO_STATUS_SUCCESS && !chart_write_svg(plan->r, bytes, out))
         status = CAIRO_STATUS_NO_MEMORY;

@@ -3,6 +3,7 @@
 #include "output/page_internal.h"
 
 #include "base/error_internal.h"
+#include "output/memory_stream_internal.h"
 #include "output/chart_internal.h"
 
 #include <stdlib.h>
@@ -76,7 +77,7 @@ static char *titles_of(const report *part)
         return NULL;
     for (size_t i = 0; i < part->chart_count; i++)
         fprintf(out, "%s%s", i > 0 ? "; " : "", part->charts[i].title);
-    if (fclose(out) == 0)
+    if (bc_memory_stream_close(out, &text))
         return text;
     free(text);
     return NULL;
@@ -95,7 +96,7 @@ static char *draw(report *part, bc_error *err)
         status = chart_inset(part, out, err);
     else
         (void)bc_fail(err, BC_ERR_MEMORY, "no memory for the charts");
-    if (out != NULL && fclose(out) != 0 && status == BC_OK)
+    if (out != NULL && !bc_memory_stream_close(out, &svg) && status == BC_OK)
         status = bc_fail(err, BC_ERR_MEMORY, "no memory for the charts");
     free(part->title);
     if (status == BC_OK)

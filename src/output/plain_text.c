@@ -63,18 +63,15 @@ static bool survives(long point, plain_rule rule)
     return rule == PLAIN_ESCAPED && point >= 0 && point < 0x20;
 }
 
-char *plain_text(const char *text, plain_rule rule)
+void plain_text_in_place(char *text, plain_rule rule)
 {
-    const char *from = text == NULL ? "" : text;
-    char *plain = malloc(strlen(from) + 1);
-    char *to = plain;
+    const char *from = text;
+    char *to = text;
 
-    if (plain == NULL)
-        return NULL;
     while (*from != '\0') {
         size_t bytes = 0;
         if (survives(decode((const unsigned char *)from, &bytes), rule)) {
-            memcpy(to, from, bytes);
+            memmove(to, from, bytes);
             to += bytes;
         } else {
             *to++ = '?';
@@ -82,6 +79,14 @@ char *plain_text(const char *text, plain_rule rule)
         from += bytes;
     }
     *to = '\0';
+}
+
+char *plain_text(const char *text, plain_rule rule)
+{
+    char *plain = strdup(text == NULL ? "" : text);
+
+    if (plain != NULL)
+        plain_text_in_place(plain, rule);
     return plain;
 }
 

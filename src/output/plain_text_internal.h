@@ -17,6 +17,9 @@ typedef enum {
  * frees it. */
 char *plain_text(const char *text, plain_rule rule);
 
+/* The same where the text stands: needs no memory. */
+void plain_text_in_place(char *text, plain_rule rule);
+
 /* Columns that so many bytes of plain text take on a terminal: its code points. */
 int plain_columns(const char *text, size_t bytes);
 

@@ -3,6 +3,8 @@
 #include "output/render.h"
 
 #include "base/error_internal.h"
+#include "output/memory_stream_internal.h"
+#include "output/apart_internal.h"
 #include "output/output_file_internal.h"
 
 #include <stdlib.h>
@@ -23,6 +25,26 @@ static const struct {
 } ENDINGS[] = {{".txt", RENDER_TEXT},  {".json", RENDER_JSON}, {".csv", RENDER_CSV}, {".html", RENDER_HTML},
                {".xlsx", RENDER_XLSX}, {".svg", RENDER_SVG},   {".png", RENDER_PNG}, {".pdf", RENDER_PDF}};
 
+/* A report on its way to a renderer. */
+typedef struct {
+    const report *r;
+    render_form form;
+    const render_style *style;
+} order;
+
+static bc_status render_order(void *data, FILE *out, bc_error *err)
+{
+    const order *o = data;
+
+    return RENDERERS[o->form](o->r, o->style, out, err);
+}
+
+/* Charts and workbooks are drawn by libraries that do not bear a lack of memory. */
+static bool is_drawn_by_others(const report *r, render_form form)
+{
+    return form == RENDER_XLSX || (r->chart_count > 0 && render_form_shows_charts(form));
+}
+
 bc_status render_to(const report *r, render_form form, const render_style *style, const char *path,
                     bc_error *err)
 {
@@ -33,10 +55,11 @@ bc_status render_to(const report *r, render_form form, const render_style *style
     if (memory == NULL)
         return bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
 
-    bc_status status = RENDERERS[form](r, style, memory, err);
+    order o = {r, form, style};
+    bc_status status = is_drawn_by_others(r, form) ? apart(render_order, &o, memory, err) : render_order(&o, memory, err);
+
     /* The stream is memory: nothing else can have run out. */
-    const bool short_of_memory = ferror(memory) != 0;
-    if ((fclose(memory) != 0 && status == BC_OK) || short_of_memory)
+    if (!bc_memory_stream_close(memory, &bytes))
         status = bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
     if (status == BC_OK)
         status = output_write(path, bytes, count, err);

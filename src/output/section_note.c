@@ -2,6 +2,7 @@
 /* section_note.c - labels with the marks of their notes, and the notes. */
 #include "output/section_internal.h"
 
+#include "output/memory_stream_internal.h"
 #include "output/text_internal.h"
 
 #include <stdio.h>
@@ -11,9 +12,7 @@
  * short. */
 static char *finish(FILE *out, char **text)
 {
-    const bool failed = ferror(out) != 0;
-
-    if (fclose(out) == 0 && !failed)
+    if (bc_memory_stream_close(out, text))
         return *text;
     free(*text);
     return NULL;

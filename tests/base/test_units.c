@@ -315,6 +315,7 @@ static void a_measure_of_another_dimension_or_without_a_unit_is_refused(void **s
     assert_no_measure("15 Celsius", "K", "C", BC_ERR_USAGE, "unknown unit");
     assert_no_measure("15,5 C", "K", "C", BC_ERR_INPUT, "decimal comma");
     assert_no_measure("nan C", "K", "C", BC_ERR_INPUT, "not a number");
+    assert_no_measure("0.99e308 MJ/m3", "MJ/m3", NULL, BC_ERR_INPUT, "beyond the range");
 }
 
 int main(void)

@@ -252,6 +252,9 @@ static void what_has_no_equilibrium_is_refused_and_nothing_is_written(void **sta
     (void)state;
     assert_refused(bc_equilibrium_tp(negative, 900.0, 1e5, &m, &err), &err, BC_ERR_INPUT, "amount of O|-4");
     assert_refused(bc_equilibrium_tp(infinite, 900.0, 1e5, &m, &err), &err, BC_ERR_INPUT, "amount of H");
+    const double huge[BC_ELEMENTS] = {[BC_H] = 4.1e201, [BC_O] = 2.3e201};
+
+    assert_refused(bc_equilibrium_tp(huge, 900.0, 1e5, &m, &err), &err, BC_ERR_INPUT, "scale the mixture");
     assert_refused(bc_equilibrium_tp(empty, 900.0, 1e5, &m, &err), &err, BC_ERR_INPUT, "without elements");
     assert_refused(bc_equilibrium_tp(carbon, 900.0, 1e5, &m, &err), &err, BC_ERR_INPUT, "carbon|oxidant");
     assert_refused(bc_equilibrium_hp(carbon, 0.0, 1e5, &m, &err), &err, BC_ERR_INPUT, "carbon|oxidant");
