@@ -41,7 +41,7 @@ MAKEFLAGS += --no-builtin-rules --no-print-directory
 .DELETE_ON_ERROR:
 .SECONDARY:
 .PHONY: FORCE all deps deps-build deps-test deps-lint deps-bench deps-coverage deps-cross deps-dist deps-deb check crosscheck run-tests \
-        sanitize clang fuzz faults valgrind demo bench lint metrics symbols thread run-threads coverage install uninstall dist deb clean help
+        sanitize clang fuzz faults valgrind demo bench lint metrics symbols thread run-threads coverage mutation install uninstall dist deb clean help
 
 OUT       := build/$(VARIANT)$(if $(WERROR),-werror)
 VERSION    = $(shell sed -n 's/^.define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
@@ -264,6 +264,15 @@ coverage: deps-coverage ## lines and branches that the tests reach, with the lea
 	@$(MAKE) VARIANT=coverage run-tests
 	@cd build/coverage && gcovr --root ../.. --object-directory . --filter ../../src/ --exclude-unreachable-branches --gcov-ignore-parse-errors --sort-percentage \
 	    --txt coverage.txt --html-details coverage.html --print-summary --fail-under-line 95 --fail-under-branch 85 .
+# Small changes of the physics, one at a time: do the tests notice? Every symbol is visible, so that the test programs
+# can share a library that is linked anew for each change.
+MUTANTS = 300
+SEED    = 1
+mutation: deps-test ## kill MUTANTS random changes of the physics by the tests; build/mutation/report.txt
+	@$(MAKE) OUT=build/mutation/base CFLAGS='-O1 -g0 -fvisibility=default $(CFLAGS)' all tests
+	@SRC='$(CURDIR)' BASE=build/mutation/base MUTANTS='$(MUTANTS)' SEED='$(SEED)' PYTHONDONTWRITEBYTECODE=1 \
+	    COMPILE='$(COMPILE) -fPIC -O1 -g0 -fvisibility=default $(call NLOPT,--cflags)' LINKER='$(CC)' LINK_LIB='$(LDLIBS_LIB)' \
+	    LINK_TEST='$(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -pthread' python3 tests/mutation/run.py
 clang: deps-lint ## the program, the library and the test programs, by Clang with -Werror
 	@$(MAKE) VARIANT=clang WERROR=1 all tests
 fuzz: deps-lint ## every fuzz target by libFuzzer, SECONDS=60 each; FUZZ=stream: that one alone

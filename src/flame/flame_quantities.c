@@ -123,7 +123,7 @@ static bc_status co2_max(const bc_subject *s, double *value, bc_error *err)
     const bc_status status = flue_of(s, &flue, err);
 
     if (status == BC_OK)
-        *value = flue.dry > 0.0 ? 100.0 * (flue.amounts.x[SPECIES_carbon_dioxide] / flue.dry) : 0.0;
+        *value = 100.0 * (flue.amounts.x[SPECIES_carbon_dioxide] / flue.dry); /* the air leaves nitrogen: not 0 */
     return status;
 }
 

@@ -70,6 +70,8 @@ static bc_status take_correlation(reader *r, const bc_ini_entry *e)
     return status;
 }
 
+#define END_ITSELF 1e-6 /* K, Pa: -50 C is inside, however it was rounded on its way to kelvin */
+
 /* "15 C, 101.325 kPa"; the pressure may be left out. */
 static bc_status take_measured_at(reader *r, const bc_ini_entry *e)
 {
@@ -83,10 +85,11 @@ static bc_status take_measured_at(reader *r, const bc_ini_entry *e)
         return gas_file_blame(r, e);
     if (comma && bc_measure_parse(bc_text_skip_space(comma + 1), "Pa", NULL, &r->c->measured_at_pa, r->err) != BC_OK)
         return gas_file_blame(r, e);
-    if (!(r->c->measured_at_k >= 223.15 && r->c->measured_at_k <= 373.15))
+    if (!(r->c->measured_at_k > 223.15 - END_ITSELF && r->c->measured_at_k < 373.15 + END_ITSELF))
         return refuse(r, e, "measured_at: the temperature is outside -50 to 100 C; correct it");
-    if (!(r->c->measured_at_pa > 1e3 && r->c->measured_at_pa < 1e8))
+    if (!(r->c->measured_at_pa > 1e3 - END_ITSELF && r->c->measured_at_pa < 1e8 + END_ITSELF))
         return refuse(r, e, "measured_at: the pressure is outside 1 kPa to 1000 bar; correct it");
+    r->c->measured_at_k = fmin(fmax(r->c->measured_at_k, 223.15), 373.15);
     return BC_OK;
 }
 

@@ -11,3 +11,10 @@ bluecone get hhv C4H10=100
 echo "exit $?" >&2
 bluecone get hhv ""
 echo "exit $?" >&2
+# Of equally near names the first is told; a name may be one letter.
+mkdir compositions
+printf '[components]\nmethane = 100\n' | tee compositions/marrowfen-a.ini compositions/marrowfen-b.ini >compositions/y.ini
+BLUECONE_PATH=$PWD bluecone get hhv marrowfen-c
+echo "exit $?" >&2
+BLUECONE_PATH=$PWD bluecone get hhv z
+echo "exit $?" >&2

@@ -130,9 +130,17 @@ static void emissions_out_of_range_are_refused(void **state)
     (void)state;
     assert_refused(bc_emission_convert(&basis, BC_EMISSION_FRACTION, -1e-6, &e, &err), BC_ERR_RANGE, &err);
     assert_refused(bc_emission_convert(&basis, (bc_emission_form)4, 1e-6, &e, &err), BC_ERR_USAGE, &err);
+    basis.o2_measured = 0.2107;
+    assert_int_equal(bc_emission_convert(&basis, BC_EMISSION_FRACTION, 1e-6, &e, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "21.07 % oxygen measured"));
+    assert_non_null(strstr(err.message, "below the 20.9"));
     basis.o2_measured = 0.20946;
     assert_refused(bc_emission_convert(&basis, BC_EMISSION_FRACTION, 1e-6, &e, &err), BC_ERR_RANGE, &err);
     basis.o2_measured = 0.03;
+    basis.o2_reference = 0.2107;
+    assert_int_equal(bc_emission_convert(&basis, BC_EMISSION_FRACTION, 1e-6, &e, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "reference oxygen of 21.07 %"));
+    assert_non_null(strstr(err.message, "below the 20.9"));
     basis.o2_reference = 0.21;
     assert_refused(bc_emission_convert(&basis, BC_EMISSION_FRACTION, 1e-6, &e, &err), BC_ERR_RANGE, &err);
     basis.o2_reference = 0.03;

@@ -198,8 +198,36 @@ static void ten_times_the_amount_gives_ten_times_the_mixture(void **state)
     assert_ok(bc_equilibrium_hp(elements, 10.0 * h_j, r.p_pa, &ten, &err), &err);
     assert_within(ten.t_k, one.t_k, 1e-9 * one.t_k);
     assert_within(ten.molar_mass_kg_per_mol, one.molar_mass_kg_per_mol, 1e-12);
+
+    double mass_kg = 0.0;
+
+    for (int k = 0; k < BC_ELEMENTS; k++)
+        mass_kg += elements[k] * bc_element_mass_g_per_mol((bc_element)k) * 1e-3;
+    assert_within(ten.molar_mass_kg_per_mol * ten.total_moles, mass_kg, 1e-9 * mass_kg);
     for (size_t i = 0; i < bc_product_count(); i++)
         assert_within_at(bc_product_formula(i), ten.moles[i], 10.0 * one.moles[i], 1e-9 * ten.moles[i]);
+}
+
+/* A noble gas takes room and nothing else, whichever it is. */
+static void every_noble_gas_dilutes_alike(void **state)
+{
+    static const bc_element NOBLE[] = {BC_HE, BC_NE, BC_AR};
+    bc_mixture first;
+    bc_error err;
+
+    (void)state;
+    for (size_t k = 0; k < COUNT(NOBLE); k++) {
+        double elements[BC_ELEMENTS] = {1.0, 4.0, 3.0, 3.9, 0.01, 0.0, 0.0, 0.0};
+        bc_mixture m;
+
+        elements[NOBLE[k]] = 2.7;
+        assert_ok(bc_equilibrium_tp(elements, 2273.0, 52000.0, &m, &err), &err);
+        if (k == 0)
+            first = m;
+        assert_within(m.total_moles, first.total_moles, 1e-9 * first.total_moles);
+        assert_within(equilibrium_x(&m, "OH"), equilibrium_x(&first, "OH"), 1e-9 * equilibrium_x(&first, "OH"));
+        assert_within(equilibrium_x(&m, "H"), equilibrium_x(&first, "H"), 1e-9 * equilibrium_x(&first, "H"));
+    }
 }
 
 /* The two ranges of the data differ at 1000 K by up to 0.16 J/mol: every enthalpy there must have an answer.
@@ -282,7 +310,11 @@ static void every_product_has_data_a_formula_and_a_source(void **state)
             assert_string_not_equal(bc_product_formula(i), bc_product_formula(j));
     }
     assert_int_equal(bc_product_thermo(bc_product_count()), bc_thermo_count());
-    assert_string_equal(bc_product_formula(BC_PRODUCT_CAPACITY), "");
+    for (size_t beyond = bc_product_count(); beyond <= BC_PRODUCT_CAPACITY; beyond++) {
+        assert_string_equal(bc_product_formula(beyond), "");
+        assert_string_equal(bc_product_role(beyond), "");
+        assert_string_equal(bc_product_source(beyond), "");
+    }
     assert_int_equal(bc_product_of(bc_thermo_count()), bc_product_count());
 }
 
@@ -296,6 +328,7 @@ int main(void)
         cmocka_unit_test(a_thousand_random_gases_come_back_from_their_enthalpy),
         cmocka_unit_test(mixtures_without_a_choice_are_found_all_the_same),
         cmocka_unit_test(ten_times_the_amount_gives_ten_times_the_mixture),
+        cmocka_unit_test(every_noble_gas_dilutes_alike),
         cmocka_unit_test(the_joint_of_the_data_at_1000_k_is_no_gap),
         cmocka_unit_test(traces_of_an_element_below_rounding_are_left_out),
         cmocka_unit_test(what_has_no_equilibrium_is_refused_and_nothing_is_written),

@@ -264,6 +264,8 @@ static void heat_that_cannot_be_is_refused(void **state)
     c.oxidant_k = BC_THERMO_T_MAX_K;
     assert_int_equal(bc_heat_path_of(&c, &path, NULL), BC_OK);
     path = walk(&good);
+    assert_int_equal(bc_heat_yield_of(&path, 1.07, &y, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "of 107 %"));
     assert_refused(bc_heat_yield_of(&path, 1.01, &y, &err), BC_ERR_RANGE, &err);
     assert_int_equal(bc_heat_yield_of(&path, 1.0, &y, NULL), BC_OK);
     assert_refused(bc_heat_rate(&y, 1e6, &rate, &err), BC_ERR_RANGE, &err);

@@ -84,6 +84,18 @@ static void a_wet_bulb_as_warm_as_the_air_means_saturation(void **state)
     }
 }
 
+/* ASHRAE Fundamentals 2017 chapter 1, (33): a bulb at 0 C itself is wet, not iced. */
+static void a_bulb_at_0_c_is_wet(void **state)
+{
+    double x = 0.0;
+    double saturated = 0.0;
+
+    (void)state;
+    assert_int_equal(bc_humidity_relative(1.0, T0_K, 98000.0, &saturated, NULL), BC_OK);
+    assert_int_equal(bc_humidity_wet_bulb(T0_K + 4.0, T0_K, 98000.0, &x, NULL), BC_OK);
+    assert_within(bc_humidity_ratio(x), (2501.0 * bc_humidity_ratio(saturated) - 1.006 * 4.0) / (2501.0 + 1.86 * 4.0), 1e-12, "humidity ratio");
+}
+
 static void humidity_that_cannot_be_is_refused(void **state)
 {
     double x = 7.0;
@@ -113,6 +125,7 @@ int main(void)
         cmocka_unit_test(the_volume_of_humid_air_is_that_of_ashrae),
         cmocka_unit_test(three_ways_to_state_humidity_agree),
         cmocka_unit_test(a_wet_bulb_as_warm_as_the_air_means_saturation),
+        cmocka_unit_test(a_bulb_at_0_c_is_wet),
         cmocka_unit_test(humidity_that_cannot_be_is_refused),
     };
 

@@ -224,6 +224,8 @@ static void impossible_readings_are_refused(void **state)
     assert_refused(bc_lambda_from_flue_oxygen(&inert, &air, 0.03, BC_FLUE_DRY, &lambda, &err), BC_ERR_RANGE, &err);
     assert_refused(bc_lambda_from_flue_oxygen(&fuel, &inert, 0.03, BC_FLUE_DRY, &lambda, &err), BC_ERR_INPUT, &err);
     assert_refused(bc_lambda_from_flue_oxygen(&hydrogen, &oxygen, 0.03, BC_FLUE_DRY, &lambda, &err), BC_ERR_RANGE, &err);
+    assert_int_equal(bc_lambda_from_excess(-1.25, &lambda, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "-125 %"));
     assert_refused(bc_lambda_from_excess(-1.0, &lambda, &err), BC_ERR_RANGE, &err);
     assert_within(lambda, 5.0, 0.0, "output after refusals");
 }

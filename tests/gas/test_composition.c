@@ -556,7 +556,8 @@ static void a_measuring_state_without_sense_is_refused(void **state)
     } ROWS[] = {
         {"15,5 C", "does not fit"}, {"warm", "not a number"}, {"-60 C", "-50 to 100 C"}, {"15 kPa", "does not fit"},
         {"15 C, 101", "no unit"},   {"15 C, 0.5 kPa", "1 kPa to 1000 bar"}, {"120 C", "-50 to 100 C"}, {"15 C, 2000 bar", "1 kPa to 1000 bar"},
-        {"15 C, 101.325 kPa, dry", "unknown unit"}, {"", "missing"}, {"288.15 M", "unknown unit"},
+        {"15 C, 101.325 kPa, dry", "unknown unit"}, {"", "missing"}, {"288.15 M", "unknown unit"}, {"-50.1 C", "-50 to 100 C"},
+        {"100.1 C", "-50 to 100 C"}, {"15 C, 0.999 kPa", "1 kPa to 1000 bar"}, {"15 C, 1000.1 bar", "1 kPa to 1000 bar"},
     };
 
     (void)state;
@@ -565,6 +566,51 @@ static void a_measuring_state_without_sense_is_refused(void **state)
 
         (void)snprintf(text, sizeof text, "[gas]\nmeasured_at = %s\n[components]\nmethane = 100\n", ROWS[i].value);
         assert_text_refused(text, 2, ROWS[i].words);
+    }
+}
+
+/* BC_PRINTED_BYTES with the final NUL: 47 are kept whole, 48 refused. */
+static void a_printed_figure_is_kept_whole_or_refused(void **state)
+{
+    char figure[BC_PRINTED_BYTES + 1], text[200];
+    bc_composition c;
+
+    (void)state;
+    for (int longer = 0; longer < 2; longer++) {
+        (void)snprintf(figure, sizeof figure, "41.2%0*d MJ/m3", BC_PRINTED_BYTES - 1 + longer - 10, 0);
+        (void)snprintf(text, sizeof text, "[components]\nmethane = 100\n[printed]\nhhv = %s\n", figure);
+        assert_int_equal(strlen(figure), BC_PRINTED_BYTES - 1 + longer);
+        if (longer) {
+            assert_text_refused(text, 4, "shorten it");
+            continue;
+        }
+        read_text(text, &c);
+        assert_string_equal(c.printed[0].text, figure);
+    }
+}
+
+static void the_ends_that_a_measuring_state_may_have_are_inside(void **state)
+{
+    static const struct {
+        const char *value;
+        double t_k, p_pa;
+    } ROWS[] = {{"-50 C", 223.15, 101325.0}, {"-58 F", 223.15, 101325.0}, {"100 C", 373.15, 101325.0}, {"212 F", 373.15, 101325.0},
+                {"15 C, 1 kPa", 288.15, 1e3}, {"15 C, 1000 bar", 288.15, 1e8}};
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(ROWS); i++) {
+        char text[160];
+        bc_composition c;
+
+        (void)snprintf(text, sizeof text, "[gas]\nmeasured_at = %s\n[components]\nmethane = 100\n", ROWS[i].value);
+        read_text(text, &c);
+        assert_within_at(text, c.measured_at_k, ROWS[i].t_k, 1e-9);
+        assert_within_at(text, c.measured_at_pa, ROWS[i].p_pa, 1e-7);
+        if (ROWS[i].t_k < 300.0 && ROWS[i].p_pa > 5e4) { /* and can be saturated there */
+            (void)snprintf(text, sizeof text, "[gas]\nmoisture = saturated\nmeasured_at = %s\n[components]\nmethane = 100\n", ROWS[i].value);
+            read_text(text, &c);
+            assert_true(c.gas.x[SPECIES_water] > 0.0);
+        }
     }
 }
 
@@ -812,6 +858,8 @@ int main(void)
         cmocka_unit_test(unknown_and_ambiguous_components_are_refused_with_their_line),
         cmocka_unit_test(unknown_sections_keys_and_choices_suggest_what_there_is),
         cmocka_unit_test(a_measuring_state_without_sense_is_refused),
+        cmocka_unit_test(a_printed_figure_is_kept_whole_or_refused),
+        cmocka_unit_test(the_ends_that_a_measuring_state_may_have_are_inside),
         cmocka_unit_test(a_cut_needs_an_entry_and_a_sensible_split),
         cmocka_unit_test(ninety_six_components_are_read_and_ninety_seven_refused),
         cmocka_unit_test(literals_accept_digits_in_names_and_blanks),

@@ -53,6 +53,35 @@ static void intensities_and_flows_are_read_in_si(void **state)
     assert_int_equal(p.of, BC_DIM_ENERGY);
 }
 
+/* Nm3 at 0 C, Sm3 at 15 C, scf at 60 F: units.def. */
+static void a_volume_brings_the_temperature_it_is_counted_at_or_none(void **state)
+{
+    static const struct {
+        const char *price, *flow;
+        bool has_metering;
+        double metering_c;
+    } ROWS[] = {{"0.37 EUR/Nm3", "120 Nm3/h", true, 0.0},
+                {"0.37 EUR/Sm3", "120 Sm3/h", true, 15.0},
+                {"0.01 USD/scf", "120 scf/h", true, 140.0 / 9.0},
+                {"0.37 EUR/m3", "120 m3/h", false, 0.0}};
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(ROWS); i++) {
+        bc_per_amount price, flow;
+        char currency[BC_CURRENCY_MAX];
+        bc_error err;
+
+        assert_ok(bc_price_parse(ROWS[i].price, &price, currency, &err), &err);
+        assert_ok(bc_flow_parse(ROWS[i].flow, &flow, &err), &err);
+        assert_int_equal(price.has_metering, ROWS[i].has_metering);
+        assert_int_equal(flow.has_metering, ROWS[i].has_metering);
+        if (!ROWS[i].has_metering)
+            continue;
+        assert_within_at(ROWS[i].price, price.metering_c, ROWS[i].metering_c, 1e-9);
+        assert_within_at(ROWS[i].flow, flow.metering_c, ROWS[i].metering_c, 1e-9);
+    }
+}
+
 static void what_is_none_of_them_is_refused_with_the_form(void **state)
 {
     bc_per_amount p;
@@ -112,6 +141,7 @@ int main(void)
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(prices_per_energy_mass_volume_and_amount_are_read),
         cmocka_unit_test(intensities_and_flows_are_read_in_si),
+        cmocka_unit_test(a_volume_brings_the_temperature_it_is_counted_at_or_none),
         cmocka_unit_test(what_is_none_of_them_is_refused_with_the_form),
         cmocka_unit_test(a_composition_file_may_state_the_terms_of_supply),
         cmocka_unit_test(bad_terms_of_supply_are_refused_with_their_line),

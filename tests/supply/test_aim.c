@@ -199,15 +199,19 @@ static void a_fixed_share_stays_and_several_aims_may_be_out_of_reach(void **stat
 
 static void a_figure_that_no_blend_has_is_refused(void **state)
 {
-    static const char *const GASES[] = {"hydrogen=100", "nitrogen=100"};
+    static const char *const GASES[] = {"hydrogen=100", "nitrogen=100", "argon=100"};
     static setting s;
     bc_aim aim;
     bc_error err = {.status = BC_OK};
 
     (void)state;
-    open_setting(&s, BC_BY_MOLE, GASES, 2);
-    add_aim(&s, "hydrogen-carbon-ratio", "", 4.0);
-    assert_refused(bc_aim_find(&s.problem, &aim, &err), &err, BC_ERR_RANGE, "hydrogen-carbon-ratio");
+    for (size_t aims = 1; aims <= 2; aims++) { /* the second, of hydrogen, is met alone */
+        open_setting(&s, BC_BY_MOLE, GASES, aims + 1);
+        add_aim(&s, "hydrogen-carbon-ratio", "", 4.0);
+        if (aims == 2)
+            add_aim(&s, "hydrogen", "", 37.0);
+        assert_refused(bc_aim_find(&s.problem, &aim, &err), &err, BC_ERR_RANGE, "hydrogen-carbon-ratio");
+    }
 }
 
 static void windows_lie_between_the_crossings(void **state)

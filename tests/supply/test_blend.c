@@ -274,6 +274,14 @@ static void more_sources_than_a_spread_holds_keep_their_covariances(void **state
         }
 }
 
+static void a_basis_has_its_word_and_what_is_none_has_no_word(void **state)
+{
+    (void)state;
+    assert_string_equal(bc_blend_basis_text(BC_BY_MOLE), "mole");
+    assert_string_equal(bc_blend_basis_text(BC_BY_ENERGY), "energy");
+    assert_string_equal(bc_blend_basis_text((bc_blend_basis)(BC_BY_ENERGY + 1)), "");
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -285,6 +293,7 @@ int main(void)
         cmocka_unit_test(a_part_without_heat_has_no_share_of_energy),
         cmocka_unit_test(scatter_of_the_blend_is_the_slope_along_each_source_of_its_parts),
         cmocka_unit_test(more_sources_than_a_spread_holds_keep_their_covariances),
+        cmocka_unit_test(a_basis_has_its_word_and_what_is_none_has_no_word),
     };
 
     return cmocka_run_group_tests(tests, NULL, NULL);

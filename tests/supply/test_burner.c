@@ -68,6 +68,29 @@ static void the_old_gas_changes_nothing_under_any_control(void **state)
     }
 }
 
+static void just_enough_air_stays_just_enough(void **state)
+{
+    const bc_reference reference = reference_at("15/15");
+    const bc_subject gas = subject_of(&reference, NATURAL);
+
+    (void)state;
+    for (size_t k = 0; k < COUNT(CONTROLS); k++) {
+        bc_burner b = burner_with(CONTROLS[k]);
+
+        b.lambda = 1.0;
+        const bc_burner_case set = set_on(&b, &gas);
+
+        assert_within_at(bc_control_word(CONTROLS[k]), response_of(&set, &gas, NULL).lambda, 1.0, 0.0);
+        for (size_t g = 0; g < COUNT(NEW_GASES); g++) { /* a trim holds it on every gas, but for rounding */
+            const bc_subject other = subject_of(&reference, NEW_GASES[g]);
+            const bc_burner_response r = response_of(&set, &other, NULL);
+
+            if ((CONTROLS[k] == BC_CONTROL_TRIM_AIR || CONTROLS[k] == BC_CONTROL_TRIM_GAS) && !r.trim_at_end)
+                assert_within_at(NEW_GASES[g], r.lambda, 1.0, 0.0);
+        }
+    }
+}
+
 static void heat_through_a_fixed_orifice_goes_with_the_net_wobbe_index(void **state)
 {
     const bc_reference reference = reference_at("15/15");
@@ -499,6 +522,7 @@ int main(void)
 {
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(the_old_gas_changes_nothing_under_any_control),
+        cmocka_unit_test(just_enough_air_stays_just_enough),
         cmocka_unit_test(heat_through_a_fixed_orifice_goes_with_the_net_wobbe_index),
         cmocka_unit_test(the_air_factor_goes_with_the_inverse_of_the_air_index),
         cmocka_unit_test(metered_gas_brings_heat_by_its_volume_or_its_mass),

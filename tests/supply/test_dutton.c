@@ -272,6 +272,14 @@ static void both_routes_to_the_methane_number_are_given(void **state)
     assert_within(n.linear_other, 1.624 * 137.78 - 119.1, 1e-9);
     assert_within(index_of("methane-number", NULL, "methane=100").low, n.linear, 1e-9);
     assert_within(index_of("methane-number", NULL, "methane=100").high, n.ratio, 1e-9);
+
+    const bc_gas rich = gas_of(RICH);
+    const bc_index both = index_of("methane-number", NULL, RICH);
+
+    assert_ok(bc_methane_number_of(&rich, &n, &err), &err); /* here the linear route gives more */
+    assert_true(n.linear > n.ratio);
+    assert_within(both.low, n.ratio, 1e-9);
+    assert_within(both.high, n.linear, 1e-9);
 }
 
 static void gases_without_a_term_have_no_methane_number(void **state)

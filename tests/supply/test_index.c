@@ -275,6 +275,66 @@ static void wrong_calls_are_refused(void **state)
     assert_string_equal(bc_verdict_text((bc_verdict)99), "cannot judge");
 }
 
+/* Sums over a gas without oxygen: of air, of the lifting and of the yellow tip constants. */
+typedef struct {
+    double air, lifting, yellow;
+} aga_sums;
+
+static aga_sums aga_sums_of(const char *literal, double inert)
+{
+    const bc_reference reference = reference_at("60F/60F@14.73psi");
+    const bc_gas gas = gas_of(literal);
+    bc_aga_gas a;
+    bc_error err;
+
+    assert_ok(bc_aga_gas_of(&reference, &gas, &a, &err), &err);
+    return (aga_sums){a.air, a.lifting_constant * a.relative_density, a.yellow_tip_limit * (a.air + 7.0 * inert) / 100.0};
+}
+
+static void assert_same_sums(aga_sums got, aga_sums want)
+{
+    assert_within(got.air, want.air, 1e-12);
+    assert_within(got.lifting, want.lifting, 1e-12);
+    assert_within(got.yellow, want.yellow, 1e-12);
+}
+
+/* As aga36.c tells: an inert gas without constants is nitrogen, a fuel without is the butane with the oxygen of its
+ * combustion, C5H12 + 8 O2 beside C4H10 + 6.5 O2. */
+static void what_the_bulletin_does_not_list_counts_as_nitrogen_or_butane(void **state)
+{
+    const double share = 0.03 * 8.0 / 6.5;
+    const aga_sums methane = aga_sums_of("methane=100", 0.0), butane = aga_sums_of("n-butane=100", 0.0);
+
+    (void)state;
+    assert_same_sums(aga_sums_of("methane=95,helium=5", 0.05), aga_sums_of("methane=95,nitrogen=5", 0.05));
+    assert_same_sums(aga_sums_of("methane=97,n-pentane=3", 0.0),
+                     (aga_sums){0.97 * methane.air + share * butane.air, 0.97 * methane.lifting + share * butane.lifting,
+                                0.97 * methane.yellow + share * butane.yellow});
+}
+
+/* More than half methane, and 800 to 1200 Btu/ft3: aga36.c. */
+static const char *aga_outside_as_old(const char *literal)
+{
+    const bc_reference reference = reference_at("60F/60F@14.73psi");
+    const bc_gas gas = gas_of(literal);
+    bc_aga_gas a;
+    bc_error err;
+
+    assert_ok(bc_aga_gas_of(&reference, &gas, &a, &err), &err);
+    return a.outside_adjustment;
+}
+
+static void the_bulletin_starts_from_a_natural_gas(void **state)
+{
+    (void)state;
+    assert_string_equal(aga_outside_as_old("methane=50.1,ethane=29.9,nitrogen=20"), "");
+    assert_non_null(strstr(aga_outside_as_old("methane=50,ethane=30,nitrogen=20"), "no natural gas"));
+    assert_non_null(strstr(aga_outside_as_old("methane=78,nitrogen=22"), "800 to 1200"));
+    assert_string_equal(aga_outside_as_old("methane=80.5,nitrogen=19.5"), ""); /* 816 Btu/ft3 */
+    assert_string_equal(aga_outside_as_old("methane=76,ethane=24"), "");       /* 1,199 */
+    assert_non_null(strstr(aga_outside_as_old("methane=70,ethane=30"), "800 to 1200"));
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -293,6 +353,8 @@ int main(void)
         cmocka_unit_test(what_does_not_burn_has_no_index),
         cmocka_unit_test(a_gas_that_holds_its_own_air_has_no_index_of_the_air_methods),
         cmocka_unit_test(wrong_calls_are_refused),
+        cmocka_unit_test(what_the_bulletin_does_not_list_counts_as_nitrogen_or_butane),
+        cmocka_unit_test(the_bulletin_starts_from_a_natural_gas),
     };
 
     return cmocka_run_group_tests_name("index", tests, NULL, NULL);

@@ -230,6 +230,34 @@ static void biogenic_carbon_is_not_counted_and_the_making_is(void **state)
     assert_within(co2 * 3.6e9, 0.4 * 44.0095e-3 / s.mixer.value[0].gross_j_per_mol * 3.6e9 + 0.6 * 18.0, 1e-3);
 }
 
+/* Hydrogen and nitrogen as far as their limits let them: 75 % of moles is methane, by mass with the molar masses of
+ * ISO 6976:2016 table 1. */
+static void the_least_share_of_a_part_is_what_the_limits_of_the_others_leave(void **state)
+{
+    static const char *const GASES[] = {"hydrogen=100", "methane=100", "nitrogen=100"};
+    static const char *const PRICES[] = {"0.1 EUR/m3", "0.1 EUR/m3", "0.1 EUR/m3"};
+    const double methane = 0.75 * 16.04246;
+    const struct {
+        bc_blend_basis by;
+        double want;
+    } rows[] = {{BC_BY_MOLE, 0.75}, {BC_BY_MASS, methane / (methane + 0.2 * 2.01588 + 0.05 * 28.0134)}};
+    static setting s;
+    bc_optimum o;
+    bc_error err;
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(rows); i++) {
+        open_setting(&s, rows[i].by, GASES, PRICES, 3);
+        s.problem.least = BC_LEAST_SHARE;
+        s.problem.part = 1;
+        within_text(&s, "[limit hydrogen]\nmax = 20\n[limit nitrogen]\nmax = 5\n");
+        assert_ok(bc_optimum_find(&s.problem, &o, &err), &err);
+        assert_true(o.feasible);
+        assert_within(o.share[1], rows[i].want, 1e-6);
+        assert_within(o.objective, o.share[1], 1e-9);
+    }
+}
+
 static void the_same_problem_gives_the_same_answer_to_the_last_bit(void **state)
 {
     static setting s;
@@ -270,6 +298,7 @@ int main(void)
         cmocka_unit_test(limits_that_exclude_each_other_are_named_with_what_would_do),
         cmocka_unit_test(a_flow_that_there_is_not_limits_a_share),
         cmocka_unit_test(biogenic_carbon_is_not_counted_and_the_making_is),
+        cmocka_unit_test(the_least_share_of_a_part_is_what_the_limits_of_the_others_leave),
         cmocka_unit_test(the_same_problem_gives_the_same_answer_to_the_last_bit),
         cmocka_unit_test(what_makes_no_problem_is_refused),
     };

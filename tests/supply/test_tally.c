@@ -216,6 +216,41 @@ static double draw_anything(chance *c)
     return (chance_below(c, 2) == 0 ? -1.0 : 1.0) * exp(40.0 * chance_normal(c));
 }
 
+/* By the definition over the sorted rows -2, 0, 3: the first at which the share asked for is reached. */
+static void a_single_row_of_zero_has_its_place_and_no_row_has_none(void **state)
+{
+    static const double SHARES[] = {0.2, 0.5, 0.9}, WANT[] = {-2.0, 0.0, 3.0};
+    tally *t = open_one(0.0, HUGE_VAL, TALLY_WHOLE);
+    double value = 47.11;
+
+    (void)state;
+    assert_false(tally_percentile(t, 0, 0.5, &value));
+    assert_within(value, 47.11, 0.0);
+    add(t, FEBRUARY, 3.0, 0.0);
+    add(t, FEBRUARY + HOUR, 0.0, 0.0);
+    add(t, FEBRUARY + 2.0 * HOUR, -2.0, 0.0);
+    case_settle(t);
+    for (size_t i = 0; i < COUNT(SHARES); i++) {
+        assert_true(tally_percentile(t, 0, SHARES[i], &value));
+        assert_within(value, WANT[i], 1e-9);
+    }
+    tally_close(t);
+}
+
+static void little_energy_is_summed_as_exactly_as_much(void **state)
+{
+    tally *t = open_one(HOUR, HUGE_VAL, TALLY_WHOLE);
+    tally_cover cover;
+
+    (void)state;
+    add(t, FEBRUARY, 1.25, 1.0);
+    add(t, FEBRUARY + HOUR, 2.5, 0.25);
+    case_settle(t);
+    tally_covers(t, &cover);
+    assert_within(cover.energy_j, 1.25 * HOUR, 1e-9);
+    tally_close(t);
+}
+
 static void percentiles_keep_the_accuracy_that_is_told(void **state)
 {
     (void)state;
@@ -582,6 +617,23 @@ static void a_trend_has_a_thousand_steps_at_most_and_no_excursion_is_lost(void *
     tally_close(t);
 }
 
+static void a_trend_of_just_a_thousand_steps_is_not_halved(void **state)
+{
+    (void)state;
+    for (size_t more = 0; more < 2; more++) {
+        tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
+        tally_span span;
+
+        for (size_t i = 0; i < TALLY_TREND_MAX + more; i++)
+            add(t, FEBRUARY + 60.0 * (double)i, 9.0, 0.0);
+        case_settle(t);
+        tally_trend_at(t, 0, &span);
+        assert_within(span.until_s - span.from_s, more == 0 ? 60.0 : 120.0, 0.0);
+        assert_int_equal(tally_trend_count(t), more == 0 ? TALLY_TREND_MAX : TALLY_TREND_MAX / 2 + 1);
+        tally_close(t);
+    }
+}
+
 static void ten_years_of_days_stay_below_sixteen_mebibytes(void **state)
 {
     tally_plan plan = {.figure_count = 6, .limit_count = 20, .step_s = 1800.0, .by = TALLY_DAY};
@@ -612,6 +664,8 @@ int main(void)
         cmocka_unit_test(without_a_usual_step_rows_count),
         cmocka_unit_test(moments_are_those_of_the_definition_even_far_from_zero),
         cmocka_unit_test(a_figure_that_never_moves_has_no_deviation),
+        cmocka_unit_test(a_single_row_of_zero_has_its_place_and_no_row_has_none),
+        cmocka_unit_test(little_energy_is_summed_as_exactly_as_much),
         cmocka_unit_test(percentiles_keep_the_accuracy_that_is_told),
         cmocka_unit_test(bars_hold_all_the_time),
         cmocka_unit_test(periods_are_days_and_months_of_the_calendar),
@@ -623,6 +677,7 @@ int main(void)
         cmocka_unit_test(a_tally_says_what_the_log_of_all_rows_says),
         cmocka_unit_test(the_longest_excursions_are_kept),
         cmocka_unit_test(a_trend_has_a_thousand_steps_at_most_and_no_excursion_is_lost),
+        cmocka_unit_test(a_trend_of_just_a_thousand_steps_is_not_halved),
         cmocka_unit_test(ten_years_of_days_stay_below_sixteen_mebibytes),
     };
     return cmocka_run_group_tests(tests, NULL, NULL);

@@ -528,6 +528,11 @@ static void saturated_states_count_their_water(void **state)
     space.limit_count = 1;
     assert_refused(bc_worst_open(&space, &open_water, &err), &err, BC_ERR_RANGE, "give water one fraction");
     assert_null(open_water);
+    space.components[0] = space.components[2];
+    space.components[0].min = space.components[0].max = 1.0;
+    space.component_count = 1;
+    assert_refused(bc_worst_open(&space, &open_water, &err), &err, BC_ERR_RANGE, "nothing but water");
+    assert_null(open_water);
 }
 
 /* What is next to a figure is not the figure: an idle limit on a Wobbe index bounds no heat. */

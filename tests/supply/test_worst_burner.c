@@ -413,6 +413,17 @@ static void a_trim_behind_a_nozzle_is_proven_while_it_holds(void **state)
     assert_true(travel.min.exact && travel.max.exact && travel.max.value > 1.01);
     assert_true(!heat.min.exact && !heat.max.exact && !heat.max.bounded);
     assert_within(heat.max.value, heat_of(&r, &heat.max.gas), 1e-12);
+
+    const double reach = fmax(travel.max.value - 1.0, 1.0 - travel.min.value);
+
+    for (int k = 0; k < 2; k++) { /* a thousandth beyond what is asked of it, and a thousandth short of it */
+        r.burner.trim_range = reach * (k == 0 ? 1.001 : 0.999);
+        rig_set(&r);
+        const bc_extremes end = extremes_of(&r, w, BC_BURNER_HEAT);
+
+        assert_int_equal(end.min.exact, k == 0);
+        assert_int_equal(end.max.exact, k == 0);
+    }
     bc_worst_close(w);
 }
 

@@ -230,7 +230,10 @@ static void figures_of_the_other_edition_are_labelled_as_such(void **state)
         assert_true(strlen(bc_reference_heat_source(i, 2016)) > 5);
         assert_true(strlen(bc_reference_factor_source(i, 1995)) > 5);
     }
+    assert_non_null(strstr(bc_reference_heat_source(SPECIES_n_dodecane, 1995), "ISO 6976:2016"));
+    assert_non_null(strstr(bc_reference_heat_source(SPECIES_methane, 1995), "ISO 6976:1995"));
     assert_string_equal(bc_reference_heat_source(bc_species_count(), 2016), "");
+    assert_string_equal(bc_reference_factor_source(bc_species_count(), 2016), "");
 }
 
 static void a_metering_temperature_between_the_columns_is_smooth(void **state)
@@ -285,11 +288,14 @@ static void air_has_the_density_of_air(void **state)
 
 static void volume_figures_end_where_z_falls_below_0_9(void **state)
 {
+    const bc_value last = {.z = 0.9}, first = {.z = 0.9000001};
     const bc_value thin = value_of("propane=100", "15/15", 2016), thick = value_of("n-octane=100", "15/15", 2016);
 
     (void)state;
     assert_true(bc_value_in_range(&thin));
     assert_false(bc_value_in_range(&thick));
+    assert_true(bc_value_in_range(&first));
+    assert_false(bc_value_in_range(&last)); /* Z > 0.9: ISO 6976:2016, value from memory */
     assert_within(thick.gross_j_per_mol * 1e-3, 5516.01, 1e-9); /* the molar figure holds all the same */
 }
 

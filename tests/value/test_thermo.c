@@ -154,8 +154,16 @@ static void temperatures_and_species_outside_the_data_are_refused(void **state)
     assert_refused(bc_thermo_liquid_water(600.1, &value, &err), &err, BC_ERR_RANGE, "liquid water");
     assert_within(value, 47.11, 0.0);
     assert_null(bc_thermo_coefficients(bc_thermo_count(), 0));
-    assert_within(bc_thermo_formation_j_per_mol(SIZE_MAX), 0.0, 0.0);
-    assert_string_equal(bc_thermo_name(SIZE_MAX), "");
+    for (size_t k = 0; k < 2; k++) {
+        const size_t beyond = k == 0 ? bc_thermo_count() : SIZE_MAX;
+
+        assert_within(bc_thermo_formation_j_per_mol(beyond), 0.0, 0.0);
+        assert_string_equal(bc_thermo_name(beyond), "");
+        assert_string_equal(bc_thermo_source(beyond), "");
+        assert_int_equal(bc_thermo_origin_of(beyond), BC_THERMO_FITTED);
+        for (int element = 0; element < BC_ELEMENTS; element++)
+            assert_int_equal(bc_thermo_atoms(beyond, (bc_element)element), 0);
+    }
 }
 
 static void liquid_water_has_its_known_enthalpy_and_heat_capacity(void **state)

@@ -1,0 +1,53 @@
+/* SPDX-License-Identifier: MIT */
+/* test_subject.c - when a gas can be made a subject. */
+#include "support.h"
+
+#include "bluecone/subject.h"
+#include "gas/species_index.h"
+
+/* A gas of methane with this share of n-pentadecane, a liquid in truth, metered at 0 C; its Z is that of the subject. */
+static bc_status make_with(double x_heavy, const bc_reference *r, double *z, bc_error *err)
+{
+    bc_gas gas = {{0.0}};
+    bc_subject s;
+    bc_status status;
+
+    gas.x[SPECIES_methane] = 1.0 - x_heavy;
+    gas.x[SPECIES_n_pentadecane] = x_heavy;
+    status = bc_subject_make(r, &gas, NULL, &s, err);
+    if (status == BC_OK)
+        *z = s.value.z;
+    return status;
+}
+
+/* subject.h names the bound, 0.05: the last gas that is taken has just this Z. */
+static void what_is_no_gas_is_refused_from_the_z_on_that_the_manual_names(void **state)
+{
+    const bc_state at = {.combustion_c = 15.0, .metering_c = 0.0, .metering_pa = 101325.0, .edition = 2016};
+    double taken = 0.0, refused = 1.0, z = 0.0;
+    bc_reference r;
+    bc_error err = {.status = BC_OK};
+
+    (void)state;
+    assert_ok(bc_reference_at(&at, &r, &err), &err);
+    assert_ok(make_with(0.0, &r, &z, &err), &err);
+    assert_refused(make_with(1.0, &r, &z, &err), &err, BC_ERR_RANGE, "at 0 C|is no gas|ISO 6976");
+    while (refused - taken > 1e-12) {
+        const double x = 0.5 * (taken + refused);
+
+        if (make_with(x, &r, &z, &err) == BC_OK)
+            taken = x;
+        else
+            refused = x;
+    }
+    assert_within(z, 0.05, 1e-9);
+}
+
+int main(void)
+{
+    const struct CMUnitTest tests[] = {
+        cmocka_unit_test(what_is_no_gas_is_refused_from_the_z_on_that_the_manual_names),
+    };
+
+    return cmocka_run_group_tests(tests, NULL, NULL);
+}
