@@ -137,15 +137,6 @@ static bc_status write_header(stream_case *s, size_t length, bc_error *err)
     return status;
 }
 
-static uint64_t count_lines(const char *text, size_t length)
-{
-    uint64_t lines = 0;
-
-    for (size_t i = 0; i < length; i++)
-        lines += text[i] == '\n';
-    return lines;
-}
-
 static bc_status begin(stream_case *s, bc_error *err)
 {
     size_t header = 0;
@@ -160,7 +151,7 @@ static bc_status begin(stream_case *s, bc_error *err)
         s->is_open = status == BC_OK;
         status = s->is_open ? write_header(s, header, err) : status;
     }
-    s->lines = count_lines(s->in.rest, header);
+    s->lines = stream_count_lines(s->in.rest, header);
     stream_input_skip(&s->in, header);
     return status;
 }

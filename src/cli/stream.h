@@ -141,6 +141,9 @@ size_t stream_row_end(const stream_plan *p, const char *text, size_t length, boo
 /* Whether a row ends within a quote, which would swallow what is written behind it. */
 bool stream_is_open(char delimiter, const char *text, size_t length);
 
+/* Line feeds in a text. */
+uint32_t stream_count_lines(const char *text, size_t length);
+
 typedef enum {
     STREAM_CUT_WHOLE,
     STREAM_CUT_OPEN, /* the last quote is not closed */

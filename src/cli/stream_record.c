@@ -109,3 +109,12 @@ stream_cut stream_split(char delimiter, const char *text, size_t length, char (*
             return STREAM_CUT_WHOLE;
     }
 }
+
+uint32_t stream_count_lines(const char *text, size_t length)
+{
+    uint32_t lines = 0;
+
+    for (const char *p = text; (p = memchr(p, '\n', (size_t)(text + length - p))) != NULL; p++)
+        lines++;
+    return lines;
+}

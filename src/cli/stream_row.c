@@ -261,15 +261,6 @@ static bool is_blank(const char *text, size_t length)
     return true;
 }
 
-static uint32_t count_lines(const char *text, size_t length)
-{
-    uint32_t lines = 0;
-
-    for (const char *p = text; (p = memchr(p, '\n', (size_t)(text + length - p))) != NULL; p++)
-        lines++;
-    return lines;
-}
-
 void stream_work(const stream_plan *p, stream_batch *b)
 {
     b->out_length = 0;
@@ -293,7 +284,7 @@ void stream_work(const stream_plan *p, stream_batch *b)
             work_row(p, b, text, length, b->lines);
         if (b->status != BC_OK)
             return;
-        b->lines += memchr(text, '\n', length - 1) ? count_lines(text, length) : 1;
+        b->lines += memchr(text, '\n', length - 1) ? stream_count_lines(text, length) : 1;
         b->out_length = p->drops ? 0 : b->out_length;
         at += length;
     }

@@ -32,6 +32,7 @@ for component in "${components[@]}"; do
 done
 volume=$(mawk 'BEGIN { printf "%.12f", 8.3144621 * 288.15 / 101325 }') # R T/p, m3/mol, R of ISO 6976:2016
 
+# shellcheck disable=SC2016 # $0 is that of mawk
 program='BEGIN { FS = OFS = "," } NR == 1 { print $0, "hhv"; next } { n = 0; h = 0; s = 0;'
 
 sum='' heat='' root=''
@@ -47,9 +48,9 @@ expression="n = $sum; h = ($heat) / n; s = ($root) / n; \$hhv = fmtnum(h * 1e-3 
 # measure NAME COMMAND...: the best of three runs, s
 declare -A best
 measure() {
-    local name=$1 run spent TIMEFORMAT=%R
+    local name=$1 spent TIMEFORMAT=%R
     shift
-    for run in 1 2 3; do
+    for _ in 1 2 3; do
         spent=$({ time "$@" >/dev/null 2>&1; } 2>&1)
         if [[ -z ${best[$name]:-} ]] || mawk "BEGIN { exit !($spent < ${best[$name]}) }"; then best[$name]=$spent; fi
     done

@@ -1,6 +1,6 @@
 try() { "$@" >/dev/null; echo "exit $?" >&2; }
 cd "$SRC/examples" || exit
-log=log-of-two-weeks.csv
+log='log-of-two-weeks.csv'
 try bluecone stream $log --summary --summary-part
 try bluecone stream $log --json
 try bluecone stream $log --by day
