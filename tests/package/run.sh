@@ -58,7 +58,7 @@ if test -e .git; then
 fi
 
 # What the rules need is there: no file is asked for that the archive does not have.
-(cd "$work/bluecone-$version" && make -n MAKEFLAGS= all 2>&1 >/dev/null | grep -v '^dist:') >"$work/wrong"
+(cd "$work/bluecone-$version" && env -u MAKEFLAGS -u MFLAGS make -n all 2>&1 >/dev/null | grep -v '^dist:') >"$work/wrong"
 point 'make finds all it needs in the archive'
 
 sed -n '/^Permission/,$p' LICENSE >"$work/license"
