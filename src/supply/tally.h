@@ -24,7 +24,7 @@
 #define TALLY_LIMIT_MAX BC_LIMIT_MAX
 #define TALLY_FLAG_MAX 16
 #define TALLY_PERIOD_MAX 40000 /* hours, days or months: 109 years of days */
-#define TALLY_CELL_MAX 120000  /* periods times figures: 20,000 days of six figures, 13 MB */
+#define TALLY_CELL_MAX 52800   /* periods times figures: the hours of a year for six figures */
 #define TALLY_TREND_MAX 1000   /* steps of a trend */
 #define TALLY_RUN_MAX 1000     /* excursions that are kept one by one: the longest */
 #define TALLY_VALUE_MAX 1e100  /* a figure of this magnitude is none: its square times a weight must stay finite */
