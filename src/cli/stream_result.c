@@ -122,7 +122,7 @@ static void add_figure(const stream_plan *p, size_t i, const bc_subject *subject
 {
     const stream_figure *f = &p->figures[i];
     double value = 0.0;
-    bc_error err;
+    bc_error err BC_UNFILLED;
 
     if (bc_quantity_value(f->quantity, subject, &value, &err) != BC_OK) {
         add_reason(r, bc_quantity_at(f->quantity)->id, &err);
@@ -180,9 +180,9 @@ static void take_power(const stream_plan *p, double flow, const bc_gas *gas, str
 
 void stream_evaluate(const stream_plan *p, stream_batch *b, stream_reading *r, stream_mark *mark, stream_cells *cells)
 {
-    bc_gas gas;
-    bc_subject subject;
-    bc_error err;
+    bc_gas gas BC_UNFILLED;
+    bc_subject subject BC_UNFILLED;
+    bc_error err BC_UNFILLED;
     double kept = 0.0;
 
     memset(cells->length, 0, p->figure_count);

@@ -211,6 +211,8 @@ static sums sum_over(const bc_reference *r, const bc_gas *gas)
     sums s = {0.0, 0.0, 0.0, 0.0};
 
     for (size_t i = 0; i < SPECIES_COUNT; i++) {
+        if (gas->x[i] == 0.0) /* most species are not there */
+            continue;
         s.gross += gas->x[i] * r->gross_j_per_mol[i];
         s.net += gas->x[i] * r->net_j_per_mol[i];
         s.mass += gas->x[i] * r->mass_kg_per_mol[i];

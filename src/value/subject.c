@@ -2,6 +2,7 @@
 /* subject.c - a gas made ready at a reference state, and the gap between its two heating values. */
 #include "bluecone/subject.h"
 
+#include "base/compiler.h"
 #include "base/error_internal.h"
 #include "gas/species_atoms.h"
 #include "value/formation_internal.h"
@@ -22,7 +23,7 @@ void subject_weigh(bc_subject *subject)
 
 bc_status bc_subject_make(const bc_reference *reference, const bc_gas *gas, const bc_spread *spread, bc_subject *subject, bc_error *err)
 {
-    bc_gas metered;
+    bc_gas metered BC_UNFILLED;
     const bc_status status = bc_gas_for_state(gas, &reference->state, &metered, err);
 
     if (status != BC_OK)
