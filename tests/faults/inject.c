@@ -5,6 +5,7 @@
  *   FAULT_REPORT=FD   at the end: calls counted, calls failed, blocks of memory not given back
  *
  * Kinds are the rows of FAULTS. What the C library does inside itself (stdio on a file) is out of reach. */
+#undef _FORTIFY_SOURCE /* its inline read() and the like would be what is defined here */
 #define _GNU_SOURCE /* RTLD_NEXT, memfd_create */
 #include <dirent.h>
 #include <dlfcn.h>
