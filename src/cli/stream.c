@@ -48,6 +48,15 @@ static bc_status take_jobs(const arguments *a, size_t *jobs, bc_error *err)
 
 /* ---- batches in the order of the log -------------------------------------------------------------------------------- */
 
+/* A good row that some limit has no figure for: it is not known to keep the contract. */
+static bool is_unjudged(const stream_plan *p, const stream_mark *mark)
+{
+    const size_t limits = p->contract ? p->contract->limit_count : 0;
+    const uint64_t all = limits == 64 ? UINT64_MAX : ((uint64_t)1 << limits) - 1;
+
+    return mark->good && mark->broken == 0 && mark->known != all;
+}
+
 static void count(stream_case *s, const stream_batch *b)
 {
     for (size_t i = 0; i < b->count; i++) {
@@ -56,7 +65,7 @@ static void count(stream_case *s, const stream_batch *b)
         for (size_t k = 0; mark->flags >> k; k++)
             s->flagged[k] += mark->flags >> k & 1U;
         s->outside += mark->broken != 0;
-        s->unjudged += mark->good && s->plan.contract && mark->known == 0 && s->plan.contract->limit_count > 0;
+        s->unjudged += is_unjudged(&s->plan, mark);
     }
     s->rows += b->count;
     if (b->refused > 0 && s->refused == 0) {
@@ -171,6 +180,8 @@ static void tell(const stream_case *s)
             warn("%llu row%s flagged %s: %s", (unsigned long long)s->flagged[i], s->flagged[i] > 1 ? "s" : "", stream_flag_word(i), stream_flag_meaning(i));
     if (s->plan.contract)
         warn("%llu of %llu rows are outside of %s", (unsigned long long)s->outside, (unsigned long long)(s->rows - s->refused), s->plan.contract->name);
+    if (s->unjudged > 0)
+        warn("%llu row%s cannot be judged by every limit of it", (unsigned long long)s->unjudged, s->unjudged > 1 ? "s" : "");
 }
 
 /* Told in any case: rows without results are not to be found by chance. */
@@ -206,7 +217,7 @@ static bc_status finish(stream_case *s, bc_error *err)
         status = output_finish(&s->out, err);
     if (status != BC_OK)
         return status;
-    s->code = s->refused == s->rows && !s->plan.is_part ? bc_exit_code(BC_ERR_INPUT) : s->outside > 0 ? ANSWER_NO : 0;
+    s->code = s->refused == s->rows && !s->plan.is_part ? bc_exit_code(BC_ERR_INPUT) : s->outside + s->unjudged > 0 ? ANSWER_NO : 0;
     if (!s->plan.a->value[OPTION_summary])
         tell(s);
     tell_refused(s);

@@ -58,7 +58,8 @@ static int write_summary(const arguments *a, const stream_plan *p, const tally *
 
     open_report(&r, p, t, "Summary of a log");
     stream_summary_report(&r, t);
-    return answer(&r, a, false, is_outside(t) ? ANSWER_NO : 0);
+    /* a limit that cannot be judged is no yes either */
+    return answer(&r, a, false, is_outside(t) || report_judged(&r) == REPORT_NO ? ANSWER_NO : 0);
 }
 
 /* The note and the report of a settled tally; the exit code of what failed, else of the answer. */
@@ -85,7 +86,11 @@ bc_status stream_sum_end(stream_sum *s, int *code, bc_error *err)
         return stream_part_write(s->t, a->value[OPTION_output], err);
     status = tally_settle(s->t, err);
     if (status == BC_OK)
-        *code = write_settled(a, s->p, s->t, a->value[OPTION_summary] != NULL);
+    {
+        const int written = write_settled(a, s->p, s->t, a->value[OPTION_summary] != NULL);
+
+        *code = written > *code ? written : *code; /* the rows may have said no already */
+    }
     return status;
 }
 
