@@ -85,8 +85,7 @@ bc_status stream_sum_end(stream_sum *s, int *code, bc_error *err)
     if (a->value[OPTION_summary_part])
         return stream_part_write(s->t, a->value[OPTION_output], err);
     status = tally_settle(s->t, err);
-    if (status == BC_OK)
-    {
+    if (status == BC_OK) {
         const int written = write_settled(a, s->p, s->t, a->value[OPTION_summary] != NULL);
 
         *code = written > *code ? written : *code; /* the rows may have said no already */

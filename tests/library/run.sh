@@ -19,21 +19,8 @@ trap 'exit 2' INT TERM
 . tests/library/python.sh
 use_python "$OUT" "$work/bin"
 
-count=0
-failed=0
-# point NAME: passed when $work/wrong, which tells what is wrong, is empty.
-point() {
-    count=$((count + 1))
-    if test -s "$work/wrong"; then
-        failed=$((failed + 1))
-        echo "not ok $count - $1"
-        sed 's/^/# /' "$work/wrong"
-    else
-        echo "ok $count - $1"
-    fi
-    : >"$work/wrong"
-}
-: >"$work/wrong"
+# shellcheck source=tests/tap.sh
+. "$SRC/tests/tap.sh"
 
 # The settings of the make that runs this go on, but not its job server, which it does not hand down.
 MAKEFLAGS=$(printf '%s' "${MAKEFLAGS-}" | sed -e 's/ *--jobserver[^ ]*//g' -e 's/ *-j[0-9]*//g')

@@ -12,21 +12,8 @@ work=$(mktemp -d) || exit 2
 trap 'rm -rf "$work"' EXIT
 trap 'exit 2' INT TERM
 
-count=0
-failed=0
-# point NAME: passed when $work/wrong, which tells what is wrong, is empty.
-point() {
-    count=$((count + 1))
-    if test -s "$work/wrong"; then
-        failed=$((failed + 1))
-        echo "not ok $count - $1"
-        sed 's/^/# /' "$work/wrong"
-    else
-        echo "ok $count - $1"
-    fi
-    : >"$work/wrong"
-}
-: >"$work/wrong"
+# shellcheck source=tests/tap.sh
+. "$SRC/tests/tap.sh"
 
 version=$(sed -n 's/^#define BC_VERSION "\(.*\)"/\1/p' include/bluecone/status.h)
 # dist TREE FOLDER: the archive that TREE makes.
