@@ -116,7 +116,7 @@ BC_API BC_MUST_USE bc_status bc_composition_find(const char *word, const char *c
  *   parts    out: BC_SPECIES_CAPACITY mole fractions; untouched on failure
  *   remark   out: BC_REMARK_BYTES; what was assumed, as a sentence, "" for nothing; may be NULL
  *
- * BC_ERR_INPUT with the nearest known word. */
+ * BC_ERR_INPUT with a known word that is near. */
 BC_API BC_MUST_USE bc_status bc_composition_component(const char *word, double parts[], char remark[], bc_error *err);
 
 /* The gas if the share that is missing from the sum (1 - composition->sum) had been measured as one

@@ -16,7 +16,8 @@ extern "C" {
 BC_API size_t bc_quantity_count(void);
 BC_API const bc_quantity *bc_quantity_at(size_t index);
 
-/* Finds a quantity by id; case, '-' and '_' do not matter. BC_ERR_USAGE names the nearest known id. */
+/* Finds a quantity by id; case, '-' and '_' do not matter. BC_ERR_USAGE names
+ * the id that a word of the trade stands for, or one that is near. */
 BC_API BC_MUST_USE bc_status bc_quantity_find(const char *id, size_t *index, bc_error *err);
 
 /* Evaluates a quantity of a subject. Where the method has no analytic uncertainty, that of the composition

@@ -34,7 +34,7 @@ BC_API size_t bc_species_count(void);
  *
  *   word    the word as written
  *   index   out: 0..bc_species_count()-1; untouched on failure
- *   err     out: the nearest known word, or all candidates of an ambiguous formula; may be NULL
+ *   err     out: a known word that is near, or all candidates of an ambiguous formula; may be NULL
  *
  * BC_ERR_INPUT: unknown, or a formula of several species (C4H10). */
 BC_API BC_MUST_USE bc_status bc_species_find(const char *word, size_t *index, bc_error *err);

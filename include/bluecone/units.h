@@ -41,7 +41,7 @@ typedef struct {
  *
  *   text   the unit alone, such as "MJ/m3"; "" and "1" are the unit one
  *   unit   out: the unit; untouched on failure
- *   err    out: cause, with the nearest known symbol; may be NULL
+ *   err    out: cause, with a known symbol that is near; may be NULL
  *
  * BC_ERR_USAGE: unknown symbol, more than one '/' part beyond a quotient of products, or the symbol
  * MBtu, which half of the trade reads as a thousand and the other half as a million. */

@@ -197,3 +197,18 @@ size_t bc_text_unlikeness(const char *word, const char *candidate)
 
     return beginning < distance ? beginning : distance;
 }
+
+/* A third of the letters may be wrong, and one; of a word of three letters only one, else anything is near. */
+bool bc_text_is_near(const char *word, const char *candidate)
+{
+    const size_t length = strlen(word);
+
+    return bc_text_unlikeness(word, candidate) <= (length > 3 ? 1 + length / 3 : 1);
+}
+
+void bc_text_suggest(char *to, size_t size, const char *lead, const char *word, const char *candidate)
+{
+    to[0] = '\0';
+    if (bc_text_is_near(word, candidate))
+        (void)snprintf(to, size, "; %s '%s'", lead, candidate);
+}

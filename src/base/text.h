@@ -10,6 +10,7 @@
 #include <stddef.h>
 
 #define BC_WORD_MAX 64 /* bytes of one word (an id, a component, a unit), with the final NUL */
+#define BC_HINT_MAX 128 /* bytes of a suggestion: a lead of a few words, and one word */
 
 /* snprintf() that writes a decimal point in every locale: whatever holds a double goes through here. */
 int bc_text_format(char *to, size_t size, const char *format, ...) BC_PRINTF(3, 4);
@@ -40,5 +41,11 @@ size_t bc_text_distance(const char *a, const char *b);
 /* How unlike a word and a candidate for it are, for suggesting the nearest: the distance of both when
  * folded, or one more than that to the beginning of the candidate, since people type beginnings. */
 size_t bc_text_unlikeness(const char *word, const char *candidate);
+
+/* True when a candidate is near enough to a word that suggesting it helps. A wrong suggestion misleads more than none. */
+bool bc_text_is_near(const char *word, const char *candidate);
+
+/* "; LEAD 'CANDIDATE'" when the candidate is near enough to the word to be suggested, else nothing. */
+void bc_text_suggest(char *to, size_t size, const char *lead, const char *word, const char *candidate);
 
 #endif

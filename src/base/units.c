@@ -94,6 +94,17 @@ static void apply(bc_unit *unit, const unit_row *row, int power)
     }
 }
 
+/* Superscripts are how a page prints a power; the symbols here have plain digits. */
+static bc_status refuse_symbol(const char *symbol, const char *shown, bc_error *err)
+{
+    char hint[BC_HINT_MAX];
+
+    if (strstr(symbol, "\xC2\xB3") || strstr(symbol, "\xC2\xB2"))
+        return bc_fail(err, BC_ERR_USAGE, "unknown unit '%s'; powers are plain digits, as m3 (bluecone list units)", shown);
+    bc_text_suggest(hint, sizeof hint, "the nearest known one is", symbol, nearest_symbol(symbol));
+    return bc_fail(err, BC_ERR_USAGE, "unknown unit '%s'%s (bluecone list units)", shown, hint);
+}
+
 /* One symbol of the quotient; `alone` when the unit consists of it, so that an offset has a meaning. */
 static bc_status take_symbol(bc_unit *unit, const char *symbol, int power, bool alone, bc_error *err)
 {
@@ -104,8 +115,7 @@ static bc_status take_symbol(bc_unit *unit, const char *symbol, int power, bool 
     if (strcmp(symbol, "MBtu") == 0)
         return bc_fail(err, BC_ERR_USAGE, "'MBtu' is read as a thousand and as a million Btu; write kBtu or MMBtu");
     if (!row)
-        return bc_fail(err, BC_ERR_USAGE, "unknown unit '%s'; the nearest known one is '%s' (bluecone list units)", shown,
-                       nearest_symbol(symbol));
+        return refuse_symbol(symbol, shown, err);
     apply(unit, row, power);
     if (alone)
         unit->offset = row->offset;

@@ -84,6 +84,8 @@ static bc_status refuse_option(const command *c, const char *word, bc_error *err
     for (size_t i = 0; i < OPTION_COUNT; i++)
         if ((OPTIONS[i].commands & c->bit) && (!best || bc_text_unlikeness(word, OPTIONS[i].word) < bc_text_unlikeness(word, best)))
             best = OPTIONS[i].word;
+    if (!best || !bc_text_is_near(word, best))
+        return bc_fail(err, BC_ERR_USAGE, "'%s' has no option --%s; see bluecone %s --help", c->word, shown, c->word);
     return bc_fail(err, BC_ERR_USAGE, "'%s' has no option --%s; the nearest is --%s; see bluecone %s --help", c->word, shown, best, c->word);
 }
 

@@ -205,6 +205,7 @@ static bc_status run_topic(report *r, const arguments *a, bc_error *err)
     const char *name = a->argument_count > 1 ? a->argument[1] : NULL;
     size_t best = 0;
     char shown[BC_WORD_MAX];
+    char hint[BC_HINT_MAX];
 
     for (size_t i = 0; i < BC_COUNT(TOPICS); i++) {
         if (strcmp(TOPICS[i].word, a->argument[0]) == 0)
@@ -213,8 +214,9 @@ static bc_status run_topic(report *r, const arguments *a, bc_error *err)
             best = i;
     }
     bc_text_show(shown, sizeof shown, a->argument[0]);
-    return bc_fail(err, BC_ERR_USAGE, "there is no list '%s'; the nearest is '%s': bluecone list gases|specifications|species|quantities|units|methods|states",
-                   shown, TOPICS[best].word);
+    bc_text_suggest(hint, sizeof hint, "the nearest is", a->argument[0], TOPICS[best].word);
+    return bc_fail(err, BC_ERR_USAGE, "there is no list '%s'%s: bluecone list gases|specifications|species|quantities|units|methods|states",
+                   shown, hint);
 }
 
 int run_list(const arguments *a)

@@ -19,9 +19,14 @@ static int refuse_command(const char *word)
         if (bc_text_unlikeness(word, command_at(i)->word) < bc_text_unlikeness(word, best->word))
             best = command_at(i);
     char shown[BC_WORD_MAX];
+    char hint[BC_HINT_MAX];
 
     bc_text_show(shown, sizeof shown, word);
-    (void)bc_fail(&err, BC_ERR_USAGE, "unknown command '%s'; the nearest is '%s'; see bluecone --help", shown, best->word);
+    bc_text_suggest(hint, sizeof hint, "the nearest is", word, best->word);
+    if (word[0] == '-')
+        (void)bc_fail(&err, BC_ERR_USAGE, "'%s' stands where the command belongs; options come behind it: bluecone COMMAND [OPTIONS] ARGUMENTS", shown);
+    else
+        (void)bc_fail(&err, BC_ERR_USAGE, "unknown command '%s'%s; see bluecone --help", shown, hint);
     return complain(&err);
 }
 
@@ -35,6 +40,20 @@ static int finish(int code)
         return code;
     (void)bc_fail(&err, BC_ERR_FILE, "cannot write to standard output: %s", strerror(errno));
     return complain(&err);
+}
+
+/* The short help, or that of a command whose name stands behind it. */
+static int help(const char *word)
+{
+    const command *c = word ? command_find(word) : NULL;
+
+    if (word && !c)
+        return refuse_command(word);
+    if (c)
+        help_command(c);
+    else
+        help_all();
+    return finish(0);
 }
 
 static int run(const command *c, int argc, char **argv)
@@ -66,10 +85,8 @@ int main(int argc, char **argv)
         (void)fputs("bluecone: no command given; see bluecone --help\n", stderr);
         return bc_exit_code(BC_ERR_USAGE);
     }
-    if (strcmp(argv[1], "--help") == 0 || strcmp(argv[1], "-h") == 0 || strcmp(argv[1], "help") == 0) {
-        help_all();
-        return finish(0);
-    }
+    if (strcmp(argv[1], "--help") == 0 || strcmp(argv[1], "-h") == 0 || strcmp(argv[1], "help") == 0)
+        return help(argc > 2 ? argv[2] : NULL);
     if (strcmp(argv[1], "--version") == 0) {
         puts("bluecone " BC_VERSION);
         return finish(0);

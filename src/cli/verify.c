@@ -112,6 +112,7 @@ static bc_status check_area(const char *area, bc_error *err)
 {
     const char *best = bc_check_area(0);
     char shown[BC_WORD_MAX];
+    char hint[BC_HINT_MAX];
 
     for (size_t i = 0; i < bc_check_count(); i++) {
         if (strcmp(bc_check_area(i), area) == 0)
@@ -120,8 +121,8 @@ static bc_status check_area(const char *area, bc_error *err)
             best = bc_check_area(i);
     }
     bc_text_show(shown, sizeof shown, area);
-    return bc_fail(err, BC_ERR_USAGE, "unknown area '%s' of checks; the nearest is '%s' (bluecone list areas; verify without an area runs all)",
-                   shown, best);
+    bc_text_suggest(hint, sizeof hint, "the nearest is", area, best);
+    return bc_fail(err, BC_ERR_USAGE, "unknown area '%s' of checks%s (bluecone list areas; verify without an area runs all)", shown, hint);
 }
 
 /* A line for each area and the verdict; the number of failed checks comes back. */

@@ -31,5 +31,5 @@ bc_nearest bc_nearest_bundled(const char *word, const char *const folders[], siz
 
 bool bc_nearest_helps(const bc_nearest *n)
 {
-    return n->name[0] != '\0' && n->unlikeness <= 1 + strlen(n->word) / 3;
+    return n->name[0] != '\0' && bc_text_is_near(n->word, n->name);
 }

@@ -183,6 +183,7 @@ static bc_status refuse_unknown(const char *word, const char *folded, bc_error *
     const char *best = SPECIES_TABLE[0].id;
     size_t distance = BC_WORD_MAX;
     char shown[BC_WORD_MAX];
+    char hint[BC_HINT_MAX];
 
     for (size_t i = 0; i < SPECIES_COUNT; i++) {
         keep_nearest(folded, SPECIES_TABLE[i].id, &best, &distance);
@@ -191,7 +192,8 @@ static bc_status refuse_unknown(const char *word, const char *folded, bc_error *
     for (size_t i = 0; i < BC_COUNT(ALIASES); i++)
         keep_nearest(folded, ALIASES[i].word, &best, &distance);
     bc_text_show(shown, sizeof shown, word);
-    return bc_fail(err, BC_ERR_INPUT, "unknown component '%s'; the nearest known one is '%s' (bluecone list species)", shown, best);
+    bc_text_suggest(hint, sizeof hint, "the nearest known one is", folded, best);
+    return bc_fail(err, BC_ERR_INPUT, "unknown component '%s'%s (bluecone list species)", shown, hint);
 }
 
 bc_status bc_species_find(const char *word, size_t *index, bc_error *err)

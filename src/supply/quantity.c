@@ -2,6 +2,8 @@
 /* quantity.c - the one list of quantities, joined from the floors that compute them. */
 #include "bluecone/quantity.h"
 
+#include "bluecone/index.h"
+
 #include "base/compiler.h"
 #include "base/error_internal.h"
 #include "base/text.h"
@@ -45,16 +47,45 @@ const bc_quantity *bc_quantity_at(size_t index)
     return find_floor(&index, &source) ? source.at(index) : NULL;
 }
 
+static const char *trade_word(const char *word)
+{
+    static const struct {
+        const char *word, *ids;
+    } WORDS[] = {
+#define TRADE_WORD(word, ids) {word, ids},
+#include "data/trade_words.def"
+    };
+
+    for (size_t i = 0; i < BC_COUNT(WORDS); i++)
+        if (bc_text_same(WORDS[i].word, word))
+            return WORDS[i].ids;
+    return NULL;
+}
+
+static bool compares_two_gases(const char *id)
+{
+    for (size_t i = 0; i < bc_index_count(); i++)
+        if (bc_index_at(i)->kind == BC_INDEX_AGAINST && bc_text_same(bc_index_at(i)->id, id))
+            return true;
+    return false;
+}
+
 static bc_status refuse_id(const char *id, bc_error *err)
 {
     const char *best = bc_quantity_at(0)->id;
     char shown[BC_WORD_MAX];
+    char hint[BC_HINT_MAX];
 
     for (size_t i = 0; i < bc_quantity_count(); i++)
         if (bc_text_unlikeness(id, bc_quantity_at(i)->id) < bc_text_unlikeness(id, best))
             best = bc_quantity_at(i)->id;
     bc_text_show(shown, sizeof shown, id);
-    return bc_fail(err, BC_ERR_USAGE, "unknown quantity '%s'; the nearest known one is '%s' (bluecone list quantities)", shown, best);
+    if (trade_word(id))
+        return bc_fail(err, BC_ERR_USAGE, "unknown quantity '%s'; write %s (bluecone list quantities)", shown, trade_word(id));
+    if (compares_two_gases(id))
+        return bc_fail(err, BC_ERR_USAGE, "'%s' compares two gases, it is no quantity of one; see bluecone switch", shown);
+    bc_text_suggest(hint, sizeof hint, "the nearest known one is", id, best);
+    return bc_fail(err, BC_ERR_USAGE, "unknown quantity '%s'%s (bluecone list quantities)", shown, hint);
 }
 
 bc_status bc_quantity_find(const char *id, size_t *index, bc_error *err)

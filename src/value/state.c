@@ -48,7 +48,7 @@ bc_status bc_state_check(const bc_state *s, bc_error *err)
     if (!(s->combustion_c >= 0.0 && s->combustion_c <= 100.0))
         return bc_fail(err, BC_ERR_RANGE, "the combustion temperature %.6g C is outside 0 to 100 C", s->combustion_c);
     if (!(s->metering_c >= BC_METERING_T_MIN_C && s->metering_c <= BC_METERING_T_MAX_C))
-        return bc_fail(err, BC_ERR_RANGE, "the metering temperature %.6g C is outside %g to %g C, the range of the summation factors",
+        return bc_fail(err, BC_ERR_RANGE, "the metering temperature %.6g C is outside %g to %g C, the range of the summation factors; Fahrenheit is written 60F",
                        s->metering_c, BC_METERING_T_MIN_C, BC_METERING_T_MAX_C);
     if (!(s->metering_pa >= BC_METERING_P_MIN_PA && s->metering_pa <= BC_METERING_P_MAX_PA))
         return bc_fail(err, BC_ERR_RANGE, "the metering pressure %.6g kPa is outside 90 to 110 kPa, the range of ISO 6976",
@@ -62,7 +62,7 @@ static bc_status take_temperature(const char *text, size_t length, double *t_c, 
     double t_k = 0.0;
 
     if (!bc_text_copy(part, sizeof part, text, length) || part[0] == '\0')
-        return bc_fail(err, BC_ERR_USAGE, "a reference state is written combustion/metering temperature, as 15/15 or 60F/60F@14.73psi");
+        return bc_fail(err, BC_ERR_USAGE, "a reference state is written combustion/metering temperature, as 15/15 or 60F/60F@14.73psi (bluecone list states)");
     const bc_status status = bc_measure_parse(part, "K", "C", &t_k, err);
 
     if (status != BC_OK)
@@ -81,7 +81,7 @@ bc_status bc_state_parse(const char *text, bc_state *state, bc_error *err)
     const char *slash = memchr(text, '/', length);
 
     if (!slash)
-        return bc_fail(err, BC_ERR_USAGE, "a reference state is written combustion/metering temperature, as 15/15 or 60F/60F@14.73psi");
+        return bc_fail(err, BC_ERR_USAGE, "a reference state is written combustion/metering temperature, as 15/15 or 60F/60F@14.73psi (bluecone list states)");
     bc_status status = take_temperature(text, (size_t)(slash - text), &s.combustion_c, err);
 
     if (status == BC_OK)

@@ -162,6 +162,21 @@ static void showing_hides_control_characters_and_ends_long_texts_in_dots(void **
     assert_string_equal(to, "ten by...");
 }
 
+static void a_candidate_is_suggested_only_when_it_is_near(void **state)
+{
+    char hint[BC_HINT_MAX];
+
+    (void)state;
+    assert_true(bc_text_is_near("hvh", "hhv"));            /* two letters swapped */
+    assert_false(bc_text_is_near("foo", "flow"));          /* two of three letters */
+    assert_true(bc_text_is_near("whobbe", "wobbe-gross")); /* the beginning, and two letters */
+    assert_false(bc_text_is_near("compare", "contract"));
+    bc_text_suggest(hint, sizeof hint, "the nearest is", "gett", "get");
+    assert_string_equal(hint, "; the nearest is 'get'");
+    bc_text_suggest(hint, sizeof hint, "the nearest is", "pipeline-h", "sheet");
+    assert_string_equal(hint, "");
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -173,6 +188,7 @@ int main(void)
         cmocka_unit_test(folding_refuses_what_does_not_fit),
         cmocka_unit_test(copying_trims_both_ends_and_checks_the_room),
         cmocka_unit_test(showing_hides_control_characters_and_ends_long_texts_in_dots),
+        cmocka_unit_test(a_candidate_is_suggested_only_when_it_is_near),
     };
 
     return cmocka_run_group_tests(tests, NULL, NULL);

@@ -23,3 +23,5 @@ bluecone list areas vapour
 echo "exit $?" >&2
 bluecone list gases g20 g21
 echo "exit $?" >&2
+bluecone list pipeline-h
+echo "exit $?" >&2

@@ -31,3 +31,24 @@ bluecone sheet --bare g20
 echo "exit $?" >&2
 bluecone verify steam thermo
 echo "exit $?" >&2
+# Words of the trade lead to the id; what is like nothing gets no suggestion; the order is told.
+bluecone get Hi g20
+echo "exit $?" >&2
+bluecone get wobbe-index g20
+echo "exit $?" >&2
+bluecone get wobbe-ratio g20
+echo "exit $?" >&2
+bluecone get g20 hhv
+echo "exit $?" >&2
+bluecone get foo g20
+echo "exit $?" >&2
+bluecone compare g20
+echo "exit $?" >&2
+bluecone --json get hhv g20
+echo "exit $?" >&2
+bluecone help frobnicate
+echo "exit $?" >&2
+bluecone verify frobnicate
+echo "exit $?" >&2
+bluecone get hhv --unit MJ/m³ g20
+echo "exit $?" >&2

@@ -129,6 +129,66 @@ static void ids_are_found_in_any_spelling_and_unknown_ones_suggest(void **state)
     assert_int_equal(a, b);
 }
 
+/* "Hi" is the net heat of EN 437 and looks most like hhv, the gross one: the table must answer, not the likeness. */
+static void words_of_the_trade_lead_to_the_quantity_they_mean(void **state)
+{
+    static const struct {
+        const char *word, *told;
+    } CASES[] = {
+        {"Hi", "write lhv"}, {"Hu", "write lhv"}, {"ncv", "write lhv"}, {"PCI", "write lhv"}, {"net calorific value", "write lhv"},
+        {"Hs", "write hhv"}, {"Ho", "write hhv"}, {"GCV", "write hhv"}, {"PCS", "write hhv"}, {"higher-heating-value", "write hhv"},
+        {"calorific_value", "write hhv (gross) or lhv (net)"}, {"WI", "write wobbe-gross or wobbe-net"},
+        {"LEL", "write lfl"}, {"specific gravity", "write relative-density"}, {"Compressibility", "write z"},
+    };
+    size_t index = 0;
+
+    (void)state;
+    for (size_t i = 0; i < sizeof CASES / sizeof *CASES; i++) {
+        bc_error err = {.status = BC_OK};
+
+        assert_refused(bc_quantity_find(CASES[i].word, &index, &err), &err, BC_ERR_USAGE, CASES[i].told);
+    }
+}
+
+/* Each id that the table of words names is a quantity, and no word of it is one: it would never be looked up. */
+static void words_of_the_trade_name_quantities_that_there_are(void **state)
+{
+    static const struct {
+        const char *word, *ids;
+    } WORDS[] = {
+#define TRADE_WORD(word, ids) {word, ids},
+#include "data/trade_words.def"
+    };
+    size_t index = 0;
+
+    (void)state;
+    for (size_t i = 0; i < sizeof WORDS / sizeof *WORDS; i++) {
+        bc_error err = {.status = BC_OK};
+        const char *or_other = strstr(WORDS[i].ids, " or ");
+        char first[64];
+
+        assert_true(bc_quantity_find(WORDS[i].word, &index, NULL) != BC_OK);
+        assert_true((size_t)snprintf(first, sizeof first, "%s", WORDS[i].ids) < sizeof first);
+        first[strcspn(first, " ")] = '\0';
+        assert_ok(bc_quantity_find(first, &index, &err), &err);
+        if (or_other) {
+            (void)snprintf(first, sizeof first, "%s", or_other + 4);
+            first[strcspn(first, " ")] = '\0';
+            assert_ok(bc_quantity_find(first, &index, &err), &err);
+        }
+    }
+}
+
+static void a_word_like_no_quantity_gets_no_suggestion(void **state)
+{
+    bc_error err = {.status = BC_OK};
+    size_t index = 0;
+
+    (void)state;
+    assert_refused(bc_quantity_find("pipeline-h", &index, &err), &err, BC_ERR_USAGE, "unknown quantity 'pipeline-h' (bluecone list quantities)");
+    assert_refused(bc_quantity_find("aga-lifting", &index, &err), &err, BC_ERR_USAGE, "compares two gases|bluecone switch");
+}
+
 static void an_index_beyond_the_list_is_refused(void **state)
 {
     const bc_reference r = reference_at("15/15");
@@ -348,6 +408,9 @@ int main(void)
         cmocka_unit_test(every_quantity_of_iso_6976_is_its_own_figure_in_its_own_unit),
         cmocka_unit_test(every_quantity_is_unique_and_explains_itself),
         cmocka_unit_test(ids_are_found_in_any_spelling_and_unknown_ones_suggest),
+        cmocka_unit_test(words_of_the_trade_lead_to_the_quantity_they_mean),
+        cmocka_unit_test(words_of_the_trade_name_quantities_that_there_are),
+        cmocka_unit_test(a_word_like_no_quantity_gets_no_suggestion),
         cmocka_unit_test(an_index_beyond_the_list_is_refused),
         cmocka_unit_test(every_quantity_of_every_bundled_gas_is_finite_or_refused_with_a_reason),
         cmocka_unit_test(values_together_are_those_of_each_quantity_alone),
