@@ -8,11 +8,12 @@
 void help_all(void)
 {
     puts("usage: bluecone COMMAND [OPTIONS] ARGUMENTS\n\n"
-         "What a fuel gas is worth and how it compares: heating values, density, Wobbe\n"
-         "index after ISO 6976, checked against a formation-enthalpy balance.\n");
+         "What a fuel gas is worth, how it burns, and whether burner and contract take it.\n"
+         "Heating values and Wobbe index after ISO 6976, checked by formation enthalpies.\n");
     for (size_t i = 0; command_at(i); i++)
         printf("  %-8s %s\n", command_at(i)->word, command_at(i)->help);
-    puts("\nA GAS is a composition file, a bundled name or a literal:\n"
+    puts("\nA GAS is a composition file, a bundled name (bluecone list gases) or a literal\n"
+         "in per cent by mole; the state of --at is combustion/metering temperature:\n"
          "  bluecone get wobbe-gross methane=92,ethane=5,nitrogen=3\n"
          "  bluecone sheet pipeline-h --at 25/0\n\n"
          "bluecone COMMAND --help tells the options; man bluecone tells all.");

@@ -44,12 +44,26 @@ static bc_status list_quantities(report *r, const char *name, bc_error *err)
     list_columns(r, table, COLUMNS, BC_COUNT(COLUMNS));
     for (size_t i = 0; i < bc_quantity_count(); i++) {
         const bc_quantity *q = bc_quantity_at(i);
-        const char *const cells[] = {q->id, q->unit, q->meaning, q->method};
+        char meaning[320]; /* the trade's name first: an id such as mcp says nothing by itself */
+
+        (void)snprintf(meaning, sizeof meaning, "%s: %s", q->label, q->meaning);
+        const char *const cells[] = {q->id, q->unit, meaning, q->method};
 
         if (!name || i == only)
             list_row(r, table, cells, BC_COUNT(cells));
     }
     return BC_OK;
+}
+
+/* True when a unit, or a part of the quotient that it is, is the symbol. */
+static bool unit_has(const char *unit, const char *symbol)
+{
+    const size_t length = strlen(symbol);
+
+    for (const char *part = unit; part; part = strchr(part, '/') ? strchr(part, '/') + 1 : NULL)
+        if (strcspn(part, "/") == length && strncmp(part, symbol, length) == 0)
+            return true;
+    return false;
 }
 
 static bc_status list_units(report *r, const char *name, bc_error *err)
@@ -58,14 +72,14 @@ static bc_status list_units(report *r, const char *name, bc_error *err)
     bc_unit unit;
 
     if (name && bc_unit_parse(name, &unit, err) != BC_OK)
-        return BC_ERR_USAGE;
+        return BC_ERR_USAGE; /* of a quotient, each of its symbols */
     const size_t table = report_add_table(r, "units", "Units; quotients are written with '/', as MJ/m3");
 
     list_columns(r, table, COLUMNS, BC_COUNT(COLUMNS));
     for (size_t i = 0; i < bc_unit_count(); i++) {
         const char *const cells[] = {bc_unit_symbol(i), bc_unit_meaning(i)};
 
-        if (!name || strcmp(name, cells[0]) == 0)
+        if (!name || unit_has(name, cells[0]))
             list_row(r, table, cells, BC_COUNT(cells));
     }
     return BC_OK;

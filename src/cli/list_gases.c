@@ -48,7 +48,7 @@ static bc_status list_all(report *r, bc_composition *scratch, bc_error *err)
 
 static bc_status list_one(report *r, const char *name, bc_composition *c, bc_error *err)
 {
-    static const char *const COLUMNS[] = {"component", "as written, %", "u, %"};
+    static const char *const COLUMNS[] = {"component", "as written, %", "u (k = 1), %"};
     static const char *const BASES[] = {"mole", "volume", "mass"};
     char title[480];
     folders f;

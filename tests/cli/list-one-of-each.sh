@@ -1,6 +1,7 @@
 # One entry of each list, with its source.
 bluecone list quantities wobbe-gross
 bluecone list units Btu
+bluecone list units kWh/Nm3
 bluecone list methods virial
 bluecone list states 25/0
 bluecone list gases g20
