@@ -148,7 +148,7 @@ static void add_share(report *r, size_t table, double x)
 
 void sheet_composition(report *r, const subjects *s)
 {
-    const size_t table = report_add_table(r, "composition", "Composition as computed");
+    const size_t table = report_add_table(r, "composition", "Composition used");
 
     report_add_column(r, table, "component", "component", "mol-%");
     for (size_t i = 0; i < s->count; i++) {
@@ -170,6 +170,30 @@ void sheet_composition(report *r, const subjects *s)
     }
 }
 
+/* A row that is not there tells nobody that a method ends: the figures whose methods hold for some gases only. */
+static void tell_left_out(report *r, const subject *each)
+{
+    bool wanted[QUANTITIES_MAX] = {false};
+    double value[QUANTITIES_MAX];
+    char text[700];
+    const int named = snprintf(text, sizeof text, "%.100s: left out, since their methods do not hold for this gas: ", each->loaded.name);
+    size_t used = (size_t)named;
+    const size_t start = used;
+
+    if (bc_quantity_count() > QUANTITIES_MAX)
+        return;
+    for (size_t q = 0; q < bc_quantity_count(); q++)
+        wanted[q] = strcmp(bc_quantity_at(q)->group, "interchange") == 0 || strcmp(bc_quantity_at(q)->group, "safety") == 0;
+    bc_quantity_values(wanted, &each->subject, value);
+    for (size_t q = 0; q < bc_quantity_count(); q++)
+        if (wanted[q] && isnan(value[q]) && used + 120 < sizeof text)
+            used += (size_t)snprintf(text + used, sizeof text - used, "%s%s", used > start ? ", " : "", bc_quantity_at(q)->id);
+    if (used == start)
+        return;
+    (void)snprintf(text + used, sizeof text - used, " (bluecone get ID GAS tells why).");
+    report_add_warning(r, text);
+}
+
 static bc_status fill(report *r, const subjects *s, const arguments *a, bc_error *err)
 {
     subjects_report(s, r);
@@ -179,6 +203,7 @@ static bc_status fill(report *r, const subjects *s, const arguments *a, bc_error
     sheet_composition(r, s);
     for (size_t i = 0; i < s->count && status == BC_OK; i++) {
         check_gap(r, &s->each[i]);
+        tell_left_out(r, &s->each[i]);
         status = add_shortfall(r, s, &s->each[i], err);
         if (a->value[OPTION_working])
             report_working(r, s->each[i].loaded.name, &s->each[i].subject);

@@ -90,8 +90,9 @@ static void put_end(book_sheet *s, const report *r)
         if (!r->results[i].has_uncertainty)
             continue;
         put_fact(s, "Uncertainty",
-                 "u is the standard uncertainty (coverage factor k = 1), in the unit of its row; for figures "
-                 "without u none is stated: that is not to say that they are exact.");
+                 "u is the standard uncertainty (coverage factor k = 1) from input and tables, in the unit of "
+                 "its row; that of the method itself is not in it. For figures without u none is stated: that is not to say that they "
+                 "are exact.");
         return;
     }
 }

@@ -65,9 +65,8 @@ static void put_uncertainty(page *p)
     for (size_t i = 0; i < p->r->result_count; i++) {
         if (!p->r->results[i].has_uncertainty)
             continue;
-        fputs("<dt>Uncertainty</dt><dd>u is the standard uncertainty (coverage factor k = 1), in the unit of "
-              "its "
-              "row; double it for a coverage of about 95 %. For figures without u none is stated: that "
+        fputs("<dt>Uncertainty</dt><dd>u is the standard uncertainty (coverage factor k = 1) from input and tables, in the unit "
+              "of its row; double it for a coverage of about 95 %. That of the method itself is not in it. For figures without u none is stated: that "
               "is not to say that they are exact.</dd>\n",
               p->out);
         return;

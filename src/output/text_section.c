@@ -183,5 +183,6 @@ void text_sections(text_page *page, const report *r)
         section_close(&s);
     }
     if (with_u)
-        fputs("\nu: standard uncertainty (k = 1), in the unit of its row\n", page->out);
+        fputs("\nu: standard uncertainty (k = 1), in the unit of its row;\n"
+              "   from input and tables, that of the method is not in it\n", page->out);
 }

@@ -163,7 +163,8 @@ static void one_gas_has_its_figures_point_under_point_with_uncertainty(void **st
                    "  Molar heating value     892.92      kJ/mol  u 0.19\n"
                    "  Relative density          0.612345\n"
                    "\n"
-                   "u: standard uncertainty (k = 1), in the unit of its row\n");
+                   "u: standard uncertainty (k = 1), in the unit of its row;\n"
+                   "   from input and tables, that of the method is not in it\n");
 }
 
 static void several_gases_stand_side_by_side_and_lack_what_they_lack(void **state)
