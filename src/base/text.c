@@ -198,12 +198,14 @@ size_t bc_text_unlikeness(const char *word, const char *candidate)
     return beginning < distance ? beginning : distance;
 }
 
-/* A third of the letters may be wrong, and one; of a word of three letters only one, else anything is near. */
+/* A third of the letters may be wrong, and one, but then not the first letter, which people get right: natural-gas is not
+ * water-gas. Of a word of three letters only one, else anything is near. */
 bool bc_text_is_near(const char *word, const char *candidate)
 {
     const size_t length = strlen(word);
+    const size_t allowed = length > 3 && lower(word[0]) == lower(candidate[0]) ? 1 + length / 3 : 1;
 
-    return bc_text_unlikeness(word, candidate) <= (length > 3 ? 1 + length / 3 : 1);
+    return bc_text_unlikeness(word, candidate) <= allowed;
 }
 
 void bc_text_suggest(char *to, size_t size, const char *lead, const char *word, const char *candidate)

@@ -39,6 +39,14 @@ static bc_status check_metering(const char *text, const bc_unit *unit, const bc_
                    unit->metering_c, state->metering_c, state->combustion_c, unit->metering_c);
 }
 
+/* hhv-mass is of another basis than hhv. */
+static bool is_of_other_basis(const char *id, const char *than)
+{
+    const size_t length = strlen(than);
+
+    return strncmp(id, than, length) == 0 && id[length] == '-';
+}
+
 static bc_status check_unit(const char *text, const bc_state *state, const size_t quantities[], size_t count, bc_error *err)
 {
     bc_unit unit;
@@ -55,6 +63,10 @@ static bc_status check_unit(const char *text, const bc_state *state, const size_
 
     if (strcmp(first->unit, "1") == 0)
         return bc_fail(err, BC_ERR_USAGE, "--unit %s fits none of the quantities; %s is a pure number (bluecone list quantities)", text, first->id);
+    for (size_t i = 0; i < bc_quantity_count(); i++)
+        if (is_of_other_basis(bc_quantity_at(i)->id, first->id) && fits_quantity(&unit, bc_quantity_at(i)))
+            return bc_fail(err, BC_ERR_USAGE, "--unit %s fits none of the quantities; %s is in %s; write %s for that basis", text, first->id,
+                           first->unit, bc_quantity_at(i)->id);
     return bc_fail(err, BC_ERR_USAGE, "--unit %s fits none of the quantities; %s is in %s; ask for one on that basis (bluecone list quantities)",
                    text, first->id, first->unit);
 }

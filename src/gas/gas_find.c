@@ -79,6 +79,7 @@ static bool ends_in_ini(const char *word)
 
 static bc_status refuse(const char *word, const char *const folders[], size_t folder_count, bc_error *err)
 {
+    size_t species = 0;
     char shown[BC_WORD_MAX];
 
     bc_text_show(shown, sizeof shown, word);
@@ -88,6 +89,8 @@ static bc_status refuse(const char *word, const char *const folders[], size_t fo
 
     if (n.name[0] == '\0')
         return bc_fail(err, BC_ERR_INPUT, "no file or gas '%s', and no bundled gases were found; set BLUECONE_PATH to their folder", shown);
+    if (bc_species_find(word, &species, NULL) == BC_OK) /* before a name that looks alike: ethane is not butane */
+        return bc_fail(err, BC_ERR_INPUT, "no file or bundled gas '%s'; the pure gas is written %s=100", shown, bc_species_id(species));
     if (!bc_nearest_helps(&n))
         return bc_fail(err, BC_ERR_INPUT, "no file or bundled gas '%s'; bluecone list gases shows the bundled ones, a literal is written methane=92,ethane=8",
                        shown);

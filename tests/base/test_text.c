@@ -171,6 +171,8 @@ static void a_candidate_is_suggested_only_when_it_is_near(void **state)
     assert_false(bc_text_is_near("foo", "flow"));          /* two of three letters */
     assert_true(bc_text_is_near("whobbe", "wobbe-gross")); /* the beginning, and two letters */
     assert_false(bc_text_is_near("compare", "contract"));
+    assert_false(bc_text_is_near("natural-gas", "water-gas")); /* four letters of eleven, the first among them */
+    assert_true(bc_text_is_near("ehtane", "ethane"));
     bc_text_suggest(hint, sizeof hint, "the nearest is", "gett", "get");
     assert_string_equal(hint, "; the nearest is 'get'");
     bc_text_suggest(hint, sizeof hint, "the nearest is", "pipeline-h", "sheet");

@@ -3,6 +3,10 @@ bluecone get hhv pipelin-h
 echo "exit $?" >&2
 bluecone get hhv g-20x
 echo "exit $?" >&2
+bluecone get hhv ethane
+echo "exit $?" >&2
+bluecone get hhv natural-gas
+echo "exit $?" >&2
 bluecone get hhv missing-file.ini
 echo "exit $?" >&2
 bluecone get hhv methan=97,etane=3

@@ -15,3 +15,5 @@ bluecone get hhv --unit MJ/ g20
 echo "exit $?" >&2
 bluecone get hhv --unit '' g20
 echo "exit $?" >&2
+bluecone get lhv --unit kWh g20
+echo "exit $?" >&2
