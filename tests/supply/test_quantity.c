@@ -107,8 +107,10 @@ static void every_quantity_is_unique_and_explains_itself(void **state)
         if (strlen(q->label) < 3 || strlen(q->meaning) < 10 || strlen(q->method) < 3 || q->group[0] == '\0')
             fail_msg("%s does not explain itself", q->id);
         assert_int_equal(bc_unit_parse(q->unit, &unit, NULL), BC_OK);
-        for (size_t j = 0; j < i; j++)
+        for (size_t j = 0; j < i; j++) {
             assert_string_not_equal(q->id, bc_quantity_at(j)->id);
+            assert_string_not_equal(q->label, bc_quantity_at(j)->label); /* a page shows the label alone */
+        }
     }
     assert_null(bc_quantity_at(bc_quantity_count()));
 }
