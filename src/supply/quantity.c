@@ -10,6 +10,7 @@
 #include "flame/flame_quantities.h"
 #include "gas/species_index.h"
 #include "supply/index_quantities.h"
+#include "supply/quantity_meant.h"
 #include "value/subject_internal.h"
 #include "value/value_quantities.h"
 
@@ -47,21 +48,6 @@ const bc_quantity *bc_quantity_at(size_t index)
     return find_floor(&index, &source) ? source.at(index) : NULL;
 }
 
-static const char *trade_word(const char *word)
-{
-    static const struct {
-        const char *word, *ids;
-    } WORDS[] = {
-#define TRADE_WORD(word, ids) {word, ids},
-#include "data/trade_words.def"
-    };
-
-    for (size_t i = 0; i < BC_COUNT(WORDS); i++)
-        if (bc_text_same(WORDS[i].word, word))
-            return WORDS[i].ids;
-    return NULL;
-}
-
 static bool compares_two_gases(const char *id)
 {
     for (size_t i = 0; i < bc_index_count(); i++)
@@ -73,6 +59,7 @@ static bool compares_two_gases(const char *id)
 static bc_status refuse_id(const char *id, bc_error *err)
 {
     const char *best = bc_quantity_at(0)->id;
+    const char *meant = quantity_meant(id);
     char shown[BC_WORD_MAX];
     char hint[BC_HINT_MAX];
 
@@ -80,8 +67,8 @@ static bc_status refuse_id(const char *id, bc_error *err)
         if (bc_text_unlikeness(id, bc_quantity_at(i)->id) < bc_text_unlikeness(id, best))
             best = bc_quantity_at(i)->id;
     bc_text_show(shown, sizeof shown, id);
-    if (trade_word(id))
-        return bc_fail(err, BC_ERR_USAGE, "unknown quantity '%s'; write %s (bluecone list quantities)", shown, trade_word(id));
+    if (meant)
+        return bc_fail(err, BC_ERR_USAGE, "unknown quantity '%s'; write %s (bluecone list quantities)", shown, meant);
     if (compares_two_gases(id))
         return bc_fail(err, BC_ERR_USAGE, "'%s' compares two gases, it is no quantity of one; see bluecone switch", shown);
     bc_text_suggest(hint, sizeof hint, "the nearest known one is", id, best);

@@ -167,7 +167,7 @@ static const struct {
     {"'hhv', 'methane=1' || char(0) || '00'", "NUL", true},
     {"'hydrogen-carbon-ratio', 'nitrogen=100'", "no carbon", true},
     {"'hhv', '15/15', 'methane', 60, 'nonane', 'x'", "'nonane' reads 'x'", true},
-    {"'wobbe', 'g20'", "unknown quantity 'wobbe'; write wobbe-gross or wobbe-net", false},
+    {"'wobbe', 'g20'", "unknown quantity 'wobbe'; write 'wobbe-gross' or 'wobbe-net'", false},
     {"17, 'g20'", "the quantity is no text", false},
     {"x'686876', 'g20'", "the quantity is no text", false},
     {"'hhv', 'g20', '15'", "15", false},
