@@ -43,7 +43,7 @@ BC_API BC_MUST_USE bc_status bc_state_parse(const char *text, bc_state *state, b
 BC_API BC_MUST_USE bc_status bc_state_check(const bc_state *state, bc_error *err);
 
 /* The state in words for a report, at most size - 1 bytes: "combustion 15 C, metering 15 C and
- * 101.325 kPa, as composed, ISO 6976:2016". 60 F is written as such. */
+ * 101.325 kPa, water as stated, ISO 6976:2016". 60 F is written as such. */
 BC_API void bc_state_describe(const bc_state *state, char *text, size_t size);
 
 /* True when the temperature is a column of the edition's table (15.55 C stands for 60 F). */

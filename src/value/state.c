@@ -113,5 +113,5 @@ void bc_state_describe(const bc_state *state, char *text, size_t size)
     describe_temperature(state->combustion_c, combustion, sizeof combustion);
     describe_temperature(state->metering_c, metering, sizeof metering);
     (void)bc_text_format(text, size, "combustion %s, metering %s and %.7g kPa, %s, ISO 6976:%d", combustion, metering,
-                   state->metering_pa * 1e-3, state->saturated ? "saturated with water" : "as composed", state->edition);
+                   state->metering_pa * 1e-3, state->saturated ? "saturated with water" : "water as stated", state->edition);
 }

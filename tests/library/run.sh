@@ -100,7 +100,7 @@ check() {
     (cd "$work" && "$@" bad.ini) >"$work/got" 2>&1
     echo "exit $?" >>"$work/got"
     diff -u --label wanted --label printed - "$work/got" <<'END'
-At combustion 25 C, metering 0 C and 101.325 kPa, as composed, ISO 6976:2016:
+At combustion 25 C, metering 0 C and 101.325 kPa, water as stated, ISO 6976:2016:
 gas_value: bad.ini:3: unknown component 'ethan'; the nearest known one is 'ethane' (bluecone list species)
 exit 3
 END

@@ -133,7 +133,7 @@ static void a_state_is_told_in_words_that_fit_the_room(void **state)
 
     (void)state;
     bc_state_describe(&s, text, sizeof text);
-    assert_string_equal(text, "combustion 15 C, metering 15 C and 101.325 kPa, as composed, ISO 6976:2016");
+    assert_string_equal(text, "combustion 15 C, metering 15 C and 101.325 kPa, water as stated, ISO 6976:2016");
     assert_int_equal(bc_state_parse("60F/17.25@14.73psi", &s, NULL), BC_OK);
     s.saturated = true;
     s.edition = 1995;
