@@ -16,7 +16,10 @@ echo "Wobbe index of the present supply: $wobbe MJ/m3"
 bluecone blend --by volume free propane-works.ini free air --aim "wobbe-gross=${wobbe}MJ/m3" -o "$folder/standby.ini" |
     sed -n '/^Solutions/,/^$/p'
 echo 'Heat, air demand and flammability of what the mixer makes, beside the supply:'
-bluecone get hhv,relative-density,air-demand,ufl --quiet present-supply.ini "$folder/standby.ini"
+for gas in present-supply.ini "$folder/standby.ini"; do
+    bluecone get hhv,relative-density,air-demand,ufl --quiet "$gas" | tr '\n' ' '
+    echo
+done
 echo
 echo 'Nitrogen for a rich LNG, for the same index:'
 bluecone blend --by volume free nitrogen=100 rest lng-rich --aim "wobbe-gross=${wobbe}MJ/m3" | sed -n '/^Solutions/,/^$/p'

@@ -53,6 +53,19 @@ static bc_status choose_style(const arguments *a, render_style *style, bc_error 
     return digits_from(a, &style->digits, err);
 }
 
+/* Lines of several quantities look alike, gross and net heat above all: their ids in the order of the lines of a gas. */
+static void tell_order(const report *r)
+{
+    char text[1024] = "";
+    size_t used = 0;
+
+    for (size_t i = 0; i < r->result_count && used < sizeof text; i++)
+        if (r->results[i].gas == r->results[0].gas)
+            used += (size_t)snprintf(text + used, sizeof text - used, "%s%s", used > 0 ? ", " : "", r->results[i].id);
+    if (used < sizeof text && strchr(text, ','))
+        warn("lines: %s%s", text, r->gas_count > 1 ? ", for each gas" : "");
+}
+
 /* A number alone and a picture have no room for state and warnings: they go where messages go. */
 static void tell_aside(const report *r, const render_style *style)
 {
@@ -88,6 +101,8 @@ static bc_status render(report *r, const arguments *a, bool brief, bc_error *err
         return bc_fail(err, BC_ERR_MEMORY, "not enough memory for the report");
     if (form == RENDER_BRIEF) {
         tell_aside(r, &style);
+        if (!style.bare && !style.quiet)
+            tell_order(r);
         style.digits = style.digits ? style.digits : REPORT_DIGITS;
     } else if (render_form_is_chart(form)) {
         tell_aside(r, &style);

@@ -1,5 +1,5 @@
 /* SPDX-License-Identifier: MIT */
-/* brief.c - the report as bare lines, for a shell: value and unit, then what tells the lines apart. */
+/* brief.c - the report as bare lines, for a shell: value and unit. */
 #include "output/render.h"
 
 #include "base/error_internal.h"
@@ -7,7 +7,6 @@
 #include "output/result_text_internal.h"
 
 #include <stdlib.h>
-#include <string.h>
 
 /* Writes a separator and a text, or nothing for an empty text; false when there is no memory. */
 static bool put_behind(FILE *out, char separator, const char *text)
@@ -20,17 +19,8 @@ static bool put_behind(FILE *out, char separator, const char *text)
     return plain != NULL;
 }
 
-/* Two heats in the same unit look alike: lines of several quantities bear their ids. */
-static bool has_several_ids(const report *r)
-{
-    for (size_t i = 1; i < r->result_count; i++)
-        if (strcmp(r->results[i].id, r->results[0].id) != 0)
-            return true;
-    return false;
-}
-
 /* One result; false when there is no memory. */
-static bool put_result(FILE *out, const report *r, const report_result *result, bool with_id, const render_style *style)
+static bool put_result(FILE *out, const report *r, const report_result *result, const render_style *style)
 {
     const result_text text = result_text_of(result, style);
     const bool named = r->gas_count > 1 && result->gas != REPORT_NO_GAS;
@@ -39,8 +29,6 @@ static bool put_result(FILE *out, const report *r, const report_result *result, 
     fputs(text.value, out);
     if (!style->bare) {
         ok = put_behind(out, ' ', text.unit);
-        if (with_id)
-            ok = put_behind(out, '\t', result->id) && ok;
         if (named)
             ok = put_behind(out, '\t', r->gases[result->gas].name) && ok;
     }
@@ -70,10 +58,9 @@ static bool put_names(FILE *out, const report *r)
 bc_status render_brief(const report *r, const render_style *style, FILE *out, bc_error *err)
 {
     bool ok = report_ok(r);
-    const bool with_id = ok && has_several_ids(r);
 
     for (size_t i = 0; ok && i < r->result_count; i++)
-        ok = put_result(out, r, &r->results[i], with_id, style);
+        ok = put_result(out, r, &r->results[i], style);
     if (ok && r->result_count == 0)
         ok = put_names(out, r);
     if (!ok)

@@ -205,21 +205,6 @@ static void bare_lines_have_value_and_unit_and_with_several_gases_the_name(void 
     assert_renders(render_brief, r, (render_style){.bare = true, .digits = 3}, "37.7\n32.5\n");
 }
 
-/* Gross and net heat in the same unit must not look alike. */
-static void lines_of_several_quantities_bear_their_ids(void **state)
-{
-    report *r = *state;
-    const size_t gas = report_add_gas(r, "G20", "", 1.0);
-
-    add_result(r, gas, 37.7061, 0.0);
-    add_result(r, gas, 33.9491, 0.0);
-    (void)snprintf(r->results[1].id, 4, "lhv");
-    assert_renders(render_brief, r, (render_style){0}, "37.7061 MJ/m3\thhv\n33.9491 MJ/m3\tlhv\n");
-    (void)report_add_gas(r, "G25", "", 1.0);
-    assert_renders(render_brief, r, (render_style){0}, "37.7061 MJ/m3\thhv\tG20\n33.9491 MJ/m3\tlhv\tG20\n");
-    assert_renders(render_brief, r, (render_style){.bare = true}, "37.7061\n33.9491\n");
-}
-
 static void a_pure_number_has_no_unit_behind_it(void **state)
 {
     report *r = *state;
@@ -256,7 +241,6 @@ int main(void)
         CSV_TEST(an_empty_report_is_the_heading_alone),
         CSV_TEST(a_locale_with_a_decimal_comma_changes_no_cell),
         CSV_TEST(bare_lines_have_value_and_unit_and_with_several_gases_the_name),
-        CSV_TEST(lines_of_several_quantities_bear_their_ids),
         CSV_TEST(a_pure_number_has_no_unit_behind_it),
         CSV_TEST(a_stream_that_cannot_be_written_is_an_error),
     };
