@@ -121,7 +121,7 @@ static void add_remedy(report *r, const switch_case *c)
     const plain_figure airs[] = {
         {"air-factor", two_airs ? "Air flow, heat by the orifice" : "Air flow then", m->air, "1", 4, "atom balance"},
         {"air-factor-by-pressure", "Air flow, heat by the pressure", m->air_by_pressure, "1", 4, "atom balance"},
-        {"air-factor-alone", "Or air flow alone", m->air_alone, "1", 4, "atom balance"},
+        {"air-factor-alone", "Or air alone, heat as it comes", m->air_alone, "1", 4, "atom balance"},
         {"lambda-target", "Air factor restored", m->lambda_target, "1", 4, "atom balance"},
     };
 
@@ -137,7 +137,7 @@ static void add_remedy(report *r, const switch_case *c)
 static void add_adjusted(report *r, const switch_case *c)
 {
     const bc_burner_response *x = &c->result.on_adjusted;
-    const slot where = {r, report_add_section(r, "adjusted", "New gas with that"), NEW_GAS};
+    const slot where = {r, report_add_section(r, "adjusted", "New gas once heat input and air factor are restored"), NEW_GAS};
     const plain_figure figures[] = {
         {"adjusted-heat-input-ratio", "Heat input, of old", PERCENT * x->heat_ratio, "%", 4, "flow of the control"},
         {"adjusted-lambda", "Air factor", x->lambda, "1", 4, "flow of the control"},
@@ -207,7 +207,7 @@ void switch_controls(report *r, const switch_case *c)
     const size_t table = report_add_table(r, "controls", title);
 
     report_add_column(r, table, "control", "control", "");
-    report_add_column(r, table, "heat-input", "heat input", "%");
+    report_add_column(r, table, "heat-input", "heat, of old", "%");
     report_add_column(r, table, "lambda", "lambda", "");
     report_add_column(r, table, "flue-o2", "dry O2", "%");
     report_add_column(r, table, "meaning", "which is", "");
