@@ -5,3 +5,5 @@ done
 for p in 1.2bar 120kPa 1200mbar 120000Pa 0.18675barg; do
     bluecone burn --pressure $p g20 | sed -n '/^  pressure/p; /Water dew/p'
 done
+# Nothing leaves hotter than it burns.
+bluecone burn --flue-temp 2300 g20 | sed -n '/^Losses/,/^$/p; /^Warnings/,/^$/p'
