@@ -121,6 +121,8 @@ static bc_status fill(report *r, blend_case *c, const bc_aim *aim, bool *ok, bc_
         status = blend_sheet(r, c, aim->share[0], err);
     if (status != BC_OK)
         return status;
+    if (blend_has_terms(c) && aim->count == 1)
+        blend_cost(r, c, aim->share[0]);
     report_solutions(r, c, aim);
     for (size_t n = 0; n < shown; n++)
         blend_judge(r, c, c->count + n, &inside);
