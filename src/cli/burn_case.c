@@ -250,8 +250,11 @@ static bc_status fuel_rate(const char *text, const bc_subject *fuel, double *mol
     bc_unit unit;
     bc_status status = bc_number_prefix(text, &value, &rest, err);
 
-    if (status == BC_OK)
-        status = bc_unit_parse(rest, &unit, err);
+    if (status != BC_OK)
+        return status;
+    status = bc_unit_parse(rest, &unit, err);
+    if (status == BC_ERR_USAGE)
+        return bc_fail(err, BC_ERR_USAGE, "'%.40s' is no fuel flow; write it as 120kg/h, 300m3/h, 10000scf/h or 10kmol/h", text);
     if (status != BC_OK)
         return status;
     if (!(value > 0.0))
@@ -267,7 +270,7 @@ static bc_status fuel_rate(const char *text, const bc_subject *fuel, double *mol
             return BC_OK;
         }
     }
-    return bc_fail(err, BC_ERR_USAGE, "'%.40s' is no fuel flow; write it as 120kg/h, 300m3/h or 10kmol/h", text);
+    return bc_fail(err, BC_ERR_USAGE, "'%.40s' is no fuel flow; write it as 120kg/h, 300m3/h, 10000scf/h or 10kmol/h", text);
 }
 
 static bc_status take_rate(const arguments *a, const bc_subject *fuel, burn_setup *s, bc_error *err)

@@ -72,7 +72,7 @@ static void add_oxidant(report *r, const arguments *a, const burn_case_result *c
 {
     const bc_burn *b = &c->burn;
     const double lambda = c->setup.physics.lambda;
-    const slot where = {r, report_add_section(r, "oxidant", "Oxidant (m3/m3: per m3 of fuel as ideal gas)"), 0};
+    const slot where = {r, report_add_section(r, "oxidant", "Oxidant, volumes as ideal gases"), 0};
     const plain_figure figures[] = {
         {"oxygen-need", "Oxygen for complete combustion", b->demand.oxygen_mol, "m3/m3", 5, "atom balance"},
         {"oxygen-need-mass", "Oxygen for complete combustion, mass", b->demand.oxygen_kg, "kg/kg", 5, "atom balance"},
