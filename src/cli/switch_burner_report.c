@@ -186,9 +186,15 @@ static bc_status respond_under(const switch_case *c, bc_control control, bc_burn
 static void add_control(report *r, size_t table, const switch_case *c, bc_control control)
 {
     bc_burner_response x;
+    char meaning[160];
+    const bool responds = respond_under(c, control, &x) == BC_OK;
 
     report_add_text(r, table, bc_control_word(control));
-    if (respond_under(c, control, &x) == BC_OK) {
+    (void)snprintf(meaning, sizeof meaning, "%s", bc_control_meaning(control));
+    if (responds && x.trim_at_end)
+        (void)snprintf(meaning, sizeof meaning, "trim of the %s at its end of %.3g %%: flue oxygen not held", control == BC_CONTROL_TRIM_AIR ? "air" : "gas",
+                       PERCENT * c->burner.trim_range);
+    if (responds) {
         report_add_number(r, table, PERCENT * x.heat_ratio, 2);
         report_add_number(r, table, x.lambda, 3);
         report_add_number(r, table, PERCENT * x.o2_dry, 2);
@@ -196,7 +202,7 @@ static void add_control(report *r, size_t table, const switch_case *c, bc_contro
         for (int i = 0; i < 3; i++)
             report_add_text(r, table, "-");
     }
-    report_add_text(r, table, bc_control_meaning(control));
+    report_add_text(r, table, meaning);
 }
 
 void switch_controls(report *r, const switch_case *c)
