@@ -248,6 +248,7 @@ static bc_status fuel_rate(const char *text, const bc_subject *fuel, double *mol
     const char *rest = "";
     double value = 0.0;
     bc_unit unit;
+    bc_unit power;
     bc_status status = bc_number_prefix(text, &value, &rest, err);
 
     if (status != BC_OK)
@@ -270,6 +271,8 @@ static bc_status fuel_rate(const char *text, const bc_subject *fuel, double *mol
             return BC_OK;
         }
     }
+    if (bc_unit_parse("W", &power, NULL) == BC_OK && bc_unit_matches(&unit, &power))
+        return bc_fail(err, BC_ERR_USAGE, "'%.40s' is a power, no fuel flow; state useful heat by --duty, or the fuel as 300m3/h", text);
     return bc_fail(err, BC_ERR_USAGE, "'%.40s' is no fuel flow; write it as 120kg/h, 300m3/h, 10000scf/h or 10kmol/h", text);
 }
 
