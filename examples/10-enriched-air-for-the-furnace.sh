@@ -23,6 +23,6 @@ done
 echo
 echo 'Where the heat goes, by the path, with 25 % oxygen:'
 bluecone burn --oxidant enriched:25 --oxidant-temp 1150 --excess 8 --flue-temp 1420 --duty 3.6MW present-supply.ini |
-    sed -n '/^Heat by/,/Sum/p'
+    sed -n '/^Enthalpy path/,/Sum/p'
 echo 'The line of the oxidant is what the regenerators give back: a credit, not heat of the'
 echo 'fuel. The sum is what the furnace gets.'

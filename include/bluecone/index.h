@@ -86,7 +86,7 @@ BC_API BC_MUST_USE bc_status bc_index_evaluate(size_t index, const bc_subject *o
  * Sources and failures are those of bc_index_evaluate(). */
 BC_API BC_MUST_USE bc_status bc_index_evaluate_all(const bc_subject *old_gas, const bc_subject *new_gas, bc_index out[], bc_error *err);
 
-/* The verdict in words: "ok", "caution", "not acceptable", "cannot judge"; never NULL. */
+/* The verdict in words: "ok", "caution", "broken", "cannot judge"; never NULL. */
 BC_API const char *bc_verdict_text(bc_verdict verdict);
 
 #ifdef __cplusplus

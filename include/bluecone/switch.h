@@ -94,7 +94,7 @@ typedef struct {
 BC_API BC_MUST_USE bc_status bc_switch_judge(const bc_subject *old_gas, const bc_subject *new_gas, const bc_burner *burner, double new_gas_k,
                                              bc_switch *result, bc_error *err);
 
-/* "takes it", "takes it after adjustment", "does not take it"; never NULL. */
+/* "the burner takes the new gas", the same with "after adjustment", or "the burner does not take the new gas"; never NULL. */
 BC_API const char *bc_switch_text(bc_switch_verdict verdict);
 
 #ifdef __cplusplus

@@ -111,7 +111,7 @@ static bool quotes_close(const char *value)
 static bc_status take_entry(scan *s, const char *text, const char *equals)
 {
     if (s->section[0] == '\0')
-        return refuse(s, "a key stands before the first section; start the file with [gas] or the section it belongs to");
+        return refuse(s, "a key stands before the first section; write the section above it, as [components] or [burner]");
     if (s->ini->count == ENTRIES_MAX)
         return refuse(s, "the file has more keys than any gas needs (512); is it the right file?");
     bc_ini_entry *entry = &s->ini->entries[s->ini->count];

@@ -166,6 +166,17 @@ double bc_unit_from_si(const bc_unit *unit, double si)
     return (si - unit->offset) / unit->factor;
 }
 
+/* The unit that people write where the SI one is meant, for an example. */
+static const char *usual_unit(const char *like)
+{
+    static const char *const USUAL[][2] = {{"Pa", "kPa"}, {"W", "kW"}, {"K", "C"}, {"m", "mm"}};
+
+    for (size_t i = 0; i < BC_COUNT(USUAL); i++)
+        if (strcmp(USUAL[i][0], like) == 0)
+            return USUAL[i][1];
+    return like;
+}
+
 bc_status bc_measure_parse(const char *text, const char *like, const char *bare, double *si, bc_error *err)
 {
     const char *rest = NULL;
@@ -177,7 +188,7 @@ bc_status bc_measure_parse(const char *text, const char *like, const char *bare,
     if (status != BC_OK)
         return status;
     if (*rest == '\0' && !bare)
-        return bc_fail(err, BC_ERR_USAGE, "'%s' has no unit; write one behind the number, as in 1%s", text, like);
+        return bc_fail(err, BC_ERR_USAGE, "'%s' has no unit; write one right behind the number, as %s%s", text, text, usual_unit(like));
     status = bc_unit_parse(like, &wanted, err);
     if (status != BC_OK)
         return status;

@@ -104,13 +104,20 @@ typedef struct {
     bool used; /* the next word was taken */
 } place;
 
+static bool takes_list(const option_row *row)
+{
+    return strstr(row->argument, ",...") || strcmp(row->argument, "LIST") == 0 || strncmp(row->argument, "GAS=", 4) == 0
+           || strncmp(row->argument, "WHAT=", 5) == 0;
+}
+
 static bc_status store(const command *c, arguments *a, size_t option, place *p, bc_error *err)
 {
     const option_row *row = &OPTIONS[option];
     const bool wants = row->argument[0] != '\0';
 
     if (a->value[option])
-        return bc_fail(err, BC_ERR_USAGE, "--%s stands twice; keep one of them", row->word);
+        return bc_fail(err, BC_ERR_USAGE, takes_list(row) ? "--%s stands twice; write its parts into one, parted by commas"
+                                                          : "--%s stands twice; keep one of them", row->word);
     if (!wants && p->behind)
         return bc_fail(err, BC_ERR_USAGE, "--%s takes no value", row->word);
     if (wants && !p->behind && !p->next)
@@ -172,12 +179,23 @@ static bc_status check_output(const command *c, const arguments *a, bc_error *er
     return BC_OK;
 }
 
+/* Names the first word of the usage line that is not there, without what may follow it in brackets. */
+static bc_status refuse_lack(const command *c, size_t given, bc_error *err)
+{
+    const char *lacking = c->usage;
+
+    for (size_t i = 0; i < given; i++)
+        lacking += strcspn(lacking, " ") + 1;
+    return bc_fail(err, BC_ERR_USAGE, "%.*s is missing: bluecone %s %s; see bluecone %s --help", (int)strcspn(lacking, " [.,"), lacking, c->word, c->usage,
+                   c->word);
+}
+
 static bc_status check_count(const command *c, const arguments *a, bc_error *err)
 {
     if (a->value[OPTION_help] || a->value[OPTION_version])
         return BC_OK;
     if (a->argument_count < c->least)
-        return bc_fail(err, BC_ERR_USAGE, "something is missing: bluecone %s %s; see bluecone %s --help", c->word, c->usage, c->word);
+        return refuse_lack(c, a->argument_count, err);
     if (a->argument_count > c->most)
         return bc_fail(err, BC_ERR_USAGE, "'%s' is one argument too many: bluecone %s %s", a->argument[c->most], c->word, c->usage);
     if (a->value[OPTION_json] && a->value[OPTION_csv])

@@ -85,7 +85,7 @@ static void verdict(report *r, const blend_case *c, const bc_aim *aim, bool insi
     else if (aim->reached)
         (void)snprintf(text, sizeof text, "%s is reached by %zu blends", aims, aim->count);
     else if (c->aims->limit_count == 1 && bc_limit_value(c->aims, 0, &gas, &value, NULL) == BC_OK)
-        (void)snprintf(text, sizeof text, "%s is out of reach; the nearest that these gases give is %.8g %s", aims, value, shown_unit(&c->aims->limits[0]));
+        (void)snprintf(text, sizeof text, "%s is out of reach; the nearest that these gases give is %.6g %s", aims, value, shown_unit(&c->aims->limits[0]));
     else
         (void)snprintf(text, sizeof text, "%s cannot be reached together; the nearest blend is shown", aims);
     const size_t used = strlen(text);
@@ -121,6 +121,8 @@ static bc_status fill(report *r, blend_case *c, const bc_aim *aim, bool *ok, bc_
         status = blend_sheet(r, c, aim->share[0], err);
     if (status != BC_OK)
         return status;
+    if (blend_has_terms(c) && aim->count == 1)
+        blend_cost(r, c, aim->share[0]);
     report_solutions(r, c, aim);
     for (size_t n = 0; n < shown; n++)
         blend_judge(r, c, c->count + n, &inside);

@@ -9,7 +9,6 @@
 #include <string.h>
 
 #define J_PER_MWH 3.6e9
-#define J_PER_GJ 1e9
 #define METHOD "SLSQP, several starts"
 
 typedef struct {
@@ -122,32 +121,6 @@ static void report_bindings(report *r, const blend_case *c, const best_blend *b)
     report_lead_with(r, table);
 }
 
-/* Cost and CO2 of the blend, as far as the parts state them. */
-static bc_status report_terms(report *r, const blend_case *c, const bc_optimum *o, bc_error *err)
-{
-    const slot where = {r, report_add_section(r, "terms", "Cost and carbon dioxide, per gross heat"), c->count};
-    bc_blend_terms t;
-    const bc_status status = bc_blend_terms_of(&c->mixer, c->offer, o->share, &t, err);
-    char per_mwh[32];
-    char per_gj[32];
-
-    if (status != BC_OK)
-        return status;
-    (void)snprintf(per_mwh, sizeof per_mwh, "%s/MWh", t.currency);
-    (void)snprintf(per_gj, sizeof per_gj, "%s/GJ", t.currency);
-    const plain_figure figures[] = {
-        {"co2-burning", "CO2 of burning, biogenic not counted", t.co2_burning_per_j * J_PER_GJ, "kg/GJ", 5, "carbon balance"},
-        {"co2-making", "CO2 of making", t.co2_making_per_j * J_PER_GJ, "kg/GJ", 5, "as stated"},
-        {"cost", "Cost", t.price_per_j * J_PER_MWH, per_mwh, 6, "as stated"},
-        {"cost-per-gj", "Cost", t.price_per_j * J_PER_GJ, per_gj, 6, "as stated"},
-    };
-
-    add_figures(&where, c->a, figures, t.has_co2 ? 2 : 1);
-    if (t.has_price)
-        add_figures(&where, c->a, figures + 2, 2);
-    return BC_OK;
-}
-
 static void verdict(report *r, const blend_case *c, const best_blend *b)
 {
     const bc_optimum *o = &b->optimum;
@@ -156,7 +129,7 @@ static void verdict(report *r, const blend_case *c, const best_blend *b)
     const double factor = objective_unit(c, b, unit, sizeof unit);
 
     if (o->feasible)
-        (void)snprintf(text, sizeof text, "least %s: %.6g %s%s; %zu of %zu starts end there", c->a->value[OPTION_least], o->objective * factor, unit,
+        (void)snprintf(text, sizeof text, "least %s: %.6g %s%s; found from %zu of %zu starting blends", c->a->value[OPTION_least], o->objective * factor, unit,
                        o->binding_count == 0 ? ", held by no limit" : "", o->agreed, o->starts);
     else
         (void)snprintf(text, sizeof text, "no blend of these gases keeps all limits of %s: %zu of them exclude each other; the blend shown breaks them least",
@@ -190,11 +163,11 @@ static bc_status fill(report *r, blend_case *c, const best_blend *b, bc_error *e
     if (status != BC_OK)
         return status;
     report_bindings(r, c, b);
-    status = report_terms(r, c, o, err);
+    blend_cost(r, c, o->share);
     blend_judge(r, c, c->count, &inside);
     warn_terms(r, c, b);
     verdict(r, c, b);
-    return status;
+    return BC_OK;
 }
 
 int blend_best(blend_case *c, report *r)

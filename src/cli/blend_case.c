@@ -106,8 +106,10 @@ static bc_status check_question(const blend_case *c, bc_error *err)
         return bc_fail(err, BC_ERR_USAGE, "free shares need --aim, or --least with --within; see bluecone blend --help");
     if (a->value[OPTION_show] && c->swept == NO_PART)
         return bc_fail(err, BC_ERR_USAGE, "--show is of a sweep; write a range as 0..30/5 in front of a gas, or use bluecone get");
-    if (a->value[OPTION_flow] && !a->value[OPTION_least])
-        return bc_fail(err, BC_ERR_USAGE, "--flow counts with --least alone: it turns --max-flow into a limit of the share");
+    if ((a->value[OPTION_flow] || a->value[OPTION_max_flow]) && !a->value[OPTION_least])
+        return bc_fail(err, BC_ERR_USAGE, "--flow and --max-flow count with --least alone: together they limit the share of a part");
+    if ((a->value[OPTION_price] || a->value[OPTION_co2]) && c->swept != NO_PART)
+        return bc_fail(err, BC_ERR_USAGE, "--price and --co2 are of one blend, not of a sweep; write one share in the place of the range");
     return BC_OK;
 }
 
@@ -118,6 +120,8 @@ bc_status blend_open(blend_case *c, const arguments *a, bc_error *err)
     c->count = a->argument_count / 2;
     if (a->argument_count % 2 != 0 || c->count > BC_BLEND_PARTS_MAX)
         return bc_fail(err, BC_ERR_USAGE, "shares and gases stand in pairs, up to %d of them: bluecone blend 80 pipeline-h 20 hydrogen", BC_BLEND_PARTS_MAX);
+    if (c->count < 2)
+        return bc_fail(err, BC_ERR_USAGE, "one gas alone is no blend; add the other, as rest pipeline-h");
     for (size_t i = 0; i < c->count; i++)
         c->word[i] = a->argument[2 * i + 1];
     bc_status status = blend_take_shares(c, err);

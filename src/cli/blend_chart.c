@@ -28,15 +28,10 @@ static size_t open_panel(report *r, const sweep_table *t, const blend_case *c, c
 {
     char x[BC_NAME_MAX + 32];
     char text[BC_WORD_MAX];
-    char title[2 * BC_WORD_MAX];
-    char state[64];
+    char title[SWEEP_HEADING_MAX];
 
     (void)snprintf(text, sizeof text, "%s", column->id);
-    (void)snprintf(title, sizeof title, "%s", column->id);
-    if (column->is_limit) {
-        state_text(&c->within->references[c->within->limits[column->index].reference].state, state, sizeof state);
-        (void)snprintf(title, sizeof title, "%s, at %s", column->id, state);
-    }
+    sweep_heading(c, column, title, sizeof title);
     (void)snprintf(x, sizeof x, "%.80s, by %s", blend_part_name(c, c->swept), bc_blend_basis_text(c->by));
     const size_t chart = report_add_chart(r, text, title);
 

@@ -1,6 +1,7 @@
 /* SPDX-License-Identifier: MIT */
 /* blend_crossing.c - the shares at which a sweep leaves and enters the limits of a contract. */
 #include "cli/blend_sweep.h"
+#include "cli/contract_report.h"
 
 #include <stdio.h>
 #include <string.h>
@@ -13,7 +14,7 @@ static void add_rows(report *r, size_t table, const sweep_table *t, const blend_
     char state[64];
     const size_t count = bc_line_crossings(&t->line, c->within, index, bound, place, BC_CROSSING_MAX);
 
-    state_text(&c->within->references[limit->reference].state, state, sizeof state);
+    contract_state_text(c->within, limit, state, sizeof state);
     for (size_t i = 0; i < count; i++) {
         report_add_text(r, table, limit->id);
         report_add_text(r, table, state);

@@ -1,6 +1,7 @@
 /* SPDX-License-Identifier: MIT */
 /* blend_limits.c - blends against the limits of a contract. */
 #include "cli/blend_report.h"
+#include "cli/contract_report.h"
 
 #include <math.h>
 #include <stdio.h>
@@ -23,7 +24,7 @@ static void add_limit(report *r, const blend_case *c, size_t index, size_t gas, 
 
     (void)snprintf(id, sizeof id, "%s", limit->id);
     (void)snprintf(unit, sizeof unit, "%s", limit->unit);
-    state_text(&c->within->references[limit->reference].state, state, sizeof state);
+    contract_state_text(c->within, limit, state, sizeof state);
     if (judged)
         (void)snprintf(verdict, sizeof verdict, "%s", f.inside ? "inside" : "outside");
     else

@@ -72,6 +72,18 @@ static void warn_sum(report *r, const blend_case *c)
     report_add_warning(r, text);
 }
 
+/* 0.2 beside a rest is 0.2 %: a fifth may have been meant. */
+static void warn_fraction(report *r, const blend_case *c)
+{
+    char text[160];
+
+    if (c->rest == NO_PART || !(c->fixed > 0.0) || c->fixed > 0.01)
+        return;
+    (void)snprintf(text, sizeof text, "Shares are per cent: the numbers add up to %.6g %%, and the rest is %.6g %%.", 100.0 * c->fixed,
+                   100.0 * (1.0 - c->fixed));
+    report_add_warning(r, text);
+}
+
 /* Half of a blend's scatter is none: a part that states nothing adds nothing. */
 static void warn_scatter(report *r, const blend_case *c)
 {
@@ -90,6 +102,7 @@ bc_status blend_sheet(report *r, const blend_case *c, const double share[], bc_e
     subjects_report(&c->parts, r);
     subjects_tell_uncertainty(&c->parts, r);
     warn_sum(r, c);
+    warn_fraction(r, c);
     warn_scatter(r, c);
     (void)snprintf(title, sizeof title, "Recipe, mixed by %s", bc_blend_basis_text(c->by));
     blend_recipe_table(r, c, share, "recipe", title);
@@ -116,6 +129,8 @@ int blend_mix(blend_case *c, report *r)
         blend_close(c);
         return complain(&err);
     }
+    if (blend_has_terms(c))
+        blend_cost(r, c, share);
     blend_judge(r, c, c->count, &inside);
     blend_verdict(r, c, c->count, inside);
     return blend_answer(r, c, share, inside ? 0 : 1);

@@ -17,6 +17,12 @@ bc_status blend_sheet(report *r, const blend_case *c, const double share[], bc_e
 /* A table of the parts with their shares on every basis; it leads. */
 void blend_recipe_table(report *r, const blend_case *c, const double share[], const char *id, const char *title);
 
+/* Whether a part states a price or the CO2 of its making. */
+bool blend_has_terms(const blend_case *c);
+
+/* Cost and CO2 of the blend that stands behind the parts, as far as they state them; a warning where they cannot be added up. */
+void blend_cost(report *r, const blend_case *c, const double share[]);
+
 /* Judges the gas with an index of the subjects by the limits of --within: rows, and *inside. Without
  * --within nothing is done. A limit that cannot be judged is not kept. */
 void blend_judge(report *r, const blend_case *c, size_t gas, bool *inside);

@@ -36,7 +36,7 @@ static bc_status refuse_share(const char *word, bc_error *err)
     char shown[BC_WORD_MAX];
 
     bc_text_show(shown, sizeof shown, word);
-    return bc_fail(err, BC_ERR_USAGE, "'%s' is no share; write per cent as 20, rest, free, or a range as 0..30/5", shown);
+    return bc_fail(err, BC_ERR_USAGE, "'%s' stands where a share belongs, in front of its gas; write per cent as 20, rest, free, or a range as 0..30/5", shown);
 }
 
 static bc_status check_range(const share_word *s, const char *word, bc_error *err)

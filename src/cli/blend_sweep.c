@@ -3,6 +3,7 @@
 #include "base/error_internal.h"
 #include "base/text.h"
 #include "cli/blend_sweep.h"
+#include "cli/contract_report.h"
 #include "cli/sheet.h"
 
 #include <math.h>
@@ -175,6 +176,17 @@ static bc_status evaluate(sweep_table *t, const blend_case *c, bc_error *err)
     return status;
 }
 
+void sweep_heading(const blend_case *c, const sweep_column *column, char *text, size_t size)
+{
+    char state[64] = "";
+
+    if (column->is_limit)
+        contract_state_text(c->within, &c->within->limits[column->index], state, sizeof state);
+    const char *at = state[0] == 'b' ? ", " : ", at "; /* "by mass" is no state */
+
+    (void)snprintf(text, size, "%s%s%s", column->id, state[0] == '\0' ? "" : at, state);
+}
+
 static void add_table(report *r, const sweep_table *t, const blend_case *c)
 {
     char title[BC_NAME_MAX + 64];
@@ -183,8 +195,12 @@ static void add_table(report *r, const sweep_table *t, const blend_case *c)
     const size_t table = report_add_table(r, "sweep", title);
 
     report_add_column(r, table, "share", "share", "%");
-    for (size_t k = 0; k < t->count; k++)
-        report_add_column(r, table, t->column[k].id, t->column[k].id, strcmp(t->column[k].unit, "1") == 0 ? "" : t->column[k].unit);
+    for (size_t k = 0; k < t->count; k++) {
+        char heading[SWEEP_HEADING_MAX];
+
+        sweep_heading(c, &t->column[k], heading, sizeof heading);
+        report_add_column(r, table, t->column[k].id, heading, strcmp(t->column[k].unit, "1") == 0 ? "" : t->column[k].unit);
+    }
     for (size_t i = 0; i < sweep_points(t); i++) {
         report_add_number(r, table, 100.0 * sweep_share_at(t, sweep_place(t, i)), -1);
         for (size_t k = 0; k < t->count; k++) {

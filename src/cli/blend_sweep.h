@@ -27,6 +27,10 @@ typedef struct {
     double *value;          /* point by point; NaN where the gas has no such figure */
 } sweep_table;
 
+/* The name of a column; a limit has a state of its own, which need not be that in the head of the report. */
+#define SWEEP_HEADING_MAX (BC_WORD_MAX + 80)
+void sweep_heading(const blend_case *c, const sweep_column *column, char *text, size_t size);
+
 /* The points of the table: their number, their place on the line (0..1), the share there. */
 size_t sweep_points(const sweep_table *t);
 double sweep_place(const sweep_table *t, size_t point);

@@ -144,8 +144,9 @@ static bc_status take_oxidant(const arguments *a, burn_setup *s, bc_error *err)
 }
 
 /* 60% (relative), dew:12C, wet-bulb:18C. */
-static bc_status water_of(const char *text, const bc_burn_case *c, double *x_water, bc_error *err)
+static bc_status water_of(const char *text, burn_setup *s, double *x_water, bc_error *err)
 {
+    const bc_burn_case *c = &s->physics;
     double t_k = 0.0;
     double relative = 0.0;
     const char *rest = "";
@@ -156,10 +157,12 @@ static bc_status water_of(const char *text, const bc_burn_case *c, double *x_wat
         if (status == BC_OK && t_k > c->oxidant_k)
             return bc_fail(err, BC_ERR_USAGE, "a dew point of %.6g C is warmer than the air, %.6g C, which would drop its water", t_k - 273.15,
                            c->oxidant_k - 273.15);
+        (void)snprintf(s->water_from, sizeof s->water_from, "from a dew point of %.6g C", t_k - 273.15);
         return status == BC_OK ? bc_humidity_dew_point(t_k, c->p_pa, x_water, err) : status;
     }
     if (strncmp(text, "wet-bulb:", 9) == 0) {
         status = bc_measure_parse(text + 9, "K", "C", &t_k, err);
+        (void)snprintf(s->water_from, sizeof s->water_from, "from a wet bulb at %.6g C", t_k - 273.15);
         return status == BC_OK ? bc_humidity_wet_bulb(c->oxidant_k, t_k, c->p_pa, x_water, err) : status;
     }
     status = bc_number_prefix(text, &relative, &rest, err);
@@ -167,6 +170,7 @@ static bc_status water_of(const char *text, const bc_burn_case *c, double *x_wat
         return status;
     if (status != BC_OK || (strcmp(rest, "%") != 0 && *rest != '\0'))
         return bc_fail(err, BC_ERR_USAGE, "'%.40s' is not understood; write 60%%, dew:12C or wet-bulb:18C", text);
+    (void)snprintf(s->water_from, sizeof s->water_from, "from %.6g %% relative humidity", relative);
     return bc_humidity_relative(relative / 100.0, c->oxidant_k, c->p_pa, x_water, err);
 }
 
@@ -178,7 +182,7 @@ static bc_status take_humidity(const arguments *a, burn_setup *s, bc_error *err)
 
     if (!text)
         return BC_OK;
-    bc_status status = water_of(text, &s->physics, &x_water, err);
+    bc_status status = water_of(text, s, &x_water, err);
 
     if (status == BC_OK)
         status = bc_humidity_apply(&s->physics.oxidant, x_water, &wet, err);
@@ -232,6 +236,7 @@ static bc_status take_lambda(const arguments *a, burn_setup *s, bc_error *err)
 
     status = take_share(a, OPTION_excess, "excess", &fraction, err);
     s->physics.lambda = 1.0 + fraction;
+    (void)snprintf(s->lambda_from, sizeof s->lambda_from, "from %.6g %% excess", 100.0 * fraction);
     return status;
 }
 
@@ -243,10 +248,14 @@ static bc_status fuel_rate(const char *text, const bc_subject *fuel, double *mol
     const char *rest = "";
     double value = 0.0;
     bc_unit unit;
+    bc_unit power;
     bc_status status = bc_number_prefix(text, &value, &rest, err);
 
-    if (status == BC_OK)
-        status = bc_unit_parse(rest, &unit, err);
+    if (status != BC_OK)
+        return status;
+    status = bc_unit_parse(rest, &unit, err);
+    if (status == BC_ERR_USAGE)
+        return bc_fail(err, BC_ERR_USAGE, "'%.40s' is no fuel flow; write it as 120kg/h, 300m3/h, 10000scf/h or 10kmol/h", text);
     if (status != BC_OK)
         return status;
     if (!(value > 0.0))
@@ -262,7 +271,9 @@ static bc_status fuel_rate(const char *text, const bc_subject *fuel, double *mol
             return BC_OK;
         }
     }
-    return bc_fail(err, BC_ERR_USAGE, "'%.40s' is no fuel flow; write it as 120kg/h, 300m3/h or 10kmol/h", text);
+    if (bc_unit_parse("W", &power, NULL) == BC_OK && bc_unit_matches(&unit, &power))
+        return bc_fail(err, BC_ERR_USAGE, "'%.40s' is a power, no fuel flow; state useful heat by --duty, or the fuel as 300m3/h", text);
+    return bc_fail(err, BC_ERR_USAGE, "'%.40s' is no fuel flow; write it as 120kg/h, 300m3/h, 10000scf/h or 10kmol/h", text);
 }
 
 static bc_status take_rate(const arguments *a, const bc_subject *fuel, burn_setup *s, bc_error *err)
@@ -353,6 +364,8 @@ static bc_status take_readings(const arguments *a, burn_setup *s, bc_error *err)
         s->reading_count++;
         list += length + (list[length] == ',');
     }
+    if (s->reading_count > 0 && !a->value[OPTION_flue_o2] && !a->value[OPTION_excess] && !a->value[OPTION_lambda])
+        return bc_fail(err, BC_ERR_USAGE, "--reading belongs to the oxygen it was read at; state that, as --flue-o2 3.2 (or --excess, --lambda)");
     return BC_OK;
 }
 

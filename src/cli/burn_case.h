@@ -24,6 +24,7 @@ typedef struct {
     bc_burn_case physics;
     char oxidant[160];      /* in words */
     char oxidant_path[BC_FILE_MAX]; /* of the file it comes from; "" for none */
+    char water_from[48];    /* "from 60 % relative humidity"; "" without --humidity */
     bool is_air;            /* dry or humid air, nothing else */
     size_t remark_count;    /* what was changed in the composition of the oxidant, or is strange about it */
     char remarks[BC_REMARK_MAX][BC_REMARK_BYTES];

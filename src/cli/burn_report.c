@@ -42,14 +42,14 @@ static void add_case(report *r, const arguments *a, const burn_case_result *c)
 {
     const bc_burn_case *p = &c->setup.physics;
     const size_t table = report_add_table(r, "case", "Case");
-    const bool humidified = a->value[OPTION_humidity] != NULL;
+    const char *water_from = c->setup.water_from;
     char text[64];
 
     report_lead_with(r, table);
     report_add_column(r, table, "what", "what", "");
     report_add_column(r, table, "value", "value", "");
     report_add_column(r, table, "how", "how", "");
-    add_case_row(r, table, "oxidant", c->setup.oxidant, humidified ? "stated" : or_default(a, OPTION_oxidant));
+    add_case_row(r, table, "oxidant", c->setup.oxidant, *water_from != '\0' ? water_from : or_default(a, OPTION_oxidant));
     (void)snprintf(text, sizeof text, "%.6g", p->lambda);
     add_case_row(r, table, "air factor lambda", text, c->setup.lambda_from);
     (void)snprintf(text, sizeof text, "%.6g C", p->fuel_k - T0_K);
@@ -72,7 +72,7 @@ static void add_oxidant(report *r, const arguments *a, const burn_case_result *c
 {
     const bc_burn *b = &c->burn;
     const double lambda = c->setup.physics.lambda;
-    const slot where = {r, report_add_section(r, "oxidant", "Oxidant"), 0};
+    const slot where = {r, report_add_section(r, "oxidant", "Oxidant, volumes as ideal gases"), 0};
     const plain_figure figures[] = {
         {"oxygen-need", "Oxygen for complete combustion", b->demand.oxygen_mol, "m3/m3", 5, "atom balance"},
         {"oxygen-need-mass", "Oxygen for complete combustion, mass", b->demand.oxygen_kg, "kg/kg", 5, "atom balance"},
@@ -302,7 +302,7 @@ static void add_heat(report *r, const arguments *a, const burn_case_result *c, c
     const bc_heat_path *p = &c->burn.path;
     const bc_heat_yield *y = &c->burn.yield;
     const double fuel_volume = c->fuel->value.molar_volume_m3_per_mol;
-    const slot where = {r, report_add_section(r, "heat", "Heat by the path (enthalpy change; minus is heat given off)"), 0};
+    const slot where = {r, report_add_section(r, "heat", "Enthalpy path in steps (minus is heat given off)"), 0};
     const plain_figure figures[] = {
         {"path-fuel", "Fuel to 25 C", p->fuel_j * 1e-3, "kJ/mol", 6, "NASA/TP-2002-211556"},
         {"path-oxidant", "Oxidant to 25 C", p->oxidant_j * 1e-3, "kJ/mol", 6, "NASA/TP-2002-211556"},
@@ -408,6 +408,11 @@ static void warn_case(report *r, const burn_case_result *c)
         (void)snprintf(text, sizeof text, "Oxidant: %s", c->setup.remarks[i]);
         report_add_warning(r, text);
     }
+    if (c->setup.physics.exit_k > b->flame.t_k) {
+        (void)snprintf(text, sizeof text, "The flue gas leaves at %.5g C, hotter than the adiabatic flame, %.5g C: heat would have to be added; check --flue-temp.",
+                       c->setup.physics.exit_k - T0_K, b->flame.t_k - T0_K);
+        report_add_warning(r, text);
+    }
     if (!b->rich && b->dew.exists && c->setup.physics.exit_k < b->dew.t_k && !(b->path.condensate_mol > 0.0))
         report_add_warning(r, "The flue gas leaves below 0 C: water would come out as ice, which is not computed; all of it is counted as vapour.");
     if (b->has_acid && !b->acid.in_range)
@@ -446,7 +451,7 @@ bc_status burn_report(report *r, const arguments *a, const burn_case_result *c, 
     add_case(r, a, c);
     add_oxidant(r, a, c);
     add_flame(r, a, c);
-    add_mixture(r, "flame-composition", "Flame in equilibrium", &c->burn.flame);
+    add_mixture(r, "flame-composition", "Flame in equilibrium, at its temperature (not what leaves the stack)", &c->burn.flame);
     if (c->burn.rich)
         add_rich(r, a, c);
     else

@@ -70,6 +70,8 @@ static bool wants_shares(const arguments *a)
 static bc_status fill(report *r, const switch_case *c, bc_error *err)
 {
     subjects_report(c->s, r);
+    report_name_role(r, OLD_GAS, "old");
+    report_name_role(r, NEW_GAS, "new");
     report_add_input(r, c->burner.path);
     switch_burner(r, c);
     switch_gases(r, c);

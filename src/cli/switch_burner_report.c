@@ -121,7 +121,7 @@ static void add_remedy(report *r, const switch_case *c)
     const plain_figure airs[] = {
         {"air-factor", two_airs ? "Air flow, heat by the orifice" : "Air flow then", m->air, "1", 4, "atom balance"},
         {"air-factor-by-pressure", "Air flow, heat by the pressure", m->air_by_pressure, "1", 4, "atom balance"},
-        {"air-factor-alone", "Or air flow alone", m->air_alone, "1", 4, "atom balance"},
+        {"air-factor-alone", "Or air alone, heat as it comes", m->air_alone, "1", 4, "atom balance"},
         {"lambda-target", "Air factor restored", m->lambda_target, "1", 4, "atom balance"},
     };
 
@@ -137,7 +137,7 @@ static void add_remedy(report *r, const switch_case *c)
 static void add_adjusted(report *r, const switch_case *c)
 {
     const bc_burner_response *x = &c->result.on_adjusted;
-    const slot where = {r, report_add_section(r, "adjusted", "New gas with that"), NEW_GAS};
+    const slot where = {r, report_add_section(r, "adjusted", "New gas once heat input and air factor are restored"), NEW_GAS};
     const plain_figure figures[] = {
         {"adjusted-heat-input-ratio", "Heat input, of old", PERCENT * x->heat_ratio, "%", 4, "flow of the control"},
         {"adjusted-lambda", "Air factor", x->lambda, "1", 4, "flow of the control"},
@@ -186,9 +186,15 @@ static bc_status respond_under(const switch_case *c, bc_control control, bc_burn
 static void add_control(report *r, size_t table, const switch_case *c, bc_control control)
 {
     bc_burner_response x;
+    char meaning[160];
+    const bool responds = respond_under(c, control, &x) == BC_OK;
 
     report_add_text(r, table, bc_control_word(control));
-    if (respond_under(c, control, &x) == BC_OK) {
+    (void)snprintf(meaning, sizeof meaning, "%s", bc_control_meaning(control));
+    if (responds && x.trim_at_end)
+        (void)snprintf(meaning, sizeof meaning, "trim of the %s at its end of %.3g %%: flue oxygen not held", control == BC_CONTROL_TRIM_AIR ? "air" : "gas",
+                       PERCENT * c->burner.trim_range);
+    if (responds) {
         report_add_number(r, table, PERCENT * x.heat_ratio, 2);
         report_add_number(r, table, x.lambda, 3);
         report_add_number(r, table, PERCENT * x.o2_dry, 2);
@@ -196,7 +202,7 @@ static void add_control(report *r, size_t table, const switch_case *c, bc_contro
         for (int i = 0; i < 3; i++)
             report_add_text(r, table, "-");
     }
-    report_add_text(r, table, bc_control_meaning(control));
+    report_add_text(r, table, meaning);
 }
 
 void switch_controls(report *r, const switch_case *c)
@@ -207,7 +213,7 @@ void switch_controls(report *r, const switch_case *c)
     const size_t table = report_add_table(r, "controls", title);
 
     report_add_column(r, table, "control", "control", "");
-    report_add_column(r, table, "heat-input", "heat input", "%");
+    report_add_column(r, table, "heat-input", "heat, of old", "%");
     report_add_column(r, table, "lambda", "lambda", "");
     report_add_column(r, table, "flue-o2", "dry O2", "%");
     report_add_column(r, table, "meaning", "which is", "");

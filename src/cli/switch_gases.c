@@ -39,7 +39,7 @@ static void add_corrected(report *r, const switch_case *c, size_t section)
             continue;
         const plain_figure figures[] = {
             {"fuel-temperature", "Gas at the burner", t_k - T0_K, "C", 5, "stated, or default"},
-            {"wobbe-gross-corrected", "Wobbe gross, so warm", corrected * 1e-6, "MJ/m3", 5, "W sqrt(T0/T)"},
+            {"wobbe-gross-corrected", "Wobbe gross at that", corrected * 1e-6, "MJ/m3", 5, "W sqrt(T0/T)"},
             {"wobbe-modified", "Modified Wobbe, net", modified / MODIFIED_UNIT, "MJ/(m3 K^0.5)", 5, "Hi/sqrt(d T)"},
         };
 

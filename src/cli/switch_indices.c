@@ -21,8 +21,8 @@ void switch_limit_text(const bc_index_limits *l, char *text, size_t size)
 static const char *range_text(const bc_index *i)
 {
     if (!i->has_value)
-        return "none";
-    return i->in_range ? "in" : "OUT";
+        return "-";
+    return i->in_range ? "yes" : "NO";
 }
 
 static bool has_limit(const bc_index *i)
@@ -51,7 +51,7 @@ static void add_index(report *r, size_t table, const bc_index_row *row, const bc
 static void add_indices(report *r, const switch_case *c)
 {
     static const char *const COLUMNS[][2] = {{"index", "index"},       {"value", "value"}, {"preferable", "preferable"},
-                                             {"acceptable", "acceptable"}, {"range", "range"}, {"verdict", "verdict"}};
+                                             {"acceptable", "acceptable"}, {"range", "in range"}, {"verdict", "verdict"}};
     const size_t table = report_add_table(r, "indices", "Interchangeability of the new gas, burners set on the old one");
 
     for (size_t i = 0; i < BC_COUNT(COLUMNS); i++)

@@ -73,6 +73,8 @@ void switch_warnings(report *r, const switch_case *c)
 {
     warn_gas(r, c);
     warn_open(r, c);
+    if (c->has_fuel_k && !c->has_burner)
+        report_add_warning(r, "--fuel-temp enters no verdict without --burner: the published indices compare gases of one temperature.");
     if (c->has_burner) {
         warn_air(r, c);
         burner_note_orifice(r, &c->set);

@@ -79,6 +79,8 @@ static bc_status take_measured_at(reader *r, const bc_ini_entry *e)
     const char *comma = strchr(e->value, ',');
     const size_t length = comma ? (size_t)(comma - e->value) : strlen(e->value);
 
+    if (strchr(e->value, '/'))
+        return refuse(r, e, "measured_at is one temperature and one pressure, at which the volumes were measured; write it as 15 C, 101.325 kPa");
     if (!bc_text_copy(part, sizeof part, e->value, length))
         return refuse(r, e, "measured_at is too long; write it as 15 C, 101.325 kPa");
     if (bc_measure_parse(part, "K", "C", &r->c->measured_at_k, r->err) != BC_OK)

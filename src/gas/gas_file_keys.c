@@ -38,13 +38,14 @@ bc_status gas_file_choice(const reader *r, const bc_ini_entry *e, const choice *
 
 static bc_status refuse_key(const reader *r, const bc_ini_entry *e, const file_key keys[], size_t count)
 {
-    size_t best = 0;
+    char list[160] = "";
 
-    for (size_t i = 0; i < count; i++)
-        if (bc_text_unlikeness(e->key, keys[i].key) < bc_text_unlikeness(e->key, keys[best].key))
-            best = i;
-    return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown key '%s' in [%s]; the nearest known one is '%s'", e->key, e->section,
-                      keys[best].key);
+    for (size_t i = 0; i < count; i++) {
+        const size_t used = strlen(list);
+
+        (void)snprintf(list + used, sizeof list - used, "%s%s", i ? ", " : "", keys[i].key);
+    }
+    return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown key '%s' in [%s]; known are %s", e->key, e->section, list);
 }
 
 bc_status gas_file_key(reader *r, const bc_ini_entry *e, const file_key keys[], size_t count)

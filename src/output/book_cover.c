@@ -45,12 +45,9 @@ static void put_gases(book_sheet *s, const report *r)
 {
     for (size_t i = 0; i < r->gas_count; i++) {
         const report_gas *gas = &r->gases[i];
-        char letter[TEXT_LETTERS_MAX] = "";
-        char word[TEXT_LETTERS_MAX + 8];
+        char word[TEXT_LEAD_MAX];
 
-        if (r->gas_count > 1)
-            text_letter(i, letter);
-        (void)snprintf(word, sizeof word, "Gas%s%s", *letter == '\0' ? "" : " ", letter);
+        text_gas_lead(r, i, word);
         put_fact(s, word, gas->name);
         if (*gas->source != '\0' && strcmp(gas->source, gas->name) != 0)
             put_fact(s, "", gas->source);

@@ -78,7 +78,7 @@ static char *row_notes(const section *of, size_t row)
 
         if (i == SECTION_NONE || of->r->results[i].note == NULL)
             continue;
-        text_letter(gas, letter);
+        text_letter(of->r, gas, letter);
         fprintf(out, "%s%s: %s", ftell(out) > 0 ? "; " : "", letter, of->r->results[i].note);
     }
     if (bc_memory_stream_close(out, &text))
@@ -98,7 +98,7 @@ static void put_gas_heads(book_sheet *s, const section *of)
 
         if (!section_has_gas(of, gas))
             continue;
-        text_letter(gas, letter);
+        text_letter(of->r, gas, letter);
         (void)snprintf(head, sizeof head, "%s: %.100s", letter, of->r->gases[gas].name);
         book_put_head(s, column++, true, head);
         (void)snprintf(head, sizeof head, "u of %s (k = 1)", letter);

@@ -127,7 +127,7 @@ static void put_gas_head(page *p, size_t gas)
 {
     char letter[TEXT_LETTERS_MAX];
 
-    text_letter(gas, letter);
+    text_letter(p->r, gas, letter);
     fprintf(p->out, "<th scope=\"col\" class=\"n\">%s <span>", letter);
     page_element(p, "bdi", p->r->gases[gas].name);
     fputs("</span></th>", p->out);

@@ -118,11 +118,8 @@ void page_number(page *p, const char *number, const char *u, int fraction)
 
 void page_gas_word(page *p, size_t gas)
 {
-    char letter[TEXT_LETTERS_MAX];
+    char lead[TEXT_LEAD_MAX];
 
-    text_letter(gas, letter);
-    if (p->r->gas_count > 1)
-        fprintf(p->out, "Gas %s", letter);
-    else
-        fputs("Gas", p->out);
+    text_gas_lead(p->r, gas, lead);
+    fputs(lead, p->out);
 }

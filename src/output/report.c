@@ -50,6 +50,7 @@ void report_free_gas(report_gas *gas)
     free(gas->fractions);
     free(gas->name);
     free(gas->source);
+    free(gas->role);
 }
 
 void report_free_result(report_result *result)

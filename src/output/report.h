@@ -25,6 +25,7 @@ typedef struct {
 typedef struct {
     char *name;
     char *source;             /* file, bundled name or literal */
+    char *role;               /* a word in small letters for it, as "old"; NULL: its letter stands for it */
     report_fraction *fractions;
     size_t fraction_count;
     double sum_before;        /* of the entries as written, as a fraction of one */
@@ -205,6 +206,7 @@ void report_close(report *r);
 bool report_ok(const report *r);
 void report_set_state(report *r, const report_state *state);
 size_t report_add_gas(report *r, const char *name, const char *source, double sum_before);
+void report_name_role(report *r, size_t gas, const char *role); /* in the place of its letter; once */
 void report_add_fraction(report *r, size_t gas, const char *id, double x);
 void report_add_input(report *r, const char *path); /* the same path twice is kept once; "" is none */
 void report_identify_input(report *r, size_t input, const char *name, const char *sha256); /* once */

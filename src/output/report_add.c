@@ -33,6 +33,12 @@ static bool is_there(const report *r, size_t index, size_t count)
     return index < count;
 }
 
+void report_name_role(report *r, size_t gas, const char *role)
+{
+    if (is_there(r, gas, r->gas_count) && r->gases[gas].role == NULL)
+        r->gases[gas].role = report_copy(r, role);
+}
+
 void report_add_fraction(report *r, size_t gas, const char *id, double x)
 {
     if (!is_there(r, gas, r->gas_count))

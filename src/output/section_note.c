@@ -80,7 +80,7 @@ static void write_letters(const section *s, size_t number, FILE *out)
 
         if (!is_about(s, number, gas))
             continue;
-        text_letter(gas, letter);
+        text_letter(s->r, gas, letter);
         fprintf(out, "%s%s", separator, letter);
         separator = ", ";
     }

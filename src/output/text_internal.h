@@ -27,9 +27,13 @@ typedef struct {
 } text_shape;
 void text_paragraph(text_page *page, text_shape shape, const char *text);
 
-/* The letter of a gas on the page: A, B, ... Z, AA, ... */
+/* The letter of a gas on the page, A, B, ... Z, AA, ..., or the word for its role. */
 #define TEXT_LETTERS_MAX 16
-void text_letter(size_t gas, char out[TEXT_LETTERS_MAX]);
+void text_letter(const report *r, size_t gas, char out[TEXT_LETTERS_MAX]);
+
+/* What stands in front of its name: "Gas", where there are several "Gas B", or "Old gas". */
+#define TEXT_LEAD_MAX (TEXT_LETTERS_MAX + 8)
+void text_gas_lead(const report *r, size_t gas, char out[TEXT_LEAD_MAX]);
 
 /* All sections with their results, and all tables. */
 void text_sections(text_page *page, const report *r);

@@ -75,12 +75,12 @@ static void add_columns(grid *g, const limit_columns *c)
     grid_add_column(g, GRID_LEFT, CELL_FOLD, "verdict", "");
 }
 
-static void add_limit(grid *g, const limit_columns *c, const report_limit *limit, const render_style *style)
+static void add_limit(grid *g, const limit_columns *c, const report *r, const report_limit *limit, const render_style *style)
 {
     char letter[TEXT_LETTERS_MAX] = "";
 
     if (limit->gas != REPORT_NO_GAS)
-        text_letter(limit->gas, letter);
+        text_letter(r, limit->gas, letter);
     grid_add_cell(g, limit->id);
     grid_add_cell(g, letter);
     grid_add_cell(g, strcmp(limit->unit, "1") == 0 ? "" : limit->unit);
@@ -109,6 +109,6 @@ void text_limits(text_page *page, const report *r)
 
     add_columns(&g, &c);
     for (size_t i = 0; i < r->limit_count; i++)
-        add_limit(&g, &c, &r->limits[i], page->style);
+        add_limit(&g, &c, r, &r->limits[i], page->style);
     grid_print(&g, page);
 }

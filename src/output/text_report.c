@@ -26,16 +26,14 @@ static void print_head(text_page *page, const report *r)
         text_paragraph(page, (text_shape){.lead = "State:", .hang = HEAD_HANG}, r->state.text);
 }
 
-/* A gas with the letter that stands for it where there are several. */
 static void print_gas(text_page *page, const report *r, size_t gas)
 {
-    char letter[TEXT_LETTERS_MAX] = "";
-    char lead[TEXT_LETTERS_MAX + 8];
+    char word[TEXT_LEAD_MAX];
+    char lead[TEXT_LEAD_MAX + 1];
     const report_gas *of = &r->gases[gas];
 
-    if (r->gas_count > 1)
-        text_letter(gas, letter);
-    snprintf(lead, sizeof lead, "Gas%s%s:", *letter == '\0' ? "" : " ", letter);
+    text_gas_lead(r, gas, word);
+    snprintf(lead, sizeof lead, "%s:", word);
     text_paragraph(page, (text_shape){.lead = lead, .hang = HEAD_HANG}, of->name);
     if (*of->source != '\0' && strcmp(of->source, of->name) != 0)
         text_paragraph(page, (text_shape){.indent = HEAD_HANG, .hang = HEAD_HANG}, of->source);

@@ -98,7 +98,7 @@ static void add_gas_column(grid *g, const section *s, size_t gas)
 
     if (name != NULL)
         shorten_name(name);
-    text_letter(gas, letter);
+    text_letter(s->r, gas, letter);
     grid_add_column(g, GRID_POINT, 0, letter, name);
     g->failed = g->failed || name == NULL;
     free(name);

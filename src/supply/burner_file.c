@@ -13,6 +13,8 @@
 #include <stdio.h>
 #include <string.h>
 
+#define LIST_MAX 256 /* bytes of all keys of a section */
+
 /* The file being read. */
 typedef struct {
     const char *path;
@@ -52,20 +54,28 @@ static void put_choice(bc_burner *b, const key_row *row, unsigned choice)
         memcpy((char *)b + row->member, &choice, sizeof choice);
 }
 
-static bc_status take_word(const reader *r, const key_row *row, const bc_ini_entry *e)
+/* "fixed, pneumatic, ...", as much as there is room for. */
+static void list_words(const char *const words[], char *list, size_t size)
 {
-    char list[160] = "";
-    char shown[48];
-
-    for (unsigned i = 0; row->words[i]; i++) {
+    list[0] = '\0';
+    for (unsigned i = 0; words[i]; i++) {
         const size_t used = strlen(list);
 
+        (void)snprintf(list + used, size - used, "%s%s", i ? ", " : "", words[i]);
+    }
+}
+
+static bc_status take_word(const reader *r, const key_row *row, const bc_ini_entry *e)
+{
+    char list[LIST_MAX];
+    char shown[48];
+
+    for (unsigned i = 0; row->words[i]; i++)
         if (bc_text_same(row->words[i], e->value)) {
             put_choice(r->burner, row, i);
             return BC_OK;
         }
-        (void)snprintf(list + used, sizeof list - used, "%s%s", i ? ", " : "", row->words[i]);
-    }
+    list_words(row->words, list, sizeof list);
     bc_text_show(shown, sizeof shown, e->value);
     return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "%s = %s is not known; write one of %s", e->key, shown, list);
 }
@@ -111,21 +121,44 @@ static bc_status take_measure(const reader *r, const key_row *row, const bc_ini_
     return BC_OK;
 }
 
+/* The keys of a section; "" when there is no such section. */
+static void list_keys(const char *section, char *list, size_t size)
+{
+    list[0] = '\0';
+    for (size_t i = 0; i < bc_burner_key_count(); i++) {
+        const bc_burner_key *key = bc_burner_key_at(i);
+        const size_t used = strlen(list);
+
+        if (strcmp(key->section, section) == 0)
+            (void)snprintf(list + used, size - used, "%s%s", used ? ", " : "", key->key);
+    }
+}
+
+/* The sections that have such a key, as "[air] or [flue]"; "" when there is none. */
+static void list_sections(const char *key, char *list, size_t size)
+{
+    list[0] = '\0';
+    for (size_t i = 0; i < bc_burner_key_count(); i++) {
+        const size_t used = strlen(list);
+
+        if (bc_text_same(bc_burner_key_at(i)->key, key))
+            (void)snprintf(list + used, size - used, "%s[%s]", used ? " or " : "", bc_burner_key_at(i)->section);
+    }
+}
+
+/* Names are not guessed by their looks: 'power' is nearer to 'name' than to 'input'. */
 static bc_status refuse_key(const reader *r, const bc_ini_entry *e)
 {
-    const key_row *best = NULL;
+    char list[LIST_MAX];
+    char elsewhere[64];
 
-    for (size_t i = 0; i < bc_burner_key_count(); i++) {
-        const key_row *row = burner_key_row(i);
-
-        if (strcmp(row->shown.section, e->section) == 0
-            && (!best || bc_text_unlikeness(e->key, row->shown.key) < bc_text_unlikeness(e->key, best->shown.key)))
-            best = row;
-    }
-    if (!best)
+    list_keys(e->section, list, sizeof list);
+    list_sections(e->key, elsewhere, sizeof elsewhere);
+    if (list[0] == '\0')
         return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown section [%s]; known are [burner], [air], [flue] and [limits]", e->section);
-    return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown key '%s' in [%s]; the nearest known one is '%s'", e->key, e->section,
-                      best->shown.key);
+    if (elsewhere[0] != '\0')
+        return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "'%s' stands in [%s]; it belongs to %s", e->key, e->section, elsewhere);
+    return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "unknown key '%s' in [%s]; known are %s", e->key, e->section, list);
 }
 
 static bc_status take_entry(const reader *r, const bc_ini_entry *e)
@@ -214,6 +247,17 @@ static bc_status check_orifices(const reader *r, const bc_ini *ini)
     return bc_fail_at(r->err, BC_ERR_INPUT, r->path, e->line, "orifices = %.40s is no whole number; count them", e->value);
 }
 
+/* Without them nothing can be said, and no default would be right for most. */
+static bc_status check_stated(const reader *r, const char *key)
+{
+    char list[LIST_MAX];
+
+    if (burner_states(r->burner, "burner", key))
+        return BC_OK;
+    list_words(burner_key_row(burner_key_find("burner", key))->words, list, sizeof list);
+    return bc_fail_at(r->err, BC_ERR_INPUT, r->path, 0, "[burner] does not state its %s; write '%s = ' and one of %s (bluecone-burner(5))", key, key, list);
+}
+
 static bc_status read_document(const reader *r, const bc_ini *ini)
 {
     static const char *const NEEDED[] = {"type", "control"};
@@ -222,9 +266,7 @@ static bc_status read_document(const reader *r, const bc_ini *ini)
     for (size_t i = 0; i < bc_ini_count(ini) && status == BC_OK; i++)
         status = take_entry(r, bc_ini_at(ini, i));
     for (size_t i = 0; i < BC_COUNT(NEEDED) && status == BC_OK; i++)
-        if (!burner_states(r->burner, "burner", NEEDED[i]))
-            status = bc_fail_at(r->err, BC_ERR_INPUT, r->path, 0, "[burner] states no '%s': what happens hangs on it; write one (bluecone-burner(5))",
-                                NEEDED[i]);
+        status = check_stated(r, NEEDED[i]);
     if (status == BC_OK)
         status = check_air(r, ini);
     if (status == BC_OK)

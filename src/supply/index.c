@@ -67,7 +67,7 @@ const char *bc_verdict_text(bc_verdict verdict)
     static const char *const TEXTS[] = {
         [BC_VERDICT_OK] = "ok",
         [BC_VERDICT_CAUTION] = "caution",
-        [BC_VERDICT_NOT_ACCEPTABLE] = "not acceptable",
+        [BC_VERDICT_NOT_ACCEPTABLE] = "broken",
         [BC_VERDICT_CANNOT_JUDGE] = "cannot judge",
     };
     const size_t i = (size_t)verdict;

@@ -44,9 +44,9 @@ bool bc_danger_matters(bc_danger danger, bc_burner_type type)
 const char *bc_switch_text(bc_switch_verdict verdict)
 {
     static const char *const TEXTS[] = {
-        [BC_SWITCH_TAKES] = "takes it",
-        [BC_SWITCH_AFTER_ADJUSTMENT] = "takes it after adjustment",
-        [BC_SWITCH_NO] = "does not take it",
+        [BC_SWITCH_TAKES] = "the burner takes the new gas",
+        [BC_SWITCH_AFTER_ADJUSTMENT] = "the burner takes the new gas after adjustment",
+        [BC_SWITCH_NO] = "the burner does not take the new gas",
     };
     const size_t i = (size_t)verdict;
 

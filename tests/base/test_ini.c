@@ -156,7 +156,7 @@ static void sections_that_are_repeated_empty_or_ill_formed_are_refused(void **st
 static void keys_that_are_misplaced_or_ill_formed_are_refused(void **state)
 {
     static const hostile FILES[] = {
-        {"before a section", "methane = 91\n[gas]\nname = x\n", 0, 1, "before the first section|[gas]"},
+        {"before a section", "methane = 91\n[gas]\nname = x\n", 0, 1, "before the first section|[burner]"},
         {"no equals sign", GAS "[components]\nmethane 91\n", 0, 4, "neither [section] nor key = value|put '='"},
         {"a colon instead", GAS "[components]\nmethane: 91\n", 0, 4, "put '='"},
         {"a colon and an equals sign", GAS "[components]\nmethane:x = 91\n", 0, 4, "cannot hold ':'"},
@@ -196,7 +196,7 @@ static void files_without_anything_to_read_are_refused(void **state)
 
     (void)state;
     assert_each_refused(FILES, COUNT(FILES));
-    assert_file_refused("empty", write_scratch("", 0), BC_ERR_INPUT, 0, "the file is empty|bluecone-composition(5)");
+    assert_file_refused("empty", write_scratch("", 0), BC_ERR_INPUT, 0, "the file is empty|bluecone-composition(5)|bluecone-burner(5)");
 }
 
 static void a_backslash_at_the_end_of_a_line_is_refused(void **state)

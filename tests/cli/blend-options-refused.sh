@@ -4,6 +4,9 @@ refused 50 g20 50 g25 --least cost
 refused 50 g20 50 g25 --aim hhv=30
 refused 50 g20 50 g25 --show hhv
 refused 50 g20 50 g25 --flow 5MW
+refused 50 g20 50 g25 --max-flow 1=5MW
+refused 50 g20 50 g25 --price 1=30EUR/MWh --price 2=20EUR/MWh
+refused 0..5 g20 rest g25 --price 1=30EUR/MWh
 refused free g20 free g25 --aim hhv=30,wobbe-gross=40
 refused free g20 free g25 --aim hhv
 refused free g20 free g25 --aim hhb=30

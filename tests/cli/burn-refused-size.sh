@@ -34,6 +34,7 @@ refused --reading soot=1ppm
 refused --reading nox=-1ppm
 refused --reading co=1ppm,co=1ppm,co=1ppm,co=1ppm,co=1ppm,co=1ppm,co=1ppm,co=1ppm,co=1ppm
 refused --reading nox=1ppm --reference-o2 21
+refused --reading nox=1ppm
 refused --reference-o2 -3
 refused --reading nox=1ppm --oxidant oxygen --lambda 1.2
 refused --lambda 0.9 --duty 1MW

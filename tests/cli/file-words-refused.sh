@@ -5,6 +5,9 @@ echo "exit $?" >&2
 printf '[gas]\nmoistur = dry\n[components]\nmethane = 100\n' >sample.ini
 bluecone get hhv sample.ini
 echo "exit $?" >&2
+printf '[gas]\nmeasured_at = 25/0\n[components]\nmethane = 100\n' >sample.ini
+bluecone get hhv sample.ini
+echo "exit $?" >&2
 printf '[gass]\nname = x\n[components]\nmethane = 100\n' >sample.ini
 bluecone get hhv sample.ini
 echo "exit $?" >&2

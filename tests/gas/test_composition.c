@@ -540,7 +540,7 @@ static void unknown_sections_keys_and_choices_suggest_what_there_is(void **state
 {
     (void)state;
     assert_text_refused("[gas]\nname = x\n[component]\nmethane = 100\n", 4, "unknown section [component]|[components]");
-    assert_text_refused("[gas]\nfamly = natural\n[components]\nmethane = 100\n", 2, "unknown key 'famly'|'family'");
+    assert_text_refused("[gas]\nfamly = natural\n[components]\nmethane = 100\n", 2, "unknown key 'famly'|known are name, family");
     assert_text_refused("[gas]\nbasis = weight\n[components]\nmethane = 100\n", 2, "basis = weight|mole, volume, mass");
     assert_text_refused("[gas]\nunit = permille\n[components]\nmethane = 100\n", 2, "percent, fraction, ppm");
     assert_text_refused("[gas]\nmoisture = wet\n[components]\nmethane = 100\n", 2, "dry, as-analysed, saturated");
@@ -554,7 +554,7 @@ static void a_measuring_state_without_sense_is_refused(void **state)
     static const struct {
         const char *value, *words;
     } ROWS[] = {
-        {"15,5 C", "does not fit"}, {"warm", "not a number"}, {"-60 C", "-50 to 100 C"}, {"15 kPa", "does not fit"},
+        {"25/0", "one temperature and one pressure"}, {"15,5 C", "does not fit"}, {"warm", "not a number"}, {"-60 C", "-50 to 100 C"}, {"15 kPa", "does not fit"},
         {"15 C, 101", "no unit"},   {"15 C, 0.5 kPa", "1 kPa to 1000 bar"}, {"120 C", "-50 to 100 C"}, {"15 C, 2000 bar", "1 kPa to 1000 bar"},
         {"15 C, 101.325 kPa, dry", "unknown unit"}, {"", "missing"}, {"288.15 M", "unknown unit"}, {"-50.1 C", "-50 to 100 C"},
         {"100.1 C", "-50 to 100 C"}, {"15 C, 0.999 kPa", "1 kPa to 1000 bar"}, {"15 C, 1000.1 bar", "1 kPa to 1000 bar"},

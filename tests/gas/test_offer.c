@@ -120,7 +120,7 @@ static void bad_terms_of_supply_are_refused_with_their_line(void **state)
         const char *text, *words;
     } ROWS[] = {
         {"[components]\nmethane = 100\n[supply]\nprice = 61\n", "32 EUR/MWh"},
-        {"[components]\nmethane = 100\n[supply]\nprize = 61 EUR/MWh\n", "unknown key 'prize' in [supply]|'price'"},
+        {"[components]\nmethane = 100\n[supply]\nprize = 61 EUR/MWh\n", "unknown key 'prize' in [supply]|known are price"},
         {"[components]\nmethane = 100\n[supply]\ncarbon = green\n", "fossil, biogenic"},
         {"[components]\nmethane = 100\n[supply]\nmax_flow = -1 m3/h\n", "above zero"},
     };

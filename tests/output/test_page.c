@@ -220,6 +220,20 @@ static void gases_stand_side_by_side_with_their_letters(void **state)
     report_close(&r);
 }
 
+static void a_role_stands_in_the_place_of_a_letter(void **state)
+{
+    static const char *const WORDS[] = {"<dt>Old gas</dt>", "<dt>Gas B</dt>", "class=\"n\">old <span><bdi>text</bdi>", "class=\"n\">B <span>"};
+    report r;
+
+    (void)state;
+    open_full(&r, "text", 3, false);
+    report_name_role(&r, 0, "old");
+    char *page = page_of(&r);
+    assert_in_order(page, WORDS, COUNT(WORDS));
+    free(page);
+    report_close(&r);
+}
+
 static void many_gases_are_a_page_that_lies_across(void **state)
 {
     report r;
@@ -502,6 +516,7 @@ int main(void)
         cmocka_unit_test(tables_have_captions_and_scopes),
         cmocka_unit_test(a_figure_has_label_value_unit_uncertainty_and_method),
         cmocka_unit_test(gases_stand_side_by_side_with_their_letters),
+        cmocka_unit_test(a_role_stands_in_the_place_of_a_letter),
         cmocka_unit_test(many_gases_are_a_page_that_lies_across),
         cmocka_unit_test(digits_asked_for_are_kept_and_quiet_is_quiet),
         cmocka_unit_test(a_long_fraction_is_printed_whole_without_alignment),
