@@ -228,6 +228,25 @@ static bc_status take_bases(log_header *h, int line, bc_error *err)
     return status;
 }
 
+/* The component whose name a heading all but spells; NULL for none. A slip changes a third of a word at most; formulas
+ * are too short to tell. */
+static const char *nearly_named(const char *name)
+{
+    const size_t slip = strlen(name) / 3;
+    const char *best = NULL;
+    size_t least = slip + 1;
+
+    for (size_t i = 0; i < bc_species_count(); i++) {
+        const size_t unlikeness = bc_text_unlikeness(name, bc_species_id(i));
+
+        if (unlikeness < least) {
+            least = unlikeness;
+            best = bc_species_id(i);
+        }
+    }
+    return best;
+}
+
 void log_header_tell_ignored(log_header *h)
 {
     char text[BC_REMARK_BYTES] = "Columns of the log that are ignored: ";
@@ -238,8 +257,12 @@ void log_header_tell_ignored(log_header *h)
 
         if (h->columns[i].kind != LOG_IGNORED)
             continue;
-        if (used + strlen(h->columns[i].name) + 8 < sizeof text)
-            (void)snprintf(text + used, sizeof text - used, "%s%s", told > 0 ? ", " : "", h->columns[i].name);
+        const char *meant = nearly_named(h->columns[i].name);
+        char one[2 * LOG_CELL_MAX];
+
+        (void)snprintf(one, sizeof one, "%s%s%s%s", h->columns[i].name, meant ? " (is it " : "", meant ? meant : "", meant ? "?)" : "");
+        if (used + strlen(one) + 8 < sizeof text)
+            (void)snprintf(text + used, sizeof text - used, "%s%s", told > 0 ? ", " : "", one);
         else if (strcmp(text + used - 3, "...") != 0)
             (void)snprintf(text + used, sizeof text - used, " ...");
         told++;
@@ -266,7 +289,7 @@ bc_status log_header_take(log_header *h, char (*cells)[LOG_CELL_MAX], size_t cou
     if (status != BC_OK)
         return status;
     if (log_header_count(h, LOG_COMPONENT) == 0)
-        return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "no column is a component; the first row of a log names them, as in time,methane,ethane");
+        return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "no column is a component; the first row of a log names them, as in time,methane,ethane; for one without that row: stream --no-header --columns");
     if (log_header_count(h, LOG_TIME) > 2)
         return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "more than two columns of time; keep one, or a date and a time");
     return take_bases(h, line, err);

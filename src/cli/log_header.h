@@ -49,7 +49,7 @@ bc_status log_header_take(log_header *h, char (*cells)[LOG_CELL_MAX], size_t cou
 /* Columns of a kind. */
 size_t log_header_count(const log_header *h, log_column_kind kind);
 
-/* Adds a remark that names the columns that nothing is made of. */
+/* Adds a remark that names the columns that nothing is made of, and the component that one may have been meant for. */
 void log_header_tell_ignored(log_header *h);
 
 /* Sets what shares without a unit are in: "mass %", "ppm". False: no such unit. */

@@ -64,6 +64,8 @@ static bc_status take_names(stream_plan *p, char (*cells)[LOG_CELL_MAX], size_t 
 
     for (size_t i = 0; i < count && i < LOG_COLUMNS_MAX; i++)
         memcpy(p->names[i], cells[i], LOG_CELL_MAX);
+    if (status == BC_OK)
+        log_header_tell_ignored(&p->header);
     return status;
 }
 

@@ -12,6 +12,7 @@
 #include <string.h>
 
 #define CALIBRATION_NEAR 5e-4 /* mole fraction: analysers reproduce their calibration gas to a few hundredths of a per cent */
+#define SUM_OFF 0.01         /* of one: sums of an analysis within it are passed without a question; common practice */
 #define MIX 0x9E3779B97F4A7C15U /* 2^64 over the golden ratio, as of Knuth's multiplicative hashing */
 
 void stream_put(stream_batch *b, const char *text, size_t length)
@@ -163,7 +164,10 @@ static bool make_gas(const stream_plan *p, const stream_reading *r, bc_gas *gas,
         return false;
     }
     if (!(r->sum >= BC_SUM_MIN && r->sum <= BC_SUM_MAX)) {
-        (void)bc_fail(err, BC_ERR_INPUT, "its components add up to %.6g %%, not to 100 %%", 100.0 * r->sum);
+        const bool fractions = 100.0 * r->sum >= BC_SUM_MIN && 100.0 * r->sum <= BC_SUM_MAX;
+
+        (void)bc_fail(err, BC_ERR_INPUT, "its components add up to %.6g %%, not to 100 %%%s", 100.0 * r->sum,
+                      fractions ? "; if they are fractions of one, add --shares fraction" : "");
         return false;
     }
     return bc_gas_from_amounts(r->amounts, gas, err) == BC_OK && bc_subject_make(&p->reference, gas, NULL, subject, err) == BC_OK;
@@ -194,6 +198,8 @@ void stream_evaluate(const stream_plan *p, stream_batch *b, stream_reading *r, s
     }
     if (p->keeps && r->flow >= 0.0)
         take_power(p, r->flow, &gas, mark);
+    if (fabs(r->sum - 1.0) > SUM_OFF + 1e-9) /* 99 and 101 % themselves, as added up, are within */
+        r->flags |= 1U << STREAM_off;
     if (p->has_calibration && is_calibration(p, &gas))
         r->flags |= 1U << STREAM_calibration;
     mark->wobbe = subject.value.wobbe_gross_j_per_m3;

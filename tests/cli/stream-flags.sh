@@ -10,6 +10,9 @@
     for minute in 23 24 25 26 27 28 29 30 31 32 33 34; do echo "2026-03-02T00:$minute,91.1,3.0,5.9"; done
     echo 'yesterday,91.0,3.0,6.0'
     echo '2026-03-02T00:35,100,0,0'
+    echo '2026-03-02T00:36,91.1,3.0,4.9'
+    echo '2026-03-02T00:37,91.1,3.0,4.8'
+    echo '2026-03-02T00:38,92.2,3.0,5.9'
 } >log.csv
 bluecone stream --add wobbe-gross --digits 5 --calibration methane=100 log.csv
 # the night when the clock is put back, and that when it is put on; a clock with a zone has no such hour
