@@ -146,6 +146,19 @@ static bc_status write_header(stream_case *s, size_t length, bc_error *err)
     return status;
 }
 
+/* Rows in a file that is called a page or a workbook would be taken for a spoilt one. */
+static bc_status check_ending(const stream_plan *p, bc_error *err)
+{
+    const char *path = p->a->value[OPTION_output];
+    const render_form own = p->form == STREAM_CSV ? RENDER_CSV : RENDER_JSON;
+    render_form form = own;
+
+    if (p->drops || !path || !render_form_of(path, &form) || form == own || form == RENDER_TEXT)
+        return BC_OK;
+    return bc_fail(err, BC_ERR_USAGE, "-o %.200s: rows come out in the form of the log, so name it %s; with --summary the ending gives the form", path,
+                   own == RENDER_CSV ? ".csv" : ".ndjson");
+}
+
 static bc_status begin(stream_case *s, bc_error *err)
 {
     size_t header = 0;
@@ -153,6 +166,8 @@ static bc_status begin(stream_case *s, bc_error *err)
 
     if (status == BC_OK)
         status = stream_find_columns(&s->plan, s->in.rest, s->in.rest_length, s->in.ended, &header, err);
+    if (status == BC_OK)
+        status = check_ending(&s->plan, err);
     if (status == BC_OK && s->plan.keeps)
         status = stream_sum_open(&s->sum, &s->plan, s->by, err);
     if (status == BC_OK && !s->plan.drops) {

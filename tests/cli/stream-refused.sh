@@ -19,6 +19,9 @@ try bluecone stream "$log" --unit kWh/kg
 try bluecone stream "$log" --calibration no-such-gas
 try bluecone stream "$log" --contract no-such-contract
 try bluecone stream "$log" --against g20
+try bluecone stream "$log" -o rows.html; ls
+try bluecone stream "$log" -o rows.json
+printf '{"methane":100}' | try bluecone stream -o rows.csv
 printf '' | try bluecone stream
 printf 'time,pressure\n1,2\n' | try bluecone stream
 printf 'methane,CH4\n1,2\n' | try bluecone stream
