@@ -57,6 +57,8 @@ void log_warn(const log_case *l, report *r)
 
     for (size_t i = 0; i < l->header.remark_count; i++)
         report_add_warning(r, l->header.remarks[i]);
+    if (log_header_flow_note(&l->header))
+        report_add_warning(r, log_header_flow_note(&l->header));
     warn_absent(l, r);
     if (l->flows_missing == 0)
         return;

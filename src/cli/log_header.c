@@ -271,6 +271,15 @@ void log_header_tell_ignored(log_header *h)
         add_remark(h, text);
 }
 
+const char *log_header_flow_note(const log_header *h)
+{
+    for (size_t i = 0; i < h->column_count; i++)
+        if (h->columns[i].kind == LOG_FLOW && h->columns[i].flow.of == BC_DIM_VOLUME && !h->columns[i].flow.has_metering)
+            return "The flow is counted in cubic metres of the metering state above: those of an uncorrected meter, or of another state, "
+                   "give another heat; flow [Nm3/h] or [kg/h] leaves no question.";
+    return NULL;
+}
+
 void log_header_start(log_header *h, const char *path)
 {
     memset(h, 0, sizeof *h);

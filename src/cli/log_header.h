@@ -52,6 +52,9 @@ size_t log_header_count(const log_header *h, log_column_kind kind);
 /* Adds a remark that names the columns that nothing is made of, and the component that one may have been meant for. */
 void log_header_tell_ignored(log_header *h);
 
+/* What has to be known of the flow's cubic metres; NULL where there is no flow, or its unit leaves no question. */
+const char *log_header_flow_note(const log_header *h);
+
 /* Sets what shares without a unit are in: "mass %", "ppm". False: no such unit. */
 bool log_header_shares(log_header *h, const char *word);
 

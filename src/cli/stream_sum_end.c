@@ -34,6 +34,8 @@ static void open_report(report *r, const stream_plan *p, const tally *t, const c
             report_contract_inputs(r, p->contract);
         for (size_t i = 0; i < p->header.remark_count; i++)
             report_add_warning(r, p->header.remarks[i]);
+        if (log_header_flow_note(&p->header))
+            report_add_warning(r, log_header_flow_note(&p->header));
     }
     if (is_outside(t))
         report_set_caution(r, CAUTION);
