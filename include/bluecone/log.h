@@ -55,11 +55,11 @@ typedef struct {
     double longest_from_s;
 } bc_log_excursions;
 
-/* Distribution of a limited figure, each value weighed with the time it held; with one row that row. */
+/* Distribution of a limited figure, each value weighted by the time it held; with one row that row. */
 typedef struct {
     double min, p5, median, mean, p95, max;
     bool has_energy_mean;
-    double energy_mean;      /* each value weighed with its gross heat */
+    double energy_mean;      /* each value weighted by its gross heat */
 } bc_log_distribution;
 
 /* Opens a log. The contract must outlive it.

@@ -196,7 +196,7 @@ static bc_status add_distributions(const log_case *l, report *r, const bc_log_co
                                      {"median", "median", ""}, {"mean", "mean", ""}, {"p95", "95 %", ""}, {"max", "max", ""},
                                      {"energy-mean", "mean by heat", ""}};
     const bc_contract *c = l->c->contract;
-    const size_t table = open_table(r, "distribution", "Distribution, weighed with time", COLUMNS, BC_COUNT(COLUMNS) - (cover->energy_j > 0.0 ? 0 : 1));
+    const size_t table = open_table(r, "distribution", "Distribution, weighted by time", COLUMNS, BC_COUNT(COLUMNS) - (cover->energy_j > 0.0 ? 0 : 1));
 
     for (size_t i = 0; i < c->limit_count; i++) {
         bc_log_distribution d;

@@ -156,7 +156,7 @@ static void name_distribution(const tally *t, const tally_cover *cover, char *te
     for (size_t i = 0; i < tally_plan_of(t)->figure_count; i++)
         worst = fmax(worst, tally_accuracy(t, i));
     (void)snprintf(text, size, "Distribution, %s; percentiles are within %.2g %% of their value",
-                   cover->timed ? "weighed with time" : "each row alike", 100.0 * worst);
+                   cover->timed ? "weighted by time" : "each row alike", 100.0 * worst);
 }
 
 static void add_distribution(report *r, const tally *t, const tally_cover *cover)

@@ -112,18 +112,18 @@ bool bc_log_value(const bc_log *log, size_t row, size_t limit, double *value)
 /* A value and its weight. */
 typedef struct {
     double value, weight;
-} weighed;
+} weighted;
 
 static int compare(const void *a, const void *b)
 {
-    const double x = ((const weighed *)a)->value;
-    const double y = ((const weighed *)b)->value;
+    const double x = ((const weighted *)a)->value;
+    const double y = ((const weighted *)b)->value;
 
     return (x > y) - (x < y);
 }
 
 /* The least value that a share of the weight does not exceed. */
-static double quantile(const weighed all[], size_t count, double total, double share)
+static double quantile(const weighted all[], size_t count, double total, double share)
 {
     double below = 0.0;
 
@@ -136,7 +136,7 @@ static double quantile(const weighed all[], size_t count, double total, double s
 }
 
 /* The rows that have the figure; the sum of their weights and, by energy, of their values. */
-static size_t gather(const bc_log *log, size_t limit, weighed all[], double *total, bc_log_distribution *d)
+static size_t gather(const bc_log *log, size_t limit, weighted all[], double *total, bc_log_distribution *d)
 {
     size_t count = 0;
     double sum = 0.0;
@@ -152,7 +152,7 @@ static size_t gather(const bc_log *log, size_t limit, weighed all[], double *tot
         const double value = log_value(log, i, limit);
         const double weight = log->step_s > 0.0 ? row->held_s : 1.0;
 
-        all[count++] = (weighed){value, weight};
+        all[count++] = (weighted){value, weight};
         *total += weight;
         sum += weight * value;
         heat += row->power_w * weight;
@@ -168,7 +168,7 @@ bc_status bc_log_distribute(const bc_log *log, size_t limit, bc_log_distribution
 {
     bc_log_distribution out = {.mean = 0.0};
     double total = 0.0;
-    weighed *all = malloc((log->count + 1) * sizeof *all);
+    weighted *all = malloc((log->count + 1) * sizeof *all);
 
     if (!all)
         return bc_fail(err, BC_ERR_MEMORY, "not enough memory for the distribution of %zu rows", log->count);

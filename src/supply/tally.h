@@ -133,14 +133,14 @@ typedef struct {
 void tally_covers(const tally *t, tally_cover *cover);
 uint64_t tally_flagged(const tally *t, size_t flag);
 
-/* A figure over all or over a period; weighed with time. What is not there is zero. */
+/* A figure over all or over a period; weighted by time. What is not there is zero. */
 typedef struct {
     uint64_t rows;               /* that have the figure */
     double held;                 /* s, or rows */
     bool has_mean;               /* its rows hold any time */
     double mean, sd;             /* of the population of moments: no n - 1 */
     bool has_energy_mean;
-    double energy_mean;          /* weighed with gross heat */
+    double energy_mean;          /* weighted by gross heat */
     double min, max;
     bool min_timed, max_timed;
     double min_s, max_s;         /* the earliest of equal ones */
