@@ -7,6 +7,7 @@
 #include "bluecone/index.h"
 #include "bluecone/quantity.h"
 #include "gas/species_index.h"
+#include "supply/quantity_meant.h"
 
 #include <math.h>
 #include <stdio.h>
@@ -157,6 +158,20 @@ static bool find_figure(const char *word, bc_limit *limit)
     return false;
 }
 
+/* A word of the trade for another id, or for what a composition does not tell, must not be led astray. */
+static bc_status refuse_word(const char *word, bc_error *err)
+{
+    const char *meant = quantity_meant(word);
+    char folded[BC_WORD_MAX];
+
+    if (meant)
+        return bc_fail(err, BC_ERR_INPUT, "'%s' is no quantity, component or group; write %s", word, meant);
+    if (bc_text_fold(folded, sizeof folded, word) && strstr(folded, "dewpoint"))
+        return bc_fail(err, BC_ERR_INPUT, "'%s' cannot be judged: no dew point of the gas itself is computed; leave the limit out and check it by other means",
+                       word);
+    return bc_fail(err, BC_ERR_INPUT, "'%s' is no quantity, component or group; the nearest known word is '%s'", word, nearest(word));
+}
+
 bc_status limit_find(const char *word, bc_limit *limit, bc_error *err)
 {
     size_t species = 0;
@@ -168,7 +183,7 @@ bc_status limit_find(const char *word, bc_limit *limit, bc_error *err)
     if (group_members(word, limit->weight))
         return BC_OK;
     if (bc_species_find(word, &species, NULL) != BC_OK)
-        return bc_fail(err, BC_ERR_INPUT, "'%s' is no quantity, component or group; the nearest known word is '%s'", word, nearest(word));
+        return refuse_word(word, err);
     (void)limit_members(word, limit->weight);
     (void)snprintf(limit->id, sizeof limit->id, "%s", bc_species_id(species));
     return BC_OK;

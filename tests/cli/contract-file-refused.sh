@@ -11,3 +11,8 @@ try '[limit hydrogen]\nmax = 3\nbasis = weight\n'
 try '[limit hydrogen]\nmax = 3\nedition = 2020\n'
 try '[limit wobbe-ratio]\nmin = 0.95\n'
 sed -n '/^Limits/,/^$/p' out.txt
+# words of the trade are led to the id they stand for, gross and net; what no composition tells is said to be none
+for word in GCV NCV Hu Hs PCI CV 'specific gravity' 'Wobbe index' 'water dew point' methne; do try "[limit $word]\nmin = 3\n"; done
+bluecone get NCV g20; echo $?
+try ''
+try '; nothing\n'
