@@ -22,7 +22,7 @@ static bc_status take_list(const char *list, bc_printed *p, bc_error *err)
 
         if (!equals || !bc_text_copy(id, sizeof id, list, (size_t)(equals - list))
             || !bc_text_copy(text, sizeof text, equals + 1, length - (size_t)(equals - list) - 1))
-            return bc_fail(err, BC_ERR_USAGE, "--printed: write figures as hhv=41.21MJ/m3,relative-density=0.609");
+            return bc_fail(err, BC_ERR_USAGE, "--printed: write figures as hhv=41.21MJ/m3,relative-density=0.609, with decimal points");
         status = bc_printed_add(p, id, text, err);
         list += length + (list[length] == ',');
     }
@@ -78,7 +78,7 @@ static void add_rows(report *r, const bc_printed *p, const bc_fits *fits, const 
 
         report_add_column(r, table, id, id, unit);
     }
-    report_add_column(r, table, "worst", "worst, in half digits", "");
+    report_add_column(r, table, "worst", "worst, halves of last digit", "");
     for (size_t k = 0; k < fits->count; k++) {
         char text[140];
 
@@ -106,17 +106,19 @@ static void conclude(report *r, const bc_printed *p, const bc_fits *fits, const 
     const char *unit = first->fit != BC_FIT_NONE ? misprinted(p, first) : NULL;
     char text[600];
     char state[140];
+    char others[100] = "and no other state";
 
     describe(first, state, sizeof state);
+    if (fits->explain > 1)
+        (void)snprintf(others, sizeof others, "but %zu other state%s as well: more figures or digits would tell", fits->explain - 1,
+                       fits->explain > 2 ? "s" : "");
     if (first->fit == BC_FIT_NONE)
         (void)snprintf(text, sizeof text, "%.100s: no state explains all printed figures; the nearest, %s, misses one by %.3g halves of its last digit",
                        gas, state, first->worst);
     else if (first->fit == BC_FIT_UNCERTAINTY)
-        (void)snprintf(text, sizeof text, "%.100s: the printed figures agree within the uncertainty of the analysis with %s; other states that do: %zu", gas,
-                       state, fits->explain - 1);
+        (void)snprintf(text, sizeof text, "%.100s: the printed figures fit %s within the uncertainty of the analysis, %s", gas, state, others);
     else
-        (void)snprintf(text, sizeof text, "%.100s: the printed figures are those of %s; other states that explain them within their digits: %zu", gas,
-                       state, fits->explain - 1);
+        (void)snprintf(text, sizeof text, "%.100s: the printed figures fit %s within their digits, %s", gas, state, others);
     const size_t used = strlen(text);
 
     if (unit)
