@@ -23,7 +23,7 @@ static void describe_side(const bc_side_standing *side, const char *unit, char *
 
 bc_status worst_standings(worst_case *w, report *r, bc_error *err)
 {
-    const size_t table = report_add_table(r, "standing", "Limits: idle ones no allowed gas reaches, open ones the ranges let be broken");
+    const size_t table = report_add_table(r, "standing", "Which limits bind: idle, no allowed gas reaches it; open, the ranges alone would let it be broken by so much");
 
     report_add_column(r, table, "limit", "limit", "");
     report_add_column(r, table, "min", "min", "");
