@@ -84,6 +84,18 @@ void contract_limits_alone(report *r, const contract_case *c)
         add_row(r, c, i, REPORT_NO_GAS, NULL);
 }
 
+/* Whether a limit on a component or group is kept only since the analysis lists nothing of it. */
+static bool is_absent(const bc_limit *limit, const subject *gas)
+{
+    double there = 0.0;
+
+    if (limit->kind == BC_LIMIT_QUANTITY || limit->kind == BC_LIMIT_INDEX || limit->has_min)
+        return false;
+    for (size_t s = 0; s < bc_species_count(); s++)
+        there += limit->weight[s] * gas->loaded.gas.x[s];
+    return there <= 0.0;
+}
+
 /* An analysis without a component shows compliance only if the component was looked for. */
 static void warn_absent(report *r, const contract_case *c, const subject *gas)
 {
@@ -93,13 +105,8 @@ static void warn_absent(report *r, const contract_case *c, const subject *gas)
     for (size_t i = 0; i < c->contract->limit_count; i++) {
         const bc_limit *limit = &c->contract->limits[i];
         const size_t used = strlen(list);
-        double there = 0.0;
 
-        if (limit->kind == BC_LIMIT_QUANTITY || limit->kind == BC_LIMIT_INDEX || limit->has_min)
-            continue;
-        for (size_t s = 0; s < bc_species_count(); s++)
-            there += limit->weight[s] * gas->loaded.gas.x[s];
-        if (there <= 0.0)
+        if (is_absent(limit, gas))
             (void)snprintf(list + used, sizeof list - used, "%s%s", used > 0 ? ", " : "", limit->id);
     }
     if (list[0] == '\0')
@@ -194,7 +201,14 @@ static void describe_gas(const contract_case *c, const subject *gas, const judge
         {t->likely, "; kept, though within uncertainty: ", is_likely},
     };
 
-    (void)snprintf(text, size, "%.100s keeps %zu of %zu limits", gas->loaded.name, t->kept + t->likely, c->contract->limit_count);
+    size_t absent = 0;
+
+    for (size_t i = 0; i < c->contract->limit_count; i++)
+        absent += is_absent(&c->contract->limits[i], gas);
+    const int kept = snprintf(text, size, "%.100s keeps %zu of %zu limits", gas->loaded.name, t->kept + t->likely, c->contract->limit_count);
+
+    if (absent > 0 && kept > 0)
+        (void)snprintf(text + kept, size - (size_t)kept, ", %zu of them on what the analysis does not list", absent);
     for (size_t i = 0; i < sizeof LISTS / sizeof *LISTS; i++) {
         const size_t used = strlen(text);
 

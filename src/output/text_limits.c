@@ -111,4 +111,6 @@ void text_limits(text_page *page, const report *r)
     for (size_t i = 0; i < r->limit_count; i++)
         add_limit(&g, &c, r, &r->limits[i], page->style);
     grid_print(&g, page);
+    if (c.percent)
+        fputs("\n%: margin in per cent of max - min, or of the only bound; negative: outside\n", page->out);
 }
