@@ -3,6 +3,7 @@
 #include "output/render.h"
 
 #include "base/error_internal.h"
+#include "output/limits_table_internal.h"
 #include "output/memory_stream_internal.h"
 #include "output/apart_internal.h"
 #include "output/output_file_internal.h"
@@ -32,10 +33,23 @@ typedef struct {
     const render_style *style;
 } order;
 
+/* A page and a workbook show the limits as a table. */
+static bc_status render_with_limits(const order *o, FILE *out, bc_error *err)
+{
+    limits_view view;
+    const bc_status status = limits_view_open(&view, o->r) ? RENDERERS[o->form](&view.shown, o->style, out, err)
+                                                            : bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
+
+    limits_view_close(&view);
+    return status;
+}
+
 static bc_status render_order(void *data, FILE *out, bc_error *err)
 {
     const order *o = data;
 
+    if (o->form == RENDER_HTML || o->form == RENDER_XLSX)
+        return render_with_limits(o, out, err);
     return RENDERERS[o->form](o->r, o->style, out, err);
 }
 
