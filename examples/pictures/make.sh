@@ -25,6 +25,6 @@ test $# -eq 0 || exit 0
 sandbox=
 test "$(id -u)" -ne 0 || sandbox=--no-sandbox # Chromium has none for root
 # shellcheck disable=SC2086 # one word or none
-chromium --headless $sandbox --disable-gpu --hide-scrollbars --force-device-scale-factor=0.8 --window-size=900,2230 \
+chromium --headless $sandbox --disable-gpu --hide-scrollbars --force-device-scale-factor=0.72 --window-size=900,2225 \
     --screenshot="$work/report.png" "file://$work/report.html" 2>"$work/log" || { cat "$work/log"; exit 4; }
 cp "$work/report.png" "$folder/report.png"
