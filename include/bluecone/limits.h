@@ -48,6 +48,8 @@ typedef struct {
     char path[BC_FILE_MAX];          /* file and line it stands on */
     int line;
     char note[BC_LIMIT_NOTE_MAX];    /* where and when it holds, as the file says; may be "" */
+    bool unit_assumed;               /* a file states none: `unit` is the default */
+    bool state_assumed;              /* neither it nor the contract states one: the default of bc_state_default() */
 } bc_limit;
 
 /* A window of [range COMPONENT]: mole fractions. */
@@ -68,6 +70,7 @@ typedef struct {
     bc_per_amount price;
     bc_per_amount annual;            /* amount a year: si is J, kg, m3 or mol per year */
     bc_state state;                  /* of limits that name none */
+    bool state_stated;               /* by a file; else it is the default */
     size_t reference_count;
     bc_reference references[BC_LIMIT_REFERENCE_MAX];
     size_t limit_count;

@@ -6,10 +6,53 @@
 #include "cli/sheet.h"
 
 #include <stdio.h>
+#include <string.h>
+
+/* Adds "hydrogen (mol %)" to a list; what has no room is told by dots. */
+static void add_item(char *list, size_t size, const char *id, const char *value)
+{
+    const size_t used = strlen(list);
+    const char *comma = used > 0 ? ", " : "";
+
+    if (used + strlen(id) + strlen(value) + 12 < size)
+        (void)snprintf(list + used, size - used, "%s%s%s%s%s", comma, id, value[0] ? " (" : "", value, value[0] ? ")" : "");
+    else if (used > 0 && list[used - 1] != '.')
+        (void)snprintf(list + used, size - used, " ...");
+}
+
+/* Defaults that move a verdict: 5 of hydrogen sulphide are mg/m3 on paper and mol % without a unit. */
+static void warn_assumed(report *r, const bc_contract *c)
+{
+    char units[200] = "";
+    char states[200] = "";
+    char state[64] = "";
+    char text[400];
+
+    for (size_t i = 0; i < c->limit_count; i++) {
+        const bc_limit *limit = &c->limits[i];
+
+        if (limit->unit_assumed)
+            add_item(units, sizeof units, limit->id, limit->unit);
+        if (!limit->state_assumed || limit->kind == BC_LIMIT_FRACTION || limit->kind == BC_LIMIT_MASS_FRACTION)
+            continue; /* moles and masses have no state */
+        add_item(states, sizeof states, limit->id, "");
+        state_text(&c->references[limit->reference].state, state, sizeof state);
+    }
+    if (units[0]) {
+        (void)snprintf(text, sizeof text, "The contract states no unit for %s: the one in brackets is taken; write it as unit = ...", units);
+        report_add_warning(r, text);
+    }
+    if (states[0]) {
+        (void)snprintf(text, sizeof text, "The contract states no reference state for %s: %.60s is taken; write it as at = ...", states, state);
+        report_add_warning(r, text);
+    }
+}
 
 void contract_warn(report *r, const bc_contract *c)
 {
     char text[BC_NAME_MAX + 320];
+
+    warn_assumed(r, c);
 
     if (c->until[0] != '\0') {
         (void)snprintf(text, sizeof text, "%.120s: the text was in force until %s and is superseded.", c->name, c->until);

@@ -101,7 +101,10 @@ static bc_status fill_words(limits_reader *r, const char *section, const bc_stat
     (void)snprintf(limit->note, sizeof limit->note, "%s", note ? note->value : "");
     if (basis && limit_take_basis(basis->value, limit, r->err) != BC_OK)
         return limits_blame(r, basis->line);
-    return limit_take_unit(unit ? unit->value : "", state, limit, r->err) == BC_OK ? BC_OK : limits_blame(r, unit ? unit->line : limit->line);
+    if (limit_take_unit(unit ? unit->value : "", state, limit, r->err) != BC_OK)
+        return limits_blame(r, unit ? unit->line : limit->line);
+    limit->unit_assumed = !unit && strcmp(limit->unit, "1") != 0;
+    return BC_OK;
 }
 
 static bc_status fill_limit(limits_reader *r, const char *section, bc_limit *limit)
@@ -109,6 +112,7 @@ static bc_status fill_limit(limits_reader *r, const char *section, bc_limit *lim
     bc_state state;
     bc_status status = take_state(r, section, &state);
 
+    limit->state_assumed = !r->c->state_stated && !bc_ini_find(r->ini, section, "at");
     if (status == BC_OK)
         status = take_bounds(r, section, limit);
     if (status != BC_OK)

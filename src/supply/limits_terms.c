@@ -65,6 +65,7 @@ static bc_status take_until(limits_reader *r, const bc_ini_entry *e)
 
 static bc_status take_at(limits_reader *r, const bc_ini_entry *e)
 {
+    r->c->state_stated = true;
     return bc_state_parse(e->value, &r->c->state, r->err) == BC_OK ? BC_OK : limits_blame(r, e->line);
 }
 
