@@ -75,12 +75,28 @@ bool option_is_common(const char *word)
     return false;
 }
 
+/* What other commands ask on the line, and a contract says itself: the key; NULL for no such option. */
+static const char *key_of_contract(const command *c, const char *word)
+{
+    static const struct {
+        const char *word, *key;
+    } KEYS[] = {{"at", "at = 25/0"}, {"saturated", "saturated = yes"}, {"edition", "edition = 1995"}, {"unit", "unit = kWh/m3 at each limit"}};
+    const size_t length = strcspn(word, "=");
+
+    for (size_t i = 0; i < BC_COUNT(KEYS); i++)
+        if (strcmp(c->word, "contract") == 0 && strlen(KEYS[i].word) == length && strncmp(word, KEYS[i].word, length) == 0)
+            return KEYS[i].key;
+    return NULL;
+}
+
 static bc_status refuse_option(const command *c, const char *word, bc_error *err)
 {
     const char *best = NULL;
     char shown[BC_WORD_MAX];
 
     bc_text_show(shown, sizeof shown, word);
+    if (key_of_contract(c, word))
+        return bc_fail(err, BC_ERR_USAGE, "'contract' has no option --%s: the file of the contract says it, as %s", shown, key_of_contract(c, word));
     for (size_t i = 0; i < OPTION_COUNT; i++)
         if ((OPTIONS[i].commands & c->bit) && (!best || bc_text_unlikeness(word, OPTIONS[i].word) < bc_text_unlikeness(word, best)))
             best = OPTIONS[i].word;
