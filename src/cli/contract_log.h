@@ -29,6 +29,8 @@ typedef struct {
     log_refusal told[LOG_TOLD_MAX];
     size_t flows_missing;      /* rows used without their flow, and the line of the first */
     int flow_line;
+    size_t sums_off;           /* rows used whose shares add up to much less or more than 100 %, and the line of the first */
+    int off_line;
 } log_case;
 
 /* Reads the file into the log. BC_ERR_INPUT: what is wrong with it as a whole; BC_ERR_FILE, BC_ERR_MEMORY. */

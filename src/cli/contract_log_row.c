@@ -53,7 +53,7 @@ static bc_status take_time(const log_case *l, double *time_s, bool *has_zone, bc
     return BC_OK;
 }
 
-static bc_status take_gas(const log_case *l, bc_gas *gas, bc_error *err)
+static bc_status take_gas(const log_case *l, bc_gas *gas, double *total, bc_error *err)
 {
     double amounts[BC_SPECIES_CAPACITY] = {0.0};
     double sum = 0.0;
@@ -76,7 +76,17 @@ static bc_status take_gas(const log_case *l, bc_gas *gas, bc_error *err)
     }
     if (!(sum >= SUM_MIN && sum <= SUM_MAX))
         return bc_fail(err, BC_ERR_INPUT, "its components add up to %.6g %%, not to 100 %%", 100.0 * sum);
+    *total = sum;
     return bc_gas_from_amounts(amounts, gas, err);
+}
+
+/* Whether a share of the row has a decimal comma. */
+static bool has_commas(const log_case *l)
+{
+    for (size_t i = 0; i < l->header.column_count; i++)
+        if (l->header.columns[i].kind == LOG_COMPONENT && strchr(l->cells[i], ','))
+            return true;
+    return false;
 }
 
 /* An analysis is worth reading without its flow, too; only its heat is not counted then. */
@@ -88,7 +98,7 @@ static void take_flow(log_case *l, bc_per_amount *flow, int line)
 
         if (l->header.columns[i].kind != LOG_FLOW)
             continue;
-        if (take_number(l, i, &value, NULL) != BC_OK || value < 0.0) {
+        if (take_number(l, i, &value, NULL) != BC_OK || value < 0.0 || (log_is_grouped(l->cells[i]) && has_commas(l))) {
             l->flow_line = l->flows_missing++ == 0 ? line : l->flow_line;
             return;
         }
@@ -112,12 +122,13 @@ static bc_status take_row(log_case *l, int line, bc_error *err)
 {
     bc_log_row row;
     bool zoned = false;
+    double sum = 1.0;
     bc_status status = check_cells(l, err);
 
     if (status == BC_OK)
         status = take_time(l, &row.time_s, &zoned, err);
     if (status == BC_OK)
-        status = take_gas(l, &row.gas, err);
+        status = take_gas(l, &row.gas, &sum, err);
     if (status != BC_OK)
         return status;
     const size_t missing = l->flows_missing;
@@ -128,6 +139,8 @@ static bc_status take_row(log_case *l, int line, bc_error *err)
         l->flows_missing = missing;
         return status;
     }
+    if (log_sum_is_off(sum))
+        l->off_line = l->sums_off++ == 0 ? line : l->off_line;
     l->clocked = true;
     l->zoned = zoned;
     return BC_OK;

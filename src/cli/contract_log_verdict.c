@@ -60,6 +60,11 @@ void log_warn(const log_case *l, report *r)
     if (log_header_flow_note(&l->header))
         report_add_warning(r, log_header_flow_note(&l->header));
     warn_absent(l, r);
+    if (l->sums_off > 0) {
+        (void)snprintf(text, sizeof text, "Scaled to 100 %%, though their components add up to less than 99 or more than 101 %%: %zu of the rows, the first in line %d.",
+                       l->sums_off, l->off_line);
+        report_add_warning(r, text);
+    }
     if (l->flows_missing == 0)
         return;
     (void)snprintf(text, sizeof text, "Judged without a flow, so that the heat is not counted: %zu of the rows, the first in line %d.", l->flows_missing, l->flow_line);

@@ -6,9 +6,11 @@
 #include "base/text.h"
 #include "gas/summation.h"
 
+#include <math.h>
 #include <stdio.h>
 #include <string.h>
 
+#define SUM_OFF 0.01      /* of one: sums of an analysis within it are passed without a question; common practice */
 #define VOLUMES_AT_C 15.0 /* shares of volume, as of a composition file that names no state */
 
 static void add_remark(log_header *h, const char *text)
@@ -302,6 +304,23 @@ bc_status log_header_take(log_header *h, char (*cells)[LOG_CELL_MAX], size_t cou
     if (log_header_count(h, LOG_TIME) > 2)
         return bc_fail_at(err, BC_ERR_INPUT, h->path, line, "more than two columns of time; keep one, or a date and a time");
     return take_bases(h, line, err);
+}
+
+bool log_sum_is_off(double sum)
+{
+    return fabs(sum - 1.0) > SUM_OFF + 1e-9; /* 99 and 101 % themselves, as added up, are within */
+}
+
+bool log_is_grouped(const char *cell)
+{
+    const char *text = bc_text_skip_space(cell);
+    const size_t before = strspn(text, "0123456789");
+
+    if (before < 1 || before > 3 || text[0] == '0' || text[before] != '.')
+        return false;
+    const char *group = text + before + 1;
+
+    return strspn(group, "0123456789") == 3 && *bc_text_skip_space(group + 3) == '\0';
 }
 
 char log_delimiter(const char *line, size_t length)

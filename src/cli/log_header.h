@@ -58,6 +58,12 @@ const char *log_header_flow_note(const log_header *h);
 /* Sets what shares without a unit are in: "mass %", "ppm". False: no such unit. */
 bool log_header_shares(log_header *h, const char *word);
 
+/* A sum of shares, of one, that is scaled to 100 %, but not passed without a word. */
+bool log_sum_is_off(double sum);
+
+/* "1.638": where commas are the decimal marks of a log, perhaps one thousand six hundred and thirty-eight. */
+bool log_is_grouped(const char *cell);
+
 /* The sign that parts the cells of a row: of ';', tab and ',' the most frequent one outside quotes. */
 char log_delimiter(const char *line, size_t length);
 

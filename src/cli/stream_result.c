@@ -12,7 +12,6 @@
 #include <string.h>
 
 #define CALIBRATION_NEAR 5e-4 /* mole fraction: analysers reproduce their calibration gas to a few hundredths of a per cent */
-#define SUM_OFF 0.01         /* of one: sums of an analysis within it are passed without a question; common practice */
 #define MIX 0x9E3779B97F4A7C15U /* 2^64 over the golden ratio, as of Knuth's multiplicative hashing */
 
 void stream_put(stream_batch *b, const char *text, size_t length)
@@ -198,7 +197,7 @@ void stream_evaluate(const stream_plan *p, stream_batch *b, stream_reading *r, s
     }
     if (p->keeps && r->flow >= 0.0)
         take_power(p, r->flow, &gas, mark);
-    if (fabs(r->sum - 1.0) > SUM_OFF + 1e-9) /* 99 and 101 % themselves, as added up, are within */
+    if (log_sum_is_off(r->sum))
         r->flags |= 1U << STREAM_off;
     if (p->has_calibration && is_calibration(p, &gas))
         r->flags |= 1U << STREAM_calibration;

@@ -96,6 +96,12 @@ static bool read_number(const stream_plan *p, const char *cell, double *value)
     return bc_number_parse(text, value, NULL) == BC_OK;
 }
 
+/* A share that is a thousand times too great shows in the sum; a flow that is so small shows nowhere. */
+static bool read_flow(const stream_plan *p, const char *cell, double *value)
+{
+    return !(p->mark == ',' && log_is_grouped(cell)) && read_number(p, cell, value);
+}
+
 static void read_share(const stream_plan *p, stream_reading *r, size_t column, const char *cell)
 {
     const char *name = p->header.columns[column].name;
@@ -142,7 +148,7 @@ void stream_read_cells(const stream_plan *p, stream_batch *b, stream_reading *r,
             continue;
         if (p->columns[i].kind == LOG_COMPONENT)
             read_share(p, r, i, cells[i]);
-        else if (p->columns[i].kind == LOG_FLOW && (!read_number(p, cells[i], &r->flow) || r->flow < 0.0))
+        else if (p->columns[i].kind == LOG_FLOW && (!read_flow(p, cells[i], &r->flow) || r->flow < 0.0))
             r->flow = -1.0;
     }
     read_time(p, b, r, cells);

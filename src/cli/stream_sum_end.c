@@ -22,6 +22,20 @@ static bool is_outside(const tally *t)
     return cover.outside > 0;
 }
 
+/* Rows whose heat is not in the sum. */
+static void warn_flows(report *r, const tally *t)
+{
+    tally_cover cover;
+    char text[160];
+
+    tally_covers(t, &cover);
+    if (cover.flows >= cover.rows)
+        return;
+    (void)snprintf(text, sizeof text, "No heat is counted for %llu of the rows used: their flow is none, or cannot be read.",
+                   (unsigned long long)(cover.rows - cover.flows));
+    report_add_warning(r, text);
+}
+
 /* Of parts it is not known any more which files they were of. */
 static void open_report(report *r, const stream_plan *p, const tally *t, const char *title)
 {
@@ -34,6 +48,8 @@ static void open_report(report *r, const stream_plan *p, const tally *t, const c
             report_contract_inputs(r, p->contract);
         for (size_t i = 0; i < p->header.remark_count; i++)
             report_add_warning(r, p->header.remarks[i]);
+        if (p->header.has_flow)
+            warn_flows(r, t);
         if (log_header_flow_note(&p->header))
             report_add_warning(r, log_header_flow_note(&p->header));
     }
