@@ -7,31 +7,6 @@
 
 #define HOUR_S 3600.0
 
-/* A component that has no column was perhaps never looked for. */
-static void warn_absent(const log_case *l, report *r)
-{
-    char list[300] = "";
-    char text[600];
-
-    for (size_t i = 0; i < l->c->contract->limit_count; i++) {
-        const bc_limit *limit = &l->c->contract->limits[i];
-        const size_t used = strlen(list);
-        double there = 0.0;
-
-        if (limit->kind == BC_LIMIT_QUANTITY || limit->kind == BC_LIMIT_INDEX || limit->has_min)
-            continue;
-        for (size_t k = 0; k < l->header.column_count; k++)
-            for (size_t s = 0; s < bc_species_count(); s++)
-                there += limit->weight[s] * l->header.columns[k].parts[s];
-        if (there <= 0.0)
-            (void)snprintf(list + used, sizeof list - used, "%s%s", used > 0 ? ", " : "", limit->id);
-    }
-    if (list[0] == '\0')
-        return;
-    (void)snprintf(text, sizeof text, "The log has no column for %s: counted as zero, which shows that a limit is kept only if it was looked for.", list);
-    report_add_warning(r, text);
-}
-
 /* Limits whose figure some rows do not have. */
 static size_t warn_unjudged(const log_case *l, report *r, size_t rows)
 {
@@ -53,13 +28,14 @@ static size_t warn_unjudged(const log_case *l, report *r, size_t rows)
 
 void log_warn(const log_case *l, report *r)
 {
-    char text[160];
+    char text[LOG_ABSENT_TEXT];
 
     for (size_t i = 0; i < l->header.remark_count; i++)
         report_add_warning(r, l->header.remarks[i]);
     if (log_header_flow_note(&l->header))
         report_add_warning(r, log_header_flow_note(&l->header));
-    warn_absent(l, r);
+    if (log_header_absent(&l->header, l->c->contract, text))
+        report_add_warning(r, text);
     if (l->sums_off > 0) {
         (void)snprintf(text, sizeof text, "Scaled to 100 %%, though their components add up to less than 99 or more than 101 %%: %zu of the rows, the first in line %d.",
                        l->sums_off, l->off_line);
@@ -131,7 +107,7 @@ bool log_judge(const log_case *l, report *r, const bc_log_cover *cover)
         (void)snprintf(text, sizeof text, "NOT within the contract in %zu of %zu analyses, %.6g of %.6g h", broken, cover->rows, held / HOUR_S,
                        cover->held_s / HOUR_S);
     else
-        (void)snprintf(text, sizeof text, "%s the contract in %zu analyses, over %.6g h", good ? "within" : "NOT shown to be within", cover->rows,
+        (void)snprintf(text, sizeof text, "%s the contract in %zu analys%s, over %.6g h", good ? "within" : "NOT shown to be within", cover->rows, cover->rows == 1 ? "is" : "es",
                        cover->held_s / HOUR_S);
     list_broken(l, text, sizeof text);
     list_missing(l, cover, unjudged, text, sizeof text - 1);

@@ -282,6 +282,32 @@ const char *log_header_flow_note(const log_header *h)
     return NULL;
 }
 
+static bool has_column(const log_header *h, const bc_limit *limit)
+{
+    double there = 0.0;
+
+    for (size_t i = 0; i < h->column_count; i++)
+        for (size_t s = 0; s < bc_species_count(); s++)
+            there += limit->weight[s] * h->columns[i].parts[s];
+    return there > 0.0;
+}
+
+bool log_header_absent(const log_header *h, const bc_contract *c, char text[LOG_ABSENT_TEXT])
+{
+    char list[300] = "";
+
+    for (size_t i = 0; i < c->limit_count; i++) {
+        const bc_limit *limit = &c->limits[i];
+        const size_t used = strlen(list);
+
+        if (limit->kind == BC_LIMIT_QUANTITY || limit->kind == BC_LIMIT_INDEX || limit->has_min || has_column(h, limit))
+            continue;
+        (void)snprintf(list + used, sizeof list - used, "%s%s", used > 0 ? ", " : "", limit->id);
+    }
+    (void)snprintf(text, LOG_ABSENT_TEXT, "The log has no column for %s: counted as zero, which shows that a limit is kept only if it was looked for.", list);
+    return list[0] != '\0';
+}
+
 void log_header_start(log_header *h, const char *path)
 {
     memset(h, 0, sizeof *h);

@@ -55,6 +55,10 @@ void log_header_tell_ignored(log_header *h);
 /* What has to be known of the flow's cubic metres; NULL where there is no flow, or its unit leaves no question. */
 const char *log_header_flow_note(const log_header *h);
 
+/* Which limits are kept only since no column is the component: perhaps it was never looked for. False: none. */
+#define LOG_ABSENT_TEXT 600
+bool log_header_absent(const log_header *h, const bc_contract *c, char text[LOG_ABSENT_TEXT]);
+
 /* Sets what shares without a unit are in: "mass %", "ppm". False: no such unit. */
 bool log_header_shares(log_header *h, const char *word);
 

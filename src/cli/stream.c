@@ -183,6 +183,7 @@ static bc_status begin(stream_case *s, bc_error *err)
 static void tell(const stream_case *s)
 {
     char state[160];
+    char absent[LOG_ABSENT_TEXT];
 
     if (s->plan.a->value[OPTION_quiet])
         return;
@@ -193,6 +194,8 @@ static void tell(const stream_case *s)
     for (size_t i = 0; i < STREAM_FLAGS; i++)
         if (s->flagged[i] > 0)
             warn("%llu row%s flagged %s: %s", (unsigned long long)s->flagged[i], s->flagged[i] > 1 ? "s" : "", stream_flag_word(i), stream_flag_meaning(i));
+    if (s->plan.contract && log_header_absent(&s->plan.header, s->plan.contract, absent))
+        warn("%s", absent);
     if (s->plan.contract)
         warn("%llu of %llu rows are outside of %s", (unsigned long long)s->outside, (unsigned long long)(s->rows - s->refused), s->plan.contract->name);
     if (s->unjudged > 0)

@@ -1,5 +1,6 @@
 /* SPDX-License-Identifier: MIT */
 /* stream_sum_end.c - what a tally comes to at the end: a part, the note of the excursions, a report; and parts merged. */
+#include "cli/contract_report.h"
 #include "cli/stream_part.h"
 #include "cli/stream_sum.h"
 #include "cli/stream_summary.h"
@@ -39,6 +40,8 @@ static void warn_flows(report *r, const tally *t)
 /* Of parts it is not known any more which files they were of. */
 static void open_report(report *r, const stream_plan *p, const tally *t, const char *title)
 {
+    char absent[LOG_ABSENT_TEXT];
+
     report_open(r, BC_VERSION, "stream", title);
     report_state_of(r, &tally_plan_of(t)->at);
     if (p) {
@@ -46,6 +49,10 @@ static void open_report(report *r, const stream_plan *p, const tally *t, const c
             report_add_input(r, p->path);
         if (p->contract)
             report_contract_inputs(r, p->contract);
+        if (p->contract)
+            contract_warn(r, p->contract);
+        if (p->contract && log_header_absent(&p->header, p->contract, absent))
+            report_add_warning(r, absent);
         for (size_t i = 0; i < p->header.remark_count; i++)
             report_add_warning(r, p->header.remarks[i]);
         if (p->header.has_flow)

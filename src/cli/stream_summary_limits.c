@@ -172,8 +172,8 @@ static void judge(const view *v, size_t unjudged)
     } else {
         if (c->timed)
             (void)snprintf(all, sizeof all, ", over %s", held);
-        (void)snprintf(text, sizeof text, "%s the contract in %llu analyses%s", good ? "within" : "NOT shown to be within",
-                       (unsigned long long)c->rows, all);
+        (void)snprintf(text, sizeof text, "%s the contract in %llu analys%s%s", good ? "within" : "NOT shown to be within",
+                       (unsigned long long)c->rows, c->rows == 1 ? "is" : "es", all);
     }
     list_broken(v, text, sizeof text);
     list_missing(v, unjudged, text, sizeof text - 1);

@@ -14,3 +14,8 @@ printf 'time;CH4;N2;flow [m3/h]\n2026-03-01 00:00;98,5;1,5;1.638\n2026-03-01 01:
 bluecone stream comma.csv --summary --add hhv | sed -n '/rows with a flow/,/gross heat/p; /^Warnings/,$p'
 printf '[limit hhv]\nmin = 30\nunit = MJ/m3\nat = 15/15\n' >limit.ini
 bluecone contract limit.ini --log comma.csv | sed -n '/gross heat/p; /^Warnings/,$p'
+# a limit that no column is for is told, with rows, in a summary and by contract; one row is one analysis
+printf 'time,CH4,N2\n2026-03-01,98,2\n' >short.csv
+bluecone stream short.csv --contract gb-gsmr-2025 --add hhv
+bluecone stream short.csv --contract gb-gsmr-2025 --summary | sed -n '/^Warnings/,$p'
+bluecone contract gb-gsmr-2025 --log short.csv | sed -n '/^Warnings/,$p'
