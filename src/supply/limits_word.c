@@ -163,13 +163,15 @@ static bc_status refuse_word(const char *word, bc_error *err)
 {
     const char *meant = quantity_meant(word);
     char folded[BC_WORD_MAX];
+    char hint[BC_HINT_MAX];
 
     if (meant)
         return bc_fail(err, BC_ERR_INPUT, "'%s' is no quantity, component or group; write %s", word, meant);
     if (bc_text_fold(folded, sizeof folded, word) && strstr(folded, "dewpoint"))
         return bc_fail(err, BC_ERR_INPUT, "'%s' cannot be judged: no dew point of the gas itself is computed; leave the limit out and check it by other means",
                        word);
-    return bc_fail(err, BC_ERR_INPUT, "'%s' is no quantity, component or group; the nearest known word is '%s'", word, nearest(word));
+    bc_text_suggest(hint, sizeof hint, "the nearest known word is", word, nearest(word));
+    return bc_fail(err, BC_ERR_INPUT, "'%s' is no quantity, component or group%s", word, hint);
 }
 
 bc_status limit_find(const char *word, bc_limit *limit, bc_error *err)

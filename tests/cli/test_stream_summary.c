@@ -138,7 +138,7 @@ static void a_good_log_is_within_and_one_with_refused_rows_asks_for_care(void **
         tally_add_refused(t, refused);
         report r = report_of(t);
 
-        assert_int_equal(strncmp(r.verdict, "within the contract in 1 analyses, over ", 40), 0);
+        assert_int_equal(strncmp(r.verdict, "within the contract in 1 analysis, over ", 40), 0);
         assert_int_equal(r.judgement, refused > 0 ? REPORT_CARE : REPORT_YES);
         assert_false(has_table(&r, "excursions"));
         report_close(&r);
