@@ -37,7 +37,7 @@ static bc_status check_kind(int fd, const char *path, size_t limit, size_t *size
     if (!S_ISREG(st.st_mode))
         return bc_fail_at(err, BC_ERR_INPUT, path, 0, "this is not a regular file; save the text to a file and name that");
     if (st.st_size == 0)
-        return bc_fail_at(err, BC_ERR_INPUT, path, 0, "the file is empty; bluecone-composition(5), -contract(5) and -burner(5) have examples");
+        return bc_fail_at(err, BC_ERR_INPUT, path, 0, "the file is empty; bluecone-composition(5), bluecone-burner(5) and bluecone-contract(5) show what stands in one");
     if ((size_t)st.st_size > limit)
         return bc_fail_at(err, BC_ERR_INPUT, path, 0, "the file has %lld bytes, more than the %zu allowed; is it the right file?",
                           (long long)st.st_size, limit);

@@ -208,7 +208,7 @@ static bc_status scan_lines(scan *s, char *text, size_t length)
         p += raw + (newline != NULL);
     }
     if (s->ini->count == 0)
-        return bc_fail_at(s->err, BC_ERR_INPUT, s->path, 0, "the file has no key = value line; bluecone-composition(5), -contract(5) and -burner(5) have examples");
+        return bc_fail_at(s->err, BC_ERR_INPUT, s->path, 0, "the file has no key = value line; see bluecone-composition(5) for an example");
     return close_section(s);
 }
 
