@@ -191,7 +191,7 @@ static bc_status take_humidity(const arguments *a, burn_setup *s, bc_error *err)
     s->physics.oxidant = wet;
     const size_t used = s->is_air ? 0 : strlen(s->oxidant);
 
-    (void)snprintf(s->oxidant + used, sizeof s->oxidant - used, "%s %.4g mol-%% water", used ? "," : "air with", 100.0 * x_water);
+    (void)snprintf(s->oxidant + used, sizeof s->oxidant - used, "%s %.4g mol %% water", used ? "," : "air with", 100.0 * x_water);
     return BC_OK;
 }
 

@@ -123,7 +123,7 @@ static const curve EFFICIENCY[] = {{"on net heat", efficiency_net}, {"on gross h
 
 static const panel PANELS[] = {
     {"flame", "Adiabatic flame temperature", "temperature", "C", FLAME, BC_COUNT(FLAME), SWEEP_EXCESS},
-    {"flue", "Flue gas", "fraction", "mol-%", FLUE, BC_COUNT(FLUE), SWEEP_EXCESS},
+    {"flue", "Flue gas", "fraction", "mol %", FLUE, BC_COUNT(FLUE), SWEEP_EXCESS},
     {"dew", "Dew points of the flue gas", "temperature", "C", DEW, BC_COUNT(DEW), SWEEP_EXCESS},
     {"efficiency", "Efficiency", "efficiency", "%", EFFICIENCY, BC_COUNT(EFFICIENCY), SWEEP_EXCESS | SWEEP_FLUE_TEMPERATURE},
     {"condensate", "Condensate per mass of fuel", "condensate", "kg/kg", CONDENSATE, BC_COUNT(CONDENSATE), SWEEP_FLUE_TEMPERATURE},

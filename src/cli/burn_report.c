@@ -137,11 +137,11 @@ static void add_flue_table(report *r, const burn_case_result *c)
     const size_t table = report_add_table(r, "flue-composition", "Flue gas composition, complete combustion");
 
     report_add_column(r, table, "species", "species", "");
-    report_add_column(r, table, "wet", "wet", "mol-%");
-    report_add_column(r, table, "dry", "dry", "mol-%");
+    report_add_column(r, table, "wet", "wet", "mol %");
+    report_add_column(r, table, "dry", "dry", "mol %");
     report_add_column(r, table, "mass", "per fuel", "kg/kg");
     if (condenses)
-        report_add_column(r, table, "exit", "as it leaves", "mol-%");
+        report_add_column(r, table, "exit", "as it leaves", "mol %");
     for (size_t i = 0; i < bc_species_count(); i++) {
         if (f->wet.x[i] < TRACE)
             continue;
@@ -163,7 +163,7 @@ static void add_mixture(report *r, const char *id, const char *title, const bc_m
     const size_t table = report_add_table(r, id, title);
 
     report_add_column(r, table, "species", "species", "");
-    report_add_column(r, table, "fraction", "wet", "mol-%");
+    report_add_column(r, table, "fraction", "wet", "mol %");
     report_add_column(r, table, "ppm", "wet", "ppm");
     for (size_t i = 0; i < bc_product_count(); i++) {
         const double x = m->moles[i] / m->total_moles;

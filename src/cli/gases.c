@@ -151,7 +151,7 @@ static void warn_wet(report *r, const char *gas, const bc_subject *s)
         || bc_gas_saturated(&s->gas, state->metering_c + 273.15, state->metering_pa, &saturated, NULL) != BC_OK
         || s->gas.x[water] <= saturated.x[water] * (1.0 + WATER_TOLD))
         return;
-    (void)snprintf(text, sizeof text, "%.100s: holds %.4g mol-%% water, more than the %.4g mol-%% that stay vapour at the metering state: "
+    (void)snprintf(text, sizeof text, "%.100s: holds %.4g mol %% water, more than the %.4g mol %% that stay vapour at the metering state: "
                    "figures per m3 count all of it as vapour; --saturated meters the gas without the excess.",
                    gas, 100.0 * s->gas.x[water], 100.0 * saturated.x[water]);
     report_add_warning(r, text);

@@ -150,7 +150,7 @@ void sheet_composition(report *r, const subjects *s)
 {
     const size_t table = report_add_table(r, "composition", "Composition used");
 
-    report_add_column(r, table, "component", "component", "mol-%");
+    report_add_column(r, table, "component", "component", "mol %");
     for (size_t i = 0; i < s->count; i++) {
         char id[40];
 

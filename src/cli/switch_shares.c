@@ -95,7 +95,7 @@ static void add_panel(report *r, const bc_blend_criterion *k)
 {
     const size_t chart = report_add_chart(r, k->id, k->label);
 
-    report_set_axis(r, chart, REPORT_X, "share of the new gas", "mol-%");
+    report_set_axis(r, chart, REPORT_X, "share of the new gas", "mol %");
     report_set_axis(r, chart, REPORT_Y, k->id, strcmp(k->unit, "1") == 0 ? "" : k->unit);
     add_curve(r, chart, k);
     mark_limit(r, chart, k->acceptable.has_min, k->acceptable.min, "least");

@@ -29,7 +29,7 @@ static terms terms_of(const bc_subject *s)
 static void add_columns(report *r, size_t table)
 {
     report_add_column(r, table, "component", "component", "");
-    report_add_column(r, table, "x", "x", "mol-%");
+    report_add_column(r, table, "x", "x", "mol %");
     report_add_column(r, table, "mass", "x M", "g/mol");
     report_add_column(r, table, "gross", "x Hgross", "kJ/mol");
     report_add_column(r, table, "net", "x Hnet", "kJ/mol");

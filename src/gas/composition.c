@@ -210,7 +210,7 @@ static bc_status add_moisture(bc_composition *c, bc_error *err)
     }
     c->gas = wet;
     shrink_spread(c);
-    composition_remark(c, "Saturated with water at %.6g C and %.6g kPa: %.4g mol-%% water added.", c->measured_at_k - 273.15,
+    composition_remark(c, "Saturated with water at %.6g C and %.6g kPa: %.4g mol %% water added.", c->measured_at_k - 273.15,
                        c->measured_at_pa * 1e-3, 100.0 * wet.x[SPECIES_water]);
     return BC_OK;
 }

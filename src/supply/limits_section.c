@@ -202,7 +202,7 @@ static bc_status fill_range(const limits_reader *r, const bc_ini_entry *e, bc_ra
     return BC_OK;
 }
 
-/* A window of the composition, mol-% unless a unit is written. */
+/* A window of the composition, mol % unless a unit is written. */
 bc_status limits_take_range(limits_reader *r, const bc_ini_entry *e)
 {
     static const char *const RANGE_KEYS[] = {"min", "max", "unit"};

@@ -182,7 +182,7 @@ static void a_saturated_gas_gets_the_water_of_its_temperature_and_pressure(void 
     assert_within(c.gas.x[SPECIES_methane], 0.627 * (1.0 - p_pa / 102.4e3), 1e-15);
     assert_within(u_of(&c, SPECIES_methane), 0.0031 * (1.0 - p_pa / 102.4e3), 1e-15);
     assert_within(u_of(&c, SPECIES_water), 0.0, 0.0);
-    assert_true(remarks(&c, "Saturated with water at 37 C and 102.4 kPa: 6.135 mol-% water added"));
+    assert_true(remarks(&c, "Saturated with water at 37 C and 102.4 kPa: 6.135 mol % water added"));
     assert_false(c.air_suspected);
 }
 

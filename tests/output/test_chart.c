@@ -16,7 +16,7 @@ static size_t add_sweep(report *r)
 {
     const size_t chart = report_add_chart(r, "sweep", "Hydrogen into Works supply");
 
-    report_set_axis(r, chart, REPORT_X, "Share of hydrogen", "mol-%");
+    report_set_axis(r, chart, REPORT_X, "Share of hydrogen", "mol %");
     report_set_axis(r, chart, REPORT_Y, "Wobbe index, gross", "MJ/m3");
     const size_t curve = report_add_series(r, chart, REPORT_LINE, "blend <A & B>");
     for (int i = 0; i <= 37; i++)
@@ -415,7 +415,7 @@ static void the_svg_is_xml_and_tells_every_label(void **state)
     static const char *const WORDS[] = {"<title>A sweep",
                                         "Hydrogen into Works supply",
                                         "Share of hydrogen",
-                                        "mol-%",
+                                        "mol %",
                                         "min 47.2",
                                         "29.4 %",
                                         "Wobbe index, gross",
@@ -641,7 +641,7 @@ static void json_has_charts_only_where_there_are_some(void **state)
     report_add_name(r, 0, REPORT_Y, "low");
     static const char *const WORDS[] = {"\"charts\"",
                                         "\"id\": \"sweep\"",
-                                        "\"unit\": \"mol-%\"",
+                                        "\"unit\": \"mol %\"",
                                         "\"time\": true",
                                         "\"names\"",
                                         "\"kind\": \"line\"",

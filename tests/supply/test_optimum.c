@@ -138,7 +138,7 @@ static void the_shadow_price_of_one_limit_is_its_derivative_by_hand(void **state
     assert_within(o.objective, ((1.0 - x) * h0 * c0 + x * h1 * c1) / heat, 1e-8 * o.objective);
     assert_int_equal(o.binding_count, 1);
     assert_int_equal(o.binding[0].kind, BC_BOUND_MAX);
-    /* d/dx of the cost: h0 h1 (c1 - c0)/heat^2, per mol-% */
+    /* d/dx of the cost: h0 h1 (c1 - c0)/heat^2, per mol % */
     assert_within(o.binding[0].shadow * 3.6e9, h0 * h1 * (c0 - c1) / (heat * heat) * 0.01 * 3.6e9, 1e-5);
 }
 
