@@ -81,7 +81,14 @@ void stream_reading_start(stream_reading *r)
     r->zoned = false;
     r->time_s = 0.0;
     r->flow = -1.0;
+    r->empty_count = 0;
     r->reason[0] = '\0';
+}
+
+void stream_reading_miss(stream_reading *r, size_t column)
+{
+    r->flags |= 1U << STREAM_empty;
+    r->empty[r->empty_count++] = (unsigned char)column;
 }
 
 void stream_reading_add(const stream_plan *p, stream_reading *r, size_t column, double value)
@@ -147,13 +154,48 @@ static void add_verdict(const stream_plan *p, const stream_mark *mark, char *ver
             used += (size_t)snprintf(verdict + used, VERDICT_MAX - used, " %s", c->limits[i].id);
 }
 
-static bc_status judge(const stream_plan *p, stream_batch *b, const bc_gas *gas, stream_mark *mark, stream_cells *cells, bc_error *err)
+static bool counts(const stream_plan *p, const bc_limit *limit, size_t column)
 {
-    const bc_status status = row_judge(p->contract, gas, b->limits + b->count * stream_limits(p), &mark->known, &mark->broken, err);
+    const stream_column *c = &p->columns[column];
 
-    if (status == BC_OK)
-        add_verdict(p, mark, cells->verdict);
-    return status;
+    if (limit->kind == BC_LIMIT_QUANTITY || limit->kind == BC_LIMIT_INDEX)
+        return false;
+    for (size_t i = 0; i < c->share_count; i++)
+        if (limit->weight[p->shares[c->first_share + i].species] > 0.0)
+            return true;
+    return false;
+}
+
+/* What was not measured may have been anything: a limit that counts it stays open, unless the rest alone is above its
+ * maximum. Quantities are left: what is missing from their sum is flagged. */
+static void leave_open(const stream_plan *p, const stream_reading *r, const double values[], stream_mark *mark)
+{
+    for (size_t i = 0; i < p->contract->limit_count; i++) {
+        const bc_limit *limit = &p->contract->limits[i];
+        const uint64_t bit = (uint64_t)1 << i;
+        const bool above = (mark->broken & bit) != 0 && limit->has_max && values[i] > limit->max;
+        bool missing = false;
+
+        for (size_t k = 0; k < r->empty_count && !missing; k++)
+            missing = counts(p, limit, r->empty[k]);
+        if (!missing || above)
+            continue;
+        mark->known &= ~bit;
+        mark->broken &= ~bit;
+    }
+}
+
+static bc_status judge(const stream_plan *p, stream_batch *b, const stream_reading *r, const bc_gas *gas, stream_mark *mark, stream_cells *cells,
+                       bc_error *err)
+{
+    double *values = b->limits + b->count * stream_limits(p);
+    const bc_status status = row_judge(p->contract, gas, values, &mark->known, &mark->broken, err);
+
+    if (status != BC_OK)
+        return status;
+    leave_open(p, r, values, mark);
+    add_verdict(p, mark, cells->verdict);
+    return BC_OK;
 }
 
 static bool make_gas(const stream_plan *p, const stream_reading *r, bc_gas *gas, bc_subject *subject, bc_error *err)
@@ -190,7 +232,7 @@ void stream_evaluate(const stream_plan *p, stream_batch *b, stream_reading *r, s
 
     memset(cells->length, 0, p->figure_count);
     cells->verdict[0] = '\0';
-    mark->good = make_gas(p, r, &gas, &subject, &err) && (!p->contract || judge(p, b, &gas, mark, cells, &err) == BC_OK);
+    mark->good = make_gas(p, r, &gas, &subject, &err) && (!p->contract || judge(p, b, r, &gas, mark, cells, &err) == BC_OK);
     if (!mark->good) {
         (void)snprintf(r->reason, sizeof r->reason, "%.*s", STREAM_REASON_MAX - 1, err.message);
         return;

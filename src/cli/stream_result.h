@@ -14,12 +14,15 @@ typedef struct {
     bool has_time, zoned;
     double time_s;
     double flow;                         /* in the unit of its column; negative: not given */
+    size_t empty_count;
+    unsigned char empty[LOG_COLUMNS_MAX]; /* columns of components without a value */
     char reason[STREAM_REASON_MAX];      /* why there are no results; "" when there are */
 } stream_reading;
 
 /* The values of all components of a row, and what they are together. */
 void stream_reading_start(stream_reading *r);
 void stream_reading_add(const stream_plan *p, stream_reading *r, size_t column, double value);
+void stream_reading_miss(stream_reading *r, size_t column);
 
 /* Makes room for the results of a row of so many bytes, and a mark; false without memory. */
 bool stream_make_room(const stream_plan *p, stream_batch *b, size_t length);

@@ -109,7 +109,7 @@ static void read_share(const stream_plan *p, stream_reading *r, size_t column, c
     double value = 0.0;
 
     if (*text == '\0') {
-        r->flags |= 1U << STREAM_empty;
+        stream_reading_miss(r, column);
         return;
     }
     if (!read_number(p, *text == '<' ? text + 1 : text, &value)) {
