@@ -241,6 +241,65 @@ static void velocities_outside_the_rule_are_marked_or_refused(void **state)
     assert_false(velocity_of("methane=40,hydrogen=60").in_range);
 }
 
+static bc_gas two_of(size_t first, double x, size_t second)
+{
+    bc_gas gas = {{0.0}};
+
+    gas.x[first] = x;
+    gas.x[second] = 1.0 - x;
+    return gas;
+}
+
+/* The ends of bluecone/flammability.h are inside, what is just beyond is not. */
+static void the_rules_end_where_the_header_says(void **state)
+{
+    const struct {
+        double x;
+        bool odd, with_oxygen, covered, fast, tabulated;
+    } ROWS[] = {{0.0, false, false, true, true, true}, {1e-6, true, true, false, false, false}};
+    bc_flammability f;
+    bc_burning_velocity v;
+    bc_error err = {.status = BC_OK};
+
+    (void)state;
+    for (size_t i = 0; i < BC_COUNT(ROWS); i++) {
+        bc_gas gas = two_of(SPECIES_hydrogen_sulfide, BC_FLAMMABILITY_ODD_MAX + ROWS[i].x, SPECIES_methane);
+
+        assert_int_equal(bc_flammability_of(&gas, &f, NULL), BC_OK);
+        assert_int_equal(f.outside_rule, ROWS[i].odd);
+        gas = two_of(SPECIES_oxygen, BC_FLAMMABILITY_OXYGEN_MAX + ROWS[i].x, SPECIES_methane);
+        assert_int_equal(bc_flammability_of(&gas, &f, NULL), BC_OK);
+        assert_int_equal(f.with_oxygen, ROWS[i].with_oxygen);
+        gas = two_of(SPECIES_methane, BC_FLAMMABILITY_COVERED_MIN - ROWS[i].x, SPECIES_carbonyl_sulfide);
+        assert_int_equal(bc_flammability_of(&gas, &f, NULL) == BC_OK, ROWS[i].covered);
+        gas = two_of(SPECIES_hydrogen, BC_BURNING_HYDROGEN_MAX + ROWS[i].x, SPECIES_methane);
+        assert_int_equal(bc_burning_velocity_of(&gas, &v, NULL), BC_OK);
+        assert_int_equal(v.in_range, ROWS[i].fast);
+        gas = two_of(SPECIES_methane, BC_BURNING_COVERED_MIN - ROWS[i].x, SPECIES_carbon_monoxide);
+        assert_int_equal(bc_burning_velocity_of(&gas, &v, NULL) == BC_OK, ROWS[i].tabulated);
+    }
+    bc_gas gas = two_of(SPECIES_methane, 0.75, SPECIES_carbonyl_sulfide);
+
+    assert_int_equal(bc_flammability_of(&gas, &f, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "only 75 %"));
+    gas = two_of(SPECIES_methane, 0.75, SPECIES_carbon_monoxide);
+    assert_int_equal(bc_burning_velocity_of(&gas, &v, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "only 75 %"));
+}
+
+/* Each end of the band follows the same rule: 1/S = sum(x_i/S_i) over the ends of the pure gases, slowed alike. */
+static void the_band_of_a_mixture_is_that_of_its_parts(void **state)
+{
+    const bc_burning_velocity methane = velocity_of("methane=100"), propane = velocity_of("propane=100");
+    const bc_burning_velocity v = velocity_of("methane=56,propane=24,nitrogen=20");
+    const double slower = 1.0 - 2.1 * v.diluent;
+
+    (void)state;
+    assert_true(v.diluent > 0.01);
+    assert_within(v.low_m_per_s, slower / (0.7 / methane.low_m_per_s + 0.3 / propane.low_m_per_s), 1e-12, "lower end");
+    assert_within(v.high_m_per_s, slower / (0.7 / methane.high_m_per_s + 0.3 / propane.high_m_per_s), 1e-12, "upper end");
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -259,6 +318,8 @@ int main(void)
         cmocka_unit_test(inerts_slow_a_flame_by_their_mass),
         cmocka_unit_test(air_in_the_gas_is_no_diluent),
         cmocka_unit_test(velocities_outside_the_rule_are_marked_or_refused),
+        cmocka_unit_test(the_rules_end_where_the_header_says),
+        cmocka_unit_test(the_band_of_a_mixture_is_that_of_its_parts),
     };
 
     return cmocka_run_group_tests_name("flammability", tests, NULL, NULL);
