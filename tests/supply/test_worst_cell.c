@@ -219,6 +219,47 @@ static void a_search_gives_the_windows_back(void **state)
     bc_worst_close(worst);
 }
 
+/* What bc_space allows, asked bound by bound; a bound itself is allowed, and the sum may be off by rounding alone. */
+static void a_composition_is_allowed_within_all_bounds_and_no_other(void **state)
+{
+    static const window WINDOWS[] = {{"methane", 50, 100}, {"ethane", 10, 30}, {"nitrogen", 0, 20}};
+    static const struct {
+        double x[3];
+        bool allowed;
+    } ROWS[] = {{{0.75, 0.25, 0.0}, true},     {{0.5, 0.3, 0.2}, true},      {{0.75, 0.1, 0.15}, true},    {{0.499, 0.301, 0.2}, false},
+                {{0.91, 0.09, 0.0}, false},    {{0.76, 0.25, -0.01}, false}, {{0.6, 0.19, 0.21}, false},   {{0.75, 0.25, 0.001}, false},
+                {{0.749, 0.25, 0.0}, false},   {{0.69, 0.31, 0.0}, false},   {{0.70, 0.25, 0.05}, true},   {{0.695, 0.25, 0.055}, false}};
+    bc_error err;
+
+    (void)state;
+    memset(&space, 0, sizeof space);
+    add_windows(&space, WINDOWS, COUNT(WINDOWS));
+    bc_worst *worst = opened(&space);
+
+    for (size_t i = 0; i < 10; i++)
+        assert_int_equal(worst_allowed(worst, ROWS[i].x), ROWS[i].allowed);
+    bc_worst_close(worst);
+    add_group(&space, (const char *const[4]){"nitrogen", NULL}, 5.0, 100.0);
+    worst = opened(&space);
+    assert_false(worst_allowed(worst, ROWS[0].x));
+    assert_true(worst_allowed(worst, ROWS[10].x));
+    bc_worst_close(worst);
+    memset(&space, 0, sizeof space);
+    add_windows(&space, WINDOWS, COUNT(WINDOWS));
+    add_limit(&space, "hhv-mole", "15/15", 0.0, 1e9);
+    const bc_gas edge = gas_of(&space, ROWS[10].x); /* the limit is the figure of one gas, the next has less */
+    double value = 0.0;
+
+    assert_ok(bc_ratio_evaluate(&space.limits[0].ratio, &edge, &value, &err), &err);
+    space.limits[0].min = value;
+    worst = opened(&space);
+    assert_true(worst_allowed(worst, ROWS[10].x));
+    assert_true(worst_limit_holds(worst, 0, ROWS[10].x));
+    assert_false(worst_allowed(worst, ROWS[11].x));
+    assert_false(worst_limit_holds(worst, 0, ROWS[11].x));
+    bc_worst_close(worst);
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -227,6 +268,7 @@ int main(void)
         cmocka_unit_test(cells_are_cut_without_a_gap),
         cmocka_unit_test(a_bound_holds_when_the_cells_run_out),
         cmocka_unit_test(a_search_gives_the_windows_back),
+        cmocka_unit_test(a_composition_is_allowed_within_all_bounds_and_no_other),
     };
 
     return cmocka_run_group_tests_name("supply/test_worst_cell", tests, NULL, NULL);
