@@ -153,6 +153,10 @@ static void temperatures_and_species_outside_the_data_are_refused(void **state)
     assert_refused(bc_thermo_liquid_water(273.1, &value, &err), &err, BC_ERR_RANGE, "liquid water");
     assert_refused(bc_thermo_liquid_water(600.1, &value, &err), &err, BC_ERR_RANGE, "liquid water");
     assert_within(value, 47.11, 0.0);
+    for (size_t k = 0; k < 2; k++) { /* the ends belong to the data */
+        assert_ok(bc_thermo_cp(SPECIES_ethane, k == 0 ? BC_THERMO_T_MIN_K : BC_THERMO_T_MAX_K, &value, &err), &err);
+        assert_ok(bc_thermo_liquid_water(k == 0 ? 273.15 : 600.0, &value, &err), &err);
+    }
     assert_null(bc_thermo_coefficients(bc_thermo_count(), 0));
     for (size_t k = 0; k < 2; k++) {
         const size_t beyond = k == 0 ? bc_thermo_count() : SIZE_MAX;
