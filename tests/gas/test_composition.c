@@ -537,6 +537,8 @@ static void a_shortfall_completed_with_a_species_is_what_it_would_have_been(void
     assert_same_gas("saturated", &completed, &whole.gas, 1e-15);
     parse("methane=92.4,ethane=rest", &c);
     assert_refused(bc_composition_completed(&c, SPECIES_hydrogen, &completed, &err), &err, BC_ERR_USAGE, "nothing is missing");
+    parse("methane=96.4,ethane=2.4", &c);
+    assert_refused(bc_composition_completed(&c, bc_species_count(), &completed, &err), &err, BC_ERR_USAGE, "nothing is missing");
     parse("methane=96.4,ethane=4.4", &c);
     assert_refused(bc_composition_completed(&c, SPECIES_hydrogen, &completed, &err), &err, BC_ERR_USAGE, "nothing is missing");
 }

@@ -244,6 +244,24 @@ static void a_gas_of_much_more_heat_may_have_no_lifting_index(void **state)
     assert_outside(index_of("aga-yellow-tip", "methane=100", "hydrogen=100"), "yellow tip limit");
 }
 
+/* A yellow tip limit of zero, of a gas without hydrocarbons, divides nothing and is divided by nothing. */
+static void without_a_yellow_tip_limit_there_is_no_index_of_it(void **state)
+{
+    const bc_aga_gas gas = aga_gas("methane=100");
+
+    (void)state;
+    assert_true(gas.yellow_tip_limit > 0.0 && bc_aga_compare(&gas, &gas).has_yellow_tip);
+    for (int side = 0; side < 2; side++) {
+        bc_aga_gas other = gas;
+
+        other.yellow_tip_limit = 0.0;
+        const bc_aga index = side ? bc_aga_compare(&gas, &other) : bc_aga_compare(&other, &gas);
+
+        assert_false(index.has_yellow_tip);
+        assert_within(index.yellow_tip, 0.0, 0.0);
+    }
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -261,6 +279,7 @@ int main(void)
         cmocka_unit_test(the_class_of_the_old_gas_picks_the_limits),
         cmocka_unit_test(gases_that_cannot_be_burnt_with_air_are_refused),
         cmocka_unit_test(oxygen_rich_gas_has_no_flame_speed_factor),
+        cmocka_unit_test(without_a_yellow_tip_limit_there_is_no_index_of_it),
         cmocka_unit_test(a_gas_of_much_more_heat_may_have_no_lifting_index),
     };
 

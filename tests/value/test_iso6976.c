@@ -444,9 +444,48 @@ static void volumes_of_two_states_differ_by_their_gas_law(void **state)
     }
 }
 
+/* ISO 6976:2016 annex A: u of the vaporisation enthalpy 4 J/mol, of Z of air 0.000015; R and the mass of air with theirs
+ * (R 8.3144621(75) J/(mol K), M of air 28.96546(17) g/mol). */
+static void the_constants_have_the_uncertainties_of_annex_a(void **state)
+{
+    const bc_state at = bc_state_default();
+    bc_reference r;
+    bc_error err;
+
+    (void)state;
+    assert_ok(bc_reference_at(&at, &r, &err), &err);
+    assert_within(r.u_vaporisation_j_per_mol, 4.0, 0.0);
+    assert_within(r.u_air_z, 0.000015, 0.0);
+    assert_within(r.u_r_j_per_mol_k, 0.0000075, 1e-18);
+    assert_within(r.u_air_kg_per_mol, 0.00017e-3, 1e-18);
+}
+
+/* Between the columns 1 - Z of air follows the parabola through 0, 15 and 20 C, whose third difference vanishes:
+ * f(3) - 3 f(2) + 3 f(1) - f(0) = 0 over equal steps, here from 5 to 20 C; both editions have the three columns. */
+static void z_of_air_lies_on_the_parabola_of_its_columns(void **state)
+{
+    (void)state;
+    for (int edition = 1995; edition <= 2016; edition += 21) {
+        double z[5];
+
+        for (int i = 0; i < 5; i++) {
+            const bc_state at = {.combustion_c = 15.0, .metering_c = 5.0 * i, .metering_pa = 101325.0, .edition = edition};
+            bc_reference r;
+            bc_error err;
+
+            assert_ok(bc_reference_at(&at, &r, &err), &err);
+            z[i] = r.air_z;
+        }
+        assert_within(z[4] - 3.0 * z[3] + 3.0 * z[2] - z[1], 0.0, 1e-12);
+        assert_within(z[3] - 3.0 * z[2] + 3.0 * z[1] - z[0], 0.0, 1e-12);
+    }
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
+        cmocka_unit_test(the_constants_have_the_uncertainties_of_annex_a),
+        cmocka_unit_test(z_of_air_lies_on_the_parabola_of_its_columns),
         cmocka_unit_test(the_example_of_annex_d_comes_out),
         cmocka_unit_test(net_heats_are_the_gross_ones_less_the_water_formed),
         cmocka_unit_test(metering_pressure_enters_volume_and_compression),
