@@ -800,6 +800,18 @@ static void without_a_family_the_gas_itself_tells_whether_oxygen_is_strange(void
         {"propane=56,air=44", "mixed on purpose", false},
         {"methane=55,carbon-dioxide=43.5,nitrogen=0.9,oxygen=0.6", "digester gas", false},
         {"hydrogen=50,methane=30,carbon-monoxide=10,nitrogen=9,oxygen=1", "manufactured gas", false},
+        /* one mark at a time of a gas that is no supply gas */
+        {"methane=69.4,hydrogen=30,oxygen=0.6", "less than 70 % hydrocarbons", false},
+        {"methane=95,nitrogen=1.9,oxygen=3.1", "oxygen of several per cent", false},
+        {"methane=97,carbon-monoxide=0.6,nitrogen=1.9,oxygen=0.5", "carbon monoxide", false},
+        {"methane=85,carbon-dioxide=10.1,nitrogen=4.4,oxygen=0.5", "much carbon dioxide", false},
+        {"methane=85,methanol=5,nitrogen=9.5,oxygen=0.5", "a supply gas with methanol", true},
+        {"methane=69,methanol=20,nitrogen=10.5,oxygen=0.5", "what holds oxygen is no hydrocarbon", false},
+        {"methane=70.4,hydrogen=29,oxygen=0.6", "just enough hydrocarbons", true},
+        {"methane=95,nitrogen=2.1,oxygen=2.9", "just little enough oxygen", true},
+        {"methane=97,carbon-monoxide=0.4,nitrogen=2.1,oxygen=0.5", "a trace of carbon monoxide", true},
+        {"methane=85,carbon-dioxide=9.9,nitrogen=4.6,oxygen=0.5", "some carbon dioxide", true},
+        {"methane=96.2,nitrogen=3.775,oxygen=0.025", "just more than a trace", true},
     };
     bc_composition c;
 

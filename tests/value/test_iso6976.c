@@ -460,6 +460,39 @@ static void the_constants_have_the_uncertainties_of_annex_a(void **state)
     assert_within(r.u_air_kg_per_mol, 0.00017e-3, 1e-18);
 }
 
+/* What an edition does not list comes from the other one, and says so; what none lists from formation enthalpies. */
+static void a_heat_that_an_edition_lacks_is_that_of_the_other(void **state)
+{
+    bc_reference of[2];
+    size_t only[2] = {0, 0}, both = 0, neither = 0;
+    bc_error err;
+
+    (void)state;
+    for (int k = 0; k < 2; k++) {
+        const bc_state at = {.combustion_c = 25.0, .metering_c = 0.0, .metering_pa = 101325.0, .edition = k == 0 ? 1995 : 2016};
+
+        assert_ok(bc_reference_at(&at, &of[k], &err), &err);
+    }
+    for (size_t i = 0; i < bc_species_count(); i++) {
+        const char *old_source = bc_reference_heat_source(i, 1995), *new_source = bc_reference_heat_source(i, 2016);
+        const bool old_has = strstr(old_source, "1995") != NULL, new_has = strstr(new_source, "2016") != NULL;
+
+        if (of[0].gross_j_per_mol[i] == 0.0)
+            continue; /* inert: no table is needed */
+        both += old_has && new_has;
+        neither += !old_has && !new_has;
+        for (int k = 0; k < 2; k++) {
+            const bool own = k == 0 ? old_has : new_has, other = strstr(k == 0 ? old_source : new_source, k == 0 ? "2016" : "1995") != NULL;
+
+            only[k] += other;
+            assert_int_equal(of[k].heat_origin[i], own ? BC_ORIGIN_EDITION : other ? BC_ORIGIN_OTHER_EDITION : BC_ORIGIN_FORMATION);
+            if (other)
+                assert_within_at(bc_species_id(i), of[0].gross_j_per_mol[i], of[1].gross_j_per_mol[i], 0.0);
+        }
+    }
+    assert_true(both > 10 && neither > 0 && only[0] > 0);
+}
+
 /* Between the columns 1 - Z of air follows the parabola through 0, 15 and 20 C, whose third difference vanishes:
  * f(3) - 3 f(2) + 3 f(1) - f(0) = 0 over equal steps, here from 5 to 20 C; both editions have the three columns. */
 static void z_of_air_lies_on_the_parabola_of_its_columns(void **state)
@@ -485,6 +518,7 @@ int main(void)
 {
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(the_constants_have_the_uncertainties_of_annex_a),
+        cmocka_unit_test(a_heat_that_an_edition_lacks_is_that_of_the_other),
         cmocka_unit_test(z_of_air_lies_on_the_parabola_of_its_columns),
         cmocka_unit_test(the_example_of_annex_d_comes_out),
         cmocka_unit_test(net_heats_are_the_gross_ones_less_the_water_formed),
