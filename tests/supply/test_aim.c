@@ -250,6 +250,28 @@ static void no_share_of_a_solution_is_negative(void **state)
     }
 }
 
+/* Shares that would have to be negative meet no aim, though Newton's method finds them. */
+static void a_solution_with_a_negative_share_is_none(void **state)
+{
+    static const char *const GASES[] = {"methane=60,hydrogen=20,nitrogen=20", "methane=80,hydrogen=10,nitrogen=10", "methane=40,hydrogen=40,nitrogen=20"};
+    static const double SHARE[] = {-0.1, 0.7, 0.4};
+    static setting s;
+    bc_aim aim;
+    bc_error err;
+
+    (void)state;
+    open_setting(&s, BC_BY_MOLE, GASES, 3);
+    add_aim(&s, "hydrogen", "", 1.0);
+    add_aim(&s, "nitrogen", "", 1.0);
+    for (size_t i = 0; i < 2; i++)
+        s.aims.limits[i].min = s.aims.limits[i].max = figure(&s, i, SHARE);
+    assert_ok(bc_aim_find(&s.problem, &aim, &err), &err);
+    assert_false(aim.reached);
+    assert_int_equal(aim.count, 1);
+    for (size_t i = 0; i < 3; i++)
+        assert_true(aim.share[0][i] >= 0.0);
+}
+
 static void a_wrong_count_of_free_shares_is_told(void **state)
 {
     static const char *const GASES[] = {"methane=100", "hydrogen=100", "propane=100", "nitrogen=100"};
@@ -303,6 +325,7 @@ int main(void)
         cmocka_unit_test(a_fixed_share_stays_and_several_aims_may_be_out_of_reach),
         cmocka_unit_test(a_figure_that_no_blend_has_is_refused),
         cmocka_unit_test(no_share_of_a_solution_is_negative),
+        cmocka_unit_test(a_solution_with_a_negative_share_is_none),
         cmocka_unit_test(a_wrong_count_of_free_shares_is_told),
         cmocka_unit_test(windows_lie_between_the_crossings),
     };

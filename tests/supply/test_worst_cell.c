@@ -248,6 +248,37 @@ static void a_search_gives_the_windows_back(void **state)
     bc_worst_close(worst);
 }
 
+/* CO2 per heat of a gas without heat, volumes of what the summation formula makes no gas: neither has a figure. */
+static void a_gas_without_a_figure_has_no_raw_one(void **state)
+{
+    static const window WINDOWS[] = {{"methane", 0, 100}, {"nitrogen", 0, 100}, {"n-pentadecane", 0, 100}};
+    static const double METHANE[] = {1.0, 0.0, 0.0}, NITROGEN[] = {0.0, 1.0, 0.0}, HEAVY[] = {0.0, 0.0, 1.0};
+    bc_reference reference;
+    bc_ratio ratio;
+    worst_term term;
+    double raw = -7.0;
+    bc_error err;
+
+    (void)state;
+    memset(&space, 0, sizeof space);
+    add_windows(&space, WINDOWS, COUNT(WINDOWS));
+    bc_worst *worst = opened(&space);
+
+    reference_of("15/0", &reference);
+    assert_ok(bc_ratio_of_quantity(quantity_of("co2-factor-net"), &reference, &ratio, &err), &err);
+    assert_ok(worst_term_of(worst, &ratio, &term, &err), &err);
+    assert_false(worst_raw(worst, &term, NITROGEN, &raw));
+    assert_within(raw, -7.0, 0.0);
+    assert_true(worst_raw(worst, &term, METHANE, &raw));
+    assert_ok(bc_ratio_of_quantity(quantity_of("hhv"), &reference, &ratio, &err), &err);
+    assert_ok(worst_term_of(worst, &ratio, &term, &err), &err);
+    raw = -7.0;
+    assert_false(worst_raw(worst, &term, HEAVY, &raw));
+    assert_within(raw, -7.0, 0.0);
+    assert_true(worst_raw(worst, &term, NITROGEN, &raw));
+    bc_worst_close(worst);
+}
+
 /* What bc_space allows, asked bound by bound; a bound itself is allowed, and the sum may be off by rounding alone. */
 static void a_composition_is_allowed_within_all_bounds_and_no_other(void **state)
 {
@@ -298,6 +329,7 @@ int main(void)
         cmocka_unit_test(a_bound_holds_when_the_cells_run_out),
         cmocka_unit_test(a_search_gives_the_windows_back),
         cmocka_unit_test(extremes_of_a_contract_take_few_cells),
+        cmocka_unit_test(a_gas_without_a_figure_has_no_raw_one),
         cmocka_unit_test(a_composition_is_allowed_within_all_bounds_and_no_other),
     };
 

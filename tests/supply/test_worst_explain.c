@@ -261,6 +261,10 @@ static void a_limit_is_idle_by_what_the_others_leave(void **state)
     natural_gas(&space);
     add_contract(&space);
     add_limit(&space, "hhv", "25/0", 30.0, 70.0);
+    add_limit(&space, "hhv", "25/0", 30.0, 70.0); /* either is idle by the other */
+    add_limit(&space, "wobbe-net", "25/0", 40.0, HUGE_VAL);
+    add_limit(&space, "density", "25/0", -HUGE_VAL, 0.99);
+    add_limit(&space, "wobbe-gross", "15/0", -HUGE_VAL, 53.7);
     bc_worst *all = opened(&space);
 
     for (size_t i = 0; i < space.limit_count; i++) {
@@ -269,6 +273,11 @@ static void a_limit_is_idle_by_what_the_others_leave(void **state)
 
         assert_ok(bc_worst_standing(all, i, &s, &err), &err);
         for (int upper = 0; upper < 2; upper++) {
+            const bool stated = isfinite(upper ? space.limits[i].max : space.limits[i].min);
+
+            assert_int_equal(upper ? s.max.stated : s.min.stated, stated);
+            if (!stated)
+                continue;
             others = space;
             *(upper ? &others.limits[i].max : &others.limits[i].min) = upper ? HUGE_VAL : -HUGE_VAL;
             bc_worst *left = opened(&others);
@@ -282,6 +291,42 @@ static void a_limit_is_idle_by_what_the_others_leave(void **state)
     }
     assert_true(idle > 1 && idle < 2 * space.limit_count);
     bc_worst_close(all);
+}
+
+/* Small figures stand as large ones do: rounding is relative. Hydrogen sulfide in kg a cubic metre. */
+static void a_limit_on_a_trace_stands_as_its_extreme_does(void **state)
+{
+    static const double MAX[] = {1e-6, 1e-3};
+    double weight[BC_SPECIES_CAPACITY] = {0.0};
+    static bc_space bare;
+    bc_reference reference;
+    bc_ratio sulfur;
+    bc_extremes e;
+    bc_error err;
+
+    (void)state;
+    natural_gas(&bare);
+    reference_of("15/15", &reference);
+    weight[species_of("hydrogen-sulfide")] = bc_species_molar_mass_kg_per_mol(species_of("hydrogen-sulfide"));
+    assert_ok(bc_ratio_of_concentration(weight, 1.0, &reference, &sulfur, &err), &err);
+    bc_worst *none = opened(&bare);
+
+    assert_ok(bc_worst_ratio(none, &sulfur, &e, &err), &err);
+    bc_worst_close(none);
+    for (size_t i = 0; i < COUNT(MAX); i++) {
+        bc_limit_standing s;
+
+        space = bare;
+        space.limits[space.limit_count++] = (bc_space_limit){sulfur, -HUGE_VAL, MAX[i]};
+        bc_worst *worst = opened(&space);
+
+        assert_ok(bc_worst_standing(worst, 0, &s, &err), &err);
+        assert_int_equal(s.max.open, e.max.value > MAX[i]);
+        assert_int_equal(s.max.idle, e.max.value <= MAX[i]);
+        assert_within(s.max.excess, s.max.open ? e.max.value - MAX[i] : 0.0, 1e-6 * e.max.value);
+        bc_worst_close(worst);
+    }
+    assert_true(e.max.value > MAX[0] && e.max.value < MAX[1]);
 }
 
 /* A limit bounds its own figure, and not one that is only like it: another heat, another temperature or pressure of
@@ -522,6 +567,7 @@ int main(void)
         cmocka_unit_test(limits_are_idle_or_open_as_the_ranges_have_it),
         cmocka_unit_test(limits_are_open_by_what_the_ranges_alone_allow),
         cmocka_unit_test(a_limit_is_idle_by_what_the_others_leave),
+        cmocka_unit_test(a_limit_on_a_trace_stands_as_its_extreme_does),
         cmocka_unit_test(a_limit_proves_nothing_of_a_figure_like_it),
         cmocka_unit_test(figures_that_some_gas_lacks_are_refused),
         cmocka_unit_test(standing_and_searching_leave_the_space_as_it_was),
