@@ -128,7 +128,7 @@ static bc_status close_sum(bc_composition *c, bc_error *err)
 
         return blame(c, rest->line, status, err);
     }
-    rest->amount = sum < 1.0 ? 1.0 - sum : 0.0;
+    rest->amount = fmax(0.0, 1.0 - sum);
     c->sum = 1.0;
     return BC_OK;
 }

@@ -363,6 +363,27 @@ static void more_periods_than_are_kept_are_refused_with_a_remedy(void **state)
     tally_close(t);
 }
 
+/* When no period more is kept, rows of those that are there are still taken: the clock went back by a day. */
+static void a_full_tally_still_takes_rows_of_its_periods(void **state)
+{
+    tally *t = open_one(86400.0, HUGE_VAL, TALLY_DAY);
+    tally_span span;
+    tally_cover cover;
+
+    (void)state;
+    for (size_t day = 0; day < TALLY_PERIOD_MAX; day++)
+        add(t, 86400.0 * (double)day, 1.5, 0.0);
+    add(t, 86400.0 * (TALLY_PERIOD_MAX - 2.0), 2.5, 0.0);
+    add(t, 86400.0 * (TALLY_PERIOD_MAX - 1.0), 3.5, 0.0);
+    case_settle(t);
+    tally_covers(t, &cover);
+    assert_int_equal(cover.rows, TALLY_PERIOD_MAX + 2);
+    assert_int_equal(tally_period_count(t), TALLY_PERIOD_MAX);
+    tally_period_at(t, TALLY_PERIOD_MAX - 2, &span);
+    assert_int_equal(span.rows, 2);
+    tally_close(t);
+}
+
 static void what_is_no_row_is_refused_and_changes_nothing(void **state)
 {
     tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
@@ -862,6 +883,7 @@ int main(void)
         cmocka_unit_test(periods_are_days_and_months_of_the_calendar),
         cmocka_unit_test(a_clock_put_back_over_the_end_of_a_period_counts_in_the_one_before),
         cmocka_unit_test(more_periods_than_are_kept_are_refused_with_a_remedy),
+        cmocka_unit_test(a_full_tally_still_takes_rows_of_its_periods),
         cmocka_unit_test(what_is_no_row_is_refused_and_changes_nothing),
         cmocka_unit_test(a_plan_out_of_bounds_is_refused),
         cmocka_unit_test(excursions_are_told_when_they_end),
