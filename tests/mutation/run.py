@@ -243,10 +243,16 @@ def judge_all(mutants, wanted, benches, tests):
 
 
 def known_equivalents():
-    """Reasons by (path, text of the line, change), from equivalent.txt."""
+    """Reasons by (path, text of the line, change), from equivalent.txt; the text may end in #N, the Nth line that reads so."""
     rows = [line.split(" | ") for line in read(os.path.join(os.path.dirname(__file__), "equivalent.txt")).splitlines()
             if not line.startswith("#")]
     return {(path, text, change): why for path, text, change, why in rows}
+
+
+def reason_of(row, reasons):
+    """Why a survivor is equivalent; None when it is not known to be."""
+    path, source, same, _, _, change = row[:6]
+    return reasons.get((path, source, change)) or reasons.get((path, f"{source} #{same}", change))
 
 
 def table(counted):
@@ -261,7 +267,7 @@ def report(rows, seed):
     """Counts the rows of results, names the survivors; true when enough were killed."""
     reasons = known_equivalents()
     counted = sorted((row for row in rows if row[-1] not in ("invalid", "same")), key=lambda row: (row[0], int(row[-2])))
-    excused = [row for row in counted if row[-1] == "" and (row[0], row[1], row[5]) in reasons]
+    excused = [row for row in counted if row[-1] == "" and reason_of(row, reasons)]
     judged = [row for row in counted if row not in excused]
     lines = [f"{len(counted)} mutants, seed {seed}; besides {sum(row[-1] == 'invalid' for row in rows)} that do not compile and "
              f"{sum(row[-1] == 'same' for row in rows)} of the same object code; "
@@ -270,7 +276,7 @@ def report(rows, seed):
     lines += [f"without {len(excused)} survivors that are known to be equivalent:", *table(judged), "survivors:"]
     lines += [f"{row[0]}:{row[-2]}: {row[5]}" for row in judged if row[-1] == ""]
     lines += ["known to be equivalent:"]
-    lines += [f"{row[0]}:{row[-2]}: {row[5]}: {reasons[row[0], row[1], row[5]]}" for row in excused]
+    lines += [f"{row[0]}:{row[-2]}: {row[5]}: {reason_of(row, reasons)}" for row in excused]
     text = "\n".join(lines) + "\n"
     print(text, end="")
     with open(os.path.join(ROOT, "report.txt"), "w", encoding="utf-8") as file:
@@ -303,7 +309,7 @@ def chosen(seed):
         return sorted(mutants, key=lambda m: m.rank(seed)), int(os.environ.get("MUTANTS") or 300), []
     reasons = known_equivalents()
     rows = last_results()
-    stay = [row for row in rows if row[-1] != "" or (row[0], row[1], row[5]) in reasons]
+    stay = [row for row in rows if row[-1] != "" or reason_of(row, reasons)]
     left = {row[:6] for row in rows if row not in stay}
     mutants = [m for m in mutants if m.identity in left]
     return mutants, len(mutants), stay

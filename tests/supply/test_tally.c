@@ -841,6 +841,23 @@ static void a_figure_that_never_moves_fills_one_bar(void **state)
     }
 }
 
+/* Values that one bin holds are spread evenly over what the figure was, from 1 to 1.00001: a bin begins with 1 and is
+ * 1.5e-5 wide. The bars share it by what they overlap; those around it have nothing. */
+static void a_bin_wider_than_a_bar_is_shared_evenly(void **state)
+{
+    tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
+    double held[14];
+
+    (void)state;
+    for (size_t k = 0; k < 100; k++)
+        add(t, FEBRUARY + 60.0 * (double)k, k % 2 ? 1.00001 : 1.0, 0.0);
+    case_settle(t);
+    tally_bars(t, 0, 1.0 - 1.5e-6, 1.0 + 12.5e-6, COUNT(held), held); /* the ends lie in the middle of bars */
+    for (size_t k = 0; k < COUNT(held); k++)
+        assert_within(held[k], k == 1 || k == 11 ? 300.0 : k > 1 && k < 11 ? 600.0 : 0.0, 1e-3);
+    tally_close(t);
+}
+
 /* An outage ends an excursion, though the limit is broken on both sides of it. */
 static void an_excursion_ends_at_a_gap(void **state)
 {
@@ -898,6 +915,7 @@ int main(void)
         cmocka_unit_test(more_figures_leave_room_for_fewer_periods),
         cmocka_unit_test(the_bytes_of_a_tally_are_those_of_its_blocks),
         cmocka_unit_test(a_figure_that_never_moves_fills_one_bar),
+        cmocka_unit_test(a_bin_wider_than_a_bar_is_shared_evenly),
         cmocka_unit_test(an_excursion_ends_at_a_gap),
         cmocka_unit_test(ten_years_of_days_stay_below_sixteen_mebibytes),
     };
