@@ -162,6 +162,23 @@ static void a_trim_within_its_range_holds_the_oxygen_and_not_quite_the_air_facto
     }
 }
 
+/* The oxygen that a trim holds is that of the old gas, however little: at 0.1 % of air beyond what is needed, too. */
+static void a_trim_holds_the_least_oxygen(void **state)
+{
+    const bc_reference reference = reference_at("15/15");
+    const bc_subject natural = subject_of(&reference, NATURAL), oven = subject_of(&reference, COKE_OVEN);
+    bc_burner b = burner_with(BC_CONTROL_TRIM_AIR);
+
+    (void)state;
+    b.lambda = 1.001;
+    const bc_burner_case set = set_on(&b, &natural);
+    const bc_burner_response was = response_of(&set, &natural, NULL), is = response_of(&set, &oven, NULL);
+
+    assert_true(was.o2_dry > 1e-4);
+    assert_within(is.o2_dry, was.o2_dry, 1e-9);
+    assert_true(fabs(is.lambda - 1.001) > 1e-6);
+}
+
 static void a_trim_that_holds_with_the_gas_makes_heat_by_the_air_alone(void **state)
 {
     const bc_reference reference = reference_at("15/15");
@@ -527,6 +544,7 @@ int main(void)
         cmocka_unit_test(the_air_factor_goes_with_the_inverse_of_the_air_index),
         cmocka_unit_test(metered_gas_brings_heat_by_its_volume_or_its_mass),
         cmocka_unit_test(a_trim_within_its_range_holds_the_oxygen_and_not_quite_the_air_factor),
+        cmocka_unit_test(a_trim_holds_the_least_oxygen),
         cmocka_unit_test(a_trim_that_holds_with_the_gas_makes_heat_by_the_air_alone),
         cmocka_unit_test(a_trim_at_the_end_of_its_range_lets_the_oxygen_go),
         cmocka_unit_test(entrained_air_keeps_the_momentum_balance),
