@@ -248,6 +248,37 @@ static void a_search_gives_the_windows_back(void **state)
     bc_worst_close(worst);
 }
 
+/* A divisor without an axis, a sum of masses or heats, is nowhere below that of the pure component that has the least,
+ * wherever it stands. */
+static void a_linear_divisor_is_least_in_a_pure_component(void **state)
+{
+    static const window WINDOWS[][2] = {{{"hydrogen", 0, 100}, {"propane", 0, 100}}, {{"propane", 0, 100}, {"hydrogen", 0, 100}}};
+    static const char *const IDS[] = {"hhv-mass", "co2-factor-net"};
+
+    (void)state;
+    for (size_t k = 0; k < COUNT(WINDOWS); k++)
+        for (size_t i = 0; i < COUNT(IDS); i++) {
+            worst_cell cell;
+            worst_term term;
+            bc_reference reference;
+            bc_ratio ratio;
+            bc_error err;
+
+            memset(&space, 0, sizeof space);
+            add_windows(&space, WINDOWS[k], 2);
+            bc_worst *worst = opened(&space);
+
+            reference_of("15/15", &reference);
+            assert_ok(bc_ratio_of_quantity(quantity_of(IDS[i]), &reference, &ratio, &err), &err);
+            assert_ok(worst_term_of(worst, &ratio, &term, &err), &err);
+            assert_within(term.p, 1.0, 0.0);
+            worst_root(worst, &cell);
+            assert_within(worst_phi_least(worst, &term, &cell), fmin(term.d[0], term.d[1]), 0.0);
+            assert_true(term.d[k == 0 ? 0 : 1] < 0.999); /* hydrogen has the least */
+            bc_worst_close(worst);
+        }
+}
+
 /* CO2 per heat of a gas without heat, volumes of what the summation formula makes no gas: neither has a figure. */
 static void a_gas_without_a_figure_has_no_raw_one(void **state)
 {
@@ -329,6 +360,7 @@ int main(void)
         cmocka_unit_test(a_bound_holds_when_the_cells_run_out),
         cmocka_unit_test(a_search_gives_the_windows_back),
         cmocka_unit_test(extremes_of_a_contract_take_few_cells),
+        cmocka_unit_test(a_linear_divisor_is_least_in_a_pure_component),
         cmocka_unit_test(a_gas_without_a_figure_has_no_raw_one),
         cmocka_unit_test(a_composition_is_allowed_within_all_bounds_and_no_other),
     };
