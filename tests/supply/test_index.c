@@ -277,6 +277,20 @@ static void the_line_itself_is_inside_of_a_method(void **state)
     }
 }
 
+/* 5 % of inerts belong to the methane number; more is told in front of what the routes differ by. */
+static void five_per_cent_of_inerts_are_not_yet_told(void **state)
+{
+    static const char *const INERTS[] = {"nitrogen", "carbon-dioxide"};
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(INERTS); i++) {
+        const bc_index at = index_of_two("methane-number", NULL, INERTS[i], 0.05), beyond = index_of_two("methane-number", NULL, INERTS[i], 0.050001);
+
+        assert_null(strstr(at.reason, "inerts above"));
+        assert_non_null(strstr(beyond.reason, "inerts above 5 %"));
+    }
+}
+
 static void what_does_not_burn_has_no_index(void **state)
 {
     (void)state;
@@ -400,6 +414,7 @@ int main(void)
         cmocka_unit_test(gases_outside_a_method_are_marked_with_their_reason),
         cmocka_unit_test(a_gas_just_inside_a_line_is_judged),
         cmocka_unit_test(the_line_itself_is_inside_of_a_method),
+        cmocka_unit_test(five_per_cent_of_inerts_are_not_yet_told),
         cmocka_unit_test(what_does_not_burn_has_no_index),
         cmocka_unit_test(a_gas_that_holds_its_own_air_has_no_index_of_the_air_methods),
         cmocka_unit_test(wrong_calls_are_refused),

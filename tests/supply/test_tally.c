@@ -618,6 +618,41 @@ static void the_longest_excursions_are_kept(void **state)
     free(k);
 }
 
+static int heavier_first(const void *a, const void *b)
+{
+    const uint64_t x = *(const uint64_t *)a, y = *(const uint64_t *)b;
+
+    return (x < y) - (x > y);
+}
+
+/* Whatever the order in which they come, those that are kept are the first of all sorted. */
+static void the_kept_excursions_are_those_of_sorting(void **state)
+{
+    enum { ALL = 3 * TALLY_RUN_MAX };
+    static uint64_t weights[ALL], kept[TALLY_RUN_MAX];
+    chance c = {1964};
+
+    (void)state;
+    for (int order = 0; order < 6; order++) {
+        tally_longest l;
+
+        assert_true(tally_longest_open(&l));
+        for (size_t i = 0; i < ALL; i++) {
+            weights[i] = order == 0 ? i : order == 1 ? ALL - i : chance_bits(&c);
+            const tally_stretch s = {.rows = 1, .weight = weights[i], .from_ms = (int64_t)i};
+
+            tally_longest_add(&l, &s);
+        }
+        assert_int_equal(l.count, TALLY_RUN_MAX);
+        for (size_t i = 0; i < l.count; i++)
+            kept[i] = l.kept[i].weight;
+        qsort(weights, ALL, sizeof *weights, heavier_first);
+        qsort(kept, TALLY_RUN_MAX, sizeof *kept, heavier_first);
+        assert_memory_equal(kept, weights, sizeof kept);
+        tally_longest_close(&l);
+    }
+}
+
 static void a_trend_has_a_thousand_steps_at_most_and_no_excursion_is_lost(void **state)
 {
     tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
@@ -906,6 +941,7 @@ int main(void)
         cmocka_unit_test(excursions_are_told_when_they_end),
         cmocka_unit_test(a_tally_says_what_the_log_of_all_rows_says),
         cmocka_unit_test(the_longest_excursions_are_kept),
+        cmocka_unit_test(the_kept_excursions_are_those_of_sorting),
         cmocka_unit_test(a_trend_has_a_thousand_steps_at_most_and_no_excursion_is_lost),
         cmocka_unit_test(a_trend_of_just_a_thousand_steps_is_not_halved),
         cmocka_unit_test(a_gap_begins_beyond_three_steps),
