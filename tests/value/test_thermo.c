@@ -74,6 +74,24 @@ static void both_ranges_join_at_1000_k(void **state)
     }
 }
 
+/* 1000 K itself belongs to the upper range, here as in the flames: Cp/R = a1 T^-2 + a2 T^-1 + a3 + a4 T + ... by its row. */
+static void the_joint_belongs_to_the_upper_range(void **state)
+{
+    size_t apart = 0;
+
+    (void)state;
+    for (size_t i = 0; i < bc_thermo_count(); i++) {
+        double cp_r[2] = {0.0, 0.0};
+
+        for (int range = 0; range < 2; range++)
+            for (int k = 0; k < 7; k++)
+                cp_r[range] += bc_thermo_coefficients(i, range)[k] * pow(1000.0, k - 2);
+        assert_within_at(bc_thermo_name(i), cp_at(i, 1000.0) / BC_THERMO_R_J_PER_MOL_K, cp_r[1], 1e-12 * cp_r[1]);
+        apart += fabs(cp_r[0] - cp_r[1]) > 1e-11 * cp_r[1];
+    }
+    assert_true(apart > 20);
+}
+
 static void enthalpy_at_298_15_k_is_the_formation_enthalpy(void **state)
 {
     (void)state;
@@ -210,6 +228,7 @@ int main(void)
         cmocka_unit_test(the_slope_of_enthalpy_is_the_heat_capacity_for_every_species),
         cmocka_unit_test(the_slope_of_entropy_is_the_heat_capacity_over_temperature),
         cmocka_unit_test(both_ranges_join_at_1000_k),
+        cmocka_unit_test(the_joint_belongs_to_the_upper_range),
         cmocka_unit_test(enthalpy_at_298_15_k_is_the_formation_enthalpy),
         cmocka_unit_test(the_elements_have_no_formation_enthalpy),
         cmocka_unit_test(key_values_of_codata_are_met),
