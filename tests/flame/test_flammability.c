@@ -55,6 +55,15 @@ static void le_chatelier_meets_measured_mixtures(void **state)
     }
 }
 
+/* What is not there needs no figure. */
+static void an_absent_component_does_not_count(void **state)
+{
+    static const double SHARE[] = {0.25, 0.75, 0.0}, FIGURE[] = {4.0, 12.0, 0.0};
+
+    (void)state;
+    assert_within(bc_le_chatelier(SHARE, FIGURE, 3), 1.0 / (0.25 / 4.0 + 0.75 / 12.0), 1e-15, "by the rule");
+}
+
 static void a_pure_gas_has_the_limits_of_its_row(void **state)
 {
     (void)state;
@@ -304,6 +313,7 @@ int main(void)
 {
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(le_chatelier_meets_measured_mixtures),
+        cmocka_unit_test(an_absent_component_does_not_count),
         cmocka_unit_test(a_pure_gas_has_the_limits_of_its_row),
         cmocka_unit_test(a_natural_gas_has_the_lower_limit_of_the_textbook),
         cmocka_unit_test(inerts_widen_the_lower_limit_to_first_order),

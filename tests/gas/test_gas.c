@@ -56,6 +56,20 @@ static void amounts_become_fractions_whatever_their_scale(void **state)
     }
 }
 
+static void amounts_behind_the_last_species_do_not_count(void **state)
+{
+    double amounts[BC_SPECIES_CAPACITY] = {0.0};
+
+    (void)state;
+    amounts[SPECIES_methane] = 3.0;
+    amounts[bc_species_count()] = 5.0;
+    amounts[BC_SPECIES_CAPACITY - 1] = 7.0;
+    const bc_gas gas = gas_of(amounts);
+
+    for (size_t i = 0; i < BC_SPECIES_CAPACITY; i++)
+        assert_within(gas.x[i], i == SPECIES_methane ? 1.0 : 0.0, 0.0);
+}
+
 static void amounts_that_make_no_gas_are_refused(void **state)
 {
     static const double BAD[] = {-1e-9, (double)INFINITY, (double)NAN};
@@ -415,6 +429,7 @@ int main(void)
 {
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(amounts_become_fractions_whatever_their_scale),
+        cmocka_unit_test(amounts_behind_the_last_species_do_not_count),
         cmocka_unit_test(amounts_that_make_no_gas_are_refused),
         cmocka_unit_test(molar_mass_and_atoms_of_a_mixture_are_its_weighted_sums),
         cmocka_unit_test(dry_air_has_the_molar_mass_of_the_standard),

@@ -109,6 +109,8 @@ static void without_a_usual_step_rows_count(void **state)
     assert_int_equal(e.runs, 1);
     assert_false(e.has_time);
     assert_within(e.longest, 2.0, 0.0);
+    assert_within(e.broken_held, 2.0, 0.0);
+    assert_within(e.broken_j, 0.0, 0.0); /* rows hold no time, so no heat */
     assert_within(e.worst, 11.5, 0.0);
     assert_int_equal(tally_trend_count(t), 0);
     tally_close(t);

@@ -64,6 +64,29 @@ static void an_inert_gas_has_no_gap(void **state)
         assert_within(share[i], 0.0, 0.0);
 }
 
+/* The gap of methane is that of methane, whatever dilutes it, down to less than 1 J/mol. */
+static void the_gap_of_a_trace_is_that_of_the_pure_gas(void **state)
+{
+    const bc_state at = bc_state_default();
+    double share[BC_SPECIES_CAPACITY], pure[BC_SPECIES_CAPACITY];
+    bc_reference r;
+    bc_subject s;
+    bc_error err;
+
+    (void)state;
+    assert_ok(bc_reference_at(&at, &r, &err), &err);
+    for (int trace = 0; trace < 2; trace++) {
+        bc_gas gas = {{0.0}};
+
+        gas.x[SPECIES_methane] = trace ? 1e-7 : 1.0;
+        gas.x[SPECIES_nitrogen] = 1.0 - gas.x[SPECIES_methane];
+        assert_ok(bc_subject_make(&r, &gas, NULL, &s, &err), &err);
+        bc_gap_shares(&s, trace ? share : pure);
+    }
+    assert_true(s.value.gross_j_per_mol < 1.0 && fabs(pure[SPECIES_methane]) > 1e-6);
+    assert_within(share[SPECIES_methane], pure[SPECIES_methane], 1e-12);
+}
+
 /* The gap is the difference of both gross heats over that of the edition, component by component. */
 static void the_shares_of_a_gap_add_up_to_it(void **state)
 {
@@ -94,6 +117,7 @@ int main(void)
 {
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(an_inert_gas_has_no_gap),
+        cmocka_unit_test(the_gap_of_a_trace_is_that_of_the_pure_gas),
         cmocka_unit_test(the_shares_of_a_gap_add_up_to_it),
         cmocka_unit_test(what_is_no_gas_is_refused_from_the_z_on_that_the_manual_names),
     };
