@@ -144,15 +144,13 @@ static void read_flue(bc_burner_response *r, double *wet_mol)
 
 static bc_status flue_of_old(const bc_burner_case *set, double *wet_mol, bc_error *err)
 {
-    bc_burner_response old;
+    bc_burner_response old = {.burn = {.rich = false}};
     bc_status status;
 
-    if (set->lambda >= 1.0) {
+    if (set->lambda >= 1.0)
         status = bc_flue_at(&set->old_gas->gas, &set->air, set->lambda, &old.burn.flue, err);
-        old.burn.rich = false;
-    } else {
+    else
         status = combust(set, set->old_gas, set->burner->gas_k, set->lambda, &old.burn, err);
-    }
     if (status == BC_OK)
         read_flue(&old, wet_mol);
     return status;

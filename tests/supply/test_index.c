@@ -260,7 +260,11 @@ static void the_line_itself_is_inside_of_a_method(void **state)
                  {"aga-lifting", "hydrogen-sulfide", 0.01, true},   {"dutton-icf", "hydrogen", 0.001, false},
                  {"dutton-icf", "carbon-monoxide", 0.001, false},   {"methane-number", "hydrogen", 0.005, false},
                  {"methane-number", "carbon-monoxide", 0.005, false},
-                 {"mcp", "ammonia", 0.01, false},                   {"mcp", "methanol", 0.01, false}};
+                 {"mcp", "ammonia", 0.01, false},                   {"mcp", "methanol", 0.01, false},
+                 {"mcp", "water", 0.04, false},                     {"gbt-cp", "water", 0.04, false},
+                 {"weaver-speed", "water", 0.04, false},            {"weaver-heat", "water", 0.04, true},
+                 {"aga-lifting", "water", 0.04, true},              {"dutton-icf", "water", 0.04, false},
+                 {"methane-number", "water", 0.04, false}};
     const bc_reference reference = reference_at("15/15");
     const bc_subject natural = subject_of(&reference, NATURAL);
 
