@@ -312,6 +312,7 @@ def chosen(seed):
     stay = [row for row in rows if row[-1] != "" or reason_of(row, reasons)]
     left = {row[:6] for row in rows if row not in stay}
     mutants = [m for m in mutants if m.identity in left]
+    print(f"{len(left) - len(mutants)} survivors drop out, as their lines are gone")
     return mutants, len(mutants), stay
 
 
