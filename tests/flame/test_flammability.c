@@ -148,6 +148,15 @@ static void not_flammable_is_only_said_on_confirmed_constants(void **state)
     assert_true(judge("ethane=4,nitrogen=96").has_lfl);
 }
 
+/* One combustible without a T_c leaves ISO 10156 without a sum; pentane has none here. */
+static void a_sum_needs_a_constant_of_every_combustible(void **state)
+{
+    (void)state;
+    assert_true(judge("methane=60,propane=20,nitrogen=20").has_sum);
+    assert_false(judge("methane=60,n-pentane=20,nitrogen=20").has_sum);
+    assert_false(judge("n-pentane=20,methane=60,nitrogen=20").has_sum);
+}
+
 static void what_cannot_burn_is_not_flammable(void **state)
 {
     const bc_flammability f = judge("nitrogen=60,carbon-dioxide=30,water=10");
@@ -320,6 +329,7 @@ int main(void)
         cmocka_unit_test(a_limit_that_leaves_a_hundred_per_cent_is_none),
         cmocka_unit_test(iso_10156_gives_the_sum_of_the_ghs_example),
         cmocka_unit_test(not_flammable_is_only_said_on_confirmed_constants),
+        cmocka_unit_test(a_sum_needs_a_constant_of_every_combustible),
         cmocka_unit_test(what_cannot_burn_is_not_flammable),
         cmocka_unit_test(gases_that_break_the_rule_are_marked),
         cmocka_unit_test(a_gas_without_published_limits_is_refused_by_name),

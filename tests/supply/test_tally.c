@@ -317,6 +317,8 @@ static void periods_are_days_and_months_of_the_calendar(void **state)
         tally_period_spread(t, i, 0, &s);
         bc_log_time_text(span.from_s, text);
         assert_string_equal(text, BEGINS[i]);
+        bc_log_time_text(span.until_s, text);
+        assert_string_equal(text, i + 1 < COUNT(BEGINS) ? BEGINS[i + 1] : "2028-04-01 00:00");
         assert_int_equal(span.rows, ROWS[i]);
         assert_within(span.held, 6.0 * HOUR * (double)ROWS[i], 1e-6);
         assert_within(span.energy_j, 1e6 * 6.0 * HOUR * (double)ROWS[i], 1.0);
