@@ -265,13 +265,15 @@ coverage: deps-coverage ## lines and branches that the tests reach, with the lea
 	@cd build/coverage && gcovr --root ../.. --object-directory . --filter ../../src/ --exclude-unreachable-branches --gcov-ignore-parse-errors --sort-percentage \
 	    --txt coverage.txt --html-details coverage.html --print-summary --fail-under-line 95 --fail-under-branch 85 .
 # Small changes of the physics, one at a time: do the tests notice? Every symbol is visible, so that the test programs
-# can share a library that is linked anew for each change.
+# can share a library that is linked anew for each change. An index that leaves its array ends the program, as it would
+# in `make sanitize`.
+WATCHED = -O1 -g0 -fvisibility=default -fsanitize=bounds -fsanitize-undefined-trap-on-error
 MUTANTS = 300
 SEED    = 1
 mutation: deps-test ## kill MUTANTS random changes of the physics by the tests; build/mutation/report.txt
-	@$(MAKE) OUT=build/mutation/base CFLAGS='-O1 -g0 -fvisibility=default $(CFLAGS)' all tests
+	@$(MAKE) OUT=build/mutation/base CFLAGS='$(WATCHED) $(CFLAGS)' all tests
 	@SRC='$(CURDIR)' BASE=build/mutation/base MUTANTS='$(MUTANTS)' SEED='$(SEED)' PYTHONDONTWRITEBYTECODE=1 \
-	    COMPILE='$(COMPILE) -fPIC -O1 -g0 -fvisibility=default $(call NLOPT,--cflags)' LINKER='$(CC)' LINK_LIB='$(LDLIBS_LIB)' \
+	    COMPILE='$(COMPILE) -fPIC $(WATCHED) $(call NLOPT,--cflags)' LINKER='$(CC)' LINK_LIB='$(LDLIBS_LIB)' \
 	    LINK_TEST='$(call CMOCKA,--libs) $(call JANSSON,--libs) $(LDLIBS_LIB) -pthread' python3 tests/mutation/run.py
 clang: deps-lint ## the program, the library and the test programs, by Clang with -Werror
 	@$(MAKE) VARIANT=clang WERROR=1 all tests

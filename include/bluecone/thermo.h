@@ -36,7 +36,7 @@ BC_API const char *bc_thermo_name(size_t index);
 BC_API const char *bc_thermo_source(size_t index);
 BC_API bc_thermo_origin bc_thermo_origin_of(size_t index);
 
-/* The nine coefficients of a range (0: up to 1000 K, 1: above): a1..a7, b1, b2. NULL out of range. */
+/* The nine coefficients of a range (0: below 1000 K, 1: from there on): a1..a7, b1, b2. NULL out of range. */
 BC_API const double *bc_thermo_coefficients(size_t index, int range);
 
 /* Atoms of an element in a molecule; 0 for an index out of range. */

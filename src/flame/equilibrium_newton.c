@@ -25,12 +25,6 @@
 /* Steps between looks at whether the components are still the abundant species. */
 #define LOOK_EVERY 5
 
-/* Of scaled pivots, which are at most 1. */
-#define PIVOT_MIN 1.0e-15
-
-/* Iterations that want to leave the range of the data before we believe them. */
-#define OUTSIDE_MAX 6
-
 typedef struct {
     double a[UNKNOWNS][UNKNOWNS + 1]; /* symmetric; the last column is the right-hand side */
 } newton_system;
@@ -108,15 +102,14 @@ static void scale_system(const equilibrium *e, newton_system *s, double scale[UN
 }
 
 /* Elimination without exchanges: the block of the components and ln T is positive definite, and what it
- * leaves of ln n is negative near the solution. A pivot lost in rounding (components that are no longer
- * independent in the abundant species) is kept apart from zero; the step control bounds what follows. */
+ * leaves of ln n is negative near the solution. Of a pivot lost in rounding (components that are no longer
+ * independent in the abundant species) comes a large step, which the step control bounds, or none that is finite:
+ * then the iteration is lost, and the search starts elsewhere. */
 static void solve_system(newton_system *s, double x[UNKNOWNS])
 {
     for (int p = 0; p < UNKNOWNS; p++) {
         double *pivot = s->a[p];
 
-        if (fabs(pivot[p]) < PIVOT_MIN)
-            pivot[p] = p == LN_N ? -PIVOT_MIN : PIVOT_MIN;
         for (int row = p + 1; row < UNKNOWNS; row++) {
             const double factor = pivot[row] / pivot[p];
 
@@ -205,21 +198,13 @@ static progress move(equilibrium *e)
     return share == 1.0 && change < STEP_LAST ? ARRIVED : GO_ON;
 }
 
-static bool at_end_of_data(const equilibrium *e)
-{
-    return !e->fixed_t && (e->t_k <= BC_THERMO_T_MIN_K || e->t_k >= BC_THERMO_T_MAX_K);
-}
-
 bool equilibrium_iterate(equilibrium *e, int steps)
 {
-    int outside = 0;
-
     e->range_changes = 0;
     for (int i = 1; i <= steps; i++) {
         const progress state = move(e);
 
-        outside = at_end_of_data(e) ? outside + 1 : 0;
-        if (state == LOST || outside > OUTSIDE_MAX)
+        if (state == LOST)
             return false;
         if (state == GO_ON && i % LOOK_EVERY != 0)
             continue;

@@ -263,7 +263,7 @@ static const bc_quantity *shown(size_t index)
 
 static bc_status evaluate(size_t index, const bc_subject *subject, bc_figure *figure, bc_error *err)
 {
-    bc_figure f = {0.0, false, 0.0, 0.0, 0.0};
+    bc_figure f = {.has_u = false};
     const bc_status status = ROWS[index].of(subject, &f.value, err);
 
     if (status == BC_OK)

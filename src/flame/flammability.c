@@ -107,7 +107,8 @@ static nitrogen_balance balance_of(const bc_gas *gas)
     return b;
 }
 
-/* Le Chatelier over the combustibles that have limits, then over the share of combustibles in the gas. */
+/* Le Chatelier over the combustibles that have limits, then over the share of combustibles in the gas; without any both
+ * limits are infinite, which is none. */
 static void mix_limits(const combustible_part *part, bc_flammability *f)
 {
     double lower[BC_SPECIES_CAPACITY];
@@ -171,8 +172,7 @@ bc_status bc_flammability_of(const bc_gas *gas, bc_flammability *flammability, b
     f.with_oxygen = gas->x[SPECIES_oxygen] > BC_FLAMMABILITY_OXYGEN_MAX;
     f.inert_corrected = part.total < 1.0 - ROUNDING;
     f.outside_rule = part.count > 1 && odd_share(gas, part.total) > BC_FLAMMABILITY_ODD_MAX;
-    if (part.count > 0)
-        mix_limits(&part, &f);
+    mix_limits(&part, &f);
     f.verdict = judge(&balance, &f);
     drop_limits(&f);
     *flammability = f;

@@ -20,7 +20,7 @@ const signed char *product_atoms(size_t thermo_index);
  * costs three short sums and no logarithm. */
 typedef struct {
     double t_k;
-    int range; /* of the coefficients: 0 up to 1000 K, 1 above */
+    int range; /* of the coefficients: 0 below 1000 K, 1 from there on */
     double cp[7], h[8], g[9];
 } polynomial_factors;
 

@@ -128,7 +128,7 @@ static bc_status close_sum(bc_composition *c, bc_error *err)
 
         return blame(c, rest->line, status, err);
     }
-    rest->amount = sum < 1.0 ? 1.0 - sum : 0.0;
+    rest->amount = fmax(0.0, 1.0 - sum);
     c->sum = 1.0;
     return BC_OK;
 }
@@ -153,22 +153,25 @@ static bc_status check_sum(bc_composition *c, bc_error *err)
     return BC_OK;
 }
 
-/* dx of one entry: x_j = sum_e y_e w_e E_ej / N with N = sum_e y_e w_e gives
- * dx_j/dy_e = (w_e/N)(E_ej - x_j); a component by difference moves the other way. */
+/* x_j = sum_e y_e w_e E_ej / N with N = sum_e y_e w_e gives dx_j/dy_e = (w_e/N)(E_ej - x_j). */
+static void add_slope(const bc_composition *c, const bc_gas *gas, const bc_entry *entry, double dy_over_n, double dx[])
+{
+    const double w = moles_per_share(c, entry) * dy_over_n;
+    const double closed = c->closure == BC_CLOSURE_NONE ? 0.0 : 1.0;
+
+    for (size_t j = 0; j < SPECIES_COUNT; j++)
+        dx[j] += w * (entry->parts[j] - closed * gas->x[j]);
+}
+
+/* dx of one entry; a component by difference moves the other way. */
 static void add_source(bc_composition *c, const bc_gas *gas, const bc_entry *entry, const bc_entry *rest, double total)
 {
-    const double w = moles_per_share(c, entry) / total;
-    const double w_rest = rest ? moles_per_share(c, rest) / total : 0.0;
-    const double closed = c->closure == BC_CLOSURE_NONE ? 0.0 : 1.0;
     double *dx = c->spread.dx[c->spread.count++];
 
     memset(dx, 0, sizeof c->spread.dx[0]);
-    for (size_t j = 0; j < SPECIES_COUNT; j++) {
-        dx[j] = w * (entry->parts[j] - closed * gas->x[j]);
-        if (rest)
-            dx[j] -= w_rest * (rest->parts[j] - closed * gas->x[j]);
-        dx[j] *= entry->u;
-    }
+    add_slope(c, gas, entry, entry->u / total, dx);
+    if (rest)
+        add_slope(c, gas, rest, -entry->u / total, dx);
 }
 
 static void make_spread(bc_composition *c, const bc_gas *gas, double total)

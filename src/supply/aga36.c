@@ -125,7 +125,7 @@ bc_status bc_aga_gas_of(const bc_reference *reference, const bc_gas *gas, bc_aga
     const sums s = sum_over(&c);
     const double h_btu = value.gross_j_per_m3 / BTU_PER_FT3;
 
-    if (!(value.gross_j_per_m3 > 0.0) || !(s.air - s.own_air > 0.0))
+    if (!(s.air - s.own_air > 0.0))
         return bc_fail(err, BC_ERR_RANGE, "the gas does not burn or holds the oxygen it needs: it has no index of Bulletin 36");
     *out = (bc_aga_gas){.gross_j_per_m3 = value.gross_j_per_m3, .relative_density = value.relative_density, .air = s.air - s.own_air,
                         .lifting_constant = s.lifting / value.relative_density, .yellow_tip_limit = yellow_tip_limit(&c, &s),

@@ -88,11 +88,10 @@ static void residuals(const bc_aim_problem *p, const double share[], double r[])
 
     for (size_t k = 0; k < p->aims->limit_count; k++) {
         const bc_limit *limit = &p->aims->limits[k];
-        double value = 0.0;
+        double value;
+        const bool has = bc_limit_value(p->aims, k, &gas, &value, NULL) == BC_OK;
 
-        r[k] = UNDEFINED;
-        if (bc_limit_value(p->aims, k, &gas, &value, NULL) == BC_OK)
-            r[k] = (value - limit->min) / bc_limit_scale(limit);
+        r[k] = has ? (value - limit->min) / bc_limit_scale(limit) : UNDEFINED;
     }
 }
 

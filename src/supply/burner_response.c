@@ -142,22 +142,18 @@ static void read_flue(bc_burner_response *r, double *wet_mol)
     *wet_mol = m->total_moles;
 }
 
-static double flue_mol_of_old(const bc_burner_case *set, bc_error *err, bc_status *status)
+static bc_status flue_of_old(const bc_burner_case *set, double *wet_mol, bc_error *err)
 {
-    bc_burner_response old;
-    double wet_mol = 0.0;
+    bc_burner_response old = {.burn = {.rich = false}};
+    bc_status status;
 
-    memset(&old, 0, sizeof old);
-    if (set->lambda >= 1.0) {
-        bc_flue flue;
-
-        *status = bc_flue_at(&set->old_gas->gas, &set->air, set->lambda, &flue, err);
-        return *status == BC_OK ? flue.wet_mol : 1.0;
-    }
-    *status = combust(set, set->old_gas, set->burner->gas_k, set->lambda, &old.burn, err);
-    if (*status == BC_OK)
-        read_flue(&old, &wet_mol);
-    return wet_mol;
+    if (set->lambda >= 1.0)
+        status = bc_flue_at(&set->old_gas->gas, &set->air, set->lambda, &old.burn.flue, err);
+    else
+        status = combust(set, set->old_gas, set->burner->gas_k, set->lambda, &old.burn, err);
+    if (status == BC_OK)
+        read_flue(&old, wet_mol);
+    return status;
 }
 
 static void scale(const bc_burner_case *set, const bc_subject *gas, bc_burner_response *r)
@@ -189,7 +185,7 @@ bc_status bc_burner_respond(const bc_burner_case *set, const bc_subject *new_gas
 {
     burner_flows f;
     bc_burner_response r;
-    double wet_mol = 0.0;
+    double wet_mol = 0.0, old_wet_mol = 0.0;
     bc_status status = burner_flow_of(set, new_gas, setting, true, &f, err);
 
     if (status != BC_OK)
@@ -201,12 +197,12 @@ bc_status bc_burner_respond(const bc_burner_case *set, const bc_subject *new_gas
     r.primary = f.primary;
     r.trim_at_end = f.trim_at_end;
     status = combust(set, new_gas, gas_temperature(set, setting->gas_k), r.lambda, &r.burn, err);
+    if (status == BC_OK)
+        status = flue_of_old(set, &old_wet_mol, err);
     if (status != BC_OK)
         return status;
     read_flue(&r, &wet_mol);
-    r.flue_ratio = r.fuel_ratio * wet_mol / flue_mol_of_old(set, err, &status);
-    if (status != BC_OK)
-        return status;
+    r.flue_ratio = r.fuel_ratio * wet_mol / old_wet_mol;
     scale(set, new_gas, &r);
     read_velocity(new_gas, &r);
     *response = r;

@@ -165,6 +165,5 @@ bc_status tally_account(tally *t, int64_t next_ms, bool last, bc_error *err)
     if (t->plan.limit_count > 0)
         tally_account_limits(t, &share, gap);
     t->accounted = true;
-    t->pending.there = false;
     return BC_OK;
 }

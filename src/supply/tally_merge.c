@@ -161,9 +161,7 @@ static bc_status merge_accounted(tally *t, tally *l, bc_error *err)
     else
         t->begin_ms = l->begin_ms;
     if (status == BC_OK)
-        status = tally_flush(t, err);
-    if (status == BC_OK)
-        status = tally_flush(l, err);
+        status = tally_flush(l, err); /* the earlier part's hot rows stay hot */
     if (status == BC_OK)
         status = merge_periods(t, l, err);
     if (status == BC_OK)

@@ -111,12 +111,10 @@ static int compare(const void *a, const void *b)
 {
     const tally_stretch *x = a;
     const tally_stretch *y = b;
+    const int by_time = (x->from_ms > y->from_ms) - (x->from_ms < y->from_ms);
+    const int by_limit = (x->limit > y->limit) - (x->limit < y->limit);
 
-    if (x->from_ms != y->from_ms)
-        return x->from_ms < y->from_ms ? -1 : 1;
-    if (x->limit != y->limit)
-        return x->limit < y->limit ? -1 : 1;
-    return tally_stretch_before(y, x) - tally_stretch_before(x, y);
+    return by_time != 0 ? by_time : by_limit != 0 ? by_limit : tally_stretch_before(y, x) - tally_stretch_before(x, y);
 }
 
 void tally_longest_sort(tally_longest *l)

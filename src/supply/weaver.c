@@ -93,7 +93,7 @@ static bc_status gas_of(const bc_reference *reference, const bc_gas *gas, const 
     const sums s = sum_over(c);
     const double denominator = speed_denominator(c, &s);
 
-    if (!(value.gross_j_per_m3 > 0.0) || !(s.air - s.own_air > 0.0))
+    if (!(s.air - s.own_air > 0.0))
         return bc_fail(err, BC_ERR_RANGE, "the gas does not burn or holds the oxygen it needs: it has no Weaver index");
     bc_weaver_gas g = {.gross_j_per_m3 = value.gross_j_per_m3, .relative_density = value.relative_density, .air = s.air - s.own_air,
                        .oxygen_percent = 100.0 * c->x[PART_OXYGEN], .carbon_excess = 100.0 * (c->hydrocarbon_c - c->alkanes)};

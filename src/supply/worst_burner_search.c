@@ -51,14 +51,17 @@ static double travel_of(const bc_burner_case *set, const bc_subject *gas)
     return set->burner->control == BC_CONTROL_TRIM_GAS ? f.lambda / target : target / f.lambda;
 }
 
+static bool has_velocity(const bc_gas *gas, bc_burning_velocity *v)
+{
+    return bc_burning_velocity_of(gas, v, NULL) == BC_OK && v->in_range;
+}
+
 /* Of gases outside of the method, the old one included, there is no ratio. */
 static double velocity_of(const bc_gas *gas, const bc_gas *old_gas)
 {
     bc_burning_velocity is, was;
 
-    if (bc_burning_velocity_of(gas, &is, NULL) != BC_OK || bc_burning_velocity_of(old_gas, &was, NULL) != BC_OK || !is.in_range || !was.in_range)
-        return HUGE_VAL;
-    return is.value_m_per_s / was.value_m_per_s;
+    return has_velocity(gas, &is) && has_velocity(old_gas, &was) ? is.value_m_per_s / was.value_m_per_s : HUGE_VAL;
 }
 
 static double methane_number_of(const bc_gas *gas)

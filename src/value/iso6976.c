@@ -66,29 +66,28 @@ static const constant_row VAPORISATIONS[] = {
 #include "data/iso6976_constants.def"
 };
 
-/* The row of an edition at a temperature, or NULL between the columns. */
-static const constant_row *constant_at(const constant_row rows[], size_t count, int year, double t_c)
+/* The row of an edition at a temperature; `count` between the columns. */
+static size_t constant_at(const constant_row rows[], size_t count, int year, double t_c)
 {
-    for (size_t i = 0; i < count; i++)
-        if (rows[i].year == year && fabs(rows[i].t_c - t_c) < SAME_C)
-            return &rows[i];
-    return NULL;
+    size_t i = 0;
+
+    while (i < count && (rows[i].year != year || fabs(rows[i].t_c - t_c) >= SAME_C))
+        i++;
+    return i;
 }
 
 static double air_z_column(int year, double t_c)
 {
-    const constant_row *row = constant_at(AIR_ZS, BC_COUNT(AIR_ZS), year, t_c);
-
-    return row ? row->value : 1.0;
+    return AIR_ZS[constant_at(AIR_ZS, BC_COUNT(AIR_ZS), year, t_c)].value;
 }
 
 /* Z of dry air at 101.325 kPa; between the columns 1 - Z follows the parabola through 0, 15 and 20 C. */
 static double air_z0(int year, double t_c)
 {
-    const constant_row *row = constant_at(AIR_ZS, BC_COUNT(AIR_ZS), year, t_c);
+    const size_t row = constant_at(AIR_ZS, BC_COUNT(AIR_ZS), year, t_c);
 
-    if (row)
-        return row->value;
+    if (row < BC_COUNT(AIR_ZS))
+        return AIR_ZS[row].value;
     return air_z_column(year, 0.0) * (t_c - 15.0) * (t_c - 20.0) / 300.0 - air_z_column(year, 15.0) * t_c * (t_c - 20.0) / 75.0
            + air_z_column(year, 20.0) * t_c * (t_c - 15.0) / 100.0;
 }
@@ -96,14 +95,14 @@ static double air_z0(int year, double t_c)
 static void look_up_constants(bc_reference *r)
 {
     const bc_state *s = &r->state;
-    const constant_row *lo = constant_at(VAPORISATIONS, BC_COUNT(VAPORISATIONS), s->edition, s->combustion_c);
+    const size_t row = constant_at(VAPORISATIONS, BC_COUNT(VAPORISATIONS), s->edition, s->combustion_c);
     const size_t e = s->edition == EDITIONS[0].year ? 0 : 1;
 
     r->r_j_per_mol_k = EDITIONS[e].r;
     r->u_r_j_per_mol_k = EDITIONS[e].u_r;
     r->air_kg_per_mol = EDITIONS[e].air * 1e-3;
     r->u_air_kg_per_mol = EDITIONS[e].u_air * 1e-3;
-    r->vaporisation_j_per_mol = lo ? lo->value * 1e3 : formation_vaporisation_j_per_mol(s->combustion_c + 273.15);
+    r->vaporisation_j_per_mol = row < BC_COUNT(VAPORISATIONS) ? VAPORISATIONS[row].value * 1e3 : formation_vaporisation_j_per_mol(s->combustion_c + 273.15);
     r->u_vaporisation_j_per_mol = 4.0; /* J/mol, ISO 6976:2016 annex A, for every temperature */
     /* Z_air(t2,p2) = 1 - (p2/p0)(1 - Z_air(t2,p0)) */
     r->air_z = 1.0 - s->metering_pa / BC_P0_PA * (1.0 - air_z0(s->edition, s->metering_c));

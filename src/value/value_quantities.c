@@ -106,7 +106,7 @@ static bc_status value_alone(size_t index, const bc_subject *subject, double *va
 static bc_status evaluate(size_t index, const bc_subject *subject, bc_figure *figure, bc_error *err)
 {
     const quantity_row *row = &ROWS[index];
-    bc_figure f = {0.0, false, 0.0, 0.0, 0.0};
+    bc_figure f = {.has_u = false};
 
     if (row->other) {
         const bc_status status = row->other(subject, &f.value, err);

@@ -78,6 +78,24 @@ static void acid_outside_the_fits_is_marked(void **state)
     assert_true(isfinite(dew.min_k) && dew.min_k > 320.0);
 }
 
+/* The ends themselves are inside: 0.1 to 200 ppm and 3 to 30 % at 1 atm. */
+static void the_fits_end_at_their_figures(void **state)
+{
+    static const struct {
+        double w, s;
+        bool inside;
+    } ROWS[] = {{0.03, 5e-6, true}, {0.30, 5e-6, true}, {0.1, 0.1e-6, true}, {0.1, 200e-6, true}, {0.029999, 5e-6, false},
+                {0.300001, 5e-6, false}, {0.1, 0.09999e-6, false}, {0.1, 200.001e-6, false}};
+
+    (void)state;
+    for (size_t i = 0; i < BC_COUNT(ROWS); i++) {
+        bc_acid_dew dew;
+
+        assert_int_equal(bc_acid_dew_point(ROWS[i].w, ROWS[i].s, P0_PA, &dew, NULL), BC_OK);
+        assert_int_equal(dew.in_range, ROWS[i].inside);
+    }
+}
+
 static void the_acid_spread_holds_all_three_and_depends_on_partial_pressure(void **state)
 {
     bc_acid_dew at_1;
@@ -134,6 +152,7 @@ int main(void)
         cmocka_unit_test(the_conversion_counts_mole_by_mole),
         cmocka_unit_test(without_sulfur_there_is_no_acid_dew_point),
         cmocka_unit_test(acid_outside_the_fits_is_marked),
+        cmocka_unit_test(the_fits_end_at_their_figures),
     };
 
     return cmocka_run_group_tests_name("acid_dew", tests, NULL, NULL);

@@ -219,6 +219,29 @@ static void at_its_dew_point_a_gas_begins_to_condense(void **state)
     assert_true(c.condenses && c.condensate_mol < 1e-7);
 }
 
+/* Saturated is not yet wet: exactly what the gas can hold stays in it. */
+static void a_gas_that_is_just_saturated_keeps_its_water(void **state)
+{
+    double p_sat_pa = 0.0;
+    bc_gas gas = {{0.0}};
+    bc_condensation c;
+    bc_error err = {.status = BC_OK};
+
+    (void)state;
+    assert_int_equal(bc_steam_pressure(333.0, &p_sat_pa, NULL), BC_OK);
+    gas.x[SPECIES_water] = p_sat_pa / 131e3;
+    gas.x[SPECIES_nitrogen] = 1.0 - gas.x[SPECIES_water];
+    assert_int_equal(bc_condense(&gas, 333.0, 131e3, &c, NULL), BC_OK);
+    assert_false(c.condenses);
+    assert_within(c.exit_mol, 1.0, 0.0, "all of it");
+    assert_within(c.condensate_mol + c.condensate_kg, 0.0, 0.0, "no condensate");
+    assert_refused(bc_condense(&gas, (double)INFINITY, 131e3, &c, &err), BC_ERR_RANGE, &err);
+    gas.x[SPECIES_water] *= 1.0 + 1e-9;
+    assert_int_equal(bc_condense(&gas, 333.0, 131e3, &c, NULL), BC_OK);
+    assert_true(c.condenses);
+    assert_within(c.condensate_kg, c.condensate_mol * bc_species_molar_mass_kg_per_mol(SPECIES_water), 1e-15, "mass");
+}
+
 static void steam_alone_condenses_whole(void **state)
 {
     const bc_gas steam = gas_of("water=100");
@@ -260,6 +283,7 @@ int main(void)
         cmocka_unit_test(methane_flue_gas_gives_its_condensate),
         cmocka_unit_test(the_exit_gas_is_saturated_and_nothing_is_lost),
         cmocka_unit_test(at_its_dew_point_a_gas_begins_to_condense),
+        cmocka_unit_test(a_gas_that_is_just_saturated_keeps_its_water),
         cmocka_unit_test(steam_alone_condenses_whole),
         cmocka_unit_test(water_that_would_freeze_out_is_refused),
     };

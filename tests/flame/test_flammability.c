@@ -55,6 +55,15 @@ static void le_chatelier_meets_measured_mixtures(void **state)
     }
 }
 
+/* What is not there needs no figure. */
+static void an_absent_component_does_not_count(void **state)
+{
+    static const double SHARE[] = {0.25, 0.75, 0.0}, FIGURE[] = {4.0, 12.0, 0.0};
+
+    (void)state;
+    assert_within(bc_le_chatelier(SHARE, FIGURE, 3), 1.0 / (0.25 / 4.0 + 0.75 / 12.0), 1e-15, "by the rule");
+}
+
 static void a_pure_gas_has_the_limits_of_its_row(void **state)
 {
     (void)state;
@@ -137,6 +146,15 @@ static void not_flammable_is_only_said_on_confirmed_constants(void **state)
     assert_int_equal(judge("methane=7.5,oxygen=10,nitrogen=82.5").verdict, BC_FLAMMABILITY_UNDECIDED);
     assert_true(judge("methane=7.5,oxygen=10,nitrogen=82.5").with_oxygen);
     assert_true(judge("ethane=4,nitrogen=96").has_lfl);
+}
+
+/* One combustible without a T_c leaves ISO 10156 without a sum; pentane has none here. */
+static void a_sum_needs_a_constant_of_every_combustible(void **state)
+{
+    (void)state;
+    assert_true(judge("methane=60,propane=20,nitrogen=20").has_sum);
+    assert_false(judge("methane=60,n-pentane=20,nitrogen=20").has_sum);
+    assert_false(judge("n-pentane=20,methane=60,nitrogen=20").has_sum);
 }
 
 static void what_cannot_burn_is_not_flammable(void **state)
@@ -241,16 +259,77 @@ static void velocities_outside_the_rule_are_marked_or_refused(void **state)
     assert_false(velocity_of("methane=40,hydrogen=60").in_range);
 }
 
+static bc_gas two_of(size_t first, double x, size_t second)
+{
+    bc_gas gas = {{0.0}};
+
+    gas.x[first] = x;
+    gas.x[second] = 1.0 - x;
+    return gas;
+}
+
+/* The ends of bluecone/flammability.h are inside, what is just beyond is not. */
+static void the_rules_end_where_the_header_says(void **state)
+{
+    const struct {
+        double x;
+        bool odd, with_oxygen, covered, fast, tabulated;
+    } ROWS[] = {{0.0, false, false, true, true, true}, {1e-6, true, true, false, false, false}};
+    bc_flammability f;
+    bc_burning_velocity v;
+    bc_error err = {.status = BC_OK};
+
+    (void)state;
+    for (size_t i = 0; i < BC_COUNT(ROWS); i++) {
+        bc_gas gas = two_of(SPECIES_hydrogen_sulfide, BC_FLAMMABILITY_ODD_MAX + ROWS[i].x, SPECIES_methane);
+
+        assert_int_equal(bc_flammability_of(&gas, &f, NULL), BC_OK);
+        assert_int_equal(f.outside_rule, ROWS[i].odd);
+        gas = two_of(SPECIES_oxygen, BC_FLAMMABILITY_OXYGEN_MAX + ROWS[i].x, SPECIES_methane);
+        assert_int_equal(bc_flammability_of(&gas, &f, NULL), BC_OK);
+        assert_int_equal(f.with_oxygen, ROWS[i].with_oxygen);
+        gas = two_of(SPECIES_methane, BC_FLAMMABILITY_COVERED_MIN - ROWS[i].x, SPECIES_carbonyl_sulfide);
+        assert_int_equal(bc_flammability_of(&gas, &f, NULL) == BC_OK, ROWS[i].covered);
+        gas = two_of(SPECIES_hydrogen, BC_BURNING_HYDROGEN_MAX + ROWS[i].x, SPECIES_methane);
+        assert_int_equal(bc_burning_velocity_of(&gas, &v, NULL), BC_OK);
+        assert_int_equal(v.in_range, ROWS[i].fast);
+        gas = two_of(SPECIES_methane, BC_BURNING_COVERED_MIN - ROWS[i].x, SPECIES_carbon_monoxide);
+        assert_int_equal(bc_burning_velocity_of(&gas, &v, NULL) == BC_OK, ROWS[i].tabulated);
+    }
+    bc_gas gas = two_of(SPECIES_methane, 0.75, SPECIES_carbonyl_sulfide);
+
+    assert_int_equal(bc_flammability_of(&gas, &f, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "only 75 %"));
+    gas = two_of(SPECIES_methane, 0.75, SPECIES_carbon_monoxide);
+    assert_int_equal(bc_burning_velocity_of(&gas, &v, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "only 75 %"));
+}
+
+/* Each end of the band follows the same rule: 1/S = sum(x_i/S_i) over the ends of the pure gases, slowed alike. */
+static void the_band_of_a_mixture_is_that_of_its_parts(void **state)
+{
+    const bc_burning_velocity methane = velocity_of("methane=100"), propane = velocity_of("propane=100");
+    const bc_burning_velocity v = velocity_of("methane=56,propane=24,nitrogen=20");
+    const double slower = 1.0 - 2.1 * v.diluent;
+
+    (void)state;
+    assert_true(v.diluent > 0.01);
+    assert_within(v.low_m_per_s, slower / (0.7 / methane.low_m_per_s + 0.3 / propane.low_m_per_s), 1e-12, "lower end");
+    assert_within(v.high_m_per_s, slower / (0.7 / methane.high_m_per_s + 0.3 / propane.high_m_per_s), 1e-12, "upper end");
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(le_chatelier_meets_measured_mixtures),
+        cmocka_unit_test(an_absent_component_does_not_count),
         cmocka_unit_test(a_pure_gas_has_the_limits_of_its_row),
         cmocka_unit_test(a_natural_gas_has_the_lower_limit_of_the_textbook),
         cmocka_unit_test(inerts_widen_the_lower_limit_to_first_order),
         cmocka_unit_test(a_limit_that_leaves_a_hundred_per_cent_is_none),
         cmocka_unit_test(iso_10156_gives_the_sum_of_the_ghs_example),
         cmocka_unit_test(not_flammable_is_only_said_on_confirmed_constants),
+        cmocka_unit_test(a_sum_needs_a_constant_of_every_combustible),
         cmocka_unit_test(what_cannot_burn_is_not_flammable),
         cmocka_unit_test(gases_that_break_the_rule_are_marked),
         cmocka_unit_test(a_gas_without_published_limits_is_refused_by_name),
@@ -259,6 +338,8 @@ int main(void)
         cmocka_unit_test(inerts_slow_a_flame_by_their_mass),
         cmocka_unit_test(air_in_the_gas_is_no_diluent),
         cmocka_unit_test(velocities_outside_the_rule_are_marked_or_refused),
+        cmocka_unit_test(the_rules_end_where_the_header_says),
+        cmocka_unit_test(the_band_of_a_mixture_is_that_of_its_parts),
     };
 
     return cmocka_run_group_tests_name("flammability", tests, NULL, NULL);

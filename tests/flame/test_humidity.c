@@ -114,6 +114,10 @@ static void humidity_that_cannot_be_is_refused(void **state)
     assert_refused(bc_humidity_wet_bulb(300.0, 301.0, P0_PA, &x, &err), BC_ERR_RANGE, &err);
     assert_refused(bc_humidity_wet_bulb(303.0, 278.0, P0_PA, &x, &err), BC_ERR_RANGE, &err);
     assert_refused(bc_humidity_apply(&water, 0.1, &wet, &err), BC_ERR_INPUT, &err);
+    assert_int_equal(bc_humidity_wet_bulb(T0_K + 30.0, T0_K + 5.0, P0_PA, &x, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "no air of 30 C has a wet bulb as cold as 5 C"));
+    assert_int_equal(bc_humidity_dew_point(T0_K + 96.85, 50000.0, &x, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "than the air, 50 kPa"));
     assert_within(x, 7.0, 0.0, "output after refusals");
 }
 

@@ -391,6 +391,68 @@ static void volume_shares_of_what_is_no_gas_there_are_refused_and_never_infinite
     assert_true(c.gas.x[SPECIES_naphthalene] < 0.0035);
 }
 
+/* Z of a pure gas by the virial form falls with temperature until it is below zero: no gas. The refusal names the state. */
+static void a_liquid_is_refused_at_the_temperature_of_the_volumes(void **state)
+{
+    (void)state;
+    assert_text_refused("[gas]\nbasis = volume\nmeasured_at = -49 C\n[components]\nn-pentadecane = 1\nmethane = rest\n", 5,
+                        "'n-pentadecane' is no gas at -49 C");
+}
+
+/* ISO 6976:2016 holds for Z above 0.9; each gas of the table is asked a little below and above the temperature of that. */
+static void a_volume_of_a_gas_just_outside_of_iso_6976_is_remarked(void **state)
+{
+    size_t species = 0;
+    double cold = -40.0, warm = 50.0;
+    bc_composition c;
+    bc_error err;
+
+    (void)state;
+    assert_int_equal(bc_species_find("n-pentane", &species, NULL), BC_OK);
+    assert_true(bc_species_z(species, cold) < 0.9 && bc_species_z(species, warm) > 0.9);
+    while (warm - cold > 1e-6)
+        *(bc_species_z(species, 0.5 * (cold + warm)) < 0.9 ? &cold : &warm) = 0.5 * (cold + warm);
+    for (int side = 0; side < 2; side++) {
+        char text[160];
+        const int n = snprintf(text, sizeof text, "[gas]\nbasis = volume\nmeasured_at = %.3f C\n[components]\nmethane = 98\nn-pentane = 2\n",
+                               cold + (side ? 0.1 : -0.1));
+
+        assert_ok(bc_composition_read(write_scratch(text, (size_t)n), &c, &err), &err);
+        assert_int_equal(remarks(&c, "Volume share of n-pentane"), side == 0);
+    }
+}
+
+/* 0 to 50 C, as remarked; the ends are inside. */
+static void volumes_outside_of_0_to_50_c_are_remarked(void **state)
+{
+    static const struct {
+        const char *at, *words;
+    } ROWS[] = {{"0", NULL}, {"50", NULL}, {"-1.5", "Volume shares at -1.5 C"}, {"51", "Volume shares at 51 C"}};
+    bc_composition c;
+    bc_error err;
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(ROWS); i++) {
+        char text[160];
+        const int n = snprintf(text, sizeof text, "[gas]\nbasis = volume\nmeasured_at = %s C\n[components]\nmethane = 98\nethane = 2\n", ROWS[i].at);
+
+        assert_ok(bc_composition_read(write_scratch(text, (size_t)n), &c, &err), &err);
+        assert_int_equal(remarks(&c, ROWS[i].words ? ROWS[i].words : "Volume shares at"), ROWS[i].words != NULL);
+    }
+}
+
+static void a_split_may_stand_in_front_of_the_components(void **state)
+{
+    const char *text = "[cut c6+]\nn-hexane = 1\nn-octane = 1\n[components]\nmethane = 97\nc6+ = 3\n";
+    bc_composition c;
+    bc_error err;
+
+    (void)state;
+    assert_ok(bc_composition_read(write_scratch(text, strlen(text)), &c, &err), &err);
+    assert_within(c.gas.x[SPECIES_n_hexane], 0.015, 1e-15);
+    assert_within(c.gas.x[SPECIES_n_octane], 0.015, 1e-15);
+}
+
 /* ---- sums ---------------------------------------------------------------------------------------- */
 
 static void a_sum_outside_98_to_102_per_cent_is_refused_with_the_sum(void **state)
@@ -475,6 +537,8 @@ static void a_shortfall_completed_with_a_species_is_what_it_would_have_been(void
     assert_same_gas("saturated", &completed, &whole.gas, 1e-15);
     parse("methane=92.4,ethane=rest", &c);
     assert_refused(bc_composition_completed(&c, SPECIES_hydrogen, &completed, &err), &err, BC_ERR_USAGE, "nothing is missing");
+    parse("methane=96.4,ethane=2.4", &c);
+    assert_refused(bc_composition_completed(&c, bc_species_count(), &completed, &err), &err, BC_ERR_USAGE, "nothing is missing");
     parse("methane=96.4,ethane=4.4", &c);
     assert_refused(bc_composition_completed(&c, SPECIES_hydrogen, &completed, &err), &err, BC_ERR_USAGE, "nothing is missing");
 }
@@ -736,6 +800,18 @@ static void without_a_family_the_gas_itself_tells_whether_oxygen_is_strange(void
         {"propane=56,air=44", "mixed on purpose", false},
         {"methane=55,carbon-dioxide=43.5,nitrogen=0.9,oxygen=0.6", "digester gas", false},
         {"hydrogen=50,methane=30,carbon-monoxide=10,nitrogen=9,oxygen=1", "manufactured gas", false},
+        /* one mark at a time of a gas that is no supply gas */
+        {"methane=69.4,hydrogen=30,oxygen=0.6", "less than 70 % hydrocarbons", false},
+        {"methane=95,nitrogen=1.9,oxygen=3.1", "oxygen of several per cent", false},
+        {"methane=97,carbon-monoxide=0.6,nitrogen=1.9,oxygen=0.5", "carbon monoxide", false},
+        {"methane=85,carbon-dioxide=10.1,nitrogen=4.4,oxygen=0.5", "much carbon dioxide", false},
+        {"methane=85,methanol=5,nitrogen=9.5,oxygen=0.5", "a supply gas with methanol", true},
+        {"methane=69,methanol=20,nitrogen=10.5,oxygen=0.5", "what holds oxygen is no hydrocarbon", false},
+        {"methane=70.4,hydrogen=29,oxygen=0.6", "just enough hydrocarbons", true},
+        {"methane=95,nitrogen=2.1,oxygen=2.9", "just little enough oxygen", true},
+        {"methane=97,carbon-monoxide=0.4,nitrogen=2.1,oxygen=0.5", "a trace of carbon monoxide", true},
+        {"methane=85,carbon-dioxide=9.9,nitrogen=4.6,oxygen=0.5", "some carbon dioxide", true},
+        {"methane=96.2,nitrogen=3.775,oxygen=0.025", "just more than a trace", true},
     };
     bc_composition c;
 
@@ -850,6 +926,10 @@ int main(void)
         cmocka_unit_test(fractions_written_as_per_cent_and_the_reverse_are_recognised),
         cmocka_unit_test(a_normalisation_is_remarked_from_0_05_per_cent_on),
         cmocka_unit_test(the_scale_of_the_shares_does_not_move_the_gas),
+        cmocka_unit_test(a_liquid_is_refused_at_the_temperature_of_the_volumes),
+        cmocka_unit_test(a_volume_of_a_gas_just_outside_of_iso_6976_is_remarked),
+        cmocka_unit_test(volumes_outside_of_0_to_50_c_are_remarked),
+        cmocka_unit_test(a_split_may_stand_in_front_of_the_components),
         cmocka_unit_test(the_rest_fills_up_to_one_hundred_and_stands_once),
         cmocka_unit_test(a_shortfall_completed_with_a_species_is_what_it_would_have_been),
         cmocka_unit_test(closing_the_fractions_another_way_changes_the_scatter_and_not_the_gas),

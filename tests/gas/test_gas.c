@@ -56,6 +56,20 @@ static void amounts_become_fractions_whatever_their_scale(void **state)
     }
 }
 
+static void amounts_behind_the_last_species_do_not_count(void **state)
+{
+    double amounts[BC_SPECIES_CAPACITY] = {0.0};
+
+    (void)state;
+    amounts[SPECIES_methane] = 3.0;
+    amounts[bc_species_count()] = 5.0;
+    amounts[BC_SPECIES_CAPACITY - 1] = 7.0;
+    const bc_gas gas = gas_of(amounts);
+
+    for (size_t i = 0; i < BC_SPECIES_CAPACITY; i++)
+        assert_within(gas.x[i], i == SPECIES_methane ? 1.0 : 0.0, 0.0);
+}
+
 static void amounts_that_make_no_gas_are_refused(void **state)
 {
     static const double BAD[] = {-1e-9, (double)INFINITY, (double)NAN};
@@ -180,6 +194,34 @@ static void a_gas_cannot_be_saturated_when_boiling_frozen_through_or_water_alone
     assert_within(wet.x[0], 0.5, 0.0);
 }
 
+/* A gas that is all vapour at its own pressure has no room for anything else. */
+static void the_saturation_pressure_itself_is_no_pressure_of_a_gas(void **state)
+{
+    double amounts[BC_SPECIES_CAPACITY] = {0.0};
+    double p_pa = 0.0;
+    bc_gas wet;
+    bc_error err = {.status = BC_OK};
+
+    (void)state;
+    amounts[SPECIES_methane] = 1.0;
+    const bc_gas gas = gas_of(amounts);
+
+    assert_int_equal(bc_steam_pressure(333.15, &p_pa, NULL), BC_OK); /* 60 C: 19.946 kPa, ASME steam tables (1999), value from memory */
+    assert_within(p_pa, 19946.0, 2.0);
+    assert_refused(bc_gas_saturated(&gas, 333.15, p_pa, &wet, &err), &err, BC_ERR_RANGE, "at 60 C water boils below 19.94");
+    assert_ok(bc_gas_saturated(&gas, 333.15, nextafter(p_pa, HUGE_VAL), &wet, &err), &err);
+    assert_refused(bc_gas_saturated(&gas, 203.15, 1e5, &wet, &err), &err, BC_ERR_RANGE, "not at -70 C");
+}
+
+/* u of a factor that only the older edition has: 0.025 up to four heavy atoms, 0.05 above, as summation.c tells; butane and
+ * pentane stand on either side. */
+static void factors_of_the_older_edition_scatter_by_the_size_of_the_molecule(void **state)
+{
+    (void)state;
+    assert_within(bc_summation_factor(SPECIES_n_butane, 1995, 15.0).u, 0.025, 0.0);
+    assert_within(bc_summation_factor(SPECIES_n_pentane, 1995, 15.0).u, 0.05, 0.0);
+}
+
 static void drying_undoes_saturating(void **state)
 {
     chance c = {9090};
@@ -236,6 +278,12 @@ static void oxygen_without_enough_nitrogen_leaves_nothing_negative(void **state)
 
     assert_ok(bc_gas_air_free(&oxygen_blown, &pure, &air, &err), &err);
     assert_within(pure.x[SPECIES_methane], 1.0, 1e-15);
+    assert_within(air, 1.0, 0.0);
+    amounts[SPECIES_methane] = 0.7895; /* 1.005 times the oxygen of air: more than all of it cannot be air */
+    amounts[SPECIES_oxygen] = 0.2105;
+    const bc_gas just_more = gas_of(amounts);
+
+    assert_ok(bc_gas_air_free(&just_more, &pure, &air, &err), &err);
     assert_within(air, 1.0, 0.0);
     assert_int_equal(bc_gas_air_free(&only_air, &pure, &air, &err), BC_ERR_INPUT);
 }
@@ -381,6 +429,7 @@ int main(void)
 {
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(amounts_become_fractions_whatever_their_scale),
+        cmocka_unit_test(amounts_behind_the_last_species_do_not_count),
         cmocka_unit_test(amounts_that_make_no_gas_are_refused),
         cmocka_unit_test(molar_mass_and_atoms_of_a_mixture_are_its_weighted_sums),
         cmocka_unit_test(dry_air_has_the_molar_mass_of_the_standard),
@@ -388,6 +437,8 @@ int main(void)
         cmocka_unit_test(ice_and_liquid_water_meet_at_the_triple_point_and_end_at_the_critical_one),
         cmocka_unit_test(a_saturated_gas_holds_the_saturation_pressure_over_its_own),
         cmocka_unit_test(a_gas_cannot_be_saturated_when_boiling_frozen_through_or_water_alone),
+        cmocka_unit_test(the_saturation_pressure_itself_is_no_pressure_of_a_gas),
+        cmocka_unit_test(factors_of_the_older_edition_scatter_by_the_size_of_the_molecule),
         cmocka_unit_test(drying_undoes_saturating),
         cmocka_unit_test(air_mixed_into_a_gas_comes_out_again),
         cmocka_unit_test(oxygen_without_enough_nitrogen_leaves_nothing_negative),

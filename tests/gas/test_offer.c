@@ -89,7 +89,10 @@ static void what_is_none_of_them_is_refused_with_the_form(void **state)
     bc_error err = {.status = BC_OK};
 
     (void)state;
-    assert_refused(bc_price_parse("32", &p, currency, &err), &err, BC_ERR_USAGE, "32 EUR/MWh");
+    assert_refused(bc_price_parse("32", &p, currency, &err), &err, BC_ERR_USAGE, "32 EUR/MWh|up to 15 letters");
+    assert_refused(bc_price_parse("32 ABCDEFGHIJKLMNOP/MWh", &p, currency, &err), &err, BC_ERR_USAGE, "up to 15 letters");
+    assert_refused(bc_price_parse("32 EUR/kkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkk", &p, currency, &err), &err, BC_ERR_USAGE,
+                   "longer than 63 characters");
     assert_refused(bc_price_parse("32 /MWh", &p, currency, &err), &err, BC_ERR_USAGE, "number, currency");
     assert_refused(bc_price_parse("32 EUR/h", &p, currency, &err), &err, BC_ERR_USAGE, "no amount of gas");
     assert_refused(bc_price_parse("cheap", &p, currency, &err), &err, BC_ERR_INPUT, "cheap");

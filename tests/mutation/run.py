@@ -4,13 +4,15 @@
 It wants the tree in $SRC, a build with every symbol visible in $BASE, the compiler with its flags in $COMPILE,
 and in $LINK_LIB and $LINK_TEST what comes behind the objects of the library and of a test. The test programs are
 linked once, against a shared library: a mutant costs one compilation and one link. Killed is a mutant at which
-a test fails, crashes or takes longer than TIMEOUT_S; not counted is one that does not compile, or whose object code is
+a test fails, crashes or computes more than ten times as long as over the unchanged library; that is processor time,
+which other work on the machine does not lengthen, and the report counts these kills apart. Not counted is one that does not compile, or whose object code is
 that of the original (equivalent beyond doubt: Papadakis et al., ICSE 2015), or that equivalent.txt excuses. MUTANTS, SEED: how many, which;
 JOBS: at once; ONLY=survivors asks the survivors of the last run again, after tests were added.
 """
 import concurrent.futures
 import glob
 import hashlib
+import math
 import os
 import queue
 import shlex
@@ -18,12 +20,15 @@ import shutil
 import signal
 import subprocess
 import sys
-import time
+import threading
 
 from sites import mutants_of
 
 LEAST_PERCENT = 90
-TIMEOUT_S = 60
+CPU_S = 10, 10  # what a test may compute: so long, and so many times what it takes without a mutant
+WALL_PER_CPU = 20  # what waits for ever computes nothing, so a clock ends it, late enough for a busy machine
+MEASURE_S = 60  # what a test is thought to take before it was measured
+BY_TIME = " (time)"
 GROUP = 16  # goldens asked together
 MEMORY_KB = 8_000_000
 FILE_BLOCKS = 1_000_000
@@ -100,7 +105,7 @@ class Tests:
         self.programs = [p[:-2] for p in self.programs]
         goldens = [os.path.basename(p)[:-3] for p in sorted(glob.glob("tests/cli/*.sh", root_dir=SRC))]
         self.goldens = [" ".join(goldens[i:i + GROUP]) for i in range(0, len(goldens), GROUP)]
-        self.seconds = {}
+        self.seconds = {}  # of processor time
 
     def link(self, library):
         parts = [p for p in glob.glob(f"{BASE}/src/output/*.o") + glob.glob(f"{BASE}/src/cli/*.o")
@@ -115,36 +120,42 @@ class Tests:
         for module in glob.glob(f"{BASE}/bluecone_*.so"):
             shutil.copy(module, ROOT)
 
-    def passes(self, test, folder):
-        """A group of goldens are names without a folder. What a mutant may take is limited, and what it leaves is removed."""
+    def verdict(self, test, folder):
+        """'' for passed, 'time' or 'failed', and the seconds computed. A group of goldens are names without a folder. What a
+        mutant may take is limited, and what it leaves is removed."""
         scratch = os.path.join(folder, "tmp")
         os.makedirs(scratch, exist_ok=True)
+        least, times = CPU_S
+        limit = math.ceil(least + times * self.seconds.get(test, MEASURE_S))
         command = [os.path.join(ROOT, test)] if "/" in test else ["sh", "tests/run_cli.sh", "-b", ROOT, *test.split()]
-        child = subprocess.Popen(["sh", "-c", f'ulimit -t {TIMEOUT_S}; ulimit -v {MEMORY_KB}; ulimit -f {FILE_BLOCKS}; exec "$@"', "sh", *command],
+        child = subprocess.Popen(["sh", "-c", f'ulimit -t {limit}; ulimit -v {MEMORY_KB}; ulimit -f {FILE_BLOCKS}; exec "$@"', "sh", *command],
                                  cwd=SRC, env=dict(os.environ, LD_LIBRARY_PATH=folder, TMPDIR=scratch),
                                  stdin=subprocess.DEVNULL, stdout=subprocess.DEVNULL, stderr=subprocess.DEVNULL,
                                  start_new_session=True)
+        waiting = threading.Timer(WALL_PER_CPU * limit, os.killpg, (child.pid, signal.SIGKILL))
+        waiting.start()
         try:
-            return child.wait(TIMEOUT_S) == 0
-        except subprocess.TimeoutExpired:
-            return False
+            _, status, usage = os.wait4(child.pid, 0)
         finally:
+            waiting.cancel()
             try:
                 os.killpg(child.pid, signal.SIGKILL)  # the whole group, which the child leads
             except ProcessLookupError:
                 pass
-            child.wait()
             for path in glob.glob(f"/tmp/bluecone-test-{child.pid}.*"):  # scratch_path() of tests/support.h
                 os.remove(path)
             shutil.rmtree(scratch)
+        code = child.returncode = os.waitstatus_to_exitcode(status)
+        how = "" if code == 0 else "time" if code in (-signal.SIGXCPU, -signal.SIGKILL) else "failed"
+        return how, usage.ru_utime + usage.ru_stime
 
     def measure(self, folder):
         """All must pass over the unchanged library."""
         for test in self.programs + self.goldens:
-            start = time.monotonic()
-            if not self.passes(test, folder):
+            how, seconds = self.verdict(test, folder)
+            if how:
                 sys.exit(f"mutation: {test} fails without a mutant")
-            self.seconds[test] = time.monotonic() - start
+            self.seconds[test] = seconds
 
     def order(self, path):
         """Those that mirror the file's name, then its folder, then the rest, then goldens; quick ones first."""
@@ -199,8 +210,9 @@ class Bench:
         for test in tests.order(mutant.path):
             if test == tests.goldens[0]:
                 print(f"{mutant.path}:{mutant.line}: {mutant.identity[-1]}: no test program noticed", flush=True)
-            if not tests.passes(test, self.folder):
-                return test if "/" in test else f"tests/cli: {test.split()[0]} ..."
+            how, _ = tests.verdict(test, self.folder)
+            if how:
+                return (test if "/" in test else f"tests/cli: {test.split()[0]} ...") + (BY_TIME if how == "time" else "")
         return ""
 
 
@@ -231,10 +243,16 @@ def judge_all(mutants, wanted, benches, tests):
 
 
 def known_equivalents():
-    """Reasons by (path, text of the line, change), from equivalent.txt."""
+    """Reasons by (path, text of the line, change), from equivalent.txt; the text may end in #N, the Nth line that reads so."""
     rows = [line.split(" | ") for line in read(os.path.join(os.path.dirname(__file__), "equivalent.txt")).splitlines()
             if not line.startswith("#")]
     return {(path, text, change): why for path, text, change, why in rows}
+
+
+def reason_of(row, reasons):
+    """Why a survivor is equivalent; None when it is not known to be."""
+    path, source, same, _, _, change = row[:6]
+    return reasons.get((path, source, change)) or reasons.get((path, f"{source} #{same}", change))
 
 
 def table(counted):
@@ -249,15 +267,16 @@ def report(rows, seed):
     """Counts the rows of results, names the survivors; true when enough were killed."""
     reasons = known_equivalents()
     counted = sorted((row for row in rows if row[-1] not in ("invalid", "same")), key=lambda row: (row[0], int(row[-2])))
-    excused = [row for row in counted if row[-1] == "" and (row[0], row[1], row[5]) in reasons]
+    excused = [row for row in counted if row[-1] == "" and reason_of(row, reasons)]
     judged = [row for row in counted if row not in excused]
     lines = [f"{len(counted)} mutants, seed {seed}; besides {sum(row[-1] == 'invalid' for row in rows)} that do not compile and "
-             f"{sum(row[-1] == 'same' for row in rows)} of the same object code"]
+             f"{sum(row[-1] == 'same' for row in rows)} of the same object code; "
+             f"{sum(row[-1].endswith(BY_TIME) for row in counted)} of the killed by time"]
     lines += table(counted)
     lines += [f"without {len(excused)} survivors that are known to be equivalent:", *table(judged), "survivors:"]
     lines += [f"{row[0]}:{row[-2]}: {row[5]}" for row in judged if row[-1] == ""]
     lines += ["known to be equivalent:"]
-    lines += [f"{row[0]}:{row[-2]}: {row[5]}: {reasons[row[0], row[1], row[5]]}" for row in excused]
+    lines += [f"{row[0]}:{row[-2]}: {row[5]}: {reason_of(row, reasons)}" for row in excused]
     text = "\n".join(lines) + "\n"
     print(text, end="")
     with open(os.path.join(ROOT, "report.txt"), "w", encoding="utf-8") as file:
@@ -290,9 +309,10 @@ def chosen(seed):
         return sorted(mutants, key=lambda m: m.rank(seed)), int(os.environ.get("MUTANTS") or 300), []
     reasons = known_equivalents()
     rows = last_results()
-    stay = [row for row in rows if row[-1] != "" or (row[0], row[1], row[5]) in reasons]
+    stay = [row for row in rows if row[-1] != "" or reason_of(row, reasons)]
     left = {row[:6] for row in rows if row not in stay}
     mutants = [m for m in mutants if m.identity in left]
+    print(f"{len(left) - len(mutants)} survivors drop out, as their lines are gone")
     return mutants, len(mutants), stay
 
 

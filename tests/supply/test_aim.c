@@ -214,6 +214,80 @@ static void a_figure_that_no_blend_has_is_refused(void **state)
     }
 }
 
+/* A blend on the border, of two gases of three, is an aim whose solution rounding must not push below zero. */
+static void no_share_of_a_solution_is_negative(void **state)
+{
+    static const char *const GASES[] = {"methane=91,ethane=9", "hydrogen=100", "propane=97,propene=3"};
+    static setting s;
+    chance dice = {77};
+    bc_error err;
+
+    (void)state;
+    for (size_t k = 0; k < 30; k++) {
+        double share[3] = {0.0, 0.0, 0.0};
+        bool found = false;
+        bc_aim aim;
+
+        share[k % 3] = 0.1 + 0.8 * chance_uniform(&dice);
+        share[(k + 1) % 3] = 1.0 - share[k % 3];
+        open_setting(&s, BC_BY_MOLE, GASES, 3);
+        add_aim(&s, "relative-density", "", 1.0);
+        add_aim(&s, "hydrogen-carbon-ratio", "", 1.0);
+        for (size_t i = 0; i < 2; i++)
+            s.aims.limits[i].min = s.aims.limits[i].max = figure(&s, i, share);
+        assert_ok(bc_aim_find(&s.problem, &aim, &err), &err);
+        assert_true(aim.reached);
+        for (size_t n = 0; n < aim.count; n++) {
+            double apart = 0.0;
+
+            for (size_t i = 0; i < 3; i++) {
+                assert_true(aim.share[n][i] >= 0.0);
+                apart = fmax(apart, fabs(aim.share[n][i] - share[i]));
+            }
+            found = found || apart < 1e-8;
+        }
+        assert_true(found);
+    }
+}
+
+/* Shares that would have to be negative meet no aim, though Newton's method finds them. */
+static void a_solution_with_a_negative_share_is_none(void **state)
+{
+    static const char *const GASES[] = {"methane=60,hydrogen=20,nitrogen=20", "methane=80,hydrogen=10,nitrogen=10", "methane=40,hydrogen=40,nitrogen=20"};
+    static const double SHARE[] = {-0.1, 0.7, 0.4};
+    static setting s;
+    bc_aim aim;
+    bc_error err;
+
+    (void)state;
+    open_setting(&s, BC_BY_MOLE, GASES, 3);
+    add_aim(&s, "hydrogen", "", 1.0);
+    add_aim(&s, "nitrogen", "", 1.0);
+    for (size_t i = 0; i < 2; i++)
+        s.aims.limits[i].min = s.aims.limits[i].max = figure(&s, i, SHARE);
+    assert_ok(bc_aim_find(&s.problem, &aim, &err), &err);
+    assert_false(aim.reached);
+    assert_int_equal(aim.count, 1);
+    for (size_t i = 0; i < 3; i++)
+        assert_true(aim.share[0][i] >= 0.0);
+}
+
+static void a_wrong_count_of_free_shares_is_told(void **state)
+{
+    static const char *const GASES[] = {"methane=100", "hydrogen=100", "propane=100", "nitrogen=100"};
+    static setting s;
+    bc_aim aim;
+    bc_error err = {.status = BC_OK};
+
+    (void)state;
+    open_setting(&s, BC_BY_MOLE, GASES, 4);
+    add_aim(&s, "wobbe-gross", "", 47.8);
+    assert_refused(bc_aim_find(&s.problem, &aim, &err), &err, BC_ERR_USAGE, "4 free shares can reach 3 aims, not 1");
+    for (size_t i = 0; i < 4; i++)
+        s.problem.low[i] = s.problem.high[i] = 0.25;
+    assert_refused(bc_aim_find(&s.problem, &aim, &err), &err, BC_ERR_USAGE, "0 free shares can reach 0 aims, not 1");
+}
+
 static void windows_lie_between_the_crossings(void **state)
 {
     static const char *const GASES[] = {"hydrogen=100", "methane=96,nitrogen=4"};
@@ -250,6 +324,9 @@ int main(void)
         cmocka_unit_test(several_aims_are_met_by_as_many_free_shares_and_one),
         cmocka_unit_test(a_fixed_share_stays_and_several_aims_may_be_out_of_reach),
         cmocka_unit_test(a_figure_that_no_blend_has_is_refused),
+        cmocka_unit_test(no_share_of_a_solution_is_negative),
+        cmocka_unit_test(a_solution_with_a_negative_share_is_none),
+        cmocka_unit_test(a_wrong_count_of_free_shares_is_told),
         cmocka_unit_test(windows_lie_between_the_crossings),
     };
 

@@ -274,6 +274,52 @@ static void more_sources_than_a_spread_holds_keep_their_covariances(void **state
         }
 }
 
+/* Eight gases of twelve sources fill a spread of 96 to its last place: each source is kept by itself. */
+static void sources_that_just_fit_are_kept_one_by_one(void **state)
+{
+    static bc_composition c;
+    static bc_spread spread;
+    const bc_reference r = reference_at("15/15");
+    bc_blend_part parts[8];
+    double share[8];
+    bc_mixer m;
+    bc_error err;
+
+    (void)state;
+    assert_ok(bc_composition_parse("methane=72~0.3,ethane=8~0.1,propane=4~0.1,n-butane=2~0.05,isobutane=1.5~0.05,n-pentane=1~0.02,"
+                                   "isopentane=0.5~0.02,hydrogen=2~0.1,nitrogen=3~0.1,carbon-dioxide=4~0.1,carbon-monoxide=1~0.03,"
+                                   "helium=1~0.02", &c, &err), &err);
+    for (size_t i = 0; i < COUNT(parts); i++) {
+        parts[i] = (bc_blend_part){&c.gas, &c.spread};
+        share[i] = 1.0;
+    }
+    assert_ok(bc_mixer_make(&r, BC_BY_MOLE, parts, COUNT(parts), &m, &err), &err);
+    bc_mixer_spread(&m, share, &spread);
+    assert_int_equal(spread.count, BC_SPECIES_CAPACITY);
+    for (size_t k = 0; k < spread.count; k++)
+        for (size_t j = 0; j < SPECIES_COUNT; j++)
+            assert_within(spread.dx[k][j], c.spread.dx[k % 12][j] / 8.0, 1e-15);
+}
+
+/* Parts without heat have no shares of energy, not shares that are no numbers. */
+static void parts_without_heat_have_no_shares_of_energy(void **state)
+{
+    const bc_reference r = reference_at("15/15");
+    bc_gas nitrogen = {{0.0}}, argon = {{0.0}};
+    const bc_blend_part parts[] = {{&nitrogen, NULL}, {&argon, NULL}};
+    const double share[] = {0.3, 0.7};
+    double converted[2];
+    bc_mixer m;
+    bc_error err;
+
+    (void)state;
+    nitrogen.x[SPECIES_nitrogen] = argon.x[SPECIES_argon] = 1.0;
+    assert_ok(bc_mixer_make(&r, BC_BY_MOLE, parts, 2, &m, &err), &err);
+    bc_mixer_shares(&m, share, BC_BY_ENERGY, converted);
+    assert_within(converted[0], 0.0, 0.0);
+    assert_within(converted[1], 0.0, 0.0);
+}
+
 static void a_basis_has_its_word_and_what_is_none_has_no_word(void **state)
 {
     (void)state;
@@ -293,6 +339,8 @@ int main(void)
         cmocka_unit_test(a_part_without_heat_has_no_share_of_energy),
         cmocka_unit_test(scatter_of_the_blend_is_the_slope_along_each_source_of_its_parts),
         cmocka_unit_test(more_sources_than_a_spread_holds_keep_their_covariances),
+        cmocka_unit_test(sources_that_just_fit_are_kept_one_by_one),
+        cmocka_unit_test(parts_without_heat_have_no_shares_of_energy),
         cmocka_unit_test(a_basis_has_its_word_and_what_is_none_has_no_word),
     };
 

@@ -4,6 +4,7 @@
 
 #include "bluecone/burner.h"
 #include "gas/species_index.h"
+#include "supply/burner_internal.h"
 
 static const bc_control CONTROLS[] = {BC_CONTROL_FIXED,    BC_CONTROL_PNEUMATIC, BC_CONTROL_VOLUME,   BC_CONTROL_MASS,
                                       BC_CONTROL_TRIM_AIR, BC_CONTROL_TRIM_GAS,  BC_CONTROL_ENTRAINED};
@@ -162,6 +163,23 @@ static void a_trim_within_its_range_holds_the_oxygen_and_not_quite_the_air_facto
     }
 }
 
+/* The oxygen that a trim holds is that of the old gas, however little: at 0.1 % of air beyond what is needed, too. */
+static void a_trim_holds_the_least_oxygen(void **state)
+{
+    const bc_reference reference = reference_at("15/15");
+    const bc_subject natural = subject_of(&reference, NATURAL), oven = subject_of(&reference, COKE_OVEN);
+    bc_burner b = burner_with(BC_CONTROL_TRIM_AIR);
+
+    (void)state;
+    b.lambda = 1.001;
+    const bc_burner_case set = set_on(&b, &natural);
+    const bc_burner_response was = response_of(&set, &natural, NULL), is = response_of(&set, &oven, NULL);
+
+    assert_true(was.o2_dry > 1e-4);
+    assert_within(is.o2_dry, was.o2_dry, 1e-9);
+    assert_true(fabs(is.lambda - 1.001) > 1e-6);
+}
+
 static void a_trim_that_holds_with_the_gas_makes_heat_by_the_air_alone(void **state)
 {
     const bc_reference reference = reference_at("15/15");
@@ -193,6 +211,31 @@ static void a_trim_at_the_end_of_its_range_lets_the_oxygen_go(void **state)
     assert_true(r.trim_at_end);
     assert_within(r.air_ratio, 1.10, 1e-12);
     assert_true(r.o2_dry < set.o2);
+}
+
+/* A jet as large as its throat leaves no room for air, a larger one none either: 1 is the least ratio of the areas. */
+static void a_jet_as_large_as_its_throat_draws_no_air(void **state)
+{
+    const bc_reference reference = reference_at("15/15");
+    const bc_subject gas = subject_of(&reference, NATURAL);
+    const bc_burner b = burner_with(BC_CONTROL_ENTRAINED);
+    const bc_burner_case set = set_on(&b, &gas);
+    bc_burner_setting setting = bc_burner_setting_as_found();
+
+    (void)state;
+    burner_flows f;
+    bc_error err;
+
+    assert_ok(burner_flow_of(&set, &gas, &setting, false, &f, &err), &err);
+    assert_within(f.primary, 0.57, 1e-9);
+    for (int larger = 0; larger < 2; larger++) {
+        setting.area = set.jet * (1.0 + 0.1 * larger);
+        assert_ok(burner_flow_of(&set, &gas, &setting, false, &f, &err), &err);
+        assert_within(f.primary, 0.0, 0.0);
+    }
+    setting.area = set.jet / 1.005;
+    assert_ok(burner_flow_of(&set, &gas, &setting, false, &f, &err), &err);
+    assert_true(f.primary > 0.0);
 }
 
 /* (1 + r)(1 + r/d) = const while gas and air are equally warm. */
@@ -527,8 +570,10 @@ int main(void)
         cmocka_unit_test(the_air_factor_goes_with_the_inverse_of_the_air_index),
         cmocka_unit_test(metered_gas_brings_heat_by_its_volume_or_its_mass),
         cmocka_unit_test(a_trim_within_its_range_holds_the_oxygen_and_not_quite_the_air_factor),
+        cmocka_unit_test(a_trim_holds_the_least_oxygen),
         cmocka_unit_test(a_trim_that_holds_with_the_gas_makes_heat_by_the_air_alone),
         cmocka_unit_test(a_trim_at_the_end_of_its_range_lets_the_oxygen_go),
+        cmocka_unit_test(a_jet_as_large_as_its_throat_draws_no_air),
         cmocka_unit_test(entrained_air_keeps_the_momentum_balance),
         cmocka_unit_test(primary_aeration_goes_nearly_with_the_inverse_of_the_air_index),
         cmocka_unit_test(restoring_restores_heat_and_air_under_every_control_and_both_ways),

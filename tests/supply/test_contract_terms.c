@@ -68,6 +68,17 @@ static void a_price_is_the_same_money_on_every_basis(void **state)
     }
 }
 
+static void a_gas_without_heat_has_no_price(void **state)
+{
+    bc_trade t = {.annual_kg = -7.0};
+    bc_error err = {.status = BC_OK};
+
+    (void)state;
+    assert_refused(bc_contract_trade(read_text("[contract]\nprice = 0.43 EUR/kg\n[limit density]\nmin = 1\n"), NULL,
+                                     &gas_of("nitrogen=71,argon=29")->gas, &t, &err), &err, BC_ERR_RANGE, "without heat");
+    assert_within(t.annual_kg, -7.0, 0.0);
+}
+
 static void a_net_annual_energy_is_net(void **state)
 {
     bc_trade t;
@@ -236,6 +247,7 @@ int main(void)
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(a_share_comes_back_on_the_basis_it_was_stated_on),
         cmocka_unit_test(a_price_is_the_same_money_on_every_basis),
+        cmocka_unit_test(a_gas_without_heat_has_no_price),
         cmocka_unit_test(a_net_annual_energy_is_net),
         cmocka_unit_test(confusions_have_the_size_that_textbooks_give),
         cmocka_unit_test(a_sum_that_was_scaled_shows_what_scaling_did),

@@ -228,6 +228,73 @@ static void a_gas_just_inside_a_line_is_judged(void **state)
     assert_true(index_of("methane-number", NULL, "methane=99.55,hydrogen=0.45").in_range);
 }
 
+static bc_index index_of_two(const char *id, const bc_subject *old_gas, const char *other, double x)
+{
+    const bc_reference reference = reference_at("15/15");
+    size_t methane = 0, species = 0, i = 0;
+    bc_gas gas = {{0.0}};
+    bc_subject s;
+    bc_index index;
+    bc_error err;
+
+    assert_ok(bc_species_find("methane", &methane, &err), &err);
+    assert_ok(bc_species_find(other, &species, &err), &err);
+    gas.x[methane] = 1.0 - x;
+    gas.x[species] = x;
+    assert_ok(bc_subject_make(&reference, &gas, NULL, &s, &err), &err);
+    assert_ok(bc_index_find(id, &i, &err), &err);
+    assert_ok(bc_index_evaluate(i, old_gas, &s, &index, &err), &err);
+    return index;
+}
+
+/* The shares that the reasons name belong to the method; a millionth more does not. */
+static void the_line_itself_is_inside_of_a_method(void **state)
+{
+    static const struct {
+        const char *id, *other;
+        double line;
+        bool pair;
+    } LINES[] = {{"weaver-flashback", "hydrogen", 0.10, true},      {"weaver-speed", "hydrogen", 0.10, false},
+                 {"weaver-speed", "hydrogen-sulfide", 0.01, false}, {"aga-flashback", "hydrogen", 0.20, true},
+                 {"aga-flashback", "carbon-monoxide", 0.20, true},  {"aga-lifting", "oxygen", 0.01, true},
+                 {"aga-lifting", "hydrogen-sulfide", 0.01, true},   {"dutton-icf", "hydrogen", 0.001, false},
+                 {"dutton-icf", "carbon-monoxide", 0.001, false},   {"methane-number", "hydrogen", 0.005, false},
+                 {"methane-number", "carbon-monoxide", 0.005, false},
+                 {"mcp", "ammonia", 0.01, false},                   {"mcp", "methanol", 0.01, false},
+                 {"mcp", "water", 0.04, false},                     {"gbt-cp", "water", 0.04, false},
+                 {"weaver-speed", "water", 0.04, false},            {"weaver-heat", "water", 0.04, true},
+                 {"aga-lifting", "water", 0.04, true},              {"dutton-icf", "water", 0.04, false},
+                 {"methane-number", "water", 0.04, false}};
+    const bc_reference reference = reference_at("15/15");
+    const bc_subject natural = subject_of(&reference, NATURAL);
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(LINES); i++) {
+        const bc_index at = index_of_two(LINES[i].id, LINES[i].pair ? &natural : NULL, LINES[i].other, LINES[i].line);
+        const bc_index beyond = index_of_two(LINES[i].id, LINES[i].pair ? &natural : NULL, LINES[i].other, LINES[i].line + 1e-6);
+
+        if (!at.has_value || !at.in_range)
+            print_error("%s with %g of %s: %s\n", LINES[i].id, LINES[i].line, LINES[i].other, at.reason);
+        if (beyond.has_value && beyond.in_range)
+            print_error("%s with more than %g of %s is in range\n", LINES[i].id, LINES[i].line, LINES[i].other);
+        assert_true(at.has_value && at.in_range && !(beyond.has_value && beyond.in_range));
+    }
+}
+
+/* 5 % of inerts belong to the methane number; more is told in front of what the routes differ by. */
+static void five_per_cent_of_inerts_are_not_yet_told(void **state)
+{
+    static const char *const INERTS[] = {"nitrogen", "carbon-dioxide"};
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(INERTS); i++) {
+        const bc_index at = index_of_two("methane-number", NULL, INERTS[i], 0.05), beyond = index_of_two("methane-number", NULL, INERTS[i], 0.050001);
+
+        assert_null(strstr(at.reason, "inerts above"));
+        assert_non_null(strstr(beyond.reason, "inerts above 5 %"));
+    }
+}
+
 static void what_does_not_burn_has_no_index(void **state)
 {
     (void)state;
@@ -350,6 +417,8 @@ int main(void)
         cmocka_unit_test(equal_heat_does_not_clear_a_hydrogen_blend),
         cmocka_unit_test(gases_outside_a_method_are_marked_with_their_reason),
         cmocka_unit_test(a_gas_just_inside_a_line_is_judged),
+        cmocka_unit_test(the_line_itself_is_inside_of_a_method),
+        cmocka_unit_test(five_per_cent_of_inerts_are_not_yet_told),
         cmocka_unit_test(what_does_not_burn_has_no_index),
         cmocka_unit_test(a_gas_that_holds_its_own_air_has_no_index_of_the_air_methods),
         cmocka_unit_test(wrong_calls_are_refused),

@@ -2,6 +2,7 @@
 /* test_optimum.c - optimal blends against dense search, against chance, and against each other. */
 #include "support.h"
 
+#include "bluecone/aim.h"
 #include "bluecone/composition.h"
 #include "bluecone/optimum.h"
 
@@ -113,6 +114,47 @@ static void three_parts_agree_with_a_dense_search(void **state)
         }
     assert_true(o.objective <= best);
     assert_within(o.objective / best, 1.0, 0.01); /* the grid is that coarse */
+}
+
+/* A goal with an aim: no cheaper blend that meets the aim is found by fixing one share after another. */
+static void an_aim_is_met_at_the_least_cost(void **state)
+{
+    static const char *const GASES[] = {"methane=96,nitrogen=4", "hydrogen=100", "propane=97,propene=3"};
+    static const char *const PRICES[] = {"41 EUR/MWh", "57 EUR/MWh", "0.91 EUR/kg"};
+    static setting s;
+    static bc_contract aims;
+    bc_optimum o;
+    bc_error err;
+    double best = HUGE_VAL, value = 0.0;
+    const double wanted = 48.9;
+
+    (void)state;
+    open_setting(&s, BC_BY_MOLE, GASES, PRICES, 3);
+    within_text(&s, "[limit hydrogen]\nmax = 31\n");
+    assert_ok(bc_contract_start(&(bc_state){15.0, 15.0, 101325.0, false, 2016}, &aims, &err), &err);
+    assert_ok(bc_contract_add(&aims, "wobbe-gross", "MJ/m3", &wanted, &wanted, &err), &err);
+    s.problem.aims = &aims;
+    assert_ok(bc_optimum_find(&s.problem, &o, &err), &err);
+    assert_true(o.feasible);
+    const bc_gas gas = bc_mixer_gas(&s.mixer, o.share);
+
+    assert_ok(bc_limit_value(&aims, 0, &gas, &value, &err), &err);
+    assert_within(value, wanted, 1e-6);
+    for (size_t i = 0; i <= 310; i++) {
+        bc_aim_problem fixed = {.mixer = &s.mixer, .aims = &aims, .high = {1.0, (double)i / 1000.0, 1.0}};
+        bc_aim aim;
+
+        fixed.low[1] = fixed.high[1];
+        assert_ok(bc_aim_find(&fixed, &aim, &err), &err);
+        for (size_t n = 0; aim.reached && n < aim.count; n++) {
+            double objective = 0.0;
+
+            assert_ok(bc_optimum_objective(&s.problem, aim.share[n], &objective, &err), &err);
+            best = fmin(best, objective);
+        }
+    }
+    assert_true(o.objective <= best * (1.0 + 1e-7));
+    assert_within(o.objective / best, 1.0, 1e-4); /* the steps are that fine */
 }
 
 /* Two parts and one binding limit: the share is where hydrogen is at its limit, the cost is linear-fractional
@@ -293,6 +335,7 @@ int main(void)
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(the_optimum_is_never_beaten_by_ten_thousand_random_blends),
         cmocka_unit_test(three_parts_agree_with_a_dense_search),
+        cmocka_unit_test(an_aim_is_met_at_the_least_cost),
         cmocka_unit_test(the_shadow_price_of_one_limit_is_its_derivative_by_hand),
         cmocka_unit_test(every_shadow_price_is_what_solving_again_gives),
         cmocka_unit_test(limits_that_exclude_each_other_are_named_with_what_would_do),

@@ -98,6 +98,27 @@ static void every_figure_of_iso_6976_and_of_the_balances_is_a_ratio(void **state
     assert_true(count >= 32); /* 19 of ISO 6976, 10 of atoms, 3 of formation */
 }
 
+/* A figure a mole of gas is divided by nothing, whatever the compiler leaves there. */
+static void what_is_divided_by_nothing_has_no_divisor(void **state)
+{
+    static const char *const IDS[] = {"oxygen-demand", "air-demand", "flue-wet", "flue-dry", "hhv-formation", "lhv-formation"};
+    bc_reference reference;
+
+    (void)state;
+    reference_of("15/15", false, 2016, &reference);
+    for (size_t k = 0; k < COUNT(IDS); k++) {
+        size_t quantity = 0;
+        bc_ratio ratio;
+        bc_error err;
+
+        assert_int_equal(bc_quantity_find(IDS[k], &quantity, NULL), BC_OK);
+        assert_ok(bc_ratio_of_quantity(quantity, &reference, &ratio, &err), &err);
+        assert_within(ratio.under_power, 0.0, 0.0);
+        for (size_t i = 0; i < BC_SPECIES_CAPACITY; i++)
+            assert_within(ratio.under[i], 0.0, 0.0);
+    }
+}
+
 static void a_dew_point_rises_with_its_ratio(void **state)
 {
     chance c = {5};
@@ -180,6 +201,7 @@ int main(void)
     const struct CMUnitTest tests[] = {
         cmocka_unit_test(every_ratio_is_its_quantity_at_every_state),
         cmocka_unit_test(every_figure_of_iso_6976_and_of_the_balances_is_a_ratio),
+        cmocka_unit_test(what_is_divided_by_nothing_has_no_divisor),
         cmocka_unit_test(a_dew_point_rises_with_its_ratio),
         cmocka_unit_test(a_concentration_is_mass_per_volume_of_real_gas),
         cmocka_unit_test(an_inert_gas_has_no_carbon_dioxide_per_heat),

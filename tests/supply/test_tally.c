@@ -6,6 +6,10 @@
 #include "tally_cases.h"
 
 #include "bluecone/log.h"
+#include "supply/tally_calendar.h"
+#include "supply/tally_internal.h"
+
+#include <malloc.h>
 
 #define HOUR 3600.0
 #define FEBRUARY 1770000000.0 /* 2026-02-02 02:40 */
@@ -105,6 +109,8 @@ static void without_a_usual_step_rows_count(void **state)
     assert_int_equal(e.runs, 1);
     assert_false(e.has_time);
     assert_within(e.longest, 2.0, 0.0);
+    assert_within(e.broken_held, 2.0, 0.0);
+    assert_within(e.broken_j, 0.0, 0.0); /* rows hold no time, so no heat */
     assert_within(e.worst, 11.5, 0.0);
     assert_int_equal(tally_trend_count(t), 0);
     tally_close(t);
@@ -311,6 +317,8 @@ static void periods_are_days_and_months_of_the_calendar(void **state)
         tally_period_spread(t, i, 0, &s);
         bc_log_time_text(span.from_s, text);
         assert_string_equal(text, BEGINS[i]);
+        bc_log_time_text(span.until_s, text);
+        assert_string_equal(text, i + 1 < COUNT(BEGINS) ? BEGINS[i + 1] : "2028-04-01 00:00");
         assert_int_equal(span.rows, ROWS[i]);
         assert_within(span.held, 6.0 * HOUR * (double)ROWS[i], 1e-6);
         assert_within(span.energy_j, 1e6 * 6.0 * HOUR * (double)ROWS[i], 1.0);
@@ -356,6 +364,27 @@ static void more_periods_than_are_kept_are_refused_with_a_remedy(void **state)
         status = add_with(t, 86400.0 * (double)days++, 1.5, 0.0, &err);
     assert_refused(status, &err, BC_ERR_INPUT, "more than 40000 days|--by month");
     assert_int_equal(days, TALLY_PERIOD_MAX + 2 + 1); /* the row at hand and the hot one are not counted yet */
+    tally_close(t);
+}
+
+/* When no period more is kept, rows of those that are there are still taken: the clock went back by a day. */
+static void a_full_tally_still_takes_rows_of_its_periods(void **state)
+{
+    tally *t = open_one(86400.0, HUGE_VAL, TALLY_DAY);
+    tally_span span;
+    tally_cover cover;
+
+    (void)state;
+    for (size_t day = 0; day < TALLY_PERIOD_MAX; day++)
+        add(t, 86400.0 * (double)day, 1.5, 0.0);
+    add(t, 86400.0 * (TALLY_PERIOD_MAX - 2.0), 2.5, 0.0);
+    add(t, 86400.0 * (TALLY_PERIOD_MAX - 1.0), 3.5, 0.0);
+    case_settle(t);
+    tally_covers(t, &cover);
+    assert_int_equal(cover.rows, TALLY_PERIOD_MAX + 2);
+    assert_int_equal(tally_period_count(t), TALLY_PERIOD_MAX);
+    tally_period_at(t, TALLY_PERIOD_MAX - 2, &span);
+    assert_int_equal(span.rows, 2);
     tally_close(t);
 }
 
@@ -593,6 +622,41 @@ static void the_longest_excursions_are_kept(void **state)
     free(k);
 }
 
+static int heavier_first(const void *a, const void *b)
+{
+    const uint64_t x = *(const uint64_t *)a, y = *(const uint64_t *)b;
+
+    return (x < y) - (x > y);
+}
+
+/* Whatever the order in which they come, those that are kept are the first of all sorted. */
+static void the_kept_excursions_are_those_of_sorting(void **state)
+{
+    enum { ALL = 3 * TALLY_RUN_MAX };
+    static uint64_t weights[ALL], kept[TALLY_RUN_MAX];
+    chance c = {1964};
+
+    (void)state;
+    for (int order = 0; order < 6; order++) {
+        tally_longest l;
+
+        assert_true(tally_longest_open(&l));
+        for (size_t i = 0; i < ALL; i++) {
+            weights[i] = order == 0 ? i : order == 1 ? ALL - i : chance_bits(&c);
+            const tally_stretch s = {.rows = 1, .weight = weights[i], .from_ms = (int64_t)i};
+
+            tally_longest_add(&l, &s);
+        }
+        assert_int_equal(l.count, TALLY_RUN_MAX);
+        for (size_t i = 0; i < l.count; i++)
+            kept[i] = l.kept[i].weight;
+        qsort(weights, ALL, sizeof *weights, heavier_first);
+        qsort(kept, TALLY_RUN_MAX, sizeof *kept, heavier_first);
+        assert_memory_equal(kept, weights, sizeof kept);
+        tally_longest_close(&l);
+    }
+}
+
 static void a_trend_has_a_thousand_steps_at_most_and_no_excursion_is_lost(void **state)
 {
     tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
@@ -657,6 +721,210 @@ static void ten_years_of_days_stay_below_sixteen_mebibytes(void **state)
     tally_close(t);
 }
 
+/* BC_LOG_GAP usual steps are no gap, a millisecond more is one, and then the row holds one step. */
+static void a_gap_begins_beyond_three_steps(void **state)
+{
+    (void)state;
+    for (int more = 0; more < 2; more++) {
+        tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
+        tally_cover cover;
+
+        add(t, FEBRUARY, 1.5, 0.0);
+        add(t, FEBRUARY + BC_LOG_GAP * 60.0 + 0.001 * more, 2.5, 0.0);
+        case_settle(t);
+        tally_covers(t, &cover);
+        assert_int_equal(cover.gaps, more);
+        assert_within(cover.held, more ? 120.0 : 240.0, 0.0);
+        assert_within(cover.gap_s, more ? 120.001 : 0.0, 1e-9);
+        tally_close(t);
+    }
+}
+
+/* The years 1970 to 9999, heats that are not negative, figures below TALLY_VALUE_MAX: supply/tally.h. */
+static void rows_are_taken_to_the_ends_of_what_a_tally_holds(void **state)
+{
+    const double latest_s = (double)TALLY_LATEST_MS / 1000.0, first = 0.0;
+    tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
+    tally_row row = {.has_time = true, .has_flow = true, .values = &first};
+    tally_spread s;
+    tally_cover cover;
+    bc_error err;
+
+    (void)state;
+    assert_ok(tally_add(t, &row, &err), &err); /* no time before 1970, no power below zero: zero is fine */
+    assert_ok(add_with(t, latest_s, nextafter(TALLY_VALUE_MAX, 0.0), nextafter(TALLY_VALUE_MAX, 0.0), &err), &err);
+    assert_refused(add_with(t, latest_s + 0.001, 1.5, 0.0, &err), &err, BC_ERR_INPUT, "1970 to 9999");
+    assert_refused(add_with(t, latest_s, 1.5, TALLY_VALUE_MAX, &err), &err, BC_ERR_INPUT, "heat");
+    row.power_w = -1e-9;
+    assert_refused(tally_add(t, &row, &err), &err, BC_ERR_INPUT, "heat");
+    add(t, latest_s - 60.0, TALLY_VALUE_MAX, 0.0); /* no figure, though a row */
+    add(t, latest_s - 60.0, -TALLY_VALUE_MAX, 0.0);
+    case_settle(t);
+    tally_covers(t, &cover);
+    tally_spreads(t, 0, &s);
+    assert_int_equal(cover.rows, 4);
+    assert_int_equal(s.rows, 2);
+    assert_within(s.max, TALLY_VALUE_MAX, 1e-15 * TALLY_VALUE_MAX);
+    assert_within(s.min, 0.0, 0.0);
+    tally_close(t);
+}
+
+/* Times count in milliseconds, the nearest. */
+static void a_time_is_that_of_the_nearest_millisecond(void **state)
+{
+    static const double ADDED[] = {0.0, 0.0004, 0.0006, 0.0014}, WANT[] = {0.0, 0.0, 0.001, 0.001};
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(ADDED); i++) {
+        tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
+        tally_cover cover;
+
+        add(t, 1000.0 + ADDED[i], 1.5, 0.0);
+        case_settle(t);
+        tally_covers(t, &cover);
+        assert_within(cover.first_s, 1000.0 + WANT[i], 1e-9);
+        tally_close(t);
+    }
+}
+
+static bool opens(size_t figures, size_t limits, size_t flags, double step_s)
+{
+    static tally_plan plan;
+    tally *t = NULL;
+    bc_error err = {.status = BC_OK};
+
+    plan = (tally_plan){.figure_count = figures, .limit_count = limits, .flag_count = flags, .step_s = step_s};
+    const bc_status status = tally_open(&plan, &t, &err);
+
+    assert_true(status == BC_OK || (status == BC_ERR_USAGE && err.status == status));
+    tally_close(t);
+    return status == BC_OK;
+}
+
+static void a_plan_is_taken_to_its_bounds(void **state)
+{
+    (void)state;
+    assert_true(opens(0, 0, 0, 0.0));
+    assert_true(opens(TALLY_FIGURE_MAX, TALLY_LIMIT_MAX, TALLY_FLAG_MAX, 60.0));
+    assert_false(opens(TALLY_FIGURE_MAX + 1, 0, 0, 60.0));
+    assert_false(opens(0, TALLY_LIMIT_MAX + 1, 0, 60.0));
+    assert_false(opens(0, 0, TALLY_FLAG_MAX + 1, 60.0));
+    assert_true(opens(1, 0, 0, 0.001)); /* a millisecond to a year and somewhat more, as the refusal says */
+    assert_true(opens(1, 0, 0, 3.2e7));
+    assert_false(opens(1, 0, 0, nextafter(0.001, 0.0)));
+    assert_false(opens(1, 0, 0, nextafter(3.2e7, HUGE_VAL)));
+    assert_false(opens(1, 0, 0, -1.0));
+}
+
+/* TALLY_CELL_MAX cells in all, TALLY_PERIOD_MAX periods at most; "the hours of a year for six figures" are 8,800. */
+static void more_figures_leave_room_for_fewer_periods(void **state)
+{
+    static const size_t FIGURES[] = {0, 1, 2, 6, 64}, ROOM[] = {40000, 40000, 26400, 8800, 825};
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(FIGURES); i++) {
+        const tally_plan plan = {.figure_count = FIGURES[i], .step_s = 60.0};
+        tally *t = NULL;
+        bc_error err;
+
+        assert_ok(tally_open(&plan, &t, &err), &err);
+        assert_int_equal(tally_period_room(t), ROOM[i]);
+        tally_close(t);
+    }
+}
+
+/* What the allocator handed out is what the tally says that it takes, but for what the allocator rounds up. */
+static void the_bytes_of_a_tally_are_those_of_its_blocks(void **state)
+{
+    tally *t = open_one(60.0, 10.0, TALLY_HOUR);
+    size_t bytes = 0, blocks = 0;
+
+    (void)state;
+    for (size_t i = 0; i < 3; i++)
+        add(t, FEBRUARY + HOUR * (double)(i / 2) + 60.0 * (double)i, 9.0 + (double)i, 0.0);
+    case_settle(t);
+    const void *const single[] = {t, t->hot, t->whole, t->bins, t->bins[0].bins, t->trend.groups, t->periods.groups, t->longest.kept};
+
+    for (size_t i = 0; i < COUNT(single); i++, blocks++)
+        bytes += malloc_usable_size((void *)(uintptr_t)single[i]);
+    for (size_t i = 0; i < t->trend.count; i++, blocks++)
+        bytes += malloc_usable_size(t->trend.groups[i]);
+    for (size_t i = 0; i < t->periods.count; i++, blocks++)
+        bytes += malloc_usable_size(t->periods.groups[i]);
+    assert_true(t->trend.count == 3 && t->periods.count == 2);
+    assert_true(tally_bytes(t) <= bytes);
+    assert_true(bytes - tally_bytes(t) <= 16 * blocks + sizeof *t->bins); /* a block in front of no bin is never of no size */
+    tally_close(t);
+}
+
+/* A figure that never moves lies in one bar, in the first or last one where it is on the edge or beyond. */
+static void a_figure_that_never_moves_fills_one_bar(void **state)
+{
+    static const struct {
+        double value;
+        size_t bar;
+    } ROWS[] = {{0.0, 0}, {-3.0, 0}, {5.0, 4}, {7.0, 4}, {2.5, 2}, {2.0, 2}, {1.999, 1}};
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(ROWS); i++) {
+        tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
+        double held[5];
+
+        for (size_t k = 0; k < 10; k++)
+            add(t, FEBRUARY + 60.0 * (double)k, ROWS[i].value, 0.0);
+        case_settle(t);
+        tally_bars(t, 0, 0.0, 5.0, COUNT(held), held);
+        for (size_t k = 0; k < COUNT(held); k++)
+            assert_within(held[k], k == ROWS[i].bar ? 600.0 : 0.0, 0.0);
+        tally_close(t);
+    }
+}
+
+/* Values that one bin holds are spread evenly over what the figure was, from 1 to 1.00001: a bin begins with 1 and is
+ * 1.5e-5 wide. The bars share it by what they overlap; those around it have nothing. */
+static void a_bin_wider_than_a_bar_is_shared_evenly(void **state)
+{
+    tally *t = open_one(60.0, HUGE_VAL, TALLY_WHOLE);
+    double held[14];
+
+    (void)state;
+    for (size_t k = 0; k < 100; k++)
+        add(t, FEBRUARY + 60.0 * (double)k, k % 2 ? 1.00001 : 1.0, 0.0);
+    case_settle(t);
+    tally_bars(t, 0, 1.0 - 1.5e-6, 1.0 + 12.5e-6, COUNT(held), held); /* the ends lie in the middle of bars */
+    for (size_t k = 0; k < COUNT(held); k++)
+        assert_within(held[k], k == 1 || k == 11 ? 300.0 : k > 1 && k < 11 ? 600.0 : 0.0, 1e-3);
+    tally_close(t);
+}
+
+/* An outage ends an excursion, though the limit is broken on both sides of it. */
+static void an_excursion_ends_at_a_gap(void **state)
+{
+    tally *t = open_one(60.0, 10.0, TALLY_WHOLE);
+    tally_excursions e;
+    tally_run run;
+
+    (void)state;
+    for (size_t i = 0; i < 3; i++)
+        add(t, FEBRUARY + 60.0 * (double)i, 11.0, 0.0);
+    for (size_t i = 0; i < 2; i++)
+        add(t, FEBRUARY + HOUR + 60.0 * (double)i, 12.0, 0.0);
+    case_settle(t);
+    tally_outside(t, 0, &e);
+    assert_int_equal(e.runs, 2);
+    assert_int_equal(tally_run_count(t), 2);
+    tally_run_at(t, 0, &run);
+    assert_int_equal(run.rows, 3);
+    assert_within(run.held, 180.0, 0.0);
+    assert_within(run.until_s, FEBRUARY + 180.0, 1e-6);
+    tally_run_at(t, 1, &run);
+    assert_int_equal(run.rows, 2);
+    assert_true(run.open_at_end);
+    assert_within(e.longest, 180.0, 0.0);
+    assert_within(e.worst_s, FEBRUARY + HOUR, 1e-6);
+    tally_close(t);
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -671,13 +939,24 @@ int main(void)
         cmocka_unit_test(periods_are_days_and_months_of_the_calendar),
         cmocka_unit_test(a_clock_put_back_over_the_end_of_a_period_counts_in_the_one_before),
         cmocka_unit_test(more_periods_than_are_kept_are_refused_with_a_remedy),
+        cmocka_unit_test(a_full_tally_still_takes_rows_of_its_periods),
         cmocka_unit_test(what_is_no_row_is_refused_and_changes_nothing),
         cmocka_unit_test(a_plan_out_of_bounds_is_refused),
         cmocka_unit_test(excursions_are_told_when_they_end),
         cmocka_unit_test(a_tally_says_what_the_log_of_all_rows_says),
         cmocka_unit_test(the_longest_excursions_are_kept),
+        cmocka_unit_test(the_kept_excursions_are_those_of_sorting),
         cmocka_unit_test(a_trend_has_a_thousand_steps_at_most_and_no_excursion_is_lost),
         cmocka_unit_test(a_trend_of_just_a_thousand_steps_is_not_halved),
+        cmocka_unit_test(a_gap_begins_beyond_three_steps),
+        cmocka_unit_test(rows_are_taken_to_the_ends_of_what_a_tally_holds),
+        cmocka_unit_test(a_time_is_that_of_the_nearest_millisecond),
+        cmocka_unit_test(a_plan_is_taken_to_its_bounds),
+        cmocka_unit_test(more_figures_leave_room_for_fewer_periods),
+        cmocka_unit_test(the_bytes_of_a_tally_are_those_of_its_blocks),
+        cmocka_unit_test(a_figure_that_never_moves_fills_one_bar),
+        cmocka_unit_test(a_bin_wider_than_a_bar_is_shared_evenly),
+        cmocka_unit_test(an_excursion_ends_at_a_gap),
         cmocka_unit_test(ten_years_of_days_stay_below_sixteen_mebibytes),
     };
     return cmocka_run_group_tests(tests, NULL, NULL);

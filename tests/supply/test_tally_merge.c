@@ -1,5 +1,6 @@
 /* SPDX-License-Identifier: MIT */
 /* test_tally_merge.c - parts of a log, summed up apart and merged, say what one tally of the whole log says. */
+#include "supply/tally_internal.h"
 #include "tally_cases.h"
 
 /* Everything of `later` behind `t`, and `later` closed. */
@@ -234,6 +235,60 @@ static void parts_of_different_plans_are_refused_with_what_differs(void **state)
     free(k);
 }
 
+/* Each word and figure of a plan counts, of its first and of its last row; and only these. */
+static void every_field_of_a_plan_tells_plans_apart(void **state)
+{
+    const tally_plan plan = case_plan(60.0, TALLY_DAY);
+    tally_plan other = plan;
+    char text[400] = "";
+
+    (void)state;
+    assert_false(tally_plans_differ(&plan, &other, text, sizeof text));
+#define DIFFERS(change, words)                                            \
+    do {                                                                  \
+        other = plan;                                                     \
+        change;                                                           \
+        assert_true(tally_plans_differ(&plan, &other, text, sizeof text)); \
+        assert_non_null(strstr(text, words));                             \
+    } while (0)
+    for (size_t i = 0; i < plan.figure_count; i++) {
+        DIFFERS(other.figures[i].id[0] = 'X', plan.figures[i].id);
+        DIFFERS(other.figures[i].label[0] = 'X', plan.figures[i].id);
+        DIFFERS(other.figures[i].unit[0] = 'X', plan.figures[i].unit);
+    }
+    for (size_t i = 0; i < plan.limit_count; i++) {
+        DIFFERS(other.limits[i].id[0] = 'X', plan.limits[i].id);
+        DIFFERS(other.limits[i].unit[0] = 'X', plan.limits[i].id);
+        DIFFERS(other.limits[i].state[0] = 'X', plan.limits[i].id);
+        DIFFERS(other.limits[i].has_min = !other.limits[i].has_min, plan.limits[i].id);
+        DIFFERS(other.limits[i].has_max = !other.limits[i].has_max, plan.limits[i].id);
+        DIFFERS(other.limits[i].min += 1e-9, plan.limits[i].id);
+        DIFFERS(other.limits[i].max -= 1e-9, plan.limits[i].id);
+    }
+    for (size_t i = 0; i < plan.flag_count; i++) {
+        DIFFERS(other.flags[i].id[0] = 'X', "remarks");
+        DIFFERS(other.flags[i].label[0] = 'X', "remarks");
+    }
+    DIFFERS(other.figure_count--, "3 figures and 2");
+    DIFFERS(other.limit_count--, "3 limits and 2");
+    DIFFERS(other.flag_count--, "remarks");
+    DIFFERS(other.flag_count++, "remarks");
+    DIFFERS(other.step_s = nextafter(60.0, 0.0), "usual steps");
+    DIFFERS(other.step_s = nextafter(60.0, 90.0), "usual steps");
+    DIFFERS(other.by = TALLY_WHOLE, "by day and by nothing");
+    DIFFERS(other.by = TALLY_HOUR, "by day and by hour");
+    DIFFERS(other.by = TALLY_MONTH, "by day and by month");
+    DIFFERS(other.zoned = !other.zoned, "UTC");
+    DIFFERS(other.state[0] = 'X', "reference states");
+    DIFFERS(other.contract[0] = 'X', "contracts");
+#undef DIFFERS
+    other = plan;
+    other.figures[plan.figure_count].id[0] = 'X'; /* beyond the last one nothing counts */
+    other.limits[plan.limit_count].id[0] = 'X';
+    other.flags[plan.flag_count].id[0] = 'X';
+    assert_false(tally_plans_differ(&plan, &other, text, sizeof text));
+}
+
 /* A part that is one long outage cannot know which clock the log has. */
 static void a_part_without_rows_takes_the_clock_of_the_others(void **state)
 {
@@ -286,6 +341,7 @@ int main(void)
         cmocka_unit_test(wide_values_and_long_logs_merge_to_the_whole),
         cmocka_unit_test(an_excursion_over_the_edge_is_one),
         cmocka_unit_test(parts_that_overlap_are_refused_and_stay_as_they_were),
+        cmocka_unit_test(every_field_of_a_plan_tells_plans_apart),
         cmocka_unit_test(parts_of_different_plans_are_refused_with_what_differs),
         cmocka_unit_test(a_part_without_rows_takes_the_clock_of_the_others),
         cmocka_unit_test(a_settled_tally_is_not_merged),

@@ -244,6 +244,49 @@ static void a_gas_of_much_more_heat_may_have_no_lifting_index(void **state)
     assert_outside(index_of("aga-yellow-tip", "methane=100", "hydrogen=100"), "yellow tip limit");
 }
 
+/* IL = K_a/((f_a a_s/(f_s a_a)) (K_s - log10(f_a/f_s))) of the Bulletin; for equal heat and density f is 1 and its logarithm 0. */
+static void a_low_lifting_constant_gives_a_high_index(void **state)
+{
+    const bc_aga_gas gas = aga_gas("methane=100");
+    bc_aga_gas low = gas;
+
+    (void)state;
+    low.lifting_constant = 0.25;
+    assert_true(bc_aga_compare(&gas, &low).has_lifting);
+    assert_within(bc_aga_compare(&gas, &low).lifting, gas.lifting_constant / 0.25, 1e-12);
+    low.lifting_constant = 0.0;
+    assert_false(bc_aga_compare(&gas, &low).has_lifting);
+}
+
+/* More than 10 % of inert gas and less than 1000 Btu/ft3 make a gas of high inerts: Bulletin 36, value from memory. */
+static void a_tenth_of_inert_gas_is_not_yet_high(void **state)
+{
+    (void)state;
+    assert_int_equal(aga_gas("methane=90,nitrogen=10").gas_class, BC_AGA_HIGH_METHANE);
+    assert_int_equal(aga_gas("methane=89.999,nitrogen=10.001").gas_class, BC_AGA_HIGH_INERT);
+    assert_int_equal(aga_gas("ethane=60,nitrogen=40").gas_class, BC_AGA_HIGH_METHANE);
+}
+
+/* A yellow tip limit of zero, of a gas without hydrocarbons, divides nothing and is divided by nothing. */
+static void without_a_yellow_tip_limit_there_is_no_index_of_it(void **state)
+{
+    const bc_aga_gas gas = aga_gas("methane=100");
+
+    (void)state;
+    assert_true(gas.yellow_tip_limit > 0.0 && bc_aga_compare(&gas, &gas).has_yellow_tip);
+    for (int side = 0; side < 2; side++) {
+        bc_aga_gas other = gas;
+
+        other.yellow_tip_limit = 0.0;
+        const bc_aga index = side ? bc_aga_compare(&gas, &other) : bc_aga_compare(&other, &gas);
+
+        assert_false(index.has_yellow_tip);
+        assert_within(index.yellow_tip, 0.0, 0.0);
+        other.yellow_tip_limit = 0.5; /* however low it is */
+        assert_true((side ? bc_aga_compare(&gas, &other) : bc_aga_compare(&other, &gas)).has_yellow_tip);
+    }
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -261,6 +304,9 @@ int main(void)
         cmocka_unit_test(the_class_of_the_old_gas_picks_the_limits),
         cmocka_unit_test(gases_that_cannot_be_burnt_with_air_are_refused),
         cmocka_unit_test(oxygen_rich_gas_has_no_flame_speed_factor),
+        cmocka_unit_test(a_low_lifting_constant_gives_a_high_index),
+        cmocka_unit_test(a_tenth_of_inert_gas_is_not_yet_high),
+        cmocka_unit_test(without_a_yellow_tip_limit_there_is_no_index_of_it),
         cmocka_unit_test(a_gas_of_much_more_heat_may_have_no_lifting_index),
     };
 

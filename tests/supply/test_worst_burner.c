@@ -625,6 +625,34 @@ static void a_gas_that_does_not_burn_has_no_air_factor(void **state)
     bc_worst_close(w);
 }
 
+/* Above half of hydrogen the rule of burning velocities ends: in the new gases as in the old one. */
+static void a_velocity_outside_of_its_rule_is_no_figure(void **state)
+{
+    static const window MUCH[] = {{"methane", 0, 100}, {"hydrogen", 40, 60}}, LITTLE[] = {{"methane", 0, 100}, {"hydrogen", 20, 40}};
+    bc_composition much;
+    bc_extremes e;
+    bc_error err;
+    rig r;
+
+    (void)state;
+    rig_open(&r, "15/15", BC_CONTROL_FIXED);
+    memset(&space, 0, sizeof space);
+    add_windows(&space, MUCH, COUNT(MUCH));
+    bc_worst *w = opened(&space);
+
+    assert_refused(bc_worst_burner(w, &r.set, BC_BURNER_VELOCITY, &e, &err), &err, BC_ERR_RANGE, "no such figure");
+    bc_worst_close(w);
+    memset(&space, 0, sizeof space);
+    add_windows(&space, LITTLE, COUNT(LITTLE));
+    w = opened(&space);
+    (void)extremes_of(&r, w, BC_BURNER_VELOCITY);
+    assert_int_equal(bc_composition_parse("hydrogen=60,methane=40", &much, NULL), BC_OK);
+    assert_int_equal(bc_subject_make(&r.reference, &much.gas, NULL, &r.old_gas, NULL), BC_OK);
+    rig_set(&r);
+    assert_refused(bc_worst_burner(w, &r.set, BC_BURNER_VELOCITY, &e, &err), &err, BC_ERR_RANGE, "such a figure");
+    bc_worst_close(w);
+}
+
 static void what_cannot_be_asked_is_refused(void **state)
 {
     static const window WINDOWS[] = {{"methane", 90, 95}, {"ethane", 0, 2}};
@@ -666,6 +694,7 @@ int main(void)
         cmocka_unit_test(a_saturated_state_counts_its_water),
         cmocka_unit_test(a_trim_leaves_the_space_as_it_was),
         cmocka_unit_test(a_gas_that_does_not_burn_has_no_air_factor),
+        cmocka_unit_test(a_velocity_outside_of_its_rule_is_no_figure),
         cmocka_unit_test(what_cannot_be_asked_is_refused),
     };
 

@@ -214,6 +214,187 @@ static void limits_are_idle_or_open_as_the_ranges_have_it(void **state)
     bc_worst_close(worst);
 }
 
+/* A figure whose extremes are certified, asked as if nothing were known of it. */
+static double unknown_figure(const bc_gas *gas, void *context)
+{
+    double value = 0.0;
+
+    return bc_ratio_evaluate(context, gas, &value, NULL) == BC_OK ? value : HUGE_VAL;
+}
+
+/* By how much the ranges alone break a limit is the extreme of its figure in a space without any limit. */
+static void limits_are_open_by_what_the_ranges_alone_allow(void **state)
+{
+    static bc_space bare;
+    bc_error err;
+
+    (void)state;
+    natural_gas(&bare);
+    space = bare;
+    add_contract(&space);
+    bc_worst *all = opened(&space), *none = opened(&bare);
+
+    for (size_t i = 0; i < space.limit_count; i++) {
+        const bc_space_limit *l = &space.limits[i];
+        bc_limit_standing s;
+        bc_extremes e;
+
+        assert_ok(bc_worst_standing(all, i, &s, &err), &err);
+        assert_ok(bc_worst_ratio(none, &l->ratio, &e, &err), &err);
+        assert_int_equal(s.min.open, e.min.value < l->min);
+        assert_int_equal(s.max.open, e.max.value > l->max);
+        assert_within(s.min.excess, s.min.open ? l->min - e.min.value : 0.0, 1e-6 * fabs(l->min));
+        assert_within(s.max.excess, s.max.open ? e.max.value - l->max : 0.0, 1e-6 * fabs(l->max));
+    }
+    bc_worst_close(all);
+    bc_worst_close(none);
+}
+
+/* A side is idle when the extreme that all other limits leave keeps it. */
+static void a_limit_is_idle_by_what_the_others_leave(void **state)
+{
+    static bc_space others;
+    bc_error err;
+    size_t idle = 0;
+
+    (void)state;
+    natural_gas(&space);
+    add_contract(&space);
+    add_limit(&space, "hhv", "25/0", 30.0, 70.0);
+    add_limit(&space, "hhv", "25/0", 30.0, 70.0); /* either is idle by the other */
+    add_limit(&space, "wobbe-net", "25/0", 40.0, HUGE_VAL);
+    add_limit(&space, "density", "25/0", -HUGE_VAL, 0.99);
+    add_limit(&space, "wobbe-gross", "15/0", -HUGE_VAL, 53.7);
+    bc_worst *all = opened(&space);
+
+    for (size_t i = 0; i < space.limit_count; i++) {
+        bc_limit_standing s;
+        bc_extremes e;
+
+        assert_ok(bc_worst_standing(all, i, &s, &err), &err);
+        for (int upper = 0; upper < 2; upper++) {
+            const bool stated = isfinite(upper ? space.limits[i].max : space.limits[i].min);
+
+            assert_int_equal(upper ? s.max.stated : s.min.stated, stated);
+            if (!stated)
+                continue;
+            others = space;
+            *(upper ? &others.limits[i].max : &others.limits[i].min) = upper ? HUGE_VAL : -HUGE_VAL;
+            bc_worst *left = opened(&others);
+
+            assert_ok(bc_worst_ratio(left, &space.limits[i].ratio, &e, &err), &err);
+            assert_int_equal(upper ? s.max.idle : s.min.idle,
+                             upper ? e.max.value <= space.limits[i].max * (1.0 + 1e-9) : e.min.value >= space.limits[i].min * (1.0 - 1e-9));
+            idle += upper ? s.max.idle : s.min.idle;
+            bc_worst_close(left);
+        }
+    }
+    assert_true(idle > 1 && idle < 2 * space.limit_count);
+    bc_worst_close(all);
+}
+
+/* Small figures stand as large ones do: rounding is relative. Hydrogen sulfide in kg a cubic metre. */
+static void a_limit_on_a_trace_stands_as_its_extreme_does(void **state)
+{
+    static const double MAX[] = {1e-6, 1e-3};
+    double weight[BC_SPECIES_CAPACITY] = {0.0};
+    static bc_space bare;
+    bc_reference reference;
+    bc_ratio sulfur;
+    bc_extremes e;
+    bc_error err;
+
+    (void)state;
+    natural_gas(&bare);
+    reference_of("15/15", &reference);
+    weight[species_of("hydrogen-sulfide")] = bc_species_molar_mass_kg_per_mol(species_of("hydrogen-sulfide"));
+    assert_ok(bc_ratio_of_concentration(weight, 1.0, &reference, &sulfur, &err), &err);
+    bc_worst *none = opened(&bare);
+
+    assert_ok(bc_worst_ratio(none, &sulfur, &e, &err), &err);
+    bc_worst_close(none);
+    for (size_t i = 0; i < COUNT(MAX); i++) {
+        bc_limit_standing s;
+
+        space = bare;
+        space.limits[space.limit_count++] = (bc_space_limit){sulfur, -HUGE_VAL, MAX[i]};
+        bc_worst *worst = opened(&space);
+
+        assert_ok(bc_worst_standing(worst, 0, &s, &err), &err);
+        assert_int_equal(s.max.open, e.max.value > MAX[i]);
+        assert_int_equal(s.max.idle, e.max.value <= MAX[i]);
+        assert_within(s.max.excess, s.max.open ? e.max.value - MAX[i] : 0.0, 1e-6 * e.max.value);
+        bc_worst_close(worst);
+    }
+    assert_true(e.max.value > MAX[0] && e.max.value < MAX[1]);
+}
+
+/* A limit bounds its own figure, and not one that is only like it: another heat, another temperature or pressure of
+ * metering, another divisor. The second route is a search that knows no bounds. */
+static void a_limit_proves_nothing_of_a_figure_like_it(void **state)
+{
+    static const struct {
+        const char *limit, *at, *figure, *other_at;
+        double min, max;
+    } PAIRS[] = {{"hhv", "15/15", "lhv", "15/15", 37.0, 40.0},
+                 {"hhv", "15/15", "hhv", "15/0", 37.0, 40.0},
+                 {"hhv", "15/15", "hhv", "15/15@91", 37.0, 40.0},
+                 {"hhv", "15/15", "wobbe-gross", "15/15", 37.0, 40.0},
+                 {"hhv", "15/15", "hhv-ideal", "15/15", 37.0, 40.0},
+                 {"wobbe-gross", "15/15", "hhv", "15/15", 47.0, 50.0},
+                 {"wobbe-gross", "15/15", "wobbe-gross-ideal", "15/15", 47.0, 50.0},
+                 {"wobbe-gross", "15/15", "wobbe-net", "15/15", 47.0, 50.0},
+                 {"co2-factor-gross", "15/15", "co2-factor-net", "15/15", 49.0, 52.0},
+                 {"hhv-mass", "15/15", "hhv-mole", "15/15", 49.0, 53.0}};
+    bc_error err;
+
+    (void)state;
+    for (size_t i = 0; i < COUNT(PAIRS); i++) {
+        bc_reference reference;
+        bc_ratio ratio;
+        bc_extremes proven, searched;
+
+        natural_gas(&space);
+        add_limit(&space, PAIRS[i].limit, PAIRS[i].at, PAIRS[i].min, PAIRS[i].max);
+        bc_worst *worst = opened(&space);
+
+        reference_of(PAIRS[i].other_at, &reference);
+        assert_ok(bc_ratio_of_quantity(quantity_of(PAIRS[i].figure), &reference, &ratio, &err), &err);
+        assert_ok(bc_worst_ratio(worst, &ratio, &proven, &err), &err);
+        assert_ok(bc_worst_search(worst, unknown_figure, &ratio, &searched, &err), &err);
+        assert_true(proven.min.exact && proven.max.exact);
+        assert_true(proven.min.value <= searched.min.value * (1.0 + 1e-6) && proven.max.value >= searched.max.value * (1.0 - 1e-6));
+        assert_true(searched.min.value >= proven.min.bound * (1.0 - 1e-9) && searched.max.value <= proven.max.bound * (1.0 + 1e-9));
+        assert_within_at(PAIRS[i].figure, searched.min.value, proven.min.value, 1e-3 * (proven.max.value - proven.min.value));
+        assert_within_at(PAIRS[i].figure, searched.max.value, proven.max.value, 1e-3 * (proven.max.value - proven.min.value));
+        bc_worst_close(worst);
+    }
+}
+
+/* Ranges that let in what the summation formula makes no gas, or a gas that does not burn, have no such figure. */
+static void figures_that_some_gas_lacks_are_refused(void **state)
+{
+    static const window HEAVY[] = {{"methane", 0, 100}, {"n-pentadecane", 0, 100}}, INERT[] = {{"methane", 0, 100}, {"nitrogen", 0, 100}};
+    bc_reference reference;
+    bc_extremes e;
+    bc_error err;
+
+    (void)state;
+    reference_of("15/0", &reference);
+    memset(&space, 0, sizeof space);
+    add_windows(&space, HEAVY, COUNT(HEAVY));
+    bc_worst *worst = opened(&space);
+
+    assert_refused(bc_worst_quantity(worst, quantity_of("hhv"), &reference, &e, &err), &err, BC_ERR_RANGE, "no such figure");
+    assert_ok(bc_worst_quantity(worst, quantity_of("hhv-mole"), &reference, &e, &err), &err);
+    bc_worst_close(worst);
+    memset(&space, 0, sizeof space);
+    add_windows(&space, INERT, COUNT(INERT));
+    worst = opened(&space);
+    assert_refused(bc_worst_quantity(worst, quantity_of("co2-factor-net"), &reference, &e, &err), &err, BC_ERR_RANGE, "no such figure");
+    bc_worst_close(worst);
+}
+
 /* What is asked in between changes nothing, to the last bit. */
 static void standing_and_searching_leave_the_space_as_it_was(void **state)
 {
@@ -269,14 +450,6 @@ static void what_is_no_space_is_refused(void **state)
     space.limit_count = BC_SPACE_LIMIT_MAX + 1;
     assert_refused(bc_worst_open(&space, &worst, &err), &err, BC_ERR_USAGE, "at most");
     assert_null(worst);
-}
-
-/* A figure whose extremes are certified, asked as if nothing were known of it. */
-static double unknown_figure(const bc_gas *gas, void *context)
-{
-    double value = 0.0;
-
-    return bc_ratio_evaluate(context, gas, &value, NULL) == BC_OK ? value : HUGE_VAL;
 }
 
 static void a_search_finds_what_can_be_proven(void **state)
@@ -392,6 +565,11 @@ int main(void)
         cmocka_unit_test(an_impossible_compression_factor_conflicts_alone),
         cmocka_unit_test(fixed_water_is_no_part_of_a_saturated_conflict),
         cmocka_unit_test(limits_are_idle_or_open_as_the_ranges_have_it),
+        cmocka_unit_test(limits_are_open_by_what_the_ranges_alone_allow),
+        cmocka_unit_test(a_limit_is_idle_by_what_the_others_leave),
+        cmocka_unit_test(a_limit_on_a_trace_stands_as_its_extreme_does),
+        cmocka_unit_test(a_limit_proves_nothing_of_a_figure_like_it),
+        cmocka_unit_test(figures_that_some_gas_lacks_are_refused),
         cmocka_unit_test(standing_and_searching_leave_the_space_as_it_was),
         cmocka_unit_test(what_is_no_space_is_refused),
         cmocka_unit_test(a_search_finds_what_can_be_proven),

@@ -144,6 +144,49 @@ static void any_multipliers_prove_a_bound(void **state)
     }
 }
 
+/* y'r <= max(y lo, y hi) and d'x <= sum of max(d l, d u) with d = c - y'R: the definition, where an open end of a row is what
+ * its columns reach. */
+static void the_bound_of_multipliers_is_that_of_its_definition(void **state)
+{
+    chance c = {1963};
+
+    (void)state;
+    for (int k = 0; k < 200; k++) {
+        double cost[4], row[3][4], y[3], ends[3][2], d[4], want = 0.0;
+
+        for (size_t j = 0; j < 4; j++)
+            d[j] = cost[j] = chance_normal(&c);
+        start(4, cost, 1.0);
+        for (size_t j = 0; j < 4; j++) {
+            lp.lower[j] = -chance_uniform(&c);
+            lp.upper[j] = chance_uniform(&c);
+        }
+        for (size_t i = 0; i < 3; i++) {
+            double largest = 0.0, reach[2] = {0.0, 0.0};
+
+            y[i] = i == 0 ? 0.0 : chance_normal(&c); /* a row that does not count */
+            for (size_t j = 0; j < 4; j++) {
+                row[i][j] = chance_normal(&c);
+                largest = fmax(largest, fabs(row[i][j]));
+                reach[0] += row[i][j] * (row[i][j] > 0.0 ? lp.lower[j] : lp.upper[j]);
+                reach[1] += row[i][j] * (row[i][j] > 0.0 ? lp.upper[j] : lp.lower[j]);
+            }
+            ends[i][0] = k % 3 == 0 ? -HUGE_VAL : -0.3;
+            ends[i][1] = k % 3 == 1 ? HUGE_VAL : 0.4;
+            lp_add_row(&lp, row[i], ends[i][0], ends[i][1]);
+            ends[i][0] = k % 3 == 0 ? fmin(reach[0], 0.4) : ends[i][0];
+            ends[i][1] = k % 3 == 1 ? fmax(reach[1], -0.3) : ends[i][1];
+            y[i] *= largest; /* rows are kept scaled */
+            want += fmax(y[i] * ends[i][0], y[i] * ends[i][1]) / largest;
+            for (size_t j = 0; j < 4; j++)
+                d[j] -= y[i] / largest * row[i][j];
+        }
+        for (size_t j = 0; j < 4; j++)
+            want += fmax(d[j] * lp.lower[j], d[j] * lp.upper[j]);
+        assert_within(lp_proven_bound(&lp, cost, y), want, 1e-12);
+    }
+}
+
 /* Fractions with random windows, rows and costs. An allowed point is known from the making, so the program
  * is feasible; its answer must be allowed, no worse than that point, and proven. */
 static void random_programs_prove_their_answers(void **state)
@@ -173,7 +216,10 @@ static void random_programs_prove_their_answers(void **state)
 
             for (size_t j = 0; j < n; j++)
                 at += known[j] * (row[j] = chance_below(&c, 2) == 0 ? 0.0 : chance_normal(&c));
-            lp_add_row(&lp, row, chance_below(&c, 2) == 0 ? at : -HUGE_VAL, at + (chance_below(&c, 2) == 0 ? 0.0 : 0.01));
+            const size_t kind = chance_below(&c, 5); /* open above, open below, or closed */
+            const double width = chance_below(&c, 2) == 0 ? 0.0 : 0.01;
+
+            lp_add_row(&lp, row, kind > 2 ? -HUGE_VAL : kind == 0 ? at - width : at, kind == 0 ? HUGE_VAL : at + width);
         }
         lp_maximise(&lp, &work, &answer);
         assert_int_equal(answer.status, LP_OPTIMAL);
@@ -204,6 +250,7 @@ int main(void)
         cmocka_unit_test(a_row_out_of_reach_of_its_columns_is_infeasible),
         cmocka_unit_test(rows_of_zeros_are_left_out_when_they_hold),
         cmocka_unit_test(any_multipliers_prove_a_bound),
+        cmocka_unit_test(the_bound_of_multipliers_is_that_of_its_definition),
         cmocka_unit_test(random_programs_prove_their_answers),
     };
 

@@ -444,9 +444,82 @@ static void volumes_of_two_states_differ_by_their_gas_law(void **state)
     }
 }
 
+/* ISO 6976:2016 annex A: u of the vaporisation enthalpy 4 J/mol, of Z of air 0.000015; R and the mass of air with theirs
+ * (R 8.3144621(75) J/(mol K), M of air 28.96546(17) g/mol). */
+static void the_constants_have_the_uncertainties_of_annex_a(void **state)
+{
+    const bc_state at = bc_state_default();
+    bc_reference r;
+    bc_error err;
+
+    (void)state;
+    assert_ok(bc_reference_at(&at, &r, &err), &err);
+    assert_within(r.u_vaporisation_j_per_mol, 4.0, 0.0);
+    assert_within(r.u_air_z, 0.000015, 0.0);
+    assert_within(r.u_r_j_per_mol_k, 0.0000075, 1e-18);
+    assert_within(r.u_air_kg_per_mol, 0.00017e-3, 1e-18);
+}
+
+/* What an edition does not list comes from the other one, and says so; what none lists from formation enthalpies. */
+static void a_heat_that_an_edition_lacks_is_that_of_the_other(void **state)
+{
+    bc_reference of[2];
+    size_t only[2] = {0, 0}, both = 0, neither = 0;
+    bc_error err;
+
+    (void)state;
+    for (int k = 0; k < 2; k++) {
+        const bc_state at = {.combustion_c = 25.0, .metering_c = 0.0, .metering_pa = 101325.0, .edition = k == 0 ? 1995 : 2016};
+
+        assert_ok(bc_reference_at(&at, &of[k], &err), &err);
+    }
+    for (size_t i = 0; i < bc_species_count(); i++) {
+        const char *old_source = bc_reference_heat_source(i, 1995), *new_source = bc_reference_heat_source(i, 2016);
+        const bool old_has = strstr(old_source, "1995") != NULL, new_has = strstr(new_source, "2016") != NULL;
+
+        if (of[0].gross_j_per_mol[i] == 0.0)
+            continue; /* inert: no table is needed */
+        both += old_has && new_has;
+        neither += !old_has && !new_has;
+        for (int k = 0; k < 2; k++) {
+            const bool own = k == 0 ? old_has : new_has, other = strstr(k == 0 ? old_source : new_source, k == 0 ? "2016" : "1995") != NULL;
+
+            only[k] += other;
+            assert_int_equal(of[k].heat_origin[i], own ? BC_ORIGIN_EDITION : other ? BC_ORIGIN_OTHER_EDITION : BC_ORIGIN_FORMATION);
+            if (other)
+                assert_within_at(bc_species_id(i), of[0].gross_j_per_mol[i], of[1].gross_j_per_mol[i], 0.0);
+        }
+    }
+    assert_true(both > 10 && neither > 0 && only[0] > 0);
+}
+
+/* Between the columns 1 - Z of air follows the parabola through 0, 15 and 20 C, whose third difference vanishes:
+ * f(3) - 3 f(2) + 3 f(1) - f(0) = 0 over equal steps, here from 5 to 20 C; both editions have the three columns. */
+static void z_of_air_lies_on_the_parabola_of_its_columns(void **state)
+{
+    (void)state;
+    for (int edition = 1995; edition <= 2016; edition += 21) {
+        double z[5];
+
+        for (int i = 0; i < 5; i++) {
+            const bc_state at = {.combustion_c = 15.0, .metering_c = 5.0 * i, .metering_pa = 101325.0, .edition = edition};
+            bc_reference r;
+            bc_error err;
+
+            assert_ok(bc_reference_at(&at, &r, &err), &err);
+            z[i] = r.air_z;
+        }
+        assert_within(z[4] - 3.0 * z[3] + 3.0 * z[2] - z[1], 0.0, 1e-12);
+        assert_within(z[3] - 3.0 * z[2] + 3.0 * z[1] - z[0], 0.0, 1e-12);
+    }
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
+        cmocka_unit_test(the_constants_have_the_uncertainties_of_annex_a),
+        cmocka_unit_test(a_heat_that_an_edition_lacks_is_that_of_the_other),
+        cmocka_unit_test(z_of_air_lies_on_the_parabola_of_its_columns),
         cmocka_unit_test(the_example_of_annex_d_comes_out),
         cmocka_unit_test(net_heats_are_the_gross_ones_less_the_water_formed),
         cmocka_unit_test(metering_pressure_enters_volume_and_compression),

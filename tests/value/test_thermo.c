@@ -74,6 +74,24 @@ static void both_ranges_join_at_1000_k(void **state)
     }
 }
 
+/* 1000 K itself belongs to the upper range, here as in the flames: Cp/R = a1 T^-2 + a2 T^-1 + a3 + a4 T + ... by its row. */
+static void the_joint_belongs_to_the_upper_range(void **state)
+{
+    size_t apart = 0;
+
+    (void)state;
+    for (size_t i = 0; i < bc_thermo_count(); i++) {
+        double cp_r[2] = {0.0, 0.0};
+
+        for (int range = 0; range < 2; range++)
+            for (int k = 0; k < 7; k++)
+                cp_r[range] += bc_thermo_coefficients(i, range)[k] * pow(1000.0, k - 2);
+        assert_within_at(bc_thermo_name(i), cp_at(i, 1000.0) / BC_THERMO_R_J_PER_MOL_K, cp_r[1], 1e-12 * cp_r[1]);
+        apart += fabs(cp_r[0] - cp_r[1]) > 1e-11 * cp_r[1];
+    }
+    assert_true(apart > 20);
+}
+
 static void enthalpy_at_298_15_k_is_the_formation_enthalpy(void **state)
 {
     (void)state;
@@ -153,6 +171,10 @@ static void temperatures_and_species_outside_the_data_are_refused(void **state)
     assert_refused(bc_thermo_liquid_water(273.1, &value, &err), &err, BC_ERR_RANGE, "liquid water");
     assert_refused(bc_thermo_liquid_water(600.1, &value, &err), &err, BC_ERR_RANGE, "liquid water");
     assert_within(value, 47.11, 0.0);
+    for (size_t k = 0; k < 2; k++) { /* the ends belong to the data */
+        assert_ok(bc_thermo_cp(SPECIES_ethane, k == 0 ? BC_THERMO_T_MIN_K : BC_THERMO_T_MAX_K, &value, &err), &err);
+        assert_ok(bc_thermo_liquid_water(k == 0 ? 273.15 : 600.0, &value, &err), &err);
+    }
     assert_null(bc_thermo_coefficients(bc_thermo_count(), 0));
     for (size_t k = 0; k < 2; k++) {
         const size_t beyond = k == 0 ? bc_thermo_count() : SIZE_MAX;
@@ -178,7 +200,17 @@ static void liquid_water_has_its_known_enthalpy_and_heat_capacity(void **state)
     assert_within((h2 - h1) / 2.0, 75.33, 0.05); /* 4.1813 kJ/(kg K) at 25 C, IAPWS-95, x 18.01528 */
     assert_int_equal(bc_thermo_liquid_water(373.15 - 1e-9, &h1, NULL), BC_OK);
     assert_int_equal(bc_thermo_liquid_water(373.15 + 1e-9, &h2, NULL), BC_OK);
-    assert_within(h2, h1, 1.0); /* the two ranges join */
+    assert_within(h2, h1, 1.0); /* the two ranges join, but for 0.16 J/mol; the joint itself belongs to the lower one */
+    assert_true(h2 - h1 > 0.1);
+    assert_int_equal(bc_thermo_liquid_water(373.15, &h2, NULL), BC_OK);
+    assert_within(h2, h1, 1e-6);
+    /* saturated liquid at 500 K has 870.6 kJ/kg more than at 25 C: steam tables, value from memory; 1 %: the pressure */
+    assert_int_equal(bc_thermo_liquid_water(500.0, &h1, NULL), BC_OK);
+    assert_within((h1 - h0) / 18.01528, 870.6, 8.7);
+    /* 6.4 kJ/(kg K) at 590 K, on the way up to the critical point: steam tables, value from memory; 3 %: the pressure */
+    assert_int_equal(bc_thermo_liquid_water(588.0, &h1, NULL), BC_OK);
+    assert_int_equal(bc_thermo_liquid_water(592.0, &h2, NULL), BC_OK);
+    assert_within((h2 - h1) / 4.0 / 18.01528, 6.4, 0.2);
 }
 
 /* ISO 6976:2016 annex A; 0.02 kJ/mol: the standard's come from IAPWS, these from an ideal vapour of CODATA. */
@@ -199,6 +231,7 @@ int main(void)
         cmocka_unit_test(the_slope_of_enthalpy_is_the_heat_capacity_for_every_species),
         cmocka_unit_test(the_slope_of_entropy_is_the_heat_capacity_over_temperature),
         cmocka_unit_test(both_ranges_join_at_1000_k),
+        cmocka_unit_test(the_joint_belongs_to_the_upper_range),
         cmocka_unit_test(enthalpy_at_298_15_k_is_the_formation_enthalpy),
         cmocka_unit_test(the_elements_have_no_formation_enthalpy),
         cmocka_unit_test(key_values_of_codata_are_met),
