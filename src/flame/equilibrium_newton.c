@@ -181,6 +181,16 @@ static double take_step(equilibrium *e, const newton_step *step, double share)
 
 typedef enum { GO_ON, ARRIVED, LOST } progress;
 
+/* Of a step, one of whose unknowns is not finite, no amount is. fmax() would pass over it. */
+static bool is_finite(const newton_step *step)
+{
+    double sum = 0.0;
+
+    for (int i = 0; i < UNKNOWNS; i++)
+        sum += fabs(step->unknown[i]);
+    return isfinite(sum);
+}
+
 /* One step, whole only where Newton's iteration squares its error. */
 static progress move(equilibrium *e)
 {
@@ -189,12 +199,12 @@ static progress move(equilibrium *e)
     if (e->factors.t_k != e->t_k)
         equilibrium_evaluate(e);
     find_step(e, &step);
+    e->iterations++;
+    if (!is_finite(&step))
+        return LOST;
     const double share = damping(e, &step);
     const double change = take_step(e, &step, share);
 
-    e->iterations++;
-    if (!isfinite(change))
-        return LOST;
     return share == 1.0 && change < STEP_LAST ? ARRIVED : GO_ON;
 }
 
