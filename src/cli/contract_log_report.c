@@ -122,7 +122,7 @@ static void add_bound(report *r, size_t table, bool there, double bound)
 
 static void add_outside(const log_case *l, report *r)
 {
-    static const column COLUMNS[] = {{"limit", "limit", ""}, {"unit", "unit", ""}, {"min", "min", ""}, {"max", "max", ""},
+    static const column COLUMNS[] = {{"limit", "limit", ""}, {"unit", "unit", ""}, {"at", "at", ""}, {"min", "min", ""}, {"max", "max", ""},
                                      {"rows", "rows", ""}, {"hours", "hours", "h"}, {"share", "share", "%"}, {"energy", "heat", "GJ"}};
     const bc_contract *c = l->c->contract;
     const size_t table = open_table(r, "outside", "Outside each limit", COLUMNS, BC_COUNT(COLUMNS) - (l->header.has_flow ? 0 : 1));
@@ -131,9 +131,13 @@ static void add_outside(const log_case *l, report *r)
         const bc_limit *limit = &c->limits[i];
         bc_log_excursions e;
 
+        char state[64];
+
         bc_log_outside(l->log, i, &e);
+        contract_state_text(c, limit, state, sizeof state);
         report_add_text(r, table, limit->id);
         report_add_text(r, table, unit_of(limit));
+        report_add_text(r, table, state);
         add_bound(r, table, limit->has_min, limit->min);
         add_bound(r, table, limit->has_max, limit->max);
         report_add_number(r, table, (double)e.broken, 0);

@@ -114,6 +114,8 @@ bool log_judge(const log_case *l, report *r, const bc_log_cover *cover)
     (void)strncat(text, ".", sizeof text - strlen(text) - 1);
     report_set_verdict(r, text);
     if (!good)
+        report_set_caution(r, LOG_CAUTION);
+    if (!good)
         report_judge(r, REPORT_NO);
     else
         report_judge(r, l->refused + cover->gaps > 0 ? REPORT_CARE : REPORT_YES);

@@ -9,6 +9,10 @@
 #include <stddef.h>
 
 #define LOG_COLUMNS_MAX 200
+/* What a report on a log has to say where a row was outside of its limits. */
+#define LOG_CAUTION "A gas outside of its limits may be dangerous to burn: carbon monoxide, flashback and explosion can kill. " \
+                    "Whether to go on is for licensed people and the local code to say."
+
 #define LOG_CELL_MAX 80    /* bytes of a cell with the final NUL; a longer one is cut, and so no number */
 
 typedef enum { LOG_IGNORED, LOG_TIME, LOG_FLOW, LOG_COMPONENT } log_column_kind;

@@ -12,9 +12,6 @@
 
 #define ANSWER_NO 1
 
-#define CAUTION "A gas outside of its limits may be dangerous to burn: carbon monoxide, flashback and explosion can kill. " \
-                "Whether to go on is for licensed people and the local code to say."
-
 static bool is_outside(const tally *t)
 {
     tally_cover cover;
@@ -61,7 +58,7 @@ static void open_report(report *r, const stream_plan *p, const tally *t, const c
             report_add_warning(r, log_header_flow_note(&p->header));
     }
     if (is_outside(t))
-        report_set_caution(r, CAUTION);
+        report_set_caution(r, LOG_CAUTION);
 }
 
 static int write_excursions(const arguments *a, const stream_plan *p, const tally *t)
