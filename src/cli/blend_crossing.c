@@ -50,8 +50,8 @@ static void verdict(report *r, const sweep_table *t, const blend_case *c, const 
     size_t used = 0;
 
     if (count == 0) {
-        (void)snprintf(text, sizeof text, "no share of %.100s from %.6g to %.6g %% keeps all limits of %s", blend_part_name(c, c->swept), 100.0 * t->low,
-                       100.0 * t->high, c->within->name);
+        (void)snprintf(text, sizeof text, "no share of %.100s from %.6g to %.6g %% by %s keeps all limits of %s", blend_part_name(c, c->swept),
+                       100.0 * t->low, 100.0 * t->high, bc_blend_basis_text(c->by), c->within->name);
         report_set_verdict(r, text);
         return;
     }
@@ -63,7 +63,7 @@ static void verdict(report *r, const sweep_table *t, const blend_case *c, const 
                            100.0 * sweep_share_at(t, window[i].high));
     }
     used = strlen(text);
-    (void)snprintf(text + used, sizeof text - used, " of %.100s", blend_part_name(c, c->swept));
+    (void)snprintf(text + used, sizeof text - used, " of %.100s, by %s", blend_part_name(c, c->swept), bc_blend_basis_text(c->by));
     report_set_verdict(r, text);
 }
 
