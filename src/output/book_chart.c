@@ -4,10 +4,12 @@
 
 #include <math.h>
 #include <stdlib.h>
+#include <string.h>
 
 #define WIDTH      2.0 /* of the chart, in those of Excel's own size */
 #define HEIGHT     1.8
 #define LINE_WIDTH 2.0F
+#define LINE_HEIGHT 15.0 /* points, of a row */
 
 /* Okabe and Ito (2008), as in the drawings. */
 static const lxw_color_t COLOURS[] = {0x0072B2, 0xD55E00, 0x009E73, 0xCC79A7, 0xE69F00, 0x56B4E9, 0x000000};
@@ -51,6 +53,41 @@ static void style_series(lxw_chart_series *series, report_series_kind kind, size
     chart_series_set_line(series, &line);
     chart_series_set_marker_type(series,
                                  kind == REPORT_POINTS ? LXW_CHART_MARKER_AUTOMATIC : LXW_CHART_MARKER_NONE);
+}
+
+/* A curve with a gap, or a point with its region, is several series of one name: the first of them. */
+static size_t first_of_name(const report_chart *chart, size_t index)
+{
+    size_t first = 0;
+
+    while (strcmp(chart->series[first].label, chart->series[index].label) != 0)
+        first++;
+    return first;
+}
+
+/* The legend has each name once, and none without a name. */
+static void thin_legend(const book_points *t)
+{
+    const report_chart *chart = t->chart;
+    int16_t *away = calloc(chart->series_count + 1, sizeof *away);
+    size_t count = 0;
+    int16_t drawn = 0;
+
+    if (away == NULL) {
+        t->s.b->failed = true;
+        return;
+    }
+    for (size_t i = 0; i < chart->series_count; i++) {
+        if (chart->series[i].point_count == 0)
+            continue;
+        if (first_of_name(chart, i) < i || *chart->series[i].label == '\0')
+            away[count++] = drawn;
+        drawn++;
+    }
+    away[count] = -1;
+    if (count > 0)
+        book_check(t->s.b, chart_legend_delete_series(t->drawn, away));
+    free(away);
 }
 
 /* A mark as a series of its own: a line from end to end, or a point. */
@@ -105,11 +142,11 @@ static void name_chart(book_points *t)
 
     if (title != NULL && *title != '\0')
         chart_title_set_name(t->drawn, title);
-    /* Excel calls the axis of the categories x, wherever it is drawn. */
-    name_axis(t->s.b, t->drawn->x_axis, across ? &t->chart->y : &t->chart->x);
-    name_axis(t->s.b, t->drawn->y_axis, across ? &t->chart->x : &t->chart->y);
+    /* libxlsxwriter's x lies level in every chart: it makes the categories of bars along x its y itself. */
+    name_axis(t->s.b, t->drawn->x_axis, &t->chart->x);
+    name_axis(t->s.b, t->drawn->y_axis, &t->chart->y);
     if (across)
-        chart_axis_set_reverse(t->drawn->x_axis);
+        chart_axis_set_reverse(t->drawn->y_axis); /* names are read from above */
     free(title);
 }
 
@@ -144,11 +181,12 @@ static void draw(book_points *t)
         at = book_put_series(t, i, at);
         lxw_chart_series *series = chart->series[i].point_count > 0 ? draw_series(t, at) : NULL;
         if (series != NULL)
-            style_series(series, chart->series[i].kind, i);
+            style_series(series, chart->series[i].kind, first_of_name(chart, i));
     }
     for (size_t i = 0; i < chart->mark_count; i++)
         put_mark(t, &chart->marks[i]);
     name_chart(t);
+    thin_legend(t);
     if (!t->is_bars) {
         set_range(chart, true, t->drawn->x_axis);
         set_range(chart, false, t->drawn->y_axis);
@@ -166,6 +204,16 @@ static bool has_something(const book_points *t)
     return t->chart->mark_count > 0 && !t->is_bars;
 }
 
+/* Names of axes fold in their columns, in the first row. */
+static void raise_head(const book_points *t)
+{
+    const size_t x = strlen(t->chart->x.label), y = strlen(t->chart->y.label);
+    const size_t lines = 1 + (x > y ? x : y) / BOOK_HEAD_WIDTH;
+
+    if (t->s.at != NULL && lines > 1)
+        book_check(t->s.b, worksheet_set_row(t->s.at, 0, LINE_HEIGHT * (double)lines, NULL));
+}
+
 void book_chart(book *b, const report_chart *chart)
 {
     book_points t = {.chart = chart,
@@ -180,5 +228,6 @@ void book_chart(book *b, const report_chart *chart)
             draw(&t);
         b->failed = b->failed || (t.drawn == NULL && has_something(&t));
     }
+    raise_head(&t);
     book_close_sheet(&t.s, BOOK_CHART_HEAD);
 }

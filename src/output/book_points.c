@@ -30,6 +30,14 @@ void book_range(const report_chart *chart, bool of_x, double *low, double *high)
             *low = fmin(*low, of_x ? point->x : point->y);
             *high = fmax(*high, of_x ? point->x : point->y);
         }
+    for (size_t i = 0; i < chart->mark_count; i++) {
+        const report_mark *mark = &chart->marks[i];
+
+        if (mark->kind == (of_x ? REPORT_MARK_Y : REPORT_MARK_X)) /* lies across the other axis */
+            continue;
+        *low = fmin(*low, of_x ? mark->x : mark->y);
+        *high = fmax(*high, of_x ? mark->x : mark->y);
+    }
     if (axis->fixed || *low > *high) {
         *low = axis->low;
         *high = axis->high;

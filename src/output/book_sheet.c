@@ -133,17 +133,20 @@ char *book_text(book *b, const char *text, size_t units)
 
 /* ---- sheets ---- */
 
-/* What Excel forbids in names becomes a blank or, at the ends, nothing. */
+/* What Excel forbids in names becomes a blank; blanks become one or, at the ends, none. */
 static void clean_name(char *name)
 {
-    size_t n = strlen(name);
+    size_t n = 0;
 
-    for (char *c = name; *c != '\0'; c++)
-        if (strchr("[]:*?/\\'", *c) != NULL)
-            *c = ' ';
+    for (const char *c = name; *c != '\0'; c++) {
+        const char kept = strchr("[]:*?/\\'", *c) != NULL ? ' ' : *c;
+
+        if (kept != ' ' || (n > 0 && name[n - 1] != ' '))
+            name[n++] = kept;
+    }
     while (n > 0 && name[n - 1] == ' ')
-        name[--n] = '\0';
-    memmove(name, name + strspn(name, " "), n - strspn(name, " ") + 1);
+        n--;
+    name[n] = '\0';
 }
 
 static bool is_free(const book *b, const char *name)

@@ -274,7 +274,37 @@ static void every_kind_of_chart_is_native(void **state)
     free(line);
     char *across = part("xl/charts/chart7.xml");
     assert_holds(across, "<c:barDir val=\"bar\"/>");
+    const char *names = strstr(across, "<c:catAx>"), *values = strstr(across, "<c:valAx>");
+    assert_true(names != NULL && names < values); /* names from above, bars to the right */
+    assert_true(strstr(names, "maxMin") != NULL && strstr(names, "maxMin") < values);
+    assert_null(strstr(values, "maxMin"));
     free(across);
+    report_close(&r);
+}
+
+/* What a gap divides is one curve still, and a bound that no point comes near is on the paper. */
+static void a_curve_with_a_gap_is_one_and_its_bound_is_seen(void **state)
+{
+    report r;
+
+    (void)state;
+    report_open(&r, "0.1.0", "stream", "Charts");
+    const size_t chart = report_add_chart(&r, "c", "Chart");
+    for (int part = 0; part < 2; part++) {
+        const size_t series = report_add_series(&r, chart, REPORT_LINE, "wobbe-gross");
+
+        report_add_point(&r, chart, series, 10.0 * part, 14.4);
+        report_add_point(&r, chart, series, 10.0 * part + 5.0, 14.6);
+    }
+    report_add_mark(&r, chart, REPORT_MARK_Y, 0.0, 21.0, "max 21");
+    write_book(&r, &STYLE);
+    assert_sound();
+    char *drawn = part("xl/charts/chart1.xml");
+    assert_holds(drawn, "<c:legendEntry><c:idx val=\"1\"/><c:delete val=\"1\"/></c:legendEntry>");
+    assert_null(strstr(drawn, "<c:legendEntry><c:idx val=\"0\"/>"));
+    assert_null(strstr(drawn, "D55E00")); /* the second colour */
+    assert_holds(drawn, "<c:max val=\"21\"/>");
+    free(drawn);
     report_close(&r);
 }
 
@@ -357,6 +387,7 @@ int main(void)
         cmocka_unit_test(long_titles_are_cut_to_names_that_differ),
         cmocka_unit_test(a_text_longer_than_a_cell_is_cut),
         cmocka_unit_test(every_kind_of_chart_is_native),
+        cmocka_unit_test(a_curve_with_a_gap_is_one_and_its_bound_is_seen),
         cmocka_unit_test(the_same_report_is_the_same_file_without_user_or_date),
         cmocka_unit_test_teardown(the_locale_does_not_matter, use_c_numbers),
         cmocka_unit_test(the_module_refuses_a_stranger_and_a_missing_one_is_named),
