@@ -51,9 +51,9 @@ static void fill(book *b)
     put_tables(b, true);
     for (size_t i = 0; i < b->r->section_count; i++)
         book_section(b, i);
+    put_tables(b, false);
     for (size_t i = 0; i < b->r->chart_count; i++)
         book_chart(b, &b->r->charts[i]);
-    put_tables(b, false);
 }
 
 /* The workbook goes to a file without a name, since libxlsxwriter knows files only. */

@@ -38,10 +38,10 @@ static void put_main(page *p)
     fputs("<main>\n", p->out);
     page_tables(p, true);
     page_sections(p);
-    page_charts(p);
     page_checks(p);
     page_warnings(p);
     page_tables(p, false);
+    page_charts(p);
     fputs("</main>\n", p->out);
 }
 

@@ -111,10 +111,10 @@ static void put_contents(page *p)
     for (size_t i = 0; i < p->r->section_count; i++)
         if (page_has_results(p, i))
             put_link(p, 's', i, p->r->sections[i].title);
-    if (p->r->chart_count > 0)
-        put_link(p, 'c', 0, "Charts");
     put_remark_links(p);
     put_table_links(p, false);
+    if (p->r->chart_count > 0)
+        put_link(p, 'c', 0, "Charts");
     put_link(p, 'a', 0, "About this report");
     fputs("</ul>\n</nav>\n", p->out);
 }

@@ -6,6 +6,7 @@
 #include <string.h>
 
 #define LONG 24 /* bytes of a word */
+#define UNIT 8  /* bytes of a text that no line may break: "mol %" */
 #define WIDE 12 /* columns that want a sheet of paper across */
 
 static void cell_number(const page *p, const report_cell *cell, char text[NUMBER_TEXT_MAX])
@@ -55,6 +56,8 @@ static const char *text_cell(const report_cell *cell, bool first, int fraction)
         return fraction < 0 ? "th scope=\"row\"" : "th scope=\"row\" class=\"n\"";
     if (fraction >= 0)
         return "td class=\"n\"";
+    if (cell->text != NULL && strlen(cell->text) <= UNIT && strchr(cell->text, ' ') != NULL)
+        return "td class=\"q\"";
     return has_long_word(cell->text) ? "td class=\"l\"" : "td";
 }
 

@@ -159,8 +159,8 @@ static void an_empty_report_is_a_whole_page(void **state)
 static void the_parts_stand_in_their_order_with_the_verdict_first(void **state)
 {
     static const char *const WORDS[] = {"<h1>text: text", "Verdict: no</strong> text", "<strong>Caution</strong> text", "<dt>State</dt>",
-                                        "<dt>Gas</dt>", "<nav", "<main>", "id=\"t0\"", "id=\"s0\"", "id=\"c0\"", "id=\"k0\"",
-                                        "class=\"no\">FAILED", "id=\"w0\"", "id=\"t1\"", "id=\"a0\"", "<dt>Methods</dt><dd>text. ",
+                                        "<dt>Gas</dt>", "<nav", "<main>", "id=\"t0\"", "id=\"s0\"", "id=\"k0\"",
+                                        "class=\"no\">FAILED", "id=\"w0\"", "id=\"t1\"", "id=\"c0\"", "id=\"a0\"", "<dt>Methods</dt><dd>text. ",
                                         "<dt>Uncertainty</dt>"};
     report r;
 
