@@ -111,9 +111,9 @@ SCRIPTS     := $(sort .ci/run .ci/deps .package/dist .package/deb $(wildcard tes
 LIB_OBJ     := $(LIB_SRC:%.c=$(OUT)/%.o)
 PROGRAM_OBJ := $(PROGRAM_SRC:%.c=$(OUT)/%.o)
 CHART_OBJ   := $(CHART_SRC:%.c=$(OUT)/%.o)
-CHART_TOO   := $(addprefix $(OUT)/src/,base/digits.o output/memory_stream.o base/text.o output/number_text.o output/plain_text.o)
+CHART_TOO   := $(addprefix $(OUT)/src/,base/digits.o output/memory_stream.o base/text.o output/number_text.o output/plain_text.o output/text_letter.o)
 BOOK_OBJ    := $(BOOK_SRC:%.c=$(OUT)/%.o)
-BOOK_TOO    := $(CHART_TOO) $(addprefix $(OUT)/src/output/,report_judged.o result_text.o section.o text_letter.o)
+BOOK_TOO    := $(CHART_TOO) $(addprefix $(OUT)/src/output/,report_judged.o result_text.o section.o)
 # Only where SQLite's headers are: the one question that is asked before any recipe, and "no" without pkg-config.
 SQL         := $(if $(shell $(PKG_CONFIG) --exists sqlite3 2>/dev/null && echo yes),$(OUT)/bluecone_sqlite.so)
 SQL_OBJ     := $(SQL_SRC:%.c=$(OUT)/%.o)

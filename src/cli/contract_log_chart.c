@@ -29,12 +29,20 @@ static void set_axis(const log_case *l, trend *t, report_axis_id axis)
     report_set_axis(t->r, t->chart, axis, label, strcmp(t->of->unit, "1") == 0 ? "" : t->of->unit);
 }
 
+static void add_bound(const trend *t, report_mark_kind kind, const char *word, double bound)
+{
+    char label[32];
+
+    (void)snprintf(label, sizeof label, "%s %.6g", word, bound);
+    report_add_mark(t->r, t->chart, kind, kind == REPORT_MARK_X ? bound : 0.0, kind == REPORT_MARK_Y ? bound : 0.0, label);
+}
+
 static void add_bounds(const trend *t)
 {
     if (t->of->has_min)
-        report_add_mark(t->r, t->chart, REPORT_MARK_Y, 0.0, t->of->min, "min");
+        add_bound(t, REPORT_MARK_Y, "min", t->of->min);
     if (t->of->has_max)
-        report_add_mark(t->r, t->chart, REPORT_MARK_Y, 0.0, t->of->max, "max");
+        add_bound(t, REPORT_MARK_Y, "max", t->of->max);
 }
 
 static void add_point(const trend *t, size_t row)
@@ -117,9 +125,9 @@ static void add_near_bounds(const trend *t, const bc_log_distribution *d)
     const double span = d->max - d->min;
 
     if (t->of->has_min && t->of->min >= d->min - span && t->of->min <= d->max + span)
-        report_add_mark(t->r, t->chart, REPORT_MARK_X, t->of->min, 0.0, "min");
+        add_bound(t, REPORT_MARK_X, "min", t->of->min);
     if (t->of->has_max && t->of->max >= d->min - span && t->of->max <= d->max + span)
-        report_add_mark(t->r, t->chart, REPORT_MARK_X, t->of->max, 0.0, "max");
+        add_bound(t, REPORT_MARK_X, "max", t->of->max);
 }
 
 static void add_histogram(const log_case *l, report *r, size_t limit, const bc_log_distribution *d)

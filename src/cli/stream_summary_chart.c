@@ -114,6 +114,15 @@ static void draw_stretches(const drawing *d)
     }
 }
 
+/* A bound with its figure, which nobody should have to read off an axis. */
+static void mark(const drawing *d, report_mark_kind kind, const char *word, double bound)
+{
+    char label[32];
+
+    (void)snprintf(label, sizeof label, "%s %.6g", word, bound);
+    report_add_mark(d->r, d->chart, kind, kind == REPORT_MARK_X ? bound : 0.0, kind == REPORT_MARK_Y ? bound : 0.0, label);
+}
+
 static void draw_trend(drawing *d)
 {
     const tally_limit_name *limit = limit_of(d);
@@ -124,18 +133,18 @@ static void draw_trend(drawing *d)
     report_set_axis(d->r, d->chart, REPORT_Y, name_of(d)->id, summary_unit(name_of(d)->unit));
     draw_stretches(d);
     if (limit && limit->has_min)
-        report_add_mark(d->r, d->chart, REPORT_MARK_Y, 0.0, limit->min, "min");
+        mark(d, REPORT_MARK_Y, "min", limit->min);
     if (limit && limit->has_max)
-        report_add_mark(d->r, d->chart, REPORT_MARK_Y, 0.0, limit->max, "max");
+        mark(d, REPORT_MARK_Y, "max", limit->max);
 }
 
 /* A bound so far off that the bars would shrink to a line is left to the trend. */
-static void mark_near(const drawing *d, bool there, double bound, const tally_spread *s, const char *label)
+static void mark_near(const drawing *d, bool there, double bound, const tally_spread *s, const char *word)
 {
     const double span = s->max - s->min;
 
     if (there && bound >= s->min - span && bound <= s->max + span)
-        report_add_mark(d->r, d->chart, REPORT_MARK_X, bound, 0.0, label);
+        mark(d, REPORT_MARK_X, word, bound);
 }
 
 static void draw_spread(drawing *d, const tally_spread *s)

@@ -26,7 +26,7 @@ static void add_columns(report *r, size_t table)
 
 static void add_table(report *r, const bc_blend_in *b)
 {
-    const size_t table = report_add_table(r, "blend-in", "Share of the new gas in the old one from which a verdict holds, mole %");
+    const size_t table = report_add_table(r, "blend-in", "Share of the new gas in the old one from which a verdict holds, mol %");
 
     add_columns(r, table);
     for (size_t i = 0; i < b->count; i++) {
@@ -45,7 +45,7 @@ static void add_table(report *r, const bc_blend_in *b)
 
 static void add_bounds(report *r, const switch_case *c, const bc_blend_in *b)
 {
-    const slot where = {r, report_add_section(r, "shares", "Share of the new gas, mole %"), NEW_GAS};
+    const slot where = {r, report_add_section(r, "shares", "Share of the new gas, mol %"), NEW_GAS};
     const plain_figure figures[] = {
         {"share-as-found", "The burner takes it as it is, up to", PERCENT * (b->adjusts.exists ? b->adjusts.share : 1.0), "%", 5, "bisection"},
         {"share-adjusted", "The burner takes it adjusted, up to", PERCENT * (b->refuses.exists ? b->refuses.share : 1.0), "%", 5, "bisection"},
@@ -64,14 +64,20 @@ static bool is_drawn(const bc_blend_criterion *k)
     return k->counts && figures > 1;
 }
 
-static void mark_limit(report *r, size_t chart, bool has, double value, const char *label)
+static void mark_limit(report *r, size_t chart, bool has, double value, const char *word)
 {
+    char label[32];
+
+    (void)snprintf(label, sizeof label, "%s %.6g", word, value);
     if (has)
         report_add_mark(r, chart, REPORT_MARK_Y, 0.0, value, label);
 }
 
-static void mark_crossing(report *r, size_t chart, const bc_crossing *c, const char *label)
+static void mark_crossing(report *r, size_t chart, const bc_crossing *c, const char *word)
 {
+    char label[48];
+
+    (void)snprintf(label, sizeof label, "%s from %.4g %%", word, PERCENT * c->share);
     if (c->exists)
         report_add_mark(r, chart, REPORT_MARK_X, PERCENT * c->share, 0.0, label);
 }
@@ -98,8 +104,8 @@ static void add_panel(report *r, const bc_blend_criterion *k)
     report_set_axis(r, chart, REPORT_X, "share of the new gas", "mol %");
     report_set_axis(r, chart, REPORT_Y, k->id, strcmp(k->unit, "1") == 0 ? "" : k->unit);
     add_curve(r, chart, k);
-    mark_limit(r, chart, k->acceptable.has_min, k->acceptable.min, "least");
-    mark_limit(r, chart, k->acceptable.has_max, k->acceptable.max, "most");
+    mark_limit(r, chart, k->acceptable.has_min, k->acceptable.min, "min");
+    mark_limit(r, chart, k->acceptable.has_max, k->acceptable.max, "max");
     mark_crossing(r, chart, &k->broken, "broken");
     mark_crossing(r, chart, &k->blind, "not covered");
 }

@@ -3,6 +3,7 @@
 #include "output/chart_draw_internal.h"
 
 #include <math.h>
+#include <string.h>
 
 #define ROW     18.0
 #define KEY     26.0 /* width of a sample of the line */
@@ -12,12 +13,21 @@
 
 static const chart_font NAME = {CHART_NORMAL, false, CHART_INK, 0.0};
 
+/* A panel whose only name stands at its axis of values already. */
+static bool axis_names_all(const report_chart *chart)
+{
+    for (size_t i = 0; i < chart->series_count; i++)
+        if (strcmp(chart->series[i].label, chart->y.label) != 0)
+            return false;
+    return true;
+}
+
 static bool has_entry(const chart_panel *panel, size_t series)
 {
     const report_chart *chart = panel->chart;
     const report_series *s = &chart->series[series];
 
-    return *s->label != '\0' && !chart_is_repeated(panel, series) &&
+    return *s->label != '\0' && !chart_is_repeated(panel, series) && !axis_names_all(chart) &&
            !(panel->labels_at_ends && s->kind == REPORT_LINE);
 }
 

@@ -2,6 +2,8 @@
 /* chart_draw_page.c - panels below each other on pages, with title and state above, caution below. */
 #include "output/chart_draw_internal.h"
 
+#include "output/text_internal.h"
+
 #include <math.h>
 #include <stdio.h>
 #include <string.h>
@@ -13,6 +15,9 @@
 #define PANEL_GAP     20.0
 #define TITLE_HEIGHT  22.0 /* of a panel */
 #define STATE_LINES   3
+#define GASES_MAX     4 /* that the head of a page names */
+#define GAS_LINES     2
+#define VERDICT_LINES 4
 #define CAUTION_LINES 4
 
 static const chart_font TITLE = {CHART_TITLE, true, CHART_INK, 0.0};
@@ -168,6 +173,32 @@ static void plan_panels(chart_canvas *canvas, chart_plan *plan, double most)
 
 /* ---- drawing ---- */
 
+/* One line of the head, or a few; answers where the next begins. */
+static double put_line(chart_canvas *canvas, const chart_font *font, double y, int lines, const char *lead, const char *text)
+{
+    const chart_box box = {CHART_EDGE, y - 4.0, INNER, 0.0};
+    char line[900];
+
+    (void)snprintf(line, sizeof line, "%.40s%s%.800s", lead, *lead != '\0' ? ": " : "", text);
+    return y + chart_paragraph(canvas, font, &box, lines, line) * chart_leading(font);
+}
+
+/* A chart is sent without its report: it says what the verdict is, and tells the gases apart. */
+static double draw_subject(chart_canvas *canvas, const report *r, double y)
+{
+    if (r->verdict != NULL)
+        y = put_line(canvas, &CAUTION, y, VERDICT_LINES, "Verdict", r->verdict);
+    if (r->state.present)
+        y = put_line(canvas, &STATE, y, STATE_LINES, "", r->state.text);
+    for (size_t i = 0; i < r->gas_count && r->gas_count > 1 && i < GASES_MAX; i++) {
+        char lead[TEXT_LEAD_MAX];
+
+        text_gas_lead(r, i, lead);
+        y = put_line(canvas, &STATE, y, GAS_LINES, lead, i + 1 == GASES_MAX && r->gas_count > GASES_MAX ? "and further ones" : r->gases[i].name);
+    }
+    return y;
+}
+
 /* A page about one gas names it; chart_paragraph() cleans and folds what users wrote. */
 static double draw_head(chart_canvas *canvas, const report *r)
 {
@@ -176,14 +207,8 @@ static double draw_head(chart_canvas *canvas, const report *r)
 
     (void)snprintf(text, sizeof text, "%.100s%s%.140s", r->title, r->gas_count == 1 ? ": " : "", r->gas_count == 1 ? r->gases[0].name : "");
     const int title_lines = chart_paragraph(canvas, &TITLE, &title, 2, text);
-    double y = title.top + title_lines * chart_leading(&TITLE);
 
-    if (r->state.present) {
-        const chart_box state = {CHART_EDGE, y - 4.0, INNER, 0.0};
-
-        y += chart_paragraph(canvas, &STATE, &state, STATE_LINES, r->state.text) * chart_leading(&STATE);
-    }
-    return y;
+    return draw_subject(canvas, r, title.top + title_lines * chart_leading(&TITLE));
 }
 
 /* The caution and who drew this; `y` is the upper end. Answers the height. */

@@ -3,6 +3,7 @@
 #include "output/chart_draw_svg_internal.h"
 
 #include "output/chart_draw_internal.h"
+#include "output/text_internal.h"
 
 #include <stdlib.h>
 #include <string.h>
@@ -58,17 +59,39 @@ static bool put_chart(const report_chart *chart, FILE *out)
     return ok;
 }
 
+/* What the head of the drawing says of the report. */
+static bool put_subject(const report *r, FILE *out)
+{
+    bool ok = true;
+
+    if (r->verdict != NULL) {
+        fputs("Verdict: ", out);
+        ok = put_line(r->verdict, out);
+    }
+    if (ok && r->state.present)
+        ok = put_line(r->state.text, out);
+    for (size_t i = 0; ok && i < r->gas_count; i++) {
+        char lead[TEXT_LEAD_MAX];
+
+        text_gas_lead(r, i, lead);
+        fprintf(out, "%s: ", lead);
+        ok = put_line(r->gases[i].name, out);
+    }
+    return ok;
+}
+
 static bool put_words(const report *r, FILE *out)
 {
     fputs("\n<title>", out);
     bool ok = put_line(r->title, out);
     fputs("</title>\n<desc>", out);
-    if (r->state.present)
-        ok = ok && put_line(r->state.text, out);
+    ok = ok && put_subject(r, out);
     for (size_t i = 0; ok && i < r->chart_count; i++)
         ok = put_chart(&r->charts[i], out);
-    if (r->caution != NULL)
+    if (r->caution != NULL) {
+        fputs("Caution: ", out);
         ok = ok && put_line(r->caution, out);
+    }
     fputs("</desc>", out);
     return ok;
 }

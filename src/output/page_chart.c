@@ -115,6 +115,8 @@ static bool put_figure(page *p, size_t first, size_t count, size_t number)
     part.chart_count = count;
     part.state.present = false;
     part.caution = NULL;
+    part.verdict = NULL;
+    part.gas_count = 0; /* the page around has all of them */
     char *svg = draw(&part, &err);
     if (svg == NULL) {
         fputs("<p class=\"note\">The charts are left out: ", p->out);

@@ -95,7 +95,8 @@ size_t burner_criteria(const switch_pair *pair, const bc_burner_response *on_old
     const burner_figure heat = {"heat-input", "Heat input, over that on the old gas", "%", 1, 1U << BC_DANGER_HEAT, true, on_new->heat_ratio,
                                 then->heat_ratio, b->input, PERCENT, 0.0, ""};
     const burner_figure lambda = {"lambda", "Air factor", "1", 3, 1U << BC_DANGER_CO, true, on_new->lambda, then->lambda, air, 1.0, 0.0, ""};
-    const burner_figure o2 = {"flue-o2", "Oxygen of the flue gas", "%", 2, 0, true, oxygen(b, on_new), oxygen(b, then), b->o2, PERCENT, 0.0, ""};
+    const burner_figure o2 = {"flue-o2", b->o2_basis == BC_FLUE_WET ? "Oxygen of the wet flue gas" : "Oxygen of the dry flue gas", "%", 2, 0,
+                              true, oxygen(b, on_new), oxygen(b, then), b->o2, PERCENT, 0.0, ""};
     const burner_figure flame = {"flame-temperature", "Adiabatic flame temperature", "C", 0, 1U << BC_DANGER_FLAME, true, on_new->burn.flame.t_k,
                                  then->burn.flame.t_k, b->flame, 1.0, T0_K, ""};
     const burner_figure velocity = velocity_of(b, on_old, on_new);
