@@ -71,6 +71,7 @@ static bc_status fill_alone(report *r, const contract_case *c, bool *good, bc_er
     contract_warn(r, c->contract);
     if (!c->a->value[OPTION_worst])
         return BC_OK;
+    report_set_caution(r, SHEET_CAUTION);
     const bc_status status = contract_worst(r, c, good, err);
 
     return status == BC_OK ? contract_charts(r, c, err) : status;

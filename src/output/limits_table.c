@@ -43,7 +43,7 @@ static void put_number(report *made, size_t table, bool there, double number, in
 
 /* Columns that only some reports fill. */
 typedef struct {
-    bool uncertainty, percent;
+    bool judged, uncertainty, percent; /* without a gas there is nothing but bounds */
 } columns;
 
 static void put_limit(report *made, size_t table, const report *r, const report_limit *limit, columns c)
@@ -53,11 +53,14 @@ static void put_limit(report *made, size_t table, const report *r, const report_
     if (limit->gas != REPORT_NO_GAS)
         text_letter(r, limit->gas, letter);
     report_add_text(made, table, limit->id);
-    report_add_text(made, table, letter);
+    if (c.judged)
+        report_add_text(made, table, letter);
     report_add_text(made, table, strcmp(limit->unit, "1") == 0 ? "" : limit->unit);
     report_add_text(made, table, limit->state);
     put_number(made, table, limit->has_min, limit->min, BOUND_DIGITS);
     put_number(made, table, limit->has_max, limit->max, BOUND_DIGITS);
+    if (!c.judged)
+        return;
     put_number(made, table, limit->has_value, limit->value, REPORT_DIGITS);
     if (c.uncertainty)
         put_number(made, table, limit->has_uncertainty, limit->uncertainty, UNCERTAINTY_DIGITS);
@@ -71,11 +74,14 @@ static void add_columns(report *made, size_t table, columns c)
 {
     static const struct {
         const char *id, *heading, *unit;
-    } COLUMNS[] = {{"limit", "limit", ""}, {"gas", "gas", ""}, {"unit", "unit", ""}, {"state", "at", ""}, {"min", "min", ""}, {"max", "max", ""},
-                   {"value", "value", ""}};
+    } COLUMNS[] = {{"limit", "limit", ""}, {"gas", "gas", ""}, {"unit", "unit", ""}, {"state", "at", ""}, {"min", "min", ""}, {"max", "max", ""}};
 
     for (size_t i = 0; i < sizeof COLUMNS / sizeof *COLUMNS; i++)
-        report_add_column(made, table, COLUMNS[i].id, COLUMNS[i].heading, COLUMNS[i].unit);
+        if (c.judged || strcmp(COLUMNS[i].id, "gas") != 0)
+            report_add_column(made, table, COLUMNS[i].id, COLUMNS[i].heading, COLUMNS[i].unit);
+    if (!c.judged)
+        return;
+    report_add_column(made, table, "value", "value", "");
     if (c.uncertainty)
         report_add_column(made, table, "uncertainty", "u (k = 1)", "");
     report_add_column(made, table, "margin", "margin", "");
@@ -87,9 +93,10 @@ static void add_columns(report *made, size_t table, columns c)
 static void make_table(report *made, const report *r)
 {
     const size_t table = report_add_table(made, "limits", r->limits_title);
-    columns c = {false, false};
+    columns c = {false, false, false};
 
     for (size_t i = 0; i < r->limit_count; i++) {
+        c.judged = c.judged || r->limits[i].gas != REPORT_NO_GAS;
         c.uncertainty = c.uncertainty || r->limits[i].has_uncertainty;
         c.percent = c.percent || r->limits[i].has_percent;
     }

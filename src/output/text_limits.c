@@ -44,14 +44,15 @@ static void add_bound(grid *g, bool there, double bound)
 
 /* Columns that only some reports fill. */
 typedef struct {
-    bool uncertainty, percent;
+    bool judged, uncertainty, percent; /* without a gas there is nothing but bounds */
 } limit_columns;
 
 static limit_columns columns_of(const report *r)
 {
-    limit_columns c = {false, false};
+    limit_columns c = {false, false, false};
 
     for (size_t i = 0; i < r->limit_count; i++) {
+        c.judged = c.judged || r->limits[i].gas != REPORT_NO_GAS;
         c.uncertainty = c.uncertainty || r->limits[i].has_uncertainty;
         c.percent = c.percent || r->limits[i].has_percent;
     }
@@ -61,12 +62,16 @@ static limit_columns columns_of(const report *r)
 static void add_columns(grid *g, const limit_columns *c)
 {
     static const char *const LEFT[] = {"limit", "gas", "unit", "at"};
-    static const char *const RIGHT[] = {"min", "max", "value"};
+    static const char *const RIGHT[] = {"min", "max"};
 
     for (size_t i = 0; i < sizeof LEFT / sizeof *LEFT; i++)
-        grid_add_column(g, GRID_LEFT, CELL_FOLD, LEFT[i], "");
+        if (c->judged || strcmp(LEFT[i], "gas") != 0)
+            grid_add_column(g, GRID_LEFT, CELL_FOLD, LEFT[i], "");
     for (size_t i = 0; i < sizeof RIGHT / sizeof *RIGHT; i++)
         grid_add_column(g, GRID_RIGHT, CELL_FOLD, RIGHT[i], "");
+    if (!c->judged)
+        return;
+    grid_add_column(g, GRID_RIGHT, CELL_FOLD, "value", "");
     if (c->uncertainty)
         grid_add_column(g, GRID_RIGHT, CELL_FOLD, "u", "");
     grid_add_column(g, GRID_RIGHT, CELL_FOLD, "margin", "");
@@ -82,11 +87,14 @@ static void add_limit(grid *g, const limit_columns *c, const report *r, const re
     if (limit->gas != REPORT_NO_GAS)
         text_letter(r, limit->gas, letter);
     grid_add_cell(g, limit->id);
-    grid_add_cell(g, letter);
+    if (c->judged)
+        grid_add_cell(g, letter);
     grid_add_cell(g, strcmp(limit->unit, "1") == 0 ? "" : limit->unit);
     grid_add_cell(g, limit->state);
     add_bound(g, limit->has_min, limit->min);
     add_bound(g, limit->has_max, limit->max);
+    if (!c->judged)
+        return;
     add_number(g, limit->has_value, limit->value, style->digits > 0 ? style->digits : REPORT_DIGITS);
     if (c->uncertainty)
         add_number(g, limit->has_uncertainty, limit->uncertainty, UNCERTAINTY_DIGITS);
@@ -104,8 +112,9 @@ void text_limits(text_page *page, const report *r)
         return;
     fputc('\n', page->out);
     text_title(page, r->limits_title, NULL);
-    grid_open(&g, INDENT, 2); /* limit and gas */
     const limit_columns c = columns_of(r);
+
+    grid_open(&g, INDENT, c.judged ? 2 : 1); /* limit and gas */
 
     add_columns(&g, &c);
     for (size_t i = 0; i < r->limit_count; i++)
