@@ -16,12 +16,12 @@ static void add_bars(report *r, const contract_case *c, size_t gas)
     char id[40];
 
     (void)snprintf(id, sizeof id, "margins-%zu", gas + 1);
-    (void)snprintf(title, sizeof title, "Margins of %.120s, at most 100 %%", c->gases.each[gas].loaded.name);
+    (void)snprintf(title, sizeof title, "Margins of %.120s, cut at 100 %%", c->gases.each[gas].loaded.name);
     const size_t chart = report_add_chart(r, id, title);
     const size_t series = report_add_series(r, chart, REPORT_BARS, "margin");
     size_t place = 0;
 
-    report_set_axis(r, chart, REPORT_X, "margin to the nearer bound, of the window or the bound", "%");
+    report_set_axis(r, chart, REPORT_X, "margin to the nearer bound, of the window or the bound; left of 0: outside", "%");
     report_set_axis(r, chart, REPORT_Y, "", "");
     for (size_t i = 0; i < r->limit_count; i++) {
         const report_limit *row = &r->limits[i];

@@ -89,7 +89,8 @@ static const char *const RULES[] = {
     ".with-u th:nth-child(1){width:34%}.with-u th:nth-child(2){width:26%}.with-u th:nth-child(3){width:18%}",
     ".with-u th:nth-child(4){width:22%}",
     ".gases table{min-width:calc(11rem + var(--n)*5.6rem)}.gases th:nth-child(1){width:7.2rem}",
-    ".gases th:nth-child(2){width:4.2rem}.gases td{padding:.3rem .3rem}.verdict ",
+    ".gases th:nth-child(2){width:4.2rem}.gases td{padding:.3rem .3rem}",
+    ".gases .q{white-space:normal;overflow-wrap:anywhere}.verdict ",
     "strong{display:table;margin-bottom:.3rem}}",
 
     /* ---- A4; a table of many columns lies across ---- */
