@@ -129,8 +129,8 @@ static void verdict(report *r, const blend_case *c, const best_blend *b)
     const double factor = objective_unit(c, b, unit, sizeof unit);
 
     if (o->feasible)
-        (void)snprintf(text, sizeof text, "least %s: %.6g %s%s; found from %zu of %zu starting blends", c->a->value[OPTION_least], o->objective * factor, unit,
-                       o->binding_count == 0 ? ", held by no limit" : "", o->agreed, o->starts);
+        (void)snprintf(text, sizeof text, "least %s: %.6g %s%s%s; found from %zu of %zu starting blends", c->a->value[OPTION_least], o->objective * factor, unit,
+                       strchr(unit, '/') ? " gross" : "", o->binding_count == 0 ? ", held by no limit" : "", o->agreed, o->starts);
     else
         (void)snprintf(text, sizeof text, "no blend of these gases keeps all limits of %s: %zu of them exclude each other; the blend shown breaks them least",
                        c->within ? c->within->name : "the flows", o->binding_count);
