@@ -175,14 +175,27 @@ static bool shows(const panel *p, const sweep *s)
     return (p->kinds & (unsigned)s->kind) != 0;
 }
 
-static void open_panels(report *r, const sweep *s, open_panel open[])
+/* What depends on excess and flue gas temperature is told at which of the one it is swept over the other. */
+static void title_of(const panel *p, const sweep *s, const bc_burn_case *c, char *title, size_t size)
+{
+    if ((p->kinds & SWEEP_FLUE_TEMPERATURE) == 0)
+        (void)snprintf(title, size, "%s", p->title);
+    else if (s->kind == SWEEP_EXCESS)
+        (void)snprintf(title, size, "%s, flue gas leaves at %.6g C", p->title, c->exit_k - T0_K);
+    else
+        (void)snprintf(title, size, "%s, excess oxidant %.4g %%", p->title, PERCENT * (c->lambda - 1.0));
+}
+
+static void open_panels(report *r, const sweep *s, const bc_burn_case *c, open_panel open[])
 {
     const bool excess = s->kind == SWEEP_EXCESS;
+    char title[100];
 
     for (size_t i = 0; i < BC_COUNT(PANELS); i++) {
         if (!shows(&PANELS[i], s))
             continue;
-        open[i].chart = report_add_chart(r, PANELS[i].id, PANELS[i].title);
+        title_of(&PANELS[i], s, c, title, sizeof title);
+        open[i].chart = report_add_chart(r, PANELS[i].id, title);
         report_set_axis(r, open[i].chart, REPORT_X, excess ? "excess oxidant" : "flue gas temperature", excess ? "%" : "C");
         report_set_axis(r, open[i].chart, REPORT_Y, PANELS[i].label, PANELS[i].unit);
     }
@@ -258,6 +271,20 @@ static void add_marks(report *r, const burn_case_result *c, const sweep *s, cons
     }
 }
 
+static bc_status burn_at(bc_burn_case *swept, const sweep *s, double x, bc_burn *b, bc_error *err)
+{
+    set_point(swept, s, x);
+    return bc_burn_of(swept, b, err);
+}
+
+/* The efficiency has a corner where condensation begins, which steps would cut off. */
+static bool has_corner(const burn_case_result *c, const sweep *s, double before, double x)
+{
+    const double dew = c->burn.dew.t_k - T0_K;
+
+    return s->kind == SWEEP_FLUE_TEMPERATURE && c->burn.dew.exists && dew > before && dew < x;
+}
+
 bc_status burn_chart(report *r, const arguments *a, const burn_case_result *c, bc_error *err)
 {
     bc_burn_case swept = c->setup.physics;
@@ -269,14 +296,19 @@ bc_status burn_chart(report *r, const arguments *a, const burn_case_result *c, b
     if (status != BC_OK)
         return status;
     memset(open, 0, sizeof open);
-    open_panels(r, &s, open);
+    open_panels(r, &s, &c->setup.physics, open);
     const size_t table = open_table(r, &s);
 
     for (size_t i = 0; i <= STEPS; i++) {
         const double x = s.low + (s.high - s.low) * (double)i / STEPS;
 
-        set_point(&swept, &s, x);
-        status = bc_burn_of(&swept, &b, err);
+        if (i > 0 && has_corner(c, &s, x - (s.high - s.low) / STEPS, x)) {
+            status = burn_at(&swept, &s, c->burn.dew.t_k - T0_K, &b, err);
+            if (status == BC_OK)
+                add_points(r, &s, open, c->burn.dew.t_k - T0_K, &b);
+        }
+        if (status == BC_OK)
+            status = burn_at(&swept, &s, x, &b, err);
         if (status != BC_OK)
             return status;
         add_points(r, &s, open, x, &b);
