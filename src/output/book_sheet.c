@@ -172,10 +172,29 @@ static bool choose_name(const book *b, const char *wanted, char name[BOOK_NAME_B
     return false;
 }
 
+/* A title too long for a name ends with its last whole word, unless little would be left. */
+static void shorten(char *title)
+{
+    size_t kept = unit_bytes(title, BOOK_NAME_MAX);
+    size_t word = kept;
+
+    if (title[kept] == '\0')
+        return;
+    while (word > 0 && title[word] != ' ')
+        word--;
+    if (word > kept / 2)
+        kept = word;
+    while (kept > 0 && strchr(" ,;:", title[kept - 1]) != NULL)
+        kept--;
+    title[kept] = '\0';
+}
+
 bool book_open_sheet(book *b, book_sheet *s, const char *name, size_t columns)
 {
-    char *wanted = book_text(b, *name == '\0' ? "Sheet" : name, BOOK_NAME_MAX);
+    char *wanted = book_text(b, *name == '\0' ? "Sheet" : name, BOOK_TEXT_MAX);
 
+    if (wanted != NULL)
+        shorten(wanted);
     *s = (book_sheet){.b = b, .columns = (lxw_col_t)columns};
     s->widths = calloc(columns + 1, sizeof *s->widths);
     if (wanted != NULL && s->widths != NULL && choose_name(b, wanted, s->name))
