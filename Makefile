@@ -220,8 +220,10 @@ $(FUZZERS): $(OUT)/%: $(OUT)/%.o $(OUT)/tests/fuzz/replay.o $(PROGRAM_PARTS) $(A
 
 # The second is what pkg-config takes when it looks into a build folder: programs there find the library that
 # was just built. A library with instruments in it needs programs that have them, too.
-$(OUT)/bluecone.pc:             private PC = -e 's|@prefix@|$(prefix)|' -e 's|@libdir@|$(libdir)|' -e 's|@includedir@|$(includedir)|'
-$(OUT)/bluecone-uninstalled.pc: private PC = -e 's|@prefix@|$(CURDIR)|' -e 's|@libdir@|$(CURDIR)/$(OUT)|' -e 's|@includedir@|$(CURDIR)/include|'
+$(OUT)/bluecone.pc:             private PC = -e 's|@prefix@|$(prefix)|' -e 's|@libdir@|$(libdir)|' -e 's|@includedir@|$(includedir)|' \
+                                             -e 's|@compositions@|$(datadir)/bluecone/compositions|'
+$(OUT)/bluecone-uninstalled.pc: private PC = -e 's|@prefix@|$(CURDIR)|' -e 's|@libdir@|$(CURDIR)/$(OUT)|' -e 's|@includedir@|$(CURDIR)/include|' \
+                                             -e 's|@compositions@|$(CURDIR)/compositions|'
 $(PC_FILES): src/bluecone.pc.in include/bluecone/status.h Makefile $(OUT)/flags
 	@sed $(PC) -e 's|@version@|$(VERSION)|' -e 's|@instruments@|$(INSTRUMENTS:%= %)|' $< >$@
 

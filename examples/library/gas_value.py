@@ -93,7 +93,11 @@ class bc_composition(Structure):
                 ("spread", bc_spread)]
 
 
-library = CDLL(os.environ.get("BLUECONE_LIBRARY", "libbluecone.so.0"))
+try:
+    library = CDLL(os.environ.get("BLUECONE_LIBRARY", "libbluecone.so.0"))
+except OSError as missing:
+    print("gas_value: %s; name the library by its path in BLUECONE_LIBRARY" % missing, file=sys.stderr)
+    sys.exit(4)
 library.bc_state_default.restype = bc_state
 library.bc_quantity_at.restype = POINTER(bc_quantity)
 library.bc_quantity_at.argtypes = [c_size_t]

@@ -104,7 +104,8 @@ BC_API BC_MUST_USE bc_status bc_composition_parse(const char *literal, bc_compos
 /* Finds what a GAS argument of the command line means: a file, else a bundled name NAME (DIR/NAME.ini),
  * else a literal.
  *
- *   folders        folders with bundled gases, looked through in order
+ *   folders        folders with bundled gases, looked through in order; the one that was installed is
+ *                  printed by `pkg-config --variable=compositions bluecone`
  *   folder_count   their number
  *
  * BC_ERR_INPUT with the nearest bundled name when nothing fits. */

@@ -85,6 +85,8 @@ static bc_status refuse(const char *word, const char *const folders[], size_t fo
     bc_text_show(shown, sizeof shown, word);
     if (strchr(word, '/') || ends_in_ini(word))
         return bc_fail(err, BC_ERR_INPUT, "there is no file '%s'; check the path", shown);
+    if (folder_count == 0) /* a program of somebody else: no environment is read here */
+        return bc_fail(err, BC_ERR_INPUT, "no file '%s', and no folder of bundled gases was given; a literal is written methane=92,ethane=8", shown);
     const bc_nearest n = bc_nearest_bundled(word, folders, folder_count);
 
     if (n.name[0] == '\0')

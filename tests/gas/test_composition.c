@@ -897,6 +897,8 @@ static void a_gas_is_found_as_file_as_bundled_name_and_as_literal(void **state)
     assert_within(c.gas.x[SPECIES_ethane], 0.07, 1e-15);
     assert_refused(bc_composition_find("landfil-gas", FOLDERS, 2, &c, &err), &err, BC_ERR_INPUT, "no file or bundled gas 'landfil-gas'|'landfill-gas'");
     assert_refused(bc_composition_find("g20", FOLDERS, 1, &c, &err), &err, BC_ERR_INPUT, "no bundled gases were found|BLUECONE_PATH");
+    assert_refused(bc_composition_find("g20", NULL, 0, &c, &err), &err, BC_ERR_INPUT, "no file 'g20'|no folder of bundled gases was given|methane=92");
+    assert_null(strstr(err.message, "BLUECONE_PATH")); /* which the library does not read */
     assert_refused(bc_composition_find("", FOLDERS, 2, &c, &err), &err, BC_ERR_INPUT, "empty");
     assert_refused(bc_composition_find("../compositions/g20", FOLDERS, 2, &c, &err), &err, BC_ERR_INPUT, "there is no file");
     assert_refused(bc_composition_find("/tmp", FOLDERS, 2, &c, &err), &err, BC_ERR_INPUT, "directory");

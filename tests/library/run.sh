@@ -86,6 +86,9 @@ point 'a header that could not be shown whole makes no page'
 test "$(objdump -p "$root/lib/libbluecone.so.0" | awk '$1 == "SONAME" { print $2 }')" = libbluecone.so.0 || echo 'not libbluecone.so.0' >"$work/wrong"
 point 'the shared library has its versioned name'
 
+test -e "$(flags --variable=compositions)/g20.ini" || flags --variable=compositions >"$work/wrong"
+point 'pkg-config leads to the bundled gases'
+
 # ---- the examples ---------------------------------------------------------------------------------
 GASES='present-supply.ini new-supply-offer.ini hydrogen-blend.ini'
 STRICT='-Wall -Wextra -Wpedantic -Werror'
@@ -128,6 +131,16 @@ build_c() {
 
 check python3 "$SRC/examples/library/gas_value.py" >"$work/wrong" 2>&1
 point 'the Python example prints the same'
+
+{
+    (cd "$work" && BLUECONE_LIBRARY=./none.so python3 "$SRC/examples/library/gas_value.py" g20) >"$work/got" 2>&1
+    echo "exit $?" >>"$work/got"
+    diff -u --label wanted --label printed - "$work/got" <<'END'
+gas_value: ./none.so: cannot open shared object file: No such file or directory; name the library by its path in BLUECONE_LIBRARY
+exit 4
+END
+} >"$work/wrong"
+point 'without a library it says how to name one'
 
 PYTHONDONTWRITEBYTECODE=1 python3 - "$SRC" >"$work/wrong" 2>&1 <<'END'
 import ctypes, re, sys
