@@ -2,7 +2,6 @@
 /* book_table.c - a table of a report as a sheet. */
 #include "output/book_internal.h"
 
-#include <string.h>
 
 static bool has_units(const report_table *table)
 {
@@ -41,9 +40,7 @@ static void put_cell(book_sheet *s, size_t column, const report_cell *cell)
     char text[NUMBER_TEXT_MAX];
 
     if (!cell->is_number) {
-        const bool is_none = cell->text != NULL && strcmp(cell->text, "-") == 0;
-
-        book_put_text(s, column, is_none ? BOOK_NONE : BOOK_PLAIN, cell->text);
+        book_put_text(s, column, report_is_none(cell) ? BOOK_NONE : BOOK_PLAIN, cell->text);
         return;
     }
     if (cell->decimals >= 0)

@@ -131,8 +131,8 @@ static void put_heading(csv_page *page, const report_column *column)
 
 static void put_cell(csv_page *page, const report_table *table, size_t index)
 {
-    if (index >= table->cell_count)
-        return;
+    if (index >= table->cell_count || report_is_none(&table->cells[index]))
+        return; /* empty: programs take a dash for a text, and with it the whole column */
     if (table->cells[index].is_number)
         put_number(page, table->cells[index].number);
     else

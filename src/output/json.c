@@ -110,13 +110,13 @@ static json_t *columns_of(const report_table *table, bool *failed)
     return array;
 }
 
-/* A row that breaks off ends in null, so that all rows are of one length. */
+/* A row that breaks off ends in null, so that all rows are of one length; a figure that is not there is null, too. */
 static json_t *row_of(const report_table *table, size_t first, bool *failed)
 {
     json_t *array = json_array();
 
     for (size_t i = first; i < first + table->column_count; i++) {
-        if (i >= table->cell_count)
+        if (i >= table->cell_count || report_is_none(&table->cells[i]))
             append(array, json_null(), failed);
         else if (table->cells[i].is_number)
             append(array, number_of(table->cells[i].number), failed);

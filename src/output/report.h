@@ -9,6 +9,7 @@
 
 #include <stdbool.h>
 #include <stddef.h>
+#include <string.h>
 
 #include "bluecone/status.h"
 
@@ -61,13 +62,19 @@ typedef struct {
     char *id, *title;
 } report_section;
 
-/* A cell of a table: text, or a number with the decimals to print (-1: significant digits decide). */
+/* A cell of a table: text, or a number with the decimals to print (-1: significant digits decide). The text "-" stands
+ * for a figure that is not there. */
 typedef struct {
     bool is_number;
     double number;
     int decimals;
     char *text;               /* NULL: empty cell */
 } report_cell;
+
+static inline bool report_is_none(const report_cell *cell)
+{
+    return !cell->is_number && cell->text != NULL && strcmp(cell->text, "-") == 0;
+}
 
 typedef struct {
     char *id, *heading, *unit;

@@ -264,7 +264,7 @@ static void hostile_names_are_escaped_and_broken_utf8_repaired(void **state)
     free(text);
 }
 
-static void rows_of_a_table_are_all_of_one_length(void **state)
+static void rows_of_a_table_are_all_of_one_length_and_null_where_no_figure_is(void **state)
 {
     report *r = *state;
     const size_t table = report_add_table(r, "log", "Log");
@@ -273,6 +273,8 @@ static void rows_of_a_table_are_all_of_one_length(void **state)
     report_add_column(r, table, "hhv", "Heating value", "MJ/m3");
     report_add_text(r, table, "08:00");
     report_add_number(r, table, 37.7061, 2);
+    report_add_text(r, table, "09:00");
+    report_add_text(r, table, "-");
     report_add_text(r, table, NULL);
 
     json_t *object = parsed(r);
@@ -280,7 +282,7 @@ static void rows_of_a_table_are_all_of_one_length(void **state)
     assert_keys(told, "id title columns rows");
     assert_keys(json_array_get(json_object_get(told, "columns"), 0), "id heading unit");
     char *rows = json_dumps(json_object_get(told, "rows"), JSON_COMPACT | JSON_REAL_PRECISION(6));
-    assert_string_equal(rows, "[[\"08:00\",37.7061],[null,null]]");
+    assert_string_equal(rows, "[[\"08:00\",37.7061],[\"09:00\",null],[null,null]]");
     free(rows);
     json_decref(object);
 }
@@ -308,7 +310,7 @@ int main(void)
         JSON_TEST(numbers_have_twelve_digits_in_every_locale),
         JSON_TEST(a_value_that_is_not_finite_is_null),
         JSON_TEST(hostile_names_are_escaped_and_broken_utf8_repaired),
-        JSON_TEST(rows_of_a_table_are_all_of_one_length),
+        JSON_TEST(rows_of_a_table_are_all_of_one_length_and_null_where_no_figure_is),
         JSON_TEST(a_stream_that_cannot_be_written_is_an_error),
     };
 
