@@ -150,12 +150,12 @@ void sheet_composition(report *r, const subjects *s)
 {
     const size_t table = report_add_table(r, "composition", "Composition used");
 
-    report_add_column(r, table, "component", "component", "mol %");
+    report_add_column(r, table, "component", "component", "");
     for (size_t i = 0; i < s->count; i++) {
         char id[40];
 
         (void)snprintf(id, sizeof id, "gas-%zu", i + 1);
-        report_add_column(r, table, id, s->each[i].loaded.name, "");
+        report_add_column(r, table, id, s->each[i].loaded.name, "mol %");
     }
     for (size_t j = 0; j < bc_species_count(); j++) {
         bool any = false;
