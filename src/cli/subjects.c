@@ -39,13 +39,27 @@ static bool holds_oxygen(const loaded_gas *gas)
     return bc_species_find("oxygen", &oxygen, NULL) == BC_OK && gas->gas.x[oxygen] > 0.0;
 }
 
+/* Certificates from one form bear one name: what tells their figures apart in an answer is then a number behind it. */
+static void part_names(const subjects *s, loaded_gas *last)
+{
+    size_t same = 1;
+
+    for (size_t i = 0; i + 1 < s->count; i++)
+        if (!s->each[i].loaded.repeated && strcmp(s->each[i].loaded.composition.name, last->composition.name) == 0)
+            same++;
+    if (same > 1)
+        (void)snprintf(last->name, sizeof last->name, "%s (%zu)", last->composition.name, same);
+}
+
 static bc_status load(subjects *s, const char *word, bool air_free, bool both, bc_error *err)
 {
     subject *each = &s->each[s->count++];
     bc_status status = gas_load(word, &each->loaded, err);
 
-    if (status == BC_OK)
+    if (status == BC_OK) {
+        part_names(s, &each->loaded);
         status = evaluate(s, each, err);
+    }
     if (status != BC_OK || !air_free || !holds_oxygen(&each->loaded))
         return status;
     if (both) {
