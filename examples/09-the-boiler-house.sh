@@ -16,7 +16,7 @@ trap 'rm -rf "$folder"' EXIT
 burn() {
     name=$1
     shift
-    bluecone burn --csv --humidity 60% --oxidant-temp 22 --flue-temp 142 --casing-loss 0.7 "$@" >"$folder/$name"
+    bluecone burn --csv --quiet --humidity 60% --oxidant-temp 22 --flue-temp 142 --casing-loss 0.7 "$@" >"$folder/$name"
 }
 # figure NAME ID: one of its figures; the name of a gas may hold commas, and is quoted then.
 figure() { sed -n "s/^$2,\"*[^\"]*\"*,\([-0-9.]*\),[^,]*,,.*/\1/p" "$folder/$1"; }

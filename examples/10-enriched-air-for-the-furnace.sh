@@ -15,7 +15,7 @@ figure() { sed -n "s/^$1,[^,]*,\([-0-9.]*\),.*/\1/p" "$folder/case"; }
 
 printf '%-16s %8s %9s %9s %9s %9s\n' oxidant 'flame C' 'gas m3/h' 'air kg/h' 'flue kg/h' 'CO2 kg/h'
 for oxidant in air enriched:23 enriched:25 enriched:28; do
-    bluecone burn --csv --oxidant $oxidant --oxidant-temp 1150 --excess 8 --flue-temp 1420 --duty 3.6MW present-supply.ini >"$folder/case"
+    bluecone burn --csv --quiet --oxidant $oxidant --oxidant-temp 1150 --excess 8 --flue-temp 1420 --duty 3.6MW present-supply.ini >"$folder/case"
     printf '%-16s %8.0f %9.1f %9.0f %9.0f %9.0f\n' $oxidant "$(figure flame-temperature)" "$(figure fuel-volume-rate)" \
         "$(figure oxidant-mass-rate)" "$(figure flue-mass-rate)" "$(figure co2-mass-rate)"
 done

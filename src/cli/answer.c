@@ -66,7 +66,7 @@ static void tell_order(const report *r)
         warn("lines: %s%s", text, r->gas_count > 1 ? ", for each gas" : "");
 }
 
-/* A number alone and a picture have no room for state and warnings: they go where messages go. */
+/* A number alone, rows of figures and a picture have no room for state and warnings: they go where messages go. */
 static void tell_aside(const report *r, const render_style *style)
 {
     if (style->bare || style->quiet)
@@ -104,7 +104,7 @@ static bc_status render(report *r, const arguments *a, bool brief, bc_error *err
         if (!style.bare && !style.quiet)
             tell_order(r);
         style.digits = style.digits ? style.digits : REPORT_DIGITS;
-    } else if (render_form_is_chart(form)) {
+    } else if (form == RENDER_CSV || render_form_is_chart(form)) {
         tell_aside(r, &style);
     }
     return render_to(r, form, &style, a->value[OPTION_output], err);

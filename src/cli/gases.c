@@ -79,11 +79,15 @@ static void warn_state(report *r, const bc_state *state)
 void report_state_of(report *r, const bc_state *state)
 {
     char text[160];
-    const report_state shown = {.present = true, .combustion_c = state->combustion_c, .metering_c = state->metering_c,
+    report_state shown = {.present = true, .combustion_c = state->combustion_c, .metering_c = state->metering_c,
                                 .metering_kpa = state->metering_pa * 1e-3, .saturated = state->saturated, .edition = state->edition,
                                 .text = text};
 
+    char brief[48];
+
     bc_state_describe(state, text, sizeof text);
+    state_text(state, brief, sizeof brief);
+    (void)snprintf(shown.brief, sizeof shown.brief, "%s%s", brief, state->edition == 1995 ? " 1995" : "");
     report_set_state(r, &shown);
     warn_state(r, state);
 }

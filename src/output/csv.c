@@ -94,6 +94,7 @@ static void put_number(const csv_page *page, double number)
     put(page, text);
 }
 
+/* With its state in every row: heat per volume means nothing without, and a file has no other place for it. */
 static void put_result(csv_page *page, const report *r, const report_result *result)
 {
     put_text(page, result->id);
@@ -108,6 +109,8 @@ static void put_result(csv_page *page, const report *r, const report_result *res
         put_number(page, result->uncertainty);
     put_char(page, ',');
     put_text(page, result->method);
+    put_char(page, ',');
+    put_text(page, r->state.present ? r->state.brief : "");
     put_char(page, '\n');
 }
 
@@ -217,7 +220,7 @@ static void put_named_tables(csv_page *page, const report *r)
 static void put_report(csv_page *page, const report *r)
 {
     if (has_figures(r)) {
-        put(page, "id,gas,value,unit,uncertainty,method\n");
+        put(page, "id,gas,value,unit,uncertainty,method,state\n");
         for (size_t i = 0; i < r->result_count; i++)
             put_result(page, r, &r->results[i]);
         return;

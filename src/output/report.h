@@ -45,6 +45,7 @@ typedef struct {
     bool saturated;
     int edition;              /* of ISO 6976 */
     char *text;               /* the same in one line, for people */
+    char brief[64];           /* and as it is typed, "25/0" */
 } report_state;
 
 /* One figure. */

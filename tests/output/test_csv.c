@@ -70,7 +70,7 @@ static int tear_down(void **state)
     return 0;
 }
 
-#define HEAD "id,gas,value,unit,uncertainty,method\n"
+#define HEAD "id,gas,value,unit,uncertainty,method,state\n"
 
 static void results_are_rows_with_twelve_digits(void **state)
 {
@@ -80,11 +80,11 @@ static void results_are_rows_with_twelve_digits(void **state)
     add_result(r, gas, 37.7061234567891, 0.0131);
     add_result(r, REPORT_NO_GAS, -0.25, 0.0);
     assert_renders(render_csv, r, (render_style){0},
-                   HEAD "hhv,G20,37.7061234568,MJ/m3,0.0131,ISO 6976:2016\n"
-                        "hhv,,-0.25,MJ/m3,,ISO 6976:2016\n");
+                   HEAD "hhv,G20,37.7061234568,MJ/m3,0.0131,ISO 6976:2016,\n"
+                        "hhv,,-0.25,MJ/m3,,ISO 6976:2016,\n");
     assert_renders(render_csv, r, (render_style){.digits = 3},
-                   HEAD "hhv,G20,37.7,MJ/m3,0.0131,ISO 6976:2016\n"
-                        "hhv,,-0.25,MJ/m3,,ISO 6976:2016\n");
+                   HEAD "hhv,G20,37.7,MJ/m3,0.0131,ISO 6976:2016,\n"
+                        "hhv,,-0.25,MJ/m3,,ISO 6976:2016,\n");
 }
 
 static void names_with_commas_quotes_and_line_feeds_are_quoted(void **state)
@@ -95,9 +95,9 @@ static void names_with_commas_quotes_and_line_feeds_are_quoted(void **state)
     add_result(r, report_add_gas(r, "2\" line", "", 1.0), 37.7, 0.0);
     add_result(r, report_add_gas(r, "two\nlines", "", 1.0), 37.7, 0.0);
     assert_renders(render_csv, r, (render_style){0},
-                   HEAD "hhv,\"Works, \"\"June\"\"\",37.7,MJ/m3,,ISO 6976:2016\n"
-                        "hhv,\"2\"\" line\",37.7,MJ/m3,,ISO 6976:2016\n"
-                        "hhv,\"two\nlines\",37.7,MJ/m3,,ISO 6976:2016\n");
+                   HEAD "hhv,\"Works, \"\"June\"\"\",37.7,MJ/m3,,ISO 6976:2016,\n"
+                        "hhv,\"2\"\" line\",37.7,MJ/m3,,ISO 6976:2016,\n"
+                        "hhv,\"two\nlines\",37.7,MJ/m3,,ISO 6976:2016,\n");
 }
 
 static void names_that_a_spreadsheet_would_compute_are_not_computed(void **state)
@@ -108,11 +108,11 @@ static void names_that_a_spreadsheet_would_compute_are_not_computed(void **state
     for (size_t i = 0; i < sizeof NAMES / sizeof *NAMES; i++)
         add_result(r, report_add_gas(r, NAMES[i], "", 1.0), -37.7, 0.0);
     assert_renders(render_csv, r, (render_style){0},
-                   HEAD "hhv,'=1+1,-37.7,MJ/m3,,ISO 6976:2016\n"
-                        "hhv,'+cmd|'/c calc'!A0,-37.7,MJ/m3,,ISO 6976:2016\n"
-                        "hhv,'-1+1,-37.7,MJ/m3,,ISO 6976:2016\n"
-                        "hhv,'@SUM(A1),-37.7,MJ/m3,,ISO 6976:2016\n"
-                        "hhv,'\t=1,-37.7,MJ/m3,,ISO 6976:2016\n");
+                   HEAD "hhv,'=1+1,-37.7,MJ/m3,,ISO 6976:2016,\n"
+                        "hhv,'+cmd|'/c calc'!A0,-37.7,MJ/m3,,ISO 6976:2016,\n"
+                        "hhv,'-1+1,-37.7,MJ/m3,,ISO 6976:2016,\n"
+                        "hhv,'@SUM(A1),-37.7,MJ/m3,,ISO 6976:2016,\n"
+                        "hhv,'\t=1,-37.7,MJ/m3,,ISO 6976:2016,\n");
 }
 
 static void control_characters_and_broken_utf8_become_question_marks(void **state)
@@ -127,7 +127,7 @@ static void control_characters_and_broken_utf8_become_question_marks(void **stat
                               "", 1.0),
                37.7, 0.0);
     assert_renders(render_csv, r, (render_style){0},
-                   HEAD "hhv,a?[2Jb?c?d?e\xC3\xBC,37.7,MJ/m3,,ISO 6976:2016\n");
+                   HEAD "hhv,a?[2Jb?c?d?e\xC3\xBC,37.7,MJ/m3,,ISO 6976:2016,\n");
 }
 
 static void a_value_that_is_not_finite_is_an_empty_cell(void **state)
@@ -137,7 +137,7 @@ static void a_value_that_is_not_finite_is_an_empty_cell(void **state)
     add_result(r, REPORT_NO_GAS, 37.7, 0.1);
     r->results[0].value = nan("");
     r->results[0].uncertainty = HUGE_VAL;
-    assert_renders(render_csv, r, (render_style){0}, HEAD "hhv,,,MJ/m3,,ISO 6976:2016\n");
+    assert_renders(render_csv, r, (render_style){0}, HEAD "hhv,,,MJ/m3,,ISO 6976:2016,\n");
 }
 
 static void add_table(report *r, const char *id)
@@ -174,9 +174,19 @@ static void tables_behind_figures_have_a_row_that_names_them(void **state)
     add_table(r, "log");
     add_table(r, "log-2");
     assert_renders(render_csv, r, (render_style){0},
-                   HEAD "hhv,,37.7,MJ/m3,,ISO 6976:2016\n"
+                   HEAD "hhv,,37.7,MJ/m3,,ISO 6976:2016,\n"
                         "\ntable,log,Log\ntime,hhv [MJ/m3]\n08:00,37.7061\n-5.2e3,\n'-5.2.1,\n"
                         "\ntable,log-2,Log\ntime,hhv [MJ/m3]\n08:00,37.7061\n-5.2e3,\n'-5.2.1,\n");
+}
+
+static void every_figure_has_the_state_beside_it(void **state)
+{
+    report *r = *state;
+    char line[] = "combustion 25 C, metering 0 C";
+
+    report_set_state(r, &(report_state){.present = true, .text = line, .brief = "25/0 saturated 1995"});
+    add_result(r, REPORT_NO_GAS, 37.7, 0.0);
+    assert_renders(render_csv, r, (render_style){0}, HEAD "hhv,,37.7,MJ/m3,,ISO 6976:2016,25/0 saturated 1995\n");
 }
 
 static void an_empty_report_is_the_heading_alone(void **state)
@@ -190,7 +200,7 @@ static void a_locale_with_a_decimal_comma_changes_no_cell(void **state)
 
     add_result(r, REPORT_NO_GAS, 37.7, 0.0131);
     use_german_numbers();
-    assert_renders(render_csv, r, (render_style){0}, HEAD "hhv,,37.7,MJ/m3,0.0131,ISO 6976:2016\n");
+    assert_renders(render_csv, r, (render_style){0}, HEAD "hhv,,37.7,MJ/m3,0.0131,ISO 6976:2016,\n");
     assert_renders(render_brief, r, (render_style){0}, "37.700 MJ/m3\n");
 }
 
@@ -214,7 +224,7 @@ static void a_pure_number_has_no_unit_behind_it(void **state)
     r->results[0].unit[0] = '1';
     r->results[0].unit[1] = '\0';
     assert_renders(render_brief, r, (render_style){0}, "0.612300\n");
-    assert_renders(render_csv, r, (render_style){0}, HEAD "hhv,,0.6123,1,,ISO 6976:2016\n");
+    assert_renders(render_csv, r, (render_style){0}, HEAD "hhv,,0.6123,1,,ISO 6976:2016,\n");
 }
 
 static void a_stream_that_cannot_be_written_is_an_error(void **state)
@@ -239,6 +249,7 @@ int main(void)
         CSV_TEST(a_value_that_is_not_finite_is_an_empty_cell),
         CSV_TEST(tables_alone_have_their_own_headings_and_an_empty_line_between),
         CSV_TEST(tables_behind_figures_have_a_row_that_names_them),
+        CSV_TEST(every_figure_has_the_state_beside_it),
         CSV_TEST(an_empty_report_is_the_heading_alone),
         CSV_TEST(a_locale_with_a_decimal_comma_changes_no_cell),
         CSV_TEST(bare_lines_have_value_and_unit_and_with_several_gases_the_name),

@@ -109,8 +109,8 @@ static void write_file(const char *path, const char *text)
     fclose(file);
 }
 
-static const char CSV[] = "id,gas,value,unit,uncertainty,method\n"
-                          "wobbe-gross,,50.723,MJ/m3,,ISO 6976:2016\n";
+static const char CSV[] = "id,gas,value,unit,uncertainty,method,state\n"
+                          "wobbe-gross,,50.723,MJ/m3,,ISO 6976:2016,\n";
 
 static void texts_are_copied(void **state)
 {
