@@ -129,6 +129,19 @@ check_file() {
     point "the composition file shown in $1 is accepted" "$work/missing"
 }
 
+# The scripts of examples/ are one story: their numbers go up by one, and the second line of each tells its own.
+check_steps() {
+    local step=0 example number
+    for example in "$SRC"/examples/[0-9]*.sh; do
+        step=$((step + 1))
+        example=${example##*/}
+        number=$((10#${example%%-*}))
+        test "$number" -eq "$step" || echo "examples/$example stands where step $step is missing"
+        sed -n 2p "$SRC/examples/$example" | grep -q ", step $number:" || echo "examples/$example does not tell step $number"
+    done >"$work/difference"
+    point 'the scripts of examples/ are numbered as one story' "$work/difference"
+}
+
 # check_links NAME: what a document links to in this tree is there.
 check_links() {
     grep -o '](\([^)]*\))' "$SRC/$1" | sed -e 's/^](//' -e 's/)$//' -e 's/#.*//' | grep -v -e '^$' -e '^[a-z]*:' | while read -r path; do
@@ -280,6 +293,7 @@ else
     done
     check_file README.md
     check_file man/bluecone-composition.5
+    check_steps
     check_links README.md
     check_links DEVELOPERS.md
     check_pictures

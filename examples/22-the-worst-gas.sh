@@ -1,5 +1,5 @@
 #!/bin/sh
-# Marrowfen Glass and Tile Works, step 19: what could come down this pipe?
+# Marrowfen Glass and Tile Works, step 22: what could come down this pipe?
 #
 # A contract does not promise the gas of the certificate but any gas within its ranges and limits. Which is the worst
 # for the furnace, which limits do no work, and which does the seller's window leave open?

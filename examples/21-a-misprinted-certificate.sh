@@ -1,5 +1,5 @@
 #!/bin/sh
-# Marrowfen Glass and Tile Works, step 18: what does this certificate mean?
+# Marrowfen Glass and Tile Works, step 21: what does this certificate mean?
 #
 # A page is headed MJ/Nm3 and names no temperatures. The composition tells what its figures would be at every state of
 # the trade; one of them explains all that is printed, and it is not the normal cubic metre.

@@ -1,5 +1,5 @@
 #!/bin/sh
-# Marrowfen Glass and Tile Works, step 16: may we sign for this gas?
+# Marrowfen Glass and Tile Works, step 19: may we sign for this gas?
 #
 # The supply contract limits the gas at 25/0 in kWh, its relative density at 15/15. Each limit is judged at its own
 # state, with the uncertainty of the certificate: what is inside by less than that is not proven. Then what the gas

@@ -1,5 +1,5 @@
 #!/bin/sh
-# Marrowfen Glass and Tile Works, step 21: what can the contract do to the burners?
+# Marrowfen Glass and Tile Works, step 24: what can the contract do to the burners?
 #
 # Step 16 asked whether the burners take the gas of one offer. But the seller may send any gas of the contract. Over
 # all of them: the least and the most heat, air and flame of each burner as it is set today, proven where it says

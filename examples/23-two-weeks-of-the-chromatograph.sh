@@ -1,5 +1,5 @@
 #!/bin/sh
-# Marrowfen Glass and Tile Works, step 20: did the supplier keep the contract?
+# Marrowfen Glass and Tile Works, step 23: did the supplier keep the contract?
 #
 # The chromatograph at the gate writes a row an hour. In two weeks of March 2026 hydrogen from a trial of the grid came
 # down the pipe; the analyser was calibrated, failed once, and stood still for a morning. How long and for how much heat

@@ -1,5 +1,5 @@
 #!/bin/sh
-# Marrowfen Glass and Tile Works, step 22: the log on several machines, or on all cores of one.
+# Marrowfen Glass and Tile Works, step 26: the log on several machines, or on all cores of one.
 #
 # A works has one chromatograph; a grid has thousands, and years of rows of each. A row of a log knows nothing of the
 # others, so that any tool which deals out lines can have the work done elsewhere. Here it is GNU parallel over a log

@@ -1,5 +1,5 @@
 #!/bin/sh
-# Marrowfen Glass and Tile Works, step 17: how wrong can one be?
+# Marrowfen Glass and Tile Works, step 20: how wrong can one be?
 #
 # The furnace's builder asks for the British limits, in MJ/m3 at 15/15. Which confusion of state, basis or analysis
 # would move the verdict on the present supply, and by how much?

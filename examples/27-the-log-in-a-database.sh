@@ -1,5 +1,5 @@
 #!/bin/sh
-# Marrowfen Glass and Tile Works, step 22: the analyses live in a database.
+# Marrowfen Glass and Tile Works, step 27: the analyses live in a database.
 #
 # The works keep the rows of the chromatograph in SQLite, beside the flow. With the module of bluecone the database itself
 # knows what a row is worth: daily means, weighted with the gas that flowed, and the hours that broke the contract,
@@ -45,4 +45,4 @@ SELECT time || ': ' || methane || ' % methane, components add up to ' || round(m
     + "n-pentane" + "n-hexane" + nitrogen + "carbon dioxide" + hydrogen + oxygen, 2) || ' %' FROM analyses WHERE wobbe IS NULL;
 END
 echo
-echo 'The five hours are those of the claim in step 20: one source of figures, asked in two places.'
+echo 'The five hours are those of the claim in step 23: one source of figures, asked in two places.'

@@ -1,5 +1,5 @@
 #!/bin/sh
-# Marrowfen Glass and Tile Works, step 23: what the accountant and the shift want of the same log.
+# Marrowfen Glass and Tile Works, step 25: what the accountant and the shift want of the same log.
 #
 # The meter station counts cubic metres, the bill counts kilowatt hours, the shift looks at the Wobbe index. `stream` puts
 # the figures behind every row of the log; what is strange about a row stands beside it, and nothing falls out.
