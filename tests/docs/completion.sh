@@ -38,7 +38,9 @@ holds() {
     done
 }
 
-holds 'bluecone ' blend burn get list sheet switch verify --help --version
+holds 'bluecone ' blend burn get list sheet switch verify help --help --version
+expect 'bluecone help sw' 'switch'
+expect 'bluecone help switch ' ''
 expect 'bluecone sh' 'sheet'
 expect 'bluecone sw' 'switch'
 expect 'bluecone get wobbe-g' 'wobbe-gross wobbe-gross-ideal'
