@@ -1,5 +1,7 @@
 /* SPDX-License-Identifier: MIT */
-/* bluecone/quantity.h - every figure of a gas by its id, with value, unit and standard uncertainty. */
+/* bluecone/quantity.h - every figure of a gas by its id, with value, unit and standard uncertainty.
+ *
+ * bc_subject, bc_quantity and bc_figure are described in bluecone/subject.h. */
 #ifndef BLUECONE_QUANTITY_H
 #define BLUECONE_QUANTITY_H
 
