@@ -120,9 +120,20 @@ static void add_bound(report *r, size_t table, bool there, double bound)
         report_add_text(r, table, "-");
 }
 
+/* A limit, the unit of its figures and the state they are at, which may be another one than that of the report. */
+static void add_limit(const bc_contract *c, report *r, size_t table, const bc_limit *limit)
+{
+    char state[64];
+
+    contract_state_text(c, limit, state, sizeof state);
+    report_add_text(r, table, limit->id);
+    report_add_text(r, table, unit_of(limit));
+    report_add_text(r, table, state);
+}
+
 static void add_outside(const log_case *l, report *r)
 {
-    static const column COLUMNS[] = {{"limit", "limit", ""}, {"unit", "unit", ""}, {"at", "at", ""}, {"min", "min", ""}, {"max", "max", ""},
+    static const column COLUMNS[] = {{"limit", "limit", ""}, {"unit", "unit", ""}, {"state", "at", ""}, {"min", "min", ""}, {"max", "max", ""},
                                      {"rows", "rows", ""}, {"hours", "hours", "h"}, {"share", "share", "%"}, {"energy", "heat", "GJ"}};
     const bc_contract *c = l->c->contract;
     const size_t table = open_table(r, "outside", "Outside each limit", COLUMNS, BC_COUNT(COLUMNS) - (l->header.has_flow ? 0 : 1));
@@ -131,13 +142,8 @@ static void add_outside(const log_case *l, report *r)
         const bc_limit *limit = &c->limits[i];
         bc_log_excursions e;
 
-        char state[64];
-
         bc_log_outside(l->log, i, &e);
-        contract_state_text(c, limit, state, sizeof state);
-        report_add_text(r, table, limit->id);
-        report_add_text(r, table, unit_of(limit));
-        report_add_text(r, table, state);
+        add_limit(c, r, table, limit);
         add_bound(r, table, limit->has_min, limit->min);
         add_bound(r, table, limit->has_max, limit->max);
         report_add_number(r, table, (double)e.broken, 0);
@@ -182,12 +188,10 @@ static void add_excursions(const log_case *l, report *r)
     }
 }
 
-static void add_distribution_row(report *r, size_t table, const bc_limit *limit, const bc_log_distribution *d)
+static void add_distribution_row(report *r, size_t table, const bc_log_distribution *d)
 {
     const double values[] = {d->min, d->p5, d->median, d->mean, d->p95, d->max};
 
-    report_add_text(r, table, limit->id);
-    report_add_text(r, table, unit_of(limit));
     for (size_t i = 0; i < BC_COUNT(values); i++)
         report_add_number(r, table, values[i], -1);
     if (d->has_energy_mean)
@@ -196,7 +200,7 @@ static void add_distribution_row(report *r, size_t table, const bc_limit *limit,
 
 static bc_status add_distributions(const log_case *l, report *r, const bc_log_cover *cover, bc_error *err)
 {
-    static const column COLUMNS[] = {{"limit", "limit", ""}, {"unit", "unit", ""}, {"min", "min", ""}, {"p5", "5 %", ""},
+    static const column COLUMNS[] = {{"limit", "limit", ""}, {"unit", "unit", ""}, {"state", "at", ""}, {"min", "min", ""}, {"p5", "5 %", ""},
                                      {"median", "median", ""}, {"mean", "mean", ""}, {"p95", "95 %", ""}, {"max", "max", ""},
                                      {"energy-mean", "mean by heat", ""}};
     const bc_contract *c = l->c->contract;
@@ -214,7 +218,8 @@ static bc_status add_distributions(const log_case *l, report *r, const bc_log_co
             d.has_energy_mean = true;
             d.energy_mean = d.mean;
         }
-        add_distribution_row(r, table, &c->limits[i], &d);
+        add_limit(c, r, table, &c->limits[i]);
+        add_distribution_row(r, table, &d);
     }
     return BC_OK;
 }

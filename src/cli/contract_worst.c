@@ -97,7 +97,7 @@ void worst_tables(worst_case *w, report *r)
     w->figures = report_add_table(r, "worst", "What a gas can be that the contract allows");
     report_add_column(r, w->figures, "figure", "figure", "");
     report_add_column(r, w->figures, "unit", "unit", "");
-    report_add_column(r, w->figures, "at", "at", "");
+    report_add_column(r, w->figures, "state", "at", "");
     report_add_column(r, w->figures, "min", "min", "");
     report_add_column(r, w->figures, "max", "max", "");
     report_add_column(r, w->figures, "proof", "proof", "");
