@@ -216,6 +216,8 @@ static bc_status check_count(const command *c, const arguments *a, bc_error *err
         return bc_fail(err, BC_ERR_USAGE, "'%s' is one argument too many: bluecone %s %s", a->argument[c->most], c->word, c->usage);
     if (a->value[OPTION_json] && a->value[OPTION_csv])
         return bc_fail(err, BC_ERR_USAGE, "--json and --csv exclude each other; keep one of them");
+    if (a->value[OPTION_bare] && (a->value[OPTION_json] || a->value[OPTION_csv]))
+        return bc_fail(err, BC_ERR_USAGE, "--bare and --%s exclude each other; keep one of them", a->value[OPTION_json] ? "json" : "csv");
     return check_output(c, a, err);
 }
 

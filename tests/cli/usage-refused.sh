@@ -21,6 +21,10 @@ bluecone get hhv g20 --unit
 echo "exit $?" >&2
 bluecone get --json --csv hhv g20
 echo "exit $?" >&2
+bluecone get hhv g20 --csv --bare
+echo "exit $?" >&2
+bluecone list gases --bare --json
+echo "exit $?" >&2
 bluecone get --bare=yes hhv g20
 echo "exit $?" >&2
 bluecone get --at 15/15 --at 25/0 hhv g20
