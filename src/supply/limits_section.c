@@ -71,6 +71,19 @@ static bc_status take_bounds(const limits_reader *r, const char *section, bc_lim
     return status == BC_OK ? check_bounds(r, limit) : status;
 }
 
+/* 500 without a unit is 500 mol %, where ppm or mg/m3 was meant: a limit that every gas keeps. */
+static bc_status check_share(const limits_reader *r, const bc_limit *limit)
+{
+    const double least = bc_unit_to_si(&limit->shown, limit->has_min ? limit->min : limit->max);
+    const double most = bc_unit_to_si(&limit->shown, limit->has_max ? limit->max : limit->min);
+    const bool is_share = limit->kind == BC_LIMIT_FRACTION || limit->kind == BC_LIMIT_MASS_FRACTION || limit->kind == BC_LIMIT_VOLUME_FRACTION;
+
+    if (is_share && !(least >= 0.0 && most <= 1.0))
+        return bc_fail_at(r->err, BC_ERR_INPUT, r->path, limit->line, "a share is from 0 to 100 %%: no gas has %.6g %s of %s; mend the number, or write its unit, as ppm",
+                          least >= 0.0 ? most / bc_unit_to_si(&limit->shown, 1.0) : least / bc_unit_to_si(&limit->shown, 1.0), limit->unit, limit->id);
+    return BC_OK;
+}
+
 /* The state of a limit: the contract's, with its own `at`, `saturated` and `edition`. */
 static bc_status take_state(limits_reader *r, const char *section, bc_state *state)
 {
@@ -104,7 +117,7 @@ static bc_status fill_words(limits_reader *r, const char *section, const bc_stat
     if (limit_take_unit(unit ? unit->value : "", state, limit, r->err) != BC_OK)
         return limits_blame(r, unit ? unit->line : limit->line);
     limit->unit_assumed = !unit && strcmp(limit->unit, "1") != 0;
-    return BC_OK;
+    return check_share(r, limit);
 }
 
 static bc_status fill_limit(limits_reader *r, const char *section, bc_limit *limit)
@@ -199,7 +212,7 @@ static bc_status fill_range(const limits_reader *r, const bc_ini_entry *e, bc_ra
         return limits_refuse(r, e, "a range is one of mole fractions; write mol %, ppm or 1 as its unit");
     range->min = bounds.has_min ? bc_unit_to_si(&bounds.shown, bounds.min) : 0.0;
     range->max = bounds.has_max ? bc_unit_to_si(&bounds.shown, bounds.max) : 1.0;
-    return BC_OK;
+    return check_share(r, &bounds);
 }
 
 /* A window of the composition, mol % unless a unit is written. */

@@ -14,5 +14,11 @@ sed -n '/^Limits/,/^$/p' out.txt
 # words of the trade are led to the id they stand for, gross and net; what no composition tells is said to be none
 for word in GCV NCV Hu Hs PCI CV 'specific gravity' 'Wobbe index' 'water dew point' methne; do try "[limit $word]\nmin = 3\n"; done
 bluecone get NCV g20; echo $?
+# a share that cannot be is a unit that was forgotten
+try '[limit hydrogen sulphide]\nmax = 500\n'
+try '[limit hydrogen]\nmin = -1\nmax = 5\n'
+try '[limit hydrogen]\nmax = 120\nbasis = mass\n'
+try '[limit inerts]\nmax = 5\n[range methane]\nmin = 820\n'
+try '[limit hydrogen sulphide]\nmax = 500\nunit = ppm\n'
 try ''
 try '; nothing\n'
