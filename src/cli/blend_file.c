@@ -103,7 +103,7 @@ bc_status blend_write_file(const blend_case *c, const double share[], const char
 {
     char *bytes = NULL;
     size_t count = 0;
-    FILE *f = open_memstream(&bytes, &count);
+    FILE *f = bc_memory_stream_open(&bytes, &count);
     bc_spread *spread = malloc(sizeof *spread);
     bc_status status = BC_OK;
 
@@ -117,7 +117,7 @@ bc_status blend_write_file(const blend_case *c, const double share[], const char
         put_uncertainty(f, spread);
         put_supply(f, c, share);
     }
-    const bool kept = f && bc_memory_stream_close(f, &bytes);
+    const bool kept = f && bc_memory_stream_close(f);
 
     if (!kept || !spread)
         status = bc_fail(err, BC_ERR_MEMORY, "not enough memory for the blend");

@@ -111,12 +111,12 @@ static _Noreturn void work_apart(apart_work *work, void *data, int to)
     memset(&l, 0, sizeof l);
     (void)signal(SIGALRM, SIG_DFL);
     (void)alarm(SECONDS_MAX);
-    FILE *memory = open_memstream(&bytes, &count);
+    FILE *memory = bc_memory_stream_open(&bytes, &count);
 
     if (memory == NULL || !listen_to_errors(errors))
         _exit(FAILED_CODE);
     l.status = work(data, memory, &l.err);
-    if (!bc_memory_stream_close(memory, &bytes) || heard_of_memory(errors[0]))
+    if (!bc_memory_stream_close(memory) || heard_of_memory(errors[0]))
         _exit(FAILED_CODE);
     l.count = count;
     _exit(send_all(to, &l, sizeof l) && send_all(to, bytes, count) ? 0 : FAILED_CODE);

@@ -68,10 +68,12 @@ static char *row_notes(const section *of, size_t row)
 {
     char *text = NULL;
     size_t size = 0;
-    FILE *out = open_memstream(&text, &size);
+    FILE *out = bc_memory_stream_open(&text, &size);
 
     if (out == NULL)
         return NULL;
+    const char *between = "";
+
     for (size_t gas = 0; gas < of->r->gas_count; gas++) {
         const size_t i = section_find(of, row, gas);
         char letter[TEXT_LETTERS_MAX];
@@ -79,9 +81,10 @@ static char *row_notes(const section *of, size_t row)
         if (i == SECTION_NONE || of->r->results[i].note == NULL)
             continue;
         text_letter(of->r, gas, letter);
-        fprintf(out, "%s%s: %s", ftell(out) > 0 ? "; " : "", letter, of->r->results[i].note);
+        fprintf(out, "%s%s: %s", between, letter, of->r->results[i].note);
+        between = "; ";
     }
-    if (bc_memory_stream_close(out, &text))
+    if (bc_memory_stream_close(out))
         return text;
     free(text);
     return NULL;

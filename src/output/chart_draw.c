@@ -64,7 +64,7 @@ static cairo_status_t draw_svg(chart_canvas *canvas, const chart_plan *plan, FIL
 {
     char *bytes = NULL;
     size_t count = 0;
-    FILE *memory = open_memstream(&bytes, &count);
+    FILE *memory = bc_memory_stream_open(&bytes, &count);
 
     if (memory == NULL)
         return CAIRO_STATUS_NO_MEMORY;
@@ -76,7 +76,7 @@ static cairo_status_t draw_svg(chart_canvas *canvas, const chart_plan *plan, FIL
     chart_draw_page(canvas, plan, 0);
 
     cairo_status_t status = close_both(canvas->cr, surface);
-    if (!bc_memory_stream_close(memory, &bytes))
+    if (!bc_memory_stream_close(memory))
         status = CAIRO_STATUS_NO_MEMORY;
     if (status == CAIRO_STATUS_SUCCESS && !chart_write_svg(plan->r, bytes, out))
         status = CAIRO_STATUS_NO_MEMORY;

@@ -71,13 +71,13 @@ static char *titles_of(const report *part)
 {
     char *text = NULL;
     size_t size = 0;
-    FILE *out = open_memstream(&text, &size);
+    FILE *out = bc_memory_stream_open(&text, &size);
 
     if (out == NULL)
         return NULL;
     for (size_t i = 0; i < part->chart_count; i++)
         fprintf(out, "%s%s", i > 0 ? "; " : "", part->charts[i].title);
-    if (bc_memory_stream_close(out, &text))
+    if (bc_memory_stream_close(out))
         return text;
     free(text);
     return NULL;
@@ -88,7 +88,7 @@ static char *draw(report *part, bc_error *err)
 {
     char *svg = NULL;
     size_t size = 0;
-    FILE *out = open_memstream(&svg, &size);
+    FILE *out = bc_memory_stream_open(&svg, &size);
     bc_status status = BC_ERR_MEMORY;
 
     part->title = titles_of(part);
@@ -96,7 +96,7 @@ static char *draw(report *part, bc_error *err)
         status = chart_inset(part, out, err);
     else
         (void)bc_fail(err, BC_ERR_MEMORY, "no memory for the charts");
-    if (out != NULL && !bc_memory_stream_close(out, &svg) && status == BC_OK)
+    if (out != NULL && !bc_memory_stream_close(out) && status == BC_OK)
         status = bc_fail(err, BC_ERR_MEMORY, "no memory for the charts");
     free(part->title);
     if (status == BC_OK)

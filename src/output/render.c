@@ -64,7 +64,7 @@ bc_status render_to(const report *r, render_form form, const render_style *style
 {
     char *bytes = NULL;
     size_t count = 0;
-    FILE *memory = open_memstream(&bytes, &count);
+    FILE *memory = bc_memory_stream_open(&bytes, &count);
 
     if (memory == NULL)
         return bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
@@ -73,7 +73,7 @@ bc_status render_to(const report *r, render_form form, const render_style *style
     bc_status status = is_drawn_by_others(r, form) ? apart(render_order, &o, memory, err) : render_order(&o, memory, err);
 
     /* The stream is memory: nothing else can have run out. */
-    if (!bc_memory_stream_close(memory, &bytes))
+    if (!bc_memory_stream_close(memory))
         status = bc_fail(err, BC_ERR_MEMORY, "no memory for the report");
     if (status == BC_OK)
         status = output_write(path, bytes, count, err);

@@ -8,11 +8,11 @@
 #include <stdio.h>
 #include <stdlib.h>
 
-/* Closes a stream of open_memstream(), which gives up its text only then; NULL when memory was
+/* Closes a stream into memory, which gives up its text only then; NULL when memory was
  * short. */
 static char *finish(FILE *out, char **text)
 {
-    if (bc_memory_stream_close(out, text))
+    if (bc_memory_stream_close(out))
         return *text;
     free(*text);
     return NULL;
@@ -38,7 +38,7 @@ char *section_label(const section *s, size_t result)
     const report_result *labelled = &s->r->results[result];
     char *text = NULL;
     size_t size = 0;
-    FILE *out = open_memstream(&text, &size);
+    FILE *out = bc_memory_stream_open(&text, &size);
 
     if (out == NULL)
         return NULL;
@@ -101,7 +101,7 @@ char *section_note(const section *s, size_t number)
 {
     char *text = NULL;
     size_t size = 0;
-    FILE *out = open_memstream(&text, &size);
+    FILE *out = bc_memory_stream_open(&text, &size);
 
     if (out == NULL)
         return NULL;
