@@ -41,7 +41,7 @@ json_t *part_bins_to(const tally_bins *b, bool *failed);
 json_t *part_stretch_to(const tally_stretch *s, bool *failed);
 json_t *part_beyond_to(const tally_beyond *b, bool *failed);
 
-/* False: what is there cannot be. Without memory, too: a reader has little else to say. */
+/* False: what is there cannot be. Without memory, too, and then errno is ENOMEM. */
 bool part_plan_from(const json_t *from, tally_plan *plan);
 bool part_group_from(const json_t *from, size_t figures, tally_group *g);
 bool part_groups_from(const json_t *from, int64_t key_max, size_t most, tally_groups *s);

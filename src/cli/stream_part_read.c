@@ -7,12 +7,31 @@
 #include "cli/json_memory.h"
 #include "cli/stream_part_internal.h"
 
+#include <errno.h>
 #include <stdlib.h>
 #include <string.h>
 
+static const char REMEDY[] = "write it anew with --summary-part";
+
+/* What stands behind the plan; the tally is kept or closed. */
+static bc_status fill(const json_t *o, const char *path, tally *t, tally **out, bc_error *err)
+{
+    errno = 0; /* which a call that finds no memory sets, and nothing else here does */
+    const char *damaged = part_fill(o, t);
+    const bool is_short = errno == ENOMEM;
+
+    if (!damaged) {
+        *out = t;
+        return BC_OK;
+    }
+    tally_close(t);
+    if (is_short)
+        return bc_fail(err, BC_ERR_MEMORY, "not enough memory to read the summary of a part");
+    return bc_fail_at(err, BC_ERR_INPUT, path, 0, "its \"%s\" is damaged; %s", damaged, REMEDY);
+}
+
 static bc_status take(const json_t *o, const char *path, tally **out, bc_error *err)
 {
-    static const char REMEDY[] = "write it anew with --summary-part";
     const json_t *part = json_object_get(o, "part");
     const char *tool = json_string_value(json_object_get(o, "tool"));
     tally_plan *plan = NULL;
@@ -34,14 +53,7 @@ static bc_status take(const json_t *o, const char *path, tally **out, bc_error *
     free(plan);
     if (status != BC_OK)
         return status == BC_ERR_USAGE ? bc_fail_at(err, BC_ERR_INPUT, path, 0, "its \"plan\" is damaged; %s", REMEDY) : status;
-    const char *damaged = part_fill(o, t);
-
-    if (damaged) {
-        tally_close(t);
-        return bc_fail_at(err, BC_ERR_INPUT, path, 0, "its \"%s\" is damaged; %s", damaged, REMEDY);
-    }
-    *out = t;
-    return BC_OK;
+    return fill(o, path, t, out, err);
 }
 
 bc_status stream_part_read(const char *path, tally **t, bc_error *err)

@@ -139,7 +139,8 @@ static void without_sulfur_there_is_no_acid_dew_point(void **state)
     assert_refused(bc_acid_dew_point(0.1, 5e-9, P0_PA, &dew, &err), BC_ERR_RANGE, &err);
     assert_refused(bc_acid_dew_point(0.1, 1.1e-8, 50e3, &dew, &err), BC_ERR_RANGE, &err);
     assert_refused(bc_acid_dew_point(0.1, -1e-6, P0_PA, &dew, &err), BC_ERR_RANGE, &err);
-    assert_refused(bc_acid_dew_point(0.1, 1e-6, 0.0, &dew, &err), BC_ERR_RANGE, &err);
+    assert_int_equal(bc_acid_dew_point(0.1, 1e-6, 0.0, &dew, &err), BC_ERR_RANGE);
+    assert_non_null(strstr(err.message, "absolute pressure")); /* and not for want of SO3 */
     assert_refused(bc_acid_dew_point_of(&flue.wet, 1.5, P0_PA, &dew, &err), BC_ERR_RANGE, &err);
 }
 

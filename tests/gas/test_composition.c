@@ -651,6 +651,11 @@ static void a_printed_figure_is_kept_whole_or_refused(void **state)
         read_text(text, &c);
         assert_string_equal(c.printed[0].text, figure);
     }
+    (void)snprintf(text, sizeof text, "[components]\nmethane = 100\n[printed]\nh%0*d = 41.2 MJ/m3\n", BC_COMPONENT_MAX - 2, 0);
+    read_text(text, &c);
+    assert_int_equal(strlen(c.printed[0].id), BC_COMPONENT_MAX - 1);
+    (void)snprintf(text, sizeof text, "[components]\nmethane = 100\n[printed]\nh%0*d = 41.2 MJ/m3\n", BC_COMPONENT_MAX - 1, 0);
+    assert_text_refused(text, 4, "shorten it");
 }
 
 static void the_ends_that_a_measuring_state_may_have_are_inside(void **state)

@@ -131,6 +131,14 @@ static void other_states_and_heavier_gases_are_refused(void **state)
     assert_within(d.icf, 7.25, 0.0);
 }
 
+/* Methane and propane are their own mixture, and half and half are rounded by nothing. */
+static void half_of_methane_is_methane_enough(void **state)
+{
+    (void)state;
+    assert_non_null(strstr(dutton_of("methane=50,propane=50").outside, "Wobbe"));
+    assert_non_null(strstr(dutton_of("methane=49.9,propane=50.1").outside, "half methane"));
+}
+
 static void the_limits_of_great_britain_name_their_text(void **state)
 {
     (void)state;
@@ -316,6 +324,7 @@ int main(void)
         cmocka_unit_test(any_share_of_nitrogen_is_found_again),
         cmocka_unit_test(a_mixture_that_needs_no_nitrogen_says_so),
         cmocka_unit_test(other_states_and_heavier_gases_are_refused),
+        cmocka_unit_test(half_of_methane_is_methane_enough),
         cmocka_unit_test(the_limits_of_great_britain_name_their_text),
         cmocka_unit_test(mcp_follows_the_burning_velocity_of_hydrogen_in_methane),
         cmocka_unit_test(inert_gas_damps_the_potential),
