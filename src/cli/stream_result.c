@@ -185,17 +185,14 @@ static void leave_open(const stream_plan *p, const stream_reading *r, const doub
     }
 }
 
-static bc_status judge(const stream_plan *p, stream_batch *b, const stream_reading *r, const bc_gas *gas, stream_mark *mark, stream_cells *cells,
-                       bc_error *err)
+static bc_status judge(const stream_plan *p, stream_batch *b, const stream_reading *r, const bc_gas *gas, stream_mark *mark, bc_error *err)
 {
     double *values = b->limits + b->count * stream_limits(p);
     const bc_status status = row_judge(p->contract, gas, values, &mark->known, &mark->broken, err);
 
-    if (status != BC_OK)
-        return status;
-    leave_open(p, r, values, mark);
-    add_verdict(p, mark, cells->verdict);
-    return BC_OK;
+    if (status == BC_OK)
+        leave_open(p, r, values, mark);
+    return status;
 }
 
 static bool make_gas(const stream_plan *p, const stream_reading *r, bc_gas *gas, bc_subject *subject, bc_error *err)
@@ -232,11 +229,13 @@ void stream_evaluate(const stream_plan *p, stream_batch *b, stream_reading *r, s
 
     memset(cells->length, 0, p->figure_count);
     cells->verdict[0] = '\0';
-    mark->good = make_gas(p, r, &gas, &subject, &err) && (!p->contract || judge(p, b, r, &gas, mark, cells, &err) == BC_OK);
+    mark->good = make_gas(p, r, &gas, &subject, &err) && (!p->contract || judge(p, b, r, &gas, mark, &err) == BC_OK);
     if (!mark->good) {
         (void)snprintf(r->reason, sizeof r->reason, "%.*s", STREAM_REASON_MAX - 1, err.message);
         return;
     }
+    if (p->contract)
+        add_verdict(p, mark, cells->verdict);
     if (p->keeps && r->flow >= 0.0)
         take_power(p, r->flow, &gas, mark);
     if (log_sum_is_off(r->sum))

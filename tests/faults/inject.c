@@ -115,6 +115,14 @@ static bool is_hit(fault kind, bool onwards)
 #define NLOPT_MOST 4096
 #define SELECTION_BYTES 80 /* of the struct that libxlsxwriter 1.1 makes for the cursor of a frozen pane */
 
+/* Where one call fails by itself, fontconfig passes over a piece of its configuration: the same picture in another font. */
+static bool is_of_fonts(const void *caller)
+{
+    Dl_info info;
+
+    return dladdr(caller, &info) != 0 && info.dli_fname && strstr(info.dli_fname, "libfontconfig") != NULL;
+}
+
 /* iniparser 4.1 does not look at what its first tables got: the product asks for that room beforehand, which helps
  * against a real want of memory, but not against one call that fails by itself. libxlsxwriter leaves out the cursor of a
  * pane that it has no memory for, and says nothing: no figure is lost. The loader ends the process when NLopt's data of a
@@ -131,7 +139,7 @@ static bool is_exempt(const void *caller, size_t size)
 
 static bool no_memory(const void *caller, size_t size)
 {
-    if ((asked != FAULT_malloc && asked != FAULT_malloc_once) || is_exempt(caller, size))
+    if ((asked != FAULT_malloc && asked != FAULT_malloc_once) || is_exempt(caller, size) || (asked == FAULT_malloc_once && is_of_fonts(caller)))
         return false;
     return is_hit(FAULT_malloc, true) || is_hit(FAULT_malloc_once, false);
 }
@@ -190,7 +198,7 @@ ssize_t read(int fd, void *to, size_t size)
 {
     REAL(ssize_t (*call)(int, void *, size_t), read);
 
-    if (is_hit(FAULT_read_eintr, false) || is_hit(FAULT_read_eio, true))
+    if ((!is_of_fonts(__builtin_return_address(0)) && is_hit(FAULT_read_eintr, false)) || is_hit(FAULT_read_eio, true))
         return -1;
     if (is_hit(FAULT_read_end, true))
         return 0;
