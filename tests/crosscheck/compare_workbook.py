@@ -21,26 +21,17 @@ def rows_of(sheet):
     return [[cell.value for cell in row] for row in sheet.iter_rows()]
 
 
-def letter(index):
-    text = ""
-    index += 1
-    while index > 0:
-        index, rest = divmod(index - 1, 26)
-        text = chr(ord("A") + rest) + text
-    return text
-
-
-def columns_of(head, gas):
-    """Where the value and the uncertainty of a gas stand, under heads as 'Value' or 'B: name'."""
-    if gas is None:
+def columns_of(head, name):
+    """Where the value and the uncertainty of a gas stand, under heads as 'Value', 'B: name' or 'new: name'."""
+    if name is None:
         return head.index("Value"), head.index("u (k = 1)")
     for i, text in enumerate(head):
-        if text and text.startswith(letter(gas) + ": "):
+        if text and text.partition(": ")[2] == name:
             return i, i + 1
     return None
 
 
-def figures_of(book):
+def figures_of(book, names):
     """All figures: (id, gas or None, unit, value, uncertainty)."""
     found = []
     for sheet in book:
@@ -51,9 +42,8 @@ def figures_of(book):
                 continue
             if head is None or row[0] is None:
                 continue
-            gases = [None] if "Value" in head else range(len(head))
-            for gas in gases:
-                at = columns_of(head, gas)
+            for gas in [None] if "Value" in head else range(len(names)):
+                at = columns_of(head, None if gas is None else names[gas])
                 if at and row[at[0]] is not None:
                     found.append((row[head.index("Id")], gas, row[head.index("Unit")], row[at[0]], row[at[1]]))
     return found
@@ -61,7 +51,7 @@ def figures_of(book):
 
 def check_results(book, report):
     names = [gas["name"] for gas in report["gases"]]
-    figures = figures_of(book)
+    figures = figures_of(book, names)
     bad = 0
     for result in report["results"]:
         gas = names.index(result["gas"]) if len(names) > 1 and result["gas"] is not None else None
@@ -83,7 +73,7 @@ def is_table(rows, table):
     body = rows[2 if units else 1:]
     if not rows or rows[0][:len(heads)] != heads or len(body) != len(table["rows"]):
         return False
-    return all(close(cell, want) if isinstance(want, (int, float)) else (cell or "") == (want or "")
+    return all(close(cell, want) if isinstance(want, (int, float)) else cell in (None, "", "-") if want is None else (cell or "") == want
                for got, row in zip(body, table["rows"]) for cell, want in zip(got, row))
 
 
