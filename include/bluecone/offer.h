@@ -38,13 +38,15 @@ typedef struct {
  *
  *   price, currency   out: untouched on failure
  *
- * BC_ERR_USAGE: no such form, or a unit that is none of energy, mass, volume, amount; BC_ERR_INPUT: no number. */
+ * BC_ERR_USAGE: no such form, or a unit that is none of energy, mass, volume, amount; BC_ERR_INPUT: no number;
+ * BC_ERR_RANGE: beyond 1e60 of the SI unit. */
 BC_API BC_MUST_USE bc_status bc_price_parse(const char *text, bc_per_amount *price, char currency[BC_CURRENCY_MAX], bc_error *err);
 
 /* Reads an intensity of CO2: "12 kg/MWh", "3.1 g/MJ net", "0.4 kg/m3". May be negative. Errors as above. */
 BC_API BC_MUST_USE bc_status bc_intensity_parse(const char *text, bc_per_amount *intensity, bc_error *err);
 
-/* Reads a flow of gas: "300 m3/h", "2.5 MW", "120 kg/h". Errors as above; BC_ERR_RANGE: not above zero. */
+/* Reads a flow of gas: "300 m3/h", "2.5 MW", "120 kg/h". Errors as above; BC_ERR_RANGE: not
+ * above zero, that is from 1e-60 to 1e60 of the SI unit. */
 BC_API BC_MUST_USE bc_status bc_flow_parse(const char *text, bc_per_amount *flow, bc_error *err);
 
 #ifdef __cplusplus

@@ -11,6 +11,13 @@
 #include <stdlib.h>
 #include <string.h>
 
+/* What all burners of the world take is below 1e7 mol/s and 1e13 W; beyond these ends products overflow or vanish. */
+#define RATE_MIN_MOL_PER_S 1e-9
+#define RATE_MAX_MOL_PER_S 1e9
+#define DUTY_MIN_W 1e-3
+#define DUTY_MAX_W 1e15
+#define READING_MAX 1e6 /* ppm, mg/m3 or mg/MJ: a flue gas that is nothing else */
+
 /* Puts the option in front of a cause that a deeper function gave. */
 static bc_status blame(const char *option, bc_status status, bc_error *err)
 {
@@ -268,6 +275,8 @@ static bc_status fuel_rate(const char *text, const bc_subject *fuel, double *mol
 
         if (bc_unit_parse(LIKE[i], &like, NULL) == BC_OK && bc_unit_matches(&unit, &like)) {
             *mol_per_s = bc_unit_to_si(&unit, value) / per_mol[i];
+            if (!(*mol_per_s >= RATE_MIN_MOL_PER_S && *mol_per_s <= RATE_MAX_MOL_PER_S))
+                return bc_fail(err, BC_ERR_USAGE, "'%.40s' is %.3g mol/s: no burner takes that; correct the number", text, *mol_per_s);
             return BC_OK;
         }
     }
@@ -295,7 +304,11 @@ static bc_status take_rate(const arguments *a, const bc_subject *fuel, burn_setu
     status = bc_measure_parse(duty, "W", NULL, &s->duty_w, err);
     if (status != BC_OK)
         return blame("duty", status, err);
-    return s->duty_w > 0.0 ? BC_OK : bc_fail(err, BC_ERR_USAGE, "--duty: the useful heat is above zero");
+    if (!(s->duty_w > 0.0))
+        return bc_fail(err, BC_ERR_USAGE, "--duty: the useful heat is above zero");
+    if (s->duty_w < DUTY_MIN_W || s->duty_w > DUTY_MAX_W)
+        return bc_fail(err, BC_ERR_USAGE, "--duty: '%.40s' is %.3g W: no burner gives that; correct the number", duty, s->duty_w);
+    return BC_OK;
 }
 
 static bc_status take_reading_unit(const char *text, const char *unit, reading *r, bc_error *err)
@@ -340,8 +353,8 @@ static bc_status take_reading(const char *text, reading *r, bc_error *err)
 
         if (status != BC_OK)
             return blame("reading", status, err);
-        if (r->value < 0.0)
-            return bc_fail(err, BC_ERR_USAGE, "--reading %.40s: a reading is not negative", text);
+        if (r->value < 0.0 || r->value > READING_MAX)
+            return bc_fail(err, BC_ERR_USAGE, "--reading %.40s: a reading is neither negative nor above 1e6", text);
         return take_reading_unit(text, rest, r, err);
     }
     return bc_fail(err, BC_ERR_USAGE, "--reading: '%s' is none of nox, co, so2", word);

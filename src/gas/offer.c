@@ -7,7 +7,10 @@
 #include "base/text.h"
 #include "bluecone/number.h"
 
+#include <math.h>
 #include <string.h>
+
+#define MOST_SI 1e60 /* in SI units: products of a price and a flow stay finite, and far beyond any supply */
 
 /* Which amount of gas a unit counts: the one dimension with power 1 while all others are zero but `time`. */
 static bool amount_of(const bc_unit *unit, int time, bc_per_amount *figure)
@@ -74,6 +77,8 @@ static bc_status take_divisor(const char *text, double value, bool net, bc_per_a
     if (!amount_of(&unit, 0, &f))
         return bc_fail(err, BC_ERR_USAGE, "'%s' measures no amount of gas; write MWh, GJ, kg, m3 or kmol", text);
     f.si = value / unit.factor;
+    if (!(fabs(f.si) <= MOST_SI))
+        return bc_fail(err, BC_ERR_RANGE, "%.6g per %.40s is more than can be computed with; correct the number", value, text);
     *figure = f;
     return BC_OK;
 }
@@ -143,9 +148,9 @@ bc_status bc_flow_parse(const char *text, bc_per_amount *flow, bc_error *err)
         return status;
     if (!amount_of(&unit, -1, &f))
         return bc_fail(err, BC_ERR_USAGE, "'%.40s' is no flow of gas; write m3/h, kg/h, kmol/h or MW", text);
-    if (!(f.si > 0.0))
-        return bc_fail(err, BC_ERR_RANGE, "the flow '%.40s' is not above zero", text);
     f.si *= unit.factor;
+    if (!(f.si >= 1.0 / MOST_SI && f.si <= MOST_SI))
+        return bc_fail(err, BC_ERR_RANGE, "the flow '%.40s' is not above zero, or more than can be computed with; correct the number", text);
     *flow = f;
     return BC_OK;
 }

@@ -41,6 +41,8 @@ static double half_digit(const char *number, size_t length)
     return 0.5 * pow(10.0, power - decimals);
 }
 
+#define PRINTED_MOST 1e30 /* and its inverse: residuals are counted in half digits, and stay finite */
+
 bc_status bc_printed_add(bc_printed *p, const char *id, const char *text, bc_error *err)
 {
     bc_printed_figure f = {.half = 0.0};
@@ -56,6 +58,8 @@ bc_status bc_printed_add(bc_printed *p, const char *id, const char *text, bc_err
     const char *own = bc_quantity_at(f.quantity)->unit;
 
     f.half = half_digit(text, (size_t)(rest - text));
+    if (!(f.half >= 1.0 / PRINTED_MOST && f.half <= PRINTED_MOST && fabs(f.value) <= PRINTED_MOST))
+        return bc_fail(err, BC_ERR_USAGE, "%.40s is no figure that a certificate prints; correct the number", text);
     (void)snprintf(f.unit, sizeof f.unit, "%s", rest[0] != '\0' ? rest : own);
     status = bc_unit_parse(own, &f.own, err);
     if (status == BC_OK)

@@ -53,3 +53,7 @@ refused g21
 refused -o case.docx
 bluecone burn
 echo "exit $?" >&2
+# numbers that no burner has, and no double multiplies
+for rate in 1e308m3/h 1e-322kg/h; do bluecone burn g20 --rate $rate; echo $?; done
+bluecone burn g20 --duty 1e305W; echo $?
+bluecone burn g20 --reading nox=1e308ppm --excess 3; echo $?

@@ -7,6 +7,7 @@ bluecone contract gb-gsmr-2025 g20 g21 --printed hhv=3MJ/m3; echo $?
 bluecone contract gb-gsmr-2025 g20 --printed hhv; echo $?
 bluecone contract gb-gsmr-2025 g20 --printed hvh=3MJ/m3; echo $?
 bluecone contract gb-gsmr-2025 g20 --printed hhv=3MJ/kg; echo $?
+bluecone contract gb-gsmr-2025 g20 --printed hhv=1e-320MJ/m3; echo $?
 bluecone contract gb-gsmr-2025 g20 --at 0/0; echo $?
 bluecone contract gb-gsmr-2025 g20 --unit=kWh/m3; echo $?
 bluecone contract; echo $?

@@ -100,6 +100,9 @@ static void what_is_none_of_them_is_refused_with_the_form(void **state)
     assert_refused(bc_intensity_parse("12 kg", &p, &err), &err, BC_ERR_USAGE, "12 kg/MWh");
     assert_refused(bc_flow_parse("12 kg", &p, &err), &err, BC_ERR_USAGE, "no flow");
     assert_refused(bc_flow_parse("0 kg/h", &p, &err), &err, BC_ERR_RANGE, "above zero");
+    assert_refused(bc_flow_parse("1e-321 kg/h", &p, &err), &err, BC_ERR_RANGE, "above zero"); /* of a double nothing is left */
+    assert_refused(bc_flow_parse("1e305 GW", &p, &err), &err, BC_ERR_RANGE, "computed with");
+    assert_refused(bc_price_parse("1e305 EUR/mg", &p, currency, &err), &err, BC_ERR_RANGE, "computed with");
 }
 
 static void a_composition_file_may_state_the_terms_of_supply(void **state)
