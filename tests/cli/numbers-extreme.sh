@@ -34,4 +34,4 @@ for v in 1e308 1e150 1e-320 0; do
     run stream log.csv --add hhv
     run stream log.csv --summary --json
 done
-echo done
+echo "all tried"
