@@ -155,6 +155,15 @@ void *malloc(size_t size)
     return no_memory(__builtin_return_address(0), size) ? NULL : count_block(__libc_malloc(size));
 }
 
+/* Of the C library it would hide who asks. */
+char *strdup(const char *text)
+{
+    const size_t size = strlen(text) + 1;
+    char *copy = no_memory(__builtin_return_address(0), size) ? NULL : count_block(__libc_malloc(size));
+
+    return copy ? memcpy(copy, text, size) : NULL;
+}
+
 void *calloc(size_t count, size_t size)
 {
     return no_memory(__builtin_return_address(0), size) ? NULL : count_block(__libc_calloc(count, size));
