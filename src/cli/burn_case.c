@@ -11,7 +11,8 @@
 #include <stdlib.h>
 #include <string.h>
 
-/* What all burners of the world take is below 1e7 mol/s and 1e13 W; beyond these ends products overflow or vanish. */
+/* All burners of the world together take below 1e7 mol/s and 1e13 W (4e12 m3 of natural gas a year, from memory); beyond
+ * these ends products overflow or vanish. */
 #define RATE_MIN_MOL_PER_S 1e-9
 #define RATE_MAX_MOL_PER_S 1e9
 #define DUTY_MIN_W 1e-3

@@ -7,6 +7,7 @@
 #include "gas/gas_file_internal.h"
 #include "gas/species_index.h"
 
+#include <assert.h>
 #include <math.h>
 #include <stdio.h>
 #include <string.h>
@@ -322,7 +323,8 @@ static bc_status take_printed(reader *r, const bc_ini_entry *e)
 
     if (c->printed_count == BC_PRINTED_MAX)
         return refuse(r, e, "there are more than 16 printed figures; leave some out");
-    if (strlen(e->value) >= sizeof p->text || strlen(e->key) >= sizeof p->id)
+    static_assert(sizeof e->key <= sizeof p->id, "a key fits");
+    if (strlen(e->value) >= sizeof p->text)
         return refuse(r, e, "a printed figure is a number and its unit, as 41.21 MJ/m3; shorten it");
     (void)snprintf(p->id, sizeof p->id, "%s", e->key);
     (void)snprintf(p->text, sizeof p->text, "%s", e->value);

@@ -2,7 +2,6 @@
 /* book_table.c - a table of a report as a sheet. */
 #include "output/book_internal.h"
 
-
 static bool has_units(const report_table *table)
 {
     for (size_t i = 0; i < table->column_count; i++)

@@ -36,19 +36,8 @@ export PKG_CONFIG_PATH=$build LD_LIBRARY_PATH=$build
 . "$SRC/tests/library/python.sh"
 use_python "$build" "$work/bin"
 
-count=0
-failed=0
-# point NAME FILE: passed when FILE, which tells what is wrong, is empty.
-point() {
-    count=$((count + 1))
-    if test -s "$2"; then
-        failed=$((failed + 1))
-        echo "not ok $count - $1"
-        sed 's/^/# /' "$2"
-    else
-        echo "ok $count - $1"
-    fi
-}
+# shellcheck source=tests/tap.sh
+. "$SRC/tests/tap.sh"
 
 # ---- documents ------------------------------------------------------------------------------------
 # A line of a document as it is shown, and back; mdoc has marks of its own.

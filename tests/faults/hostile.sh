@@ -11,12 +11,8 @@ SRC=$(cd "$(dirname "$0")/../.." && pwd) || exit 2
 test "${1:-}" = -b && test $# -eq 3 || { echo "hostile.sh: -b BUILD_FOLDER COUNT" >&2; exit 2; }
 build=$(cd "$2" && pwd) || exit 2
 count=$3
-work=$(mktemp -d) || exit 2
-trap 'rm -rf "$work"' EXIT
-trap 'exit 2' INT TERM
-cd "$work" || exit 2
-unset NO_COLOR COLUMNS
-export LC_ALL=C BLUECONE_PATH="$SRC/compositions"
+# shellcheck source=tests/faults/scratch.sh
+. "$SRC/tests/faults/scratch.sh"
 
 payloads=('<script>alert(1)</script>' '"><img src=x onerror=alert(1)>' ']]></svg><script>alert(1)</script>' '&lt;&#0;&nosuch;'
     $'\e[2J\e]0;x\a' $'\302\233 31m\r\b\177' '=HYPERLINK("http://x","y")' '+1+1' '-2+3|cmd' '@SUM(A1)' $'\342\200\256drowkcab' $'\300\257\355\240\200'

@@ -9,12 +9,9 @@ set -u
 SRC=$(cd "$(dirname "$0")/../.." && pwd) || exit 2
 test "${1:-}" = -b && test $# -ge 3 || { echo "run.sh: -b BUILD_FOLDER MOST [daily|PATTERN]" >&2; exit 2; }
 build=$(cd "$2" && pwd) || exit 2
-work=$(mktemp -d) || exit 2
-trap 'rm -rf "$work"' EXIT
-trap 'exit 2' INT TERM
-cd "$work" || exit 2
-unset NO_COLOR COLUMNS
-export LC_ALL=C BLUECONE_PATH="$SRC/compositions" HOME="$work" XDG_CACHE_HOME="$work/cache"
+# shellcheck source=tests/faults/scratch.sh
+. "$SRC/tests/faults/scratch.sh"
+export HOME="$work" XDG_CACHE_HOME="$work/cache"
 sh "$SRC/tests/faults/prepare.sh" "$SRC" "$build/bluecone" || exit 2
 case ${4:-.} in
 daily) sed -n 's/^+ //p' "$SRC/tests/faults/commands" ;;

@@ -6,12 +6,8 @@ set -u
 SRC=$(cd "$(dirname "$0")/../.." && pwd) || exit 2
 test "${1:-}" = -b || { echo "valgrind.sh: -b BUILD_FOLDER" >&2; exit 2; }
 build=$(cd "$2" && pwd) || exit 2
-work=$(mktemp -d) || exit 2
-trap 'rm -rf "$work"' EXIT
-trap 'exit 2' INT TERM
-cd "$work" || exit 2
-unset NO_COLOR COLUMNS
-export LC_ALL=C BLUECONE_PATH="$SRC/compositions"
+# shellcheck source=tests/faults/scratch.sh
+. "$SRC/tests/faults/scratch.sh"
 sh "$SRC/tests/faults/prepare.sh" "$SRC" "$build/bluecone" || exit 2
 
 bad=0
