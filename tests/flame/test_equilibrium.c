@@ -2,6 +2,8 @@
 /* test_equilibrium.c - equilibrium against its own definition, in limits, at random and out of range. */
 #include "equilibrium_support.h"
 
+#include "flame/equilibrium_internal.h"
+
 #define AIR    "oxygen=20.946,nitrogen=78.084,argon=0.97"
 #define OXYGEN "oxygen=100"
 
@@ -314,6 +316,23 @@ static void an_iteration_does_not_hop_over_the_joint_for_ever(void **state)
     assert_true(hopped > 5);
 }
 
+/* From a state that is no number nothing is found: the first step tells, and the others are spared. */
+static void an_iteration_is_lost_at_its_first_step_that_is_not_finite(void **state)
+{
+    equilibrium e = {.elements = {[BC_C] = 0.1, [BC_H] = 0.4, [BC_O] = 0.5}, .h_r = (double)NAN};
+
+    (void)state;
+    equilibrium_list_species(&e);
+    equilibrium_start_evenly(&e);
+    assert_false(equilibrium_iterate(&e, 50));
+    assert_int_equal(e.iterations, 1);
+    e.h_r = -5000.0;
+    e.iterations = 0;
+    equilibrium_start_evenly(&e);
+    assert_true(equilibrium_iterate(&e, 500));
+    assert_true(e.iterations > 1);
+}
+
 static void traces_of_an_element_below_rounding_are_left_out(void **state)
 {
     const double elements[BC_ELEMENTS] = {1.0, 4.0, 15.0, 5.0, 3e-16, 0.0, 0.0, 0.1};
@@ -396,6 +415,7 @@ int main(void)
         cmocka_unit_test(every_noble_gas_dilutes_alike),
         cmocka_unit_test(the_joint_of_the_data_at_1000_k_is_no_gap),
         cmocka_unit_test(an_iteration_does_not_hop_over_the_joint_for_ever),
+        cmocka_unit_test(an_iteration_is_lost_at_its_first_step_that_is_not_finite),
         cmocka_unit_test(traces_of_an_element_below_rounding_are_left_out),
         cmocka_unit_test(what_has_no_equilibrium_is_refused_and_nothing_is_written),
         cmocka_unit_test(every_product_has_data_a_formula_and_a_source),
